@@ -1,0 +1,152 @@
+/**
+ * The catalogue's records as the program sees them: one `Material` per file under catalog/materials/, one bibliography of
+ * CSL-JSON items. The JSON Schema in catalog/schema/ states the same for people and for other programs.
+ * Units are part of every key. Missing means absent, never 0 or -1.
+ */
+import type { ModelParameters } from '../dispersion/parameters.ts';
+
+export type Axis = 'isotropic' | 'ordinary' | 'extraordinary' | 'x' | 'y' | 'z';
+
+/** A: coefficients and an independent value both read in a publication; B: one read, one recalled; C: both recalled. */
+export type Grade = 'A' | 'B' | 'C';
+
+export type Reference = 'air' | 'vacuum';
+
+/** Published values against which a fit is recomputed, grouped by where they were printed. */
+export interface CheckGroup {
+  readonly source: string;
+  /** True where the printed value was quoted from memory. */
+  readonly recalled: boolean;
+  /** Not from the authors of the coefficients. */
+  readonly independent: boolean;
+  /** What the values were measured at, where it differs from the fit's own conditions. */
+  readonly conditions?: Record<string, number>;
+  /** Column names, e.g. ["wavelength_um", "n", "tolerance_n"]; also k, R, eps1, eps2, tolerance_k, tolerance_R ... */
+  readonly columns: readonly string[];
+  readonly rows: readonly (readonly number[])[];
+  /** Present where the group documents a limit of the fit instead of testing it; says why. */
+  readonly setAside?: string;
+}
+
+export interface Fit {
+  /** Unique within the material and axis, e.g. "malitson-1965". */
+  readonly id: string;
+  readonly axis: Axis;
+  /** False: kept as a second opinion. */
+  readonly recommended: boolean;
+  readonly parameters: ModelParameters;
+  /** In the fit's own reference. */
+  readonly range_um: readonly [number, number];
+  /** Narrower range that the check values cover. */
+  readonly confirmedRange_um?: readonly [number, number];
+  /** Temperature of measurement; absent where the source states none or the model takes one. */
+  readonly temperature_C?: number;
+  readonly reference: Reference;
+  /** Standard uncertainty of n as stated by (or derived from) the source; absent where none is stated. */
+  readonly accuracy_n?: number;
+  /** Change of index with temperature around `temperature_C`; see dispersion/thermal.ts. */
+  readonly thermal?: ThermalForm;
+  /** Key into the bibliography. */
+  readonly source: string;
+  readonly grade: Grade;
+  /** True where the coefficients themselves were quoted from memory. */
+  readonly recalled: boolean;
+  readonly note?: string;
+  readonly confirmedBy?: string;
+  /** Films: how the layer was made and by how much n varies with the process. */
+  readonly film?: { readonly process: string; readonly spread_n?: number };
+  readonly checks: readonly CheckGroup[];
+  /** Values printed elsewhere that disagree with this fit; shown, never tested. */
+  readonly contradictedBy?: readonly unknown[];
+}
+
+/** How n changes with temperature. `dispersive` is the form glass makers print (constants D0..D2, E0, E1, lambda_TK; absolute index). */
+export type ThermalForm =
+  | { readonly form: 'constant'; readonly dn_dT_per_K: number; readonly range: string }
+  | {
+      readonly form: 'dispersive';
+      readonly D0: number;
+      readonly D1: number;
+      readonly D2: number;
+      readonly E0: number;
+      readonly E1: number;
+      readonly lambdaTK_um: number;
+      readonly referenceTemperature_C: number;
+      readonly range: string;
+    }
+  | {
+      readonly form: 'wavelength-polynomial';
+      readonly g: readonly number[];
+      readonly exponents: readonly number[];
+      readonly k: number;
+      readonly range: string;
+    };
+
+/** Measured absorption beside a real fit: exactly one of the three value columns per row. Interpolated into k. */
+export interface AbsorptionRow {
+  readonly wavelength_um: number;
+  readonly alpha_per_cm?: number;
+  readonly k?: number;
+  readonly internalTransmittance?: number;
+  readonly thickness_mm?: number;
+  readonly source: string;
+  readonly note?: string;
+}
+
+/** Facts for the hand and for the order form; texts are short and end up in cautions. */
+export interface Handling {
+  readonly hygroscopic?: string;
+  readonly hazard?: string;
+  readonly knoop?: number;
+  readonly mohs?: number;
+  readonly density_g_per_cm3?: number;
+  readonly melting_C?: number;
+  readonly expansion_1e6_per_K?: number;
+  readonly dn_dT_1e6_per_K?: number;
+  readonly [other: string]: unknown;
+}
+
+export interface Material {
+  readonly key: string;
+  readonly name: string;
+  readonly formula?: string;
+  readonly aliases: readonly string[];
+  readonly class: string;
+  readonly maker?: string;
+  readonly glassCode?: string;
+  readonly fits: readonly Fit[];
+  /** Where the bulk transmits usefully (to about 10 % over a few mm unless the basis says otherwise). */
+  readonly transparency_um?: readonly [number, number];
+  readonly transparencyBasis?: string;
+  readonly absorption?: readonly AbsorptionRow[];
+  /** Normal-incidence reflectance in air of real samples that have no optical constants: wavelength_um, R. */
+  readonly reflectanceTables?: readonly unknown[];
+  readonly bandGap?: unknown;
+  readonly handling?: Handling;
+  readonly factsSource?: string;
+  readonly note?: string;
+  /** True for entries from the user's own folder. */
+  readonly own?: boolean;
+}
+
+/** One CSL-JSON item (citation style language data schema 1.0), the subset used here. */
+export interface Source {
+  readonly id: string;
+  readonly type: string;
+  readonly title?: string;
+  readonly author?: readonly {
+    readonly family?: string;
+    readonly given?: string;
+    readonly literal?: string;
+  }[];
+  readonly issued?: { readonly 'date-parts': readonly (readonly number[])[] };
+  readonly 'container-title'?: string;
+  readonly volume?: string;
+  readonly issue?: string;
+  readonly page?: string;
+  readonly publisher?: string;
+  readonly DOI?: string;
+  readonly URL?: string;
+  readonly accessed?: { readonly 'date-parts': readonly (readonly number[])[] };
+  readonly note?: string;
+}

@@ -1,0 +1,44 @@
+/**
+ * The contract of every dispersion model.
+ *
+ * A model turns the parameters of a fit and the present conditions into an `Evaluator`: a closure that writes the complex
+ * refractive index and its exact derivatives with respect to wavelength into a caller-owned array. No allocation per call,
+ * so the same closure serves one answer and a million batch rows.
+ *
+ * Convention: fields exp(i(k r - w t)), n + ik, k >= 0 absorbs. The wavelength is in micrometres and in the fit's own
+ * reference (vacuum wavelength for fits relative to vacuum, air wavelength for fits relative to air).
+ */
+
+/** Layout of the array an evaluator writes: n, n', n'', n''', k, k', k'', k''' (derivatives by wavelength in um). */
+export const JET_LENGTH = 8;
+export const N = 0;
+export const K = 4;
+/** n, dn/dL, d2n/dL2, d3n/dL3, k, dk/dL, d2k/dL2, d3k/dL3; L in um. */
+export type IndexJet = Float64Array;
+
+export type Evaluator = (wavelength_um: number, out: IndexJet) => void;
+
+/** Conditions a question may state; `undefined` means "not stated": the model then uses its own reference condition. */
+export interface Conditions {
+  readonly temperature_K?: number | undefined;
+  readonly pressure_Pa?: number | undefined;
+  /** Relative humidity, 0 to 1. */
+  readonly humidity?: number | undefined;
+  /** CO2 content of air, in 1e-6 by volume. */
+  readonly co2_ppm?: number | undefined;
+  /** g of salt per kg of sea water. */
+  readonly salinity_g_per_kg?: number | undefined;
+}
+
+export type ConditionName = keyof Conditions;
+
+/** What binding a fit to conditions gives. */
+export interface BoundModel {
+  readonly evaluate: Evaluator;
+  /** Writes Re mu_r, Im mu_r into the two-element array; absent where mu_r = 1. n of `evaluate` is sqrt(eps mu) then. */
+  readonly permeability?: (wavelength_um: number, out: Float64Array) => void;
+  /** Conditions the model really used (filled in with its defaults), so that the answer can state them. */
+  readonly used: Conditions;
+  /** False where the derivatives written are not defined (single published value): the answer then says null. */
+  readonly hasDerivative: boolean;
+}
