@@ -1,0 +1,108 @@
+/**
+ * The question: a path of media, a wave, a geometry, conditions, optionally a beam and tolerances. Plain data, SI units.
+ * Everything a face lets a person change is a field here; defaults are filled in by `defaultQuestion`.
+ */
+import type { Axis, Material } from '../catalog/types.ts';
+import type { Conditions } from '../dispersion/evaluator.ts';
+import type { Complex } from '../num/complex.ts';
+
+/** A medium given by its numbers, as typed: non-dispersive. */
+export interface LiteralMedium {
+  /** n + ik, where the index was given. */
+  readonly n?: Complex;
+  readonly eps?: Complex;
+  readonly mu?: Complex;
+  readonly lossTangent?: number;
+  readonly conductivity_S_per_m?: number;
+}
+
+export type MediumSpec =
+  | { readonly kind: 'catalogue'; readonly material: Material; readonly axis?: Axis | undefined }
+  | { readonly kind: 'literal'; readonly literal: LiteralMedium; readonly text: string };
+
+export interface Layer {
+  readonly medium: MediumSpec;
+  readonly thickness: LayerThickness;
+}
+
+/** A length, or a part of the wavelength in the layer at the design wave and the angle there. */
+export type LayerThickness =
+  | { readonly kind: 'length'; readonly thickness_m: number }
+  | { readonly kind: 'waves'; readonly waves: number };
+
+export interface WaveSpec {
+  /** The wavelength as given, in metres; in standard air if `inAir`. */
+  readonly wavelength_m: number;
+  readonly inAir: boolean;
+  /** As typed, for the echo. */
+  readonly text: string;
+}
+
+export type Polarization = 's' | 'p' | 'unpolarized';
+
+export type Beam =
+  | {
+      readonly kind: 'power';
+      readonly power_W: number;
+      /** 1/e^2 diameter of a gaussian, full diameter of a flat-top; without it only powers are known. */
+      readonly diameter_m?: number;
+      readonly profile: 'gaussian' | 'flat';
+      readonly pulse?: PulseTrain;
+    }
+  | { readonly kind: 'irradiance'; readonly irradiance_W_per_m2: number }
+  | { readonly kind: 'field'; readonly peakE_V_per_m: number };
+
+/** Pulsed beam: energy and duration (FWHM) of one pulse. */
+export interface PulseTrain {
+  readonly energy_J: number;
+  readonly duration_s: number;
+  readonly repetition_Hz?: number;
+}
+
+/** Standard uncertainties stated by the person asking. `index` and `extinction` belong to the medium beyond the interface, `indexFrom` to the medium of incidence. */
+export interface Tolerances {
+  readonly wavelength_m?: number;
+  readonly angle_rad?: number;
+  readonly index?: number;
+  readonly indexFrom?: number;
+  readonly temperature_K?: number;
+  readonly thickness_m?: number;
+}
+
+export interface Question {
+  readonly from: MediumSpec;
+  readonly layers: readonly Layer[];
+  readonly into: MediumSpec;
+  readonly wave: WaveSpec;
+  readonly incidenceAngle_rad: number;
+  readonly polarization: Polarization;
+  readonly conditions: Conditions;
+  readonly beam?: Beam | undefined;
+  readonly tolerances: Tolerances;
+  readonly extrapolate: boolean;
+  /** Wave for which `@qw`, `@hw` are meant; the wave asked where absent. */
+  readonly designWave?: WaveSpec | undefined;
+  /** Layers whose round trip is longer than this are summed as intensities. */
+  readonly coherenceLength_m?: number | undefined;
+}
+
+/** A question with every default in place: normal incidence, unpolarized, no beam. */
+export function makeQuestion(
+  from: MediumSpec,
+  into: MediumSpec,
+  wave: WaveSpec,
+  more: Partial<Omit<Question, 'from' | 'into' | 'wave'>> = {},
+): Question {
+  return {
+    from,
+    layers: [],
+    into,
+    wave,
+    incidenceAngle_rad: 0,
+    polarization: 'unpolarized',
+    conditions: {},
+    tolerances: {},
+    extrapolate: false,
+    ...more,
+  };
+}
