@@ -4,6 +4,7 @@
  * Units are part of every key. Missing means absent, never 0 or -1.
  */
 import type { ModelParameters } from '../dispersion/parameters.ts';
+import type { ThermalForm } from '../dispersion/thermal-form.ts';
 
 export type Axis = 'isotropic' | 'ordinary' | 'extraordinary' | 'x' | 'y' | 'z';
 
@@ -60,27 +61,7 @@ export interface Fit {
   readonly contradictedBy?: readonly unknown[];
 }
 
-/** How n changes with temperature. `dispersive` is the form glass makers print (constants D0..D2, E0, E1, lambda_TK; absolute index). */
-export type ThermalForm =
-  | { readonly form: 'constant'; readonly dn_dT_per_K: number; readonly range: string }
-  | {
-      readonly form: 'dispersive';
-      readonly D0: number;
-      readonly D1: number;
-      readonly D2: number;
-      readonly E0: number;
-      readonly E1: number;
-      readonly lambdaTK_um: number;
-      readonly referenceTemperature_C: number;
-      readonly range: string;
-    }
-  | {
-      readonly form: 'wavelength-polynomial';
-      readonly g: readonly number[];
-      readonly exponents: readonly number[];
-      readonly k: number;
-      readonly range: string;
-    };
+export type { ThermalForm };
 
 /** Measured absorption beside a real fit: exactly one of the three value columns per row. Interpolated into k. */
 export interface AbsorptionRow {

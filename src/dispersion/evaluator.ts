@@ -28,6 +28,8 @@ export interface Conditions {
   readonly co2_ppm?: number | undefined;
   /** g of salt per kg of sea water. */
   readonly salinity_g_per_kg?: number | undefined;
+  /** Share of the second constituent of a mixture, 0 to 1; by amount or by mass as the fit says. */
+  readonly composition?: number | undefined;
 }
 
 export type ConditionName = keyof Conditions;
@@ -35,6 +37,8 @@ export type ConditionName = keyof Conditions;
 /** What binding a fit to conditions gives. */
 export interface BoundModel {
   readonly evaluate: Evaluator;
+  /** Only n, only for models whose k is zero: the cheap path for curves and searches. Same value as `evaluate` writes. */
+  readonly index?: (wavelength_um: number) => number;
   /** Writes Re mu_r, Im mu_r into the two-element array; absent where mu_r = 1. n of `evaluate` is sqrt(eps mu) then. */
   readonly permeability?: (wavelength_um: number, out: Float64Array) => void;
   /** Conditions the model really used (filled in with its defaults), so that the answer can state them. */
