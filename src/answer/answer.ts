@@ -59,8 +59,9 @@ export interface MediumAnswer {
   readonly gvd_s2_per_m: number | null;
   readonly tod_s3_per_m: number | null;
   readonly dispersion_per_m: number | null;
-  readonly wavelength_m: number;
-  readonly phaseVelocity_m_per_s: number;
+  /** Null where no wave advances (Re n = 0). */
+  readonly wavelength_m: number | null;
+  readonly phaseVelocity_m_per_s: number | null;
   readonly relativePermittivity: Complex;
   readonly relativePermeability: Complex;
   readonly impedance_ohm: Complex;
@@ -71,9 +72,12 @@ export interface MediumAnswer {
   readonly penetrationDepth_m: number | null;
   /** 1/e of the field. */
   readonly skinDepth_m: number | null;
+  /** What the model used; null where it takes none. */
   readonly temperature_K: number | null;
   readonly pressure_Pa: number | null;
   readonly humidity: number | null;
+  readonly co2_ppm: number | null;
+  readonly salinity_g_per_kg: number | null;
   readonly transparency_m: readonly [number, number] | null;
   readonly own: boolean;
   readonly fit: FitAnswer | null;
@@ -87,6 +91,8 @@ export interface InterfaceAnswer {
   readonly Tp: number | null;
   readonly T: number | null;
   readonly R_uncertainty: number | null;
+  /** Input that contributes most to R_uncertainty, in words. */
+  readonly R_uncertaintyFrom: string | null;
   readonly T_uncertainty: number | null;
   readonly rs: Complex;
   readonly rp: Complex;

@@ -4,17 +4,7 @@
  */
 import type { Axis, Material } from '../catalog/types.ts';
 import type { Conditions } from '../dispersion/evaluator.ts';
-import type { Complex } from '../num/complex.ts';
-
-/** A medium given by its numbers, as typed: non-dispersive. */
-export interface LiteralMedium {
-  /** n + ik, where the index was given. */
-  readonly n?: Complex;
-  readonly eps?: Complex;
-  readonly mu?: Complex;
-  readonly lossTangent?: number;
-  readonly conductivity_S_per_m?: number;
-}
+import type { LiteralMedium } from '../medium/literal.ts';
 
 export type MediumSpec =
   | { readonly kind: 'catalogue'; readonly material: Material; readonly axis?: Axis | undefined }

@@ -1,0 +1,103 @@
+/**
+ * The one pure function: a question in, an answer (or a refusal that says why not) out. No I/O, no clock, no state; the same
+ * question gives the same answer, digit for digit, on every face.
+ */
+import type { CautionNote } from '../medium/caution.ts';
+import { isRefusal, type Refusal, refuse } from '../medium/refusal.ts';
+import type { Answer, Caution } from './answer.ts';
+import { orderCautions, wordCaution } from './caution-text.ts';
+import { type EnergyParts, energyParts } from './energy-answer.ts';
+import { indexUncertainty, powerSpread } from './input-uncertainty.ts';
+import { interfaceParts, LOSSY_INCIDENCE, powerOf } from './interface-answer.ts';
+import { type MediumSide, mediumSide, type SourceOf } from './medium-side.ts';
+import type { Question } from './question.ts';
+import { bothReferences, waveAnswer } from './wave.ts';
+
+export function answerQuestion(question: Question, sourceOf: SourceOf): Answer | Refusal {
+  const wave = bothReferences(question.wave);
+  if (isRefusal(wave)) return wave;
+  const { conditions, extrapolate, incidenceAngle_rad, polarization } = question;
+  const from = mediumSide(question.from, wave, conditions, extrapolate, sourceOf);
+  if (isRefusal(from)) return from;
+  const into = mediumSide(question.into, wave, conditions, extrapolate, sourceOf);
+  if (isRefusal(into)) return into;
+  if (from.optics.n.re === 0) {
+    return refuse(
+      'no-incident-wave',
+      2,
+      `no wave propagates in ${from.name}`,
+      'swap the media, or name another first medium',
+    );
+  }
+
+  const vacuumWavelength_m = wave.vacuum_um * 1e-6;
+  const { answer: surface, wave: amplitudes } = interfaceParts(
+    from,
+    into,
+    incidenceAngle_rad,
+    polarization,
+    vacuumWavelength_m,
+  );
+  const spread = powerSpread(question, wave, from, into);
+  const reflected = spread.of(surface.R, (w) => powerOf(polarization, w.Rs, w.Rp));
+  const crossing = surface.T === null ? null : spread.of(surface.T, (w) => powerOf(polarization, w.Ts, w.Tp));
+  const energy: EnergyParts | null = question.beam
+    ? energyParts(
+        question.beam,
+        from,
+        into,
+        amplitudes,
+        polarization,
+        incidenceAngle_rad,
+        vacuumWavelength_m,
+        surface.T !== null,
+      )
+    : null;
+
+  return {
+    wave: waveAnswer(wave, question.wave.inAir),
+    geometry: { incidenceAngle_rad, polarization },
+    from: { ...from.answer, n_uncertainty: indexUncertainty(from, question, 'from') },
+    into: { ...into.answer, n_uncertainty: indexUncertainty(into, question, 'into') },
+    interface: {
+      ...surface,
+      R_uncertainty: reflected?.standardUncertainty ?? null,
+      R_uncertaintyFrom: reflected?.dominant ?? null,
+      T_uncertainty: crossing?.standardUncertainty ?? null,
+    },
+    energy: energy?.answer ?? null,
+    cautions: collectCautions(from, into, surfaceNotes(from, surface), energy?.notes ?? []),
+  };
+}
+
+function surfaceNotes(
+  from: MediumSide,
+  surface: {
+    readonly R: number;
+    readonly returnLoss_dB: number | null;
+    readonly reflectionLoss_dB: number | null;
+    readonly totalReflection: boolean;
+    readonly T: number | null;
+  },
+): readonly CautionNote[] {
+  const notes: CautionNote[] = [];
+  if (from.optics.n.im > LOSSY_INCIDENCE * Math.abs(from.optics.n.re))
+    notes.push({ code: 'lossy-incidence', details: {} });
+  if (surface.R === 0) notes.push({ code: 'infinite-value', details: { quantity: 'the return loss' } });
+  if (surface.R >= 1) notes.push({ code: 'infinite-value', details: { quantity: 'the reflection loss' } });
+  return notes;
+}
+
+function collectCautions(
+  from: MediumSide,
+  into: MediumSide,
+  surface: readonly CautionNote[],
+  beam: readonly CautionNote[],
+): readonly Caution[] {
+  return orderCautions([
+    ...from.notes.map((n) => wordCaution(n, 'from', from.name)),
+    ...into.notes.map((n) => wordCaution(n, 'into', into.name)),
+    ...surface.map((n) => wordCaution(n, 'interface', 'interface')),
+    ...beam.map((n) => wordCaution(n, 'beam', 'beam')),
+  ]);
+}

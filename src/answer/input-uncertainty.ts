@@ -1,0 +1,100 @@
+/**
+ * Which inputs of a question are uncertain, by how much, and what that does to R and T: accuracy of the fits, and the
+ * tolerances a person states for wave, angle and index.
+ */
+import type { FitWave } from '../catalog/choose-fit.ts';
+import { K, N } from '../dispersion/evaluator.ts';
+import { type FresnelResult, fresnel } from '../interface/fresnel.ts';
+import { type Optics, opticsFromIndex } from '../interface/optics.ts';
+import type { MediumSide } from './medium-side.ts';
+import type { Question } from './question.ts';
+import { propagate, type Spread } from './uncertainty.ts';
+
+interface Move {
+  readonly from?: number;
+  readonly into?: number;
+  readonly wavelength_um?: number;
+  readonly angle?: number;
+}
+
+interface MovedInput {
+  readonly name: string;
+  readonly u: number;
+  readonly move: (x: number) => Move;
+}
+
+/** Null where an accuracy that matters is not stated and the question states none either, or where nothing is uncertain. */
+function uncertainInputs(
+  question: Question,
+  wave: FitWave,
+  from: MediumSide,
+  into: MediumSide,
+): readonly MovedInput[] | null {
+  const { tolerances } = question;
+  const stated = Object.keys(tolerances).length > 0;
+  if (!stated && (from.accuracy === null || into.accuracy === null)) return null;
+  if (!stated && from.isLiteral && into.isLiteral) return null;
+  const inputs: MovedInput[] = [];
+  const add = (name: string, u: number | null | undefined, move: MovedInput['move']): void => {
+    if (u) inputs.push({ name, u, move });
+  };
+  add(`index of ${from.name}`, from.accuracy, (x) => ({ from: x }));
+  add(`index of ${into.name}`, into.accuracy, (x) => ({ into: x }));
+  add(`stated index tolerance of ${from.name}`, tolerances.indexFrom, (x) => ({ from: x }));
+  add(`stated index tolerance of ${into.name}`, tolerances.index, (x) => ({ into: x }));
+  const toVacuum = question.wave.inAir ? wave.vacuum_um / wave.air_um : 1;
+  add('wavelength', (tolerances.wavelength_m ?? 0) * 1e6 * toVacuum, (x) => ({ wavelength_um: x }));
+  add('angle of incidence', tolerances.angle_rad, (x) => ({ angle: x }));
+  return inputs;
+}
+
+/** Spread of a power read off the Fresnel result by `power`. */
+export interface PowerSpread {
+  of(value: number, power: (wave: FresnelResult) => number): Spread | null;
+}
+
+export function powerSpread(
+  question: Question,
+  wave: FitWave,
+  from: MediumSide,
+  into: MediumSide,
+): PowerSpread {
+  const inputs = uncertainInputs(question, wave, from, into);
+  const at = (move: Move): FresnelResult => {
+    const shift_um = move.wavelength_um ?? 0;
+    // |angle|: a beam tilted past the normal comes from the other side. Grazing is the far limit.
+    const angle = Math.min(Math.abs(question.incidenceAngle_rad + (move.angle ?? 0)), Math.PI / 2 - 1e-9);
+    return fresnel(moved(from, move.from ?? 0, shift_um), moved(into, move.into ?? 0, shift_um), angle);
+  };
+  return {
+    of: (value, power) =>
+      inputs &&
+      propagate(
+        value,
+        inputs.map((i) => ({ name: i.name, standardUncertainty: i.u, at: (x) => power(at(i.move(x))) })),
+      ),
+  };
+}
+
+/** The medium with its index moved: by an offset of n, and along its dispersion by a shift of wavelength. */
+function moved(side: MediumSide, dn: number, shift_um: number): Optics {
+  if (dn === 0 && shift_um === 0) return side.optics;
+  const { optics, jet } = side;
+  const n = optics.n.re + jet[N + 1]! * shift_um + dn;
+  const k = Math.max(0, optics.n.im + jet[K + 1]! * shift_um);
+  return opticsFromIndex({ re: n, im: k }, optics.mu);
+}
+
+/** Fit accuracy, stated tolerance of the index and of the wave together; null where the fit states none and nothing else does. */
+export function indexUncertainty(
+  side: MediumSide,
+  question: Question,
+  which: 'from' | 'into',
+): number | null {
+  const { tolerances } = question;
+  const stated = which === 'into' ? tolerances.index : tolerances.indexFrom;
+  const byWave = tolerances.wavelength_m ? side.jet[N + 1]! * tolerances.wavelength_m * 1e6 : 0;
+  if (side.accuracy === null && stated === undefined) return null;
+  const total = Math.hypot(side.accuracy ?? 0, stated ?? 0, byWave);
+  return side.isLiteral && total === 0 ? null : total;
+}

@@ -1,0 +1,84 @@
+/** The interface part of the answer: Fresnel, special angles, total reflection, losses; null wherever a value does not exist. */
+import { type FresnelResult, fresnel } from '../interface/fresnel.ts';
+import { reflectionLoss_dB, returnLoss_dB } from '../interface/losses.ts';
+import {
+  brewsterAngles,
+  criticalAngle,
+  pseudoBrewsterAngle,
+  WEAK_ABSORPTION,
+} from '../interface/special-angles.ts';
+import { totalReflection } from '../interface/total-reflection.ts';
+import { abs2, arg, type Complex } from '../num/complex.ts';
+import type { InterfaceAnswer } from './answer.ts';
+import type { MediumSide } from './medium-side.ts';
+import type { Polarization } from './question.ts';
+
+/** From this ratio k/n of the medium of incidence on, T as a fraction of the incident power has no meaning. */
+export const LOSSY_INCIDENCE = 1e-3;
+
+/** Below this R counts as none for phases: its amplitude is rounding noise. */
+const NO_REFLECTION = 1e-31;
+
+export interface InterfaceParts {
+  readonly answer: Omit<InterfaceAnswer, 'R_uncertainty' | 'R_uncertaintyFrom' | 'T_uncertainty'>;
+  readonly wave: FresnelResult;
+}
+
+export function powerOf(polarization: Polarization, s: number, p: number): number {
+  return polarization === 's' ? s : polarization === 'p' ? p : (s + p) / 2;
+}
+
+export function interfaceParts(
+  from: MediumSide,
+  into: MediumSide,
+  angle_rad: number,
+  polarization: Polarization,
+  vacuumWavelength_m: number,
+): InterfaceParts {
+  const a = from.optics;
+  const b = into.optics;
+  const wave = fresnel(a, b, angle_rad);
+  const critical = criticalAngle(a, b);
+  const total =
+    critical !== null && angle_rad > critical && b.n.im <= WEAK_ABSORPTION * b.n.re && wave.kappa2.im > 0;
+  const tunnelling = total ? totalReflection(a, b, angle_rad, vacuumWavelength_m) : null;
+  const brewster = brewsterAngles(a, b);
+  const powersKnown = a.n.im <= LOSSY_INCIDENCE * Math.abs(a.n.re);
+  const R = powerOf(polarization, wave.Rs, wave.Rp);
+  return {
+    wave,
+    answer: {
+      Rs: wave.Rs,
+      Rp: wave.Rp,
+      R,
+      Ts: powersKnown ? wave.Ts : null,
+      Tp: powersKnown ? wave.Tp : null,
+      T: powersKnown ? powerOf(polarization, wave.Ts, wave.Tp) : null,
+      rs: tidy(wave.rs),
+      rp: tidy(wave.rp),
+      ts: tidy(wave.ts),
+      tp: tidy(wave.tp),
+      phaseRs_rad: phase(wave.rs),
+      phaseRp_rad: phase(wave.rp),
+      refractionAngle_rad: total ? null : Math.atan2(wave.q.re, wave.kappa2.re),
+      brewsterAngle_rad: brewster.p,
+      brewsterAngleS_rad: brewster.s,
+      pseudoBrewsterAngle_rad: b.n.im > 0 ? pseudoBrewsterAngle(a, b) : null,
+      criticalAngle_rad: critical,
+      totalReflection: total,
+      evanescentDepth_m: tunnelling?.evanescentDepth_m ?? null,
+      goosHanchenS_m: tunnelling?.goosHanchenS_m ?? null,
+      goosHanchenP_m: tunnelling?.goosHanchenP_m ?? null,
+      reflectionLoss_dB: powersKnown ? reflectionLoss_dB(R) : null,
+      returnLoss_dB: returnLoss_dB(R),
+    },
+  };
+}
+
+const tidy = (z: Complex): Complex => ({ re: z.re === 0 ? 0 : z.re, im: z.im === 0 ? 0 : z.im });
+
+/** arg r in (-pi, pi]; null where nothing is reflected. A negative real r has phase +pi whatever the sign of its zero. */
+function phase(r: Complex): number | null {
+  if (abs2(r) < NO_REFLECTION) return null;
+  return arg(tidy(r));
+}

@@ -1,0 +1,330 @@
+/**
+ * A catalogue material at one wave and under given conditions: which fit answers, the absolute complex index with its
+ * derivatives by vacuum wavelength, permeability, accuracy, a second opinion, and everything that must be said about it.
+ * Pure; refuses (as data) where the catalogue does not reach the wave and the question does not insist.
+ */
+import {
+  axesOf,
+  chooseFit,
+  defaultAxis,
+  type FitWave,
+  fitWavelength_um,
+  inRange,
+} from '../catalog/choose-fit.ts';
+import type { Axis, Fit, Material } from '../catalog/types.ts';
+import { standardAirIndexJet } from '../dispersion/air-index.ts';
+import { type Conditions, type IndexJet, JET_LENGTH, K, N } from '../dispersion/evaluator.ts';
+import { bindModel, honours } from '../dispersion/registry.ts';
+import { applyThermalForm } from '../dispersion/thermal.ts';
+import { type Optics, opticsFromIndex } from '../interface/optics.ts';
+import { type Complex, ONE } from '../num/complex.ts';
+import { bindAbsorption } from './absorption.ts';
+import { toAbsolute } from './air-reference.ts';
+import type { CautionNote } from './caution.ts';
+import { lengthText, rangeText } from './range-text.ts';
+import { type Refusal, refuse } from './refusal.ts';
+
+export interface SecondOpinion {
+  readonly fit: Fit;
+  /** Relative to vacuum. */
+  readonly n: number;
+  readonly difference: number;
+}
+
+export interface MediumAtWave {
+  readonly material: Material;
+  readonly axis: Axis;
+  readonly fit: Fit;
+  readonly inRange: boolean;
+  readonly optics: Optics;
+  /** n, k and derivatives relative to vacuum, by vacuum wavelength in um. */
+  readonly jet: IndexJet;
+  readonly hasDerivative: boolean;
+  readonly nPublished: number;
+  /** False where the fit is real and no absorption data reach the wave. */
+  readonly absorptionKnown: boolean;
+  readonly used: Conditions;
+  readonly secondOpinion: SecondOpinion | null;
+  readonly notes: readonly CautionNote[];
+}
+
+/** From this ratio k/n on a medium counts as absorbing where complex data compete with real ones. */
+const ABSORBING = 1e-4;
+const ZERO_CELSIUS_K = 273.15;
+
+export function mediumAtWave(
+  material: Material,
+  axis: Axis | undefined,
+  wave: FitWave,
+  conditions: Conditions,
+  extrapolate: boolean,
+): MediumAtWave | Refusal {
+  const theAxis = axis ?? defaultAxis(material, wave);
+  if (!theAxis) return noOpticalConstants(material);
+  const choice = chooseFit(material, theAxis, wave, (fit) => preference(fit, wave, conditions));
+  if (!choice) {
+    return refuse(
+      'no-such-axis',
+      2,
+      `${material.name} has no axis "${theAxis}"`,
+      `choose one of ${axesOf(material).join(', ')}`,
+    );
+  }
+  if (!choice.inRange && !extrapolate) return outsideRange(material, theAxis, wave);
+
+  const { fit } = choice;
+  const notes: CautionNote[] = [];
+  const state = evaluateFit(fit, wave, conditions, notes);
+  const jet = state.jet;
+  let absorptionKnown = state.complexFit;
+  if (!absorptionKnown && jet[N]! > 0) {
+    absorptionKnown = bindAbsorption(material.absorption)(wave.vacuum_um, jet);
+  }
+  const second = secondOpinion(choice.others, wave, conditions, jet[N]!);
+  noteFit(notes, material, fit, theAxis, choice.inRange, wave, axis);
+  noteAbsorption(notes, material, fit, wave, jet, absorptionKnown);
+  noteDisagreement(notes, fit, second, jet[N]!);
+  noteHandling(notes, material);
+  if (!state.hasDerivative) notes.push({ code: 'no-dispersion', details: {} });
+  return {
+    material,
+    axis: theAxis,
+    fit,
+    inRange: choice.inRange,
+    optics: opticsFromIndex({ re: jet[N]!, im: jet[K]! }, state.mu),
+    jet,
+    hasDerivative: state.hasDerivative,
+    nPublished: state.nPublished,
+    absorptionKnown,
+    used: state.used,
+    secondOpinion: second,
+    notes,
+  };
+}
+
+interface FitState {
+  readonly jet: IndexJet;
+  readonly mu: Complex;
+  readonly hasDerivative: boolean;
+  readonly nPublished: number;
+  /** The fit itself gives k, or is exact. */
+  readonly complexFit: boolean;
+  readonly used: Conditions;
+}
+
+/** Absolute index of one fit at one wave; temperature by the model itself, by the fit's thermal form, or with a note that neither can. */
+function evaluateFit(fit: Fit, wave: FitWave, conditions: Conditions, notes: CautionNote[]): FitState {
+  const bound = bindModel(fit.parameters, conditions);
+  const L = fitWavelength_um(fit, wave);
+  const own = new Float64Array(JET_LENGTH);
+  bound.evaluate(L, own);
+  const takesTemperature = honours(fit.parameters).includes('temperature_K');
+  const asked_K = conditions.temperature_K;
+  const fit_K = fit.temperature_C === undefined ? undefined : fit.temperature_C + ZERO_CELSIUS_K;
+  let temperature_K = bound.used.temperature_K ?? fit_K;
+
+  const warming = !takesTemperature && asked_K !== undefined && asked_K !== fit_K ? asked_K : undefined;
+  if (warming !== undefined && fit.thermal && fit.thermal.form !== 'dispersive') {
+    applyThermalForm(fit.thermal, fit_K ?? warming, warming, L, own);
+  }
+  const nPublished = own[N]!;
+  let jet = own;
+  if (fit.reference === 'air') {
+    jet = new Float64Array(JET_LENGTH);
+    toAbsolute(own, wave.vacuum_um, standardAirIndexJet(wave.vacuum_um), jet);
+  }
+  let published = nPublished;
+  if (warming !== undefined) {
+    if (fit.thermal) {
+      if (fit.thermal.form === 'dispersive') {
+        const before = jet[N]!;
+        applyThermalForm(fit.thermal, fit_K ?? warming, warming, wave.vacuum_um, jet);
+        published += jet[N]! - before;
+      }
+      temperature_K = warming;
+    } else {
+      notes.push({
+        code: 'temperature-not-modelled',
+        details: { asked_C: warming - ZERO_CELSIUS_K, fit_C: fit.temperature_C ?? 'not stated' },
+      });
+    }
+  }
+  for (const name of ['pressure_Pa', 'humidity', 'co2_ppm', 'salinity_g_per_kg'] as const) {
+    if (conditions[name] !== undefined && bound.used[name] === undefined && isFluidCondition(fit, name)) {
+      notes.push({ code: 'condition-not-used', details: { condition: name } });
+    }
+  }
+  const mu = new Float64Array(2);
+  if (bound.permeability) bound.permeability(L, mu);
+  return {
+    jet,
+    mu: bound.permeability ? { re: mu[0]!, im: mu[1]! } : ONE,
+    hasDerivative: bound.hasDerivative,
+    nPublished: published,
+    complexFit: bound.complex,
+    used: { ...bound.used, temperature_K },
+  };
+}
+
+/** Pressure, humidity and salinity mean something for fluids alone: a solid beside the air they describe needs no remark. */
+function isFluidCondition(fit: Fit, name: string): boolean {
+  const model = fit.parameters.model;
+  if (model === 'gas')
+    return name === 'humidity' || name === 'co2_ppm' ? false : name !== 'salinity_g_per_kg';
+  if (model === 'moist-air' || model === 'radio-air') return name !== 'salinity_g_per_kg';
+  if (model === 'water-relaxation' || model === 'sea-water-optical') return name === 'salinity_g_per_kg';
+  return false;
+}
+
+/** Complex data where the medium absorbs; a fit that can honour the temperature where the others can't. */
+function preference(fit: Fit, wave: FitWave, conditions: Conditions): number {
+  let score = 0;
+  if (conditions.temperature_K !== undefined) {
+    const fit_K = fit.temperature_C === undefined ? undefined : fit.temperature_C + ZERO_CELSIUS_K;
+    const canHonour =
+      fit.thermal !== undefined ||
+      honours(fit.parameters).includes('temperature_K') ||
+      (fit_K !== undefined && Math.abs(fit_K - conditions.temperature_K) < 0.5);
+    if (canHonour) score += 2;
+  }
+  if (fit.recommended && givesAbsorption(fit, wave, conditions)) score += 1;
+  return score;
+}
+
+function givesAbsorption(fit: Fit, wave: FitWave, conditions: Conditions): boolean {
+  const bound = bindModel(fit.parameters, conditions);
+  if (!bound.complex) return false;
+  const jet = new Float64Array(JET_LENGTH);
+  bound.evaluate(fitWavelength_um(fit, wave), jet);
+  return jet[K]! > ABSORBING * jet[N]!;
+}
+
+function secondOpinion(
+  others: readonly Fit[],
+  wave: FitWave,
+  conditions: Conditions,
+  n: number,
+): SecondOpinion | null {
+  const fit = others[0];
+  if (!fit) return null;
+  const other = evaluateFit(fit, wave, conditions, []).jet[N]!;
+  return Number.isFinite(other) ? { fit, n: other, difference: other - n } : null;
+}
+
+function noteFit(
+  notes: CautionNote[],
+  material: Material,
+  fit: Fit,
+  axis: Axis,
+  reached: boolean,
+  wave: FitWave,
+  asked: Axis | undefined,
+): void {
+  if (!reached) {
+    notes.push({ code: 'outside-fit-range', details: { range: rangeText(fit.range_um) } });
+  } else if (fit.confirmedRange_um) {
+    const l = fitWavelength_um(fit, wave);
+    if (l < fit.confirmedRange_um[0] * (1 - 1e-3) || l > fit.confirmedRange_um[1] * (1 + 1e-3)) {
+      notes.push({ code: 'outside-confirmed-range', details: { range: rangeText(fit.confirmedRange_um) } });
+    }
+  }
+  if (fit.estimateBetweenBands) notes.push({ code: 'estimate-between-bands', details: {} });
+  if (!asked && axis !== 'isotropic') {
+    notes.push({
+      code: 'axis-assumed',
+      details: {
+        axis,
+        others: axesOf(material)
+          .filter((a) => a !== axis)
+          .join(', '),
+      },
+    });
+  }
+  if (fit.grade === 'C') notes.push({ code: 'recalled-data', details: {} });
+  if (fit.accuracy_n === undefined) notes.push({ code: 'accuracy-not-stated', details: {} });
+  if (fit.film) {
+    notes.push({
+      code: 'film-process',
+      details: { process: fit.film.process, ...(fit.film.spread_n ? { spread: fit.film.spread_n } : {}) },
+    });
+  } else if (material.class === 'thin film')
+    notes.push({ code: 'film-process', details: { process: 'not stated' } });
+  if (fit.contradictedBy?.length)
+    notes.push({ code: 'contradicted', details: { count: fit.contradictedBy.length } });
+  if (material.own) notes.push({ code: 'own-entry', details: {} });
+}
+
+function noteAbsorption(
+  notes: CautionNote[],
+  material: Material,
+  fit: Fit,
+  wave: FitWave,
+  jet: IndexJet,
+  known: boolean,
+): void {
+  if (fit.parameters.model === 'constant' && fit.accuracy_n === 0) return;
+  const k = jet[K]!;
+  const depth_m = k > 0 ? (wave.vacuum_um * 1e-6) / (4 * Math.PI * k) : Number.POSITIVE_INFINITY;
+  if (known) {
+    if (depth_m < 10e-3 && material.class !== 'metal')
+      notes.push({ code: 'absorbs-here', details: { depth_m } });
+    return;
+  }
+  const t = material.transparency_um;
+  if (t && (wave.vacuum_um < t[0] || wave.vacuum_um > t[1])) {
+    notes.push({ code: 'absorbs-here', details: { range: rangeText(t) } });
+  } else notes.push({ code: 'absorption-not-known', details: {} });
+}
+
+function noteDisagreement(notes: CautionNote[], fit: Fit, second: SecondOpinion | null, n: number): void {
+  if (!second) return;
+  const own = fit.accuracy_n ?? 1e-3 * n;
+  const other = second.fit.accuracy_n ?? 1e-3 * n;
+  if (Math.abs(second.difference) > 3 * Math.hypot(own, other)) {
+    notes.push({ code: 'sources-disagree', details: { difference: second.difference } });
+  }
+}
+
+const TOXIC =
+  /toxic|poison|carcino|harmful|lead |lead-|arsen|cadmium|selen|tellur|thall|beryll|barium compound|nickel|mercury|irritant|sensiti[sz]er|chromium/i;
+
+function noteHandling(notes: CautionNote[], material: Material): void {
+  const { hygroscopic, hazard } = material.handling ?? {};
+  if (hygroscopic && hygroscopic !== 'no')
+    notes.push({ code: 'hygroscopic', details: { degree: hygroscopic } });
+  if (!hazard || /^(none known|low)/i.test(hazard)) return;
+  notes.push({ code: TOXIC.test(hazard) ? 'toxic' : 'hazardous-material', details: { hazard } });
+}
+
+function outsideRange(material: Material, axis: Axis, wave: FitWave): Refusal {
+  const fits = material.fits.filter((f) => f.axis === axis && !inRange(f, wave));
+  const ranges = mergeRanges(fits.map((f) => f.range_um))
+    .map(rangeText)
+    .join(' and ');
+  const which = axis === 'isotropic' ? '' : `, ${axis} axis,`;
+  return refuse(
+    'outside-fit-range',
+    3,
+    `${material.name}${which} has no data at ${lengthText(wave.vacuum_um)}: its fits cover ${ranges}`,
+    'choose a wave inside, or add --extrapolate to insist',
+  );
+}
+
+function mergeRanges(ranges: readonly (readonly [number, number])[]): readonly (readonly [number, number])[] {
+  const merged: [number, number][] = [];
+  for (const [lo, hi] of [...ranges].sort((a, b) => a[0] - b[0])) {
+    const last = merged.at(-1);
+    if (last && lo <= last[1]) last[1] = Math.max(last[1], hi);
+    else merged.push([lo, hi]);
+  }
+  return merged;
+}
+
+function noOpticalConstants(material: Material): Refusal {
+  return refuse(
+    'no-optical-constants',
+    3,
+    `${material.name} has no optical constants in the catalogue, only reflectance measured in air`,
+    'read it with `halfspace material`, or state n and k yourself, e.g. n=2.4+3.4i',
+  );
+}
