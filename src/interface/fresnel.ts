@@ -34,10 +34,13 @@ export interface FresnelResult {
   readonly kappa2: Complex;
 }
 
-/** Normal component of the wave vector over k0 for tangential component q; backward in a doubly negative medium. */
-export function normalComponent(side: Optics, q: Complex): Complex {
-  const kappa = sqrtDecaying(sub(mul(side.eps, side.mu), mul(q, q)));
-  return side.n.re < 0 && kappa.im === 0 ? neg(kappa) : kappa;
+/**
+ * Normal component of the wave vector over k0 beyond the interface; backward in a doubly negative medium.
+ * From kappa2^2 = n2^2 - n1^2 + kappa1^2 rather than n2^2 - q^2: exact for like media, no cancellation at grazing incidence.
+ */
+function normalComponent(from: Optics, into: Optics, kappa1: Complex): Complex {
+  const kappa = sqrtDecaying(add(sub(mul(into.n, into.n), mul(from.n, from.n)), mul(kappa1, kappa1)));
+  return into.n.re < 0 && kappa.im === 0 ? neg(kappa) : kappa;
 }
 
 export const admittanceS = (side: Optics, kappa: Complex): Complex => div(kappa, side.mu);
@@ -49,7 +52,7 @@ export function fresnel(from: Optics, into: Optics, incidenceAngle_rad: number):
   const cos = Math.cos(incidenceAngle_rad);
   const q = scale(from.n, sin);
   const kappa1 = scale(from.n, cos);
-  const kappa2 = normalComponent(into, q);
+  const kappa2 = normalComponent(from, into, kappa1);
   const ys1 = admittanceS(from, kappa1);
   const ys2 = admittanceS(into, kappa2);
   const yp1 = admittanceP(from, kappa1);
@@ -84,7 +87,7 @@ export function fresnelAngleDerivative(
   const dq = scale(from.n, cos);
   const kappa1 = dq;
   const dkappa1 = neg(q);
-  const kappa2 = normalComponent(into, q);
+  const kappa2 = normalComponent(from, into, kappa1);
   const dkappa2 = neg(div(mul(q, dq), kappa2));
 
   const ys1 = admittanceS(from, kappa1);
