@@ -1,0 +1,101 @@
+/**
+ * Decimal numbers as digit strings, so that "0.5876 um" is exactly the double nearest to 5.876e-7, and rounding for
+ * display is decimal: 1.005 to two places is 1.01, although the double lies below the tie (toFixed gives 1.00).
+ *
+ * The decimal of a double is its shortest text that reads back as the same double. Ties go away from zero
+ * (ISO 80000-1:2022 annex B, rule B). Only finite numbers have a decimal.
+ */
+export interface Decimal {
+  readonly negative: boolean;
+  /** Digits without leading zeros; trailing zeros are kept as typed. "0" for zero. */
+  readonly digits: string;
+  /** The number is digits x 10^exponent. */
+  readonly exponent: number;
+}
+
+const PARTS = /^([+-]?)(\d*)\.?(\d*)(?:[eE]([+-]?\d+))?$/;
+
+/** Text of a plain decimal number (`-12.50e-3`) to its decimal; undefined for anything else. */
+export function decimalOfText(text: string): Decimal | undefined {
+  const parts = PARTS.exec(text);
+  if (!parts) return undefined;
+  const [, sign, whole = '', fraction = '', power = '0'] = parts;
+  const all = whole + fraction;
+  if (all === '') return undefined;
+  const digits = all.replace(/^0+(?=\d)/, '');
+  return { negative: sign === '-', digits, exponent: Number(power) - fraction.length };
+}
+
+/** The decimal of a finite double; throws RangeError for NaN and infinities, which no caller may pass. */
+export function decimalOf(x: number): Decimal {
+  const decimal = Number.isFinite(x) ? decimalOfText(String(x)) : undefined;
+  if (!decimal) throw new RangeError('only a finite number has a decimal');
+  return decimal;
+}
+
+/** The double nearest to the decimal times 10^shift. May be infinite, or zero where it is too small. */
+export function decimalToNumber(d: Decimal, shift = 0): number {
+  return Number(`${d.negative ? '-' : ''}${d.digits}e${d.exponent + shift}`);
+}
+
+export function shiftDecimal(d: Decimal, shift: number): Decimal {
+  return { ...d, exponent: d.exponent + shift };
+}
+
+/** Without trailing zeros; equal in value. */
+export function trimZeros(d: Decimal): Decimal {
+  const digits = d.digits.replace(/0+$/, '') || '0';
+  const dropped = d.digits.length - digits.length;
+  return { ...d, digits, exponent: digits === '0' ? 0 : d.exponent + dropped };
+}
+
+export function isZero(d: Decimal): boolean {
+  return d.digits === '0';
+}
+
+/** Power of ten of the first significant digit: 2 for 633, -1 for 0.5. Zero counts as its last written place. */
+export function leadingPlace(d: Decimal): number {
+  return d.digits.length - 1 + d.exponent;
+}
+
+/** Rounded to the place 10^place; the result's exponent is `place`, a zero result has no sign. */
+export function roundDecimal(d: Decimal, place: number): Decimal {
+  if (isZero(d)) return { negative: false, digits: '0', exponent: place };
+  if (place <= d.exponent) {
+    return { negative: d.negative, digits: d.digits + '0'.repeat(d.exponent - place), exponent: place };
+  }
+  const drop = place - d.exponent;
+  if (drop > d.digits.length) return { negative: false, digits: '0', exponent: place };
+  const kept = BigInt(d.digits.slice(0, d.digits.length - drop) || '0');
+  const up = (d.digits[d.digits.length - drop] ?? '0') >= '5';
+  const digits = String(up ? kept + 1n : kept);
+  return { negative: d.negative && digits !== '0', digits, exponent: place };
+}
+
+/** Rounded to so many significant digits, also where rounding adds a digit (9.996 to three is 10.0). */
+export function roundToDigits(d: Decimal, significantDigits: number): Decimal {
+  if (isZero(d)) return roundDecimal(d, 1 - significantDigits);
+  const rounded = roundDecimal(d, leadingPlace(d) - significantDigits + 1);
+  return leadingPlace(rounded) === leadingPlace(d) ? rounded : roundDecimal(rounded, rounded.exponent + 1);
+}
+
+/** The exact sum. */
+export function addDecimals(a: Decimal, b: Decimal): Decimal {
+  if (isZero(a) || isZero(b)) return isZero(a) ? b : a;
+  const exponent = Math.min(a.exponent, b.exponent);
+  const units = (d: Decimal): bigint => {
+    const size = BigInt(d.digits) * 10n ** BigInt(d.exponent - exponent);
+    return d.negative ? -size : size;
+  };
+  const sum = units(a) + units(b);
+  return { negative: sum < 0n, digits: String(sum < 0n ? -sum : sum), exponent };
+}
+
+/** Positional notation: `-0.0123`, `630`. A digit always stands before the point. */
+export function plainDecimal(d: Decimal): string {
+  const sign = d.negative && !isZero(d) ? '-' : '';
+  if (d.exponent >= 0) return sign + (isZero(d) ? '0' : d.digits + '0'.repeat(d.exponent));
+  const padded = d.digits.padStart(1 - d.exponent, '0');
+  const point = padded.length + d.exponent;
+  return `${sign}${padded.slice(0, point)}.${padded.slice(point)}`;
+}

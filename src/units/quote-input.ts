@@ -1,0 +1,12 @@
+/**
+ * What a person typed, made fit for a one-line message: control characters (and so escape sequences), bidirectional
+ * overrides and unpaired surrogates become `?`, long text is cut.
+ */
+const LONGEST = 40;
+const UNSAFE = /[\p{Cc}\p{Cf}\p{Cs}\p{Co}\p{Zl}\p{Zp}]/gu;
+
+export function quoteInput(text: string): string {
+  const clean = text.slice(0, 4 * LONGEST).replace(UNSAFE, '?');
+  const characters = [...clean];
+  return characters.length > LONGEST ? `"${characters.slice(0, LONGEST - 3).join('')}..."` : `"${clean}"`;
+}

@@ -1,0 +1,116 @@
+/** Every unit that is understood. Families are expanded from a base unit and the prefixes in use with it. */
+import { addDecimals, decimalOf, decimalToNumber } from './decimal.ts';
+import { SI_PREFIXES } from './si-prefix.ts';
+import { byFactor, byPower, type Unit, type UnitKind } from './unit.ts';
+
+/** `letters` lists the prefixes, a space standing for none: "nu mk". */
+function family(kind: UnitKind, base: string, name: string, letters: string, basePower = 0): Unit[] {
+  return SI_PREFIXES.filter((p) => letters.includes(p.typed || ' ')).map((p) => ({
+    symbol: p.typed + base,
+    name: p.name + name,
+    kind,
+    toSI: byPower(p.power + basePower),
+  }));
+}
+
+/** Base unit over an area or a length: W/cm2, V/m. */
+function over(
+  kind: UnitKind,
+  base: string,
+  name: string,
+  letters: string,
+  divisors: readonly Divisor[],
+): Unit[] {
+  return divisors.flatMap(([symbol, words, power]) =>
+    family(kind, `${base}/${symbol}`, `${name} per ${words}`, letters, -power),
+  );
+}
+
+type Divisor = readonly [symbol: string, name: string, power: number];
+const AREAS: readonly Divisor[] = [
+  ['m2', 'square metre', 0],
+  ['cm2', 'square centimetre', -4],
+  ['mm2', 'square millimetre', -6],
+  ['um2', 'square micrometre', -12],
+];
+const LENGTHS: readonly Divisor[] = [
+  ['m', 'metre', 0],
+  ['cm', 'centimetre', -2],
+  ['mm', 'millimetre', -3],
+  ['um', 'micrometre', -6],
+  ['nm', 'nanometre', -9],
+];
+
+const one = (symbol: string, name: string, kind: UnitKind, toSI: Unit['toSI']): Unit => ({
+  symbol,
+  name,
+  kind,
+  toSI,
+});
+
+/** Reciprocal lengths, each in the three ways it is written. */
+const WAVENUMBERS: readonly Unit[] = LENGTHS.flatMap(([symbol, name, power]) =>
+  [`${symbol}-1`, `1/${symbol}`, `/${symbol}`].map((s) =>
+    one(s, `reciprocal ${name}`, 'wavenumber', byPower(-power)),
+  ),
+);
+
+const DEGREE = Math.PI / 180;
+const degrees: Unit['toSI'] = (number) => (decimalToNumber(number) * Math.PI) / 180;
+const ANGLES: readonly Unit[] = [
+  ...['deg', 'degree', 'degrees', '°'].map((s) => one(s, 'degree', 'angle', degrees)),
+  ...family('angle', 'rad', 'radian', ' mu'),
+  ...['arcmin', "'"].map((s) => one(s, 'minute of arc', 'angle', byFactor(DEGREE / 60))),
+  ...['arcsec', '"', "''"].map((s) => one(s, 'second of arc', 'angle', byFactor(DEGREE / 3600))),
+];
+
+/** 0 C in kelvin. Added in decimal, so that -40C is 233.15 K and not a neighbouring double. */
+const ICE_POINT_K = decimalOf(273.15);
+const TEMPERATURES: readonly Unit[] = [
+  ...['C', '°C', 'degC'].map((s) =>
+    one(s, 'degree Celsius', 'temperature', (number) => decimalToNumber(addDecimals(number, ICE_POINT_K))),
+  ),
+  one('K', 'kelvin', 'temperature', byPower(0)),
+  ...['F', '°F', 'degF'].map((s) =>
+    one(s, 'degree Fahrenheit', 'temperature', (number) => ((decimalToNumber(number) - 32) * 5) / 9 + 273.15),
+  ),
+];
+
+/** Conventional millimetre of mercury, torr = 1/760 atm and pound-force per square inch: NIST SP 811 (2008), appendix B. */
+const PRESSURES: readonly Unit[] = [
+  ...family('pressure', 'Pa', 'pascal', 'm kM'),
+  one('hPa', 'hectopascal', 'pressure', byPower(2)),
+  ...family('pressure', 'bar', 'bar', 'um k', 5),
+  one('atm', 'standard atmosphere', 'pressure', byFactor(101_325)),
+  one('mmHg', 'millimetre of mercury', 'pressure', byFactor(133.322_387_415)),
+  one('Torr', 'torr', 'pressure', byFactor(101_325 / 760)),
+  one('mTorr', 'millitorr', 'pressure', byFactor(101.325 / 760)),
+  one('psi', 'pound-force per square inch', 'pressure', byFactor(6_894.757_293_168)),
+];
+
+export const UNITS: readonly Unit[] = [
+  ...family('length', 'm', 'metre', 'fpnum k'),
+  one('cm', 'centimetre', 'length', byPower(-2)),
+  { ...one('Mm', 'megametre', 'length', byPower(6)), mistakenFor: 'mm' },
+  ...['Å', 'angstrom'].map((s) => one(s, 'angstrom', 'length', byPower(-10))),
+  ...['micron', 'microns'].map((s) => one(s, 'micrometre', 'length', byPower(-6))),
+  ...family('frequency', 'Hz', 'hertz', ' kMGTP'),
+  { ...one('mHz', 'millihertz', 'frequency', byPower(-3)), mistakenFor: 'MHz' },
+  ...family('photon-energy', 'eV', 'electronvolt', 'um k'),
+  { ...one('MeV', 'megaelectronvolt', 'photon-energy', byPower(6)), mistakenFor: 'meV' },
+  ...WAVENUMBERS,
+  ...ANGLES,
+  ...TEMPERATURES,
+  ...family('power', 'W', 'watt', 'fpnum kMGTP'),
+  one('dBm', 'decibel over one milliwatt', 'power', (number) => 10 ** (decimalToNumber(number) / 10 - 3)),
+  ...family('energy', 'J', 'joule', 'afpnum kM'),
+  ...family('time', 's', 'second', 'afpnum '),
+  ...over('irradiance', 'W', 'watt', 'pnum kMGTP', AREAS),
+  ...over('field', 'V', 'volt', 'num kMG', LENGTHS),
+  ...PRESSURES,
+  ...over('conductivity', 'S', 'siemens', 'num kM', LENGTHS.slice(0, 2)),
+  one('', 'one', 'fraction', byPower(0)),
+  one('%', 'per cent', 'fraction', byPower(-2)),
+  ...['ppm', 'umol/mol'].map((s) => one(s, 'micromole per mole', 'mole-fraction', byPower(0))),
+  ...['g/kg', '‰'].map((s) => one(s, 'gram per kilogram', 'salinity', byPower(0))),
+];
