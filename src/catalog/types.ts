@@ -13,7 +13,15 @@ export type Grade = 'A' | 'B' | 'C';
 
 export type Reference = 'air' | 'vacuum';
 
-/** Published values against which a fit is recomputed, grouped by where they were printed. */
+/**
+ * Published values against which a fit is recomputed, grouped by where they were printed.
+ *
+ * Columns: `wavelength_um` first; then the states of the medium that vary from row to row (the names of `Conditions` or
+ * `temperature_C`, `vapourPressure_Pa`); then the published quantities (`n`, `k`, `R` at normal incidence in air, `eps1`, `eps2`,
+ * `lossTangent`, `sigma_S_per_m`, `skinDepth_um`, `resistivity_ohm_m`, `surfaceResistance_ohm`, `alpha_per_cm`, `mu1`,
+ * `refractivity_1e6`), each with the greatest difference allowed in `tolerance_` + its name. A set-aside group has no tolerances.
+ * n, and the wavelength, are in the fit's own reference.
+ */
 export interface CheckGroup {
   readonly source: string;
   /** True where the printed value was quoted from memory. */
@@ -22,7 +30,6 @@ export interface CheckGroup {
   readonly independent: boolean;
   /** What the values were measured at, where it differs from the fit's own conditions. */
   readonly conditions?: Record<string, number>;
-  /** Column names, e.g. ["wavelength_um", "n", "tolerance_n"]; also k, R, eps1, eps2, tolerance_k, tolerance_R ... */
   readonly columns: readonly string[];
   readonly rows: readonly (readonly number[])[];
   /** Present where the group documents a limit of the fit instead of testing it; says why. */
@@ -47,8 +54,16 @@ export interface Fit {
   readonly accuracy_n?: number;
   /** Change of index with temperature around `temperature_C`; see dispersion/thermal.ts. */
   readonly thermal?: ThermalForm;
+  /** Part of the range in which a recommended fit is preferred, where narrower than the range. */
+  readonly recommendedRange_um?: readonly [number, number];
+  /** True for a curve drawn by this catalogue between two published bands, not published itself: a caution goes with it. */
+  readonly estimateBetweenBands?: true;
   /** Key into the bibliography. */
   readonly source: string;
+  /** Further keys: the measurement behind a published fit, the handbook a fit was read in. */
+  readonly furtherSources?: readonly string[];
+  /** Abbe numbers printed for the fit: Vd = (nd - 1)/(nF - nC), Ve = (ne - 1)/(nF' - nC'), VD as Vd with the sodium line. */
+  readonly abbe?: readonly AbbeNumber[];
   readonly grade: Grade;
   /** True where the coefficients themselves were quoted from memory. */
   readonly recalled: boolean;
@@ -62,6 +77,24 @@ export interface Fit {
 }
 
 export type { ThermalForm };
+
+export interface AbbeNumber {
+  readonly quantity: 'Vd' | 'Ve' | 'VD';
+  readonly published: number;
+  readonly tolerance: number;
+  readonly source: string;
+}
+
+/** Published values of something that several fits make together, recomputed from the recommended ones. */
+export interface CompositeCheck {
+  /** `mean-index`: (2 n_o + n_e)/3, compared with a polycrystal. `optic-angle`: from z to an optic axis in the x-z plane, degrees. */
+  readonly quantity: 'mean-index' | 'optic-angle';
+  readonly source: string;
+  readonly recalled: boolean;
+  /** `wavelength_um`, then `n` or `angle_deg`, then the tolerance. */
+  readonly columns: readonly string[];
+  readonly rows: readonly (readonly number[])[];
+}
 
 /** Measured absorption beside a real fit: exactly one of the three value columns per row. Interpolated into k. */
 export interface AbsorptionRow {
@@ -96,6 +129,7 @@ export interface Material {
   readonly maker?: string;
   readonly glassCode?: string;
   readonly fits: readonly Fit[];
+  readonly compositeChecks?: readonly CompositeCheck[];
   /** Where the bulk transmits usefully (to about 10 % over a few mm unless the basis says otherwise). */
   readonly transparency_um?: readonly [number, number];
   readonly transparencyBasis?: string;
@@ -104,6 +138,7 @@ export interface Material {
   readonly reflectanceTables?: readonly unknown[];
   readonly bandGap?: unknown;
   readonly handling?: Handling;
+  /** Where transparency and handling facts come from. */
   readonly factsSource?: string;
   readonly note?: string;
   /** True for entries from the user's own folder. */
