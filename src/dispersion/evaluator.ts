@@ -36,13 +36,23 @@ export type ConditionName = keyof Conditions;
 
 /** What binding a fit to conditions gives. */
 export interface BoundModel {
+  /** Where a fit has no index (n^2 <= 0 outside its range) the parts written are NaN. */
   readonly evaluate: Evaluator;
-  /** Only n, only for models whose k is zero: the cheap path for curves and searches. Same value as `evaluate` writes. */
+  /** Only n, only for models whose k is zero: the cheap path for searches. The value `evaluate` writes, to rounding. */
   readonly index?: (wavelength_um: number) => number;
+  /** Writes n, dn/dL, k, dk/dL alone and leaves the higher derivatives untouched: the cheap path for group indices. */
+  readonly evaluateFirst?: Evaluator;
   /** Writes Re mu_r, Im mu_r into the two-element array; absent where mu_r = 1. n of `evaluate` is sqrt(eps mu) then. */
   readonly permeability?: (wavelength_um: number, out: Float64Array) => void;
   /** Conditions the model really used (filled in with its defaults), so that the answer can state them. */
   readonly used: Conditions;
   /** False where the derivatives written are not defined (single published value): the answer then says null. */
   readonly hasDerivative: boolean;
+  /**
+   * The highest derivative that means something: 3 for formulas, 2 for tables under a cubic spline, 1 under straight lines,
+   * 0 for a single value. Higher ones are written, but they describe the interpolant and not the medium.
+   */
+  readonly derivativeOrder: 0 | 1 | 2 | 3;
+  /** True where the fit gives k (or says that it is zero), false where it is silent about absorption. */
+  readonly complex: boolean;
 }

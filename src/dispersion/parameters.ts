@@ -165,7 +165,7 @@ export type MoistAirParameters =
   | { readonly model: 'moist-air'; readonly form: 'ciddor-1996' }
   /**
    * 1e8 (n - 1) = a0 + a1/(a2 - s^2) + a3/(a4 - s^2), times [1 + co2 slope (x - x0)], times
-   * p/d0 [1 + 1e-8 (d1 - d2 t) p]/(1 + d3 t), minus f (w0 - w1 s^2) 1e-2; t in C, p and f in Pa.
+   * p/d0 [1 + 1e-8 (d1 - d2 t) p]/(1 + d3 t), minus f (w0 - w1 s^2) 1e-2 (on the scale of 1e8); t in C, p and f in Pa.
    */
   | {
       readonly model: 'moist-air';

@@ -1,0 +1,38 @@
+/**
+ * n of a solution at one wavelength, tabulated against content and temperature: linear in both between the printed places.
+ * L does not enter: the derivatives are written as 0 and `hasDerivative` is false. In the fit's own reference. Source: the fit's.
+ * Special cases: outside the table the end pieces continue; an empty place is left out of its column.
+ */
+import { linear, TableError, taylorAt } from '../num/interpolate.ts';
+import type { BoundModel, Conditions } from './evaluator.ts';
+import type { CompositionTableParameters } from './parameters.ts';
+
+export function bindCompositionTable(p: CompositionTableParameters, conditions: Conditions): BoundModel {
+  const composition = conditions.composition ?? p.defaultComposition;
+  const temperature_K = conditions.temperature_K ?? p.default_K;
+  if (p.n.length !== p.content_percent.length || p.n.some((row) => row.length !== p.temperatures_C.length))
+    throw new TableError('the table needs one row per content and one place per temperature');
+  const byTemperature = p.temperatures_C.map((_, column) => {
+    const filled = p.content_percent.flatMap((content, row) => {
+      const n = p.n[row]![column];
+      return n === null || n === undefined ? [] : [{ content, n }];
+    });
+    const f = linear(
+      filled.map((place) => place.content),
+      filled.map((place) => place.n),
+    );
+    return taylorAt(f, composition * 100)[0];
+  });
+  const n = taylorAt(linear(p.temperatures_C, byTemperature), temperature_K - 273.15)[0];
+  return {
+    used: { temperature_K, composition },
+    hasDerivative: false,
+    derivativeOrder: 0,
+    complex: false,
+    evaluate(_, out) {
+      out.fill(0);
+      out[0] = n;
+    },
+    index: () => n,
+  };
+}
