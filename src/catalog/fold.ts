@@ -1,0 +1,57 @@
+/**
+ * How a typed name is made comparable. Two strengths:
+ *   loose: any case, any Unicode dress (subscripts, full-width letters, micro and angstrom signs, typographic dashes),
+ *          Greek letters spelt out, runs of spaces, hyphens, underscores and dots all alike;
+ *   tight: loose with those separators and all brackets gone, so that "nbk7" meets "N-BK7".
+ * Both are total and idempotent. Case and separators are the only differences they ever hide: "CsI" and "c-Si" meet in
+ * the tight form, so a resolver asks for the loose form first.
+ */
+
+const GREEK: Readonly<Record<string, string>> = {
+  α: 'alpha',
+  β: 'beta',
+  γ: 'gamma',
+  δ: 'delta',
+  ε: 'epsilon',
+  ζ: 'zeta',
+  η: 'eta',
+  θ: 'theta',
+  κ: 'kappa',
+  λ: 'lambda',
+  // The prefix micro is typed "u" where the key is missing.
+  μ: 'u',
+  ν: 'nu',
+  ξ: 'xi',
+  π: 'pi',
+  ρ: 'rho',
+  σ: 'sigma',
+  τ: 'tau',
+  φ: 'phi',
+  χ: 'chi',
+  ψ: 'psi',
+  ω: 'omega',
+};
+
+const PLAIN = /^[a-z0-9]*$/;
+
+/** The loose form; separators become single hyphens, none at the ends. */
+export function foldLoose(text: string): string {
+  if (PLAIN.test(text)) return text;
+  return text
+    .replace(/[®™©℠]/g, '')
+    .normalize('NFKD')
+    .replace(/[\p{M}\p{Cf}\p{Cc}]/gu, (c) => (c === '\t' || c === '\n' || c === '\r' ? ' ' : ''))
+    .toLowerCase()
+    .normalize('NFKD')
+    .replace(/\p{M}/gu, '')
+    .replace(/ς/g, 'σ')
+    .replace(/[α-ω]/g, (c) => GREEK[c] ?? c)
+    .replace(/[\s\-_.\u2010-\u2015\u2212\u00b7\u2022\u2219\u22c5\u30fb\ufe58\ufe63\uff0d]+/g, '-')
+    .replace(/^-+|-+$/g, '');
+}
+
+/** The tight form: of the loose one only letters, digits, `+`, `*`, `%` and `:` remain. */
+export function foldTight(text: string): string {
+  const loose = foldLoose(text);
+  return PLAIN.test(loose) ? loose : loose.replace(/[^\p{L}\p{N}+*%:]+/gu, '');
+}

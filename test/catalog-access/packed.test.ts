@@ -1,0 +1,106 @@
+import fc from 'fast-check';
+import { describe, expect, it, vi } from 'vitest';
+import { canonicalJson, contentHash, type MaterialChecks, packCatalogue } from '../../src/catalog/pack.ts';
+import { openPacked } from '../../src/catalog/packed.ts';
+import { packedSample, sampleMaterial, sampleMaterials, sampleSource } from './sample.ts';
+
+const input = { version: '3.1', date: '2026-01-02', materials: sampleMaterials, sources: [sampleSource] };
+
+describe('the packed file', () => {
+  const packed = packCatalogue(input);
+  const catalogue = openPacked(packed.catalogue);
+
+  it('gives back every record but the check values', () => {
+    for (const m of sampleMaterials)
+      expect(catalogue.material(m.key)).toEqual({ ...m, fits: m.fits.map((f) => ({ ...f, checks: [] })) });
+    expect(catalogue.source('doe-1999')).toEqual(sampleSource);
+    expect(catalogue.material('nothing')).toBeUndefined();
+    expect(catalogue.source('nothing')).toBeUndefined();
+    expect(catalogue.material('fused-silica\t0')).toBeUndefined();
+  });
+
+  it('keeps the check values in the second file, one material a line', () => {
+    const lines = packed.checks.toString().trimEnd().split('\n');
+    expect(lines).toHaveLength(sampleMaterials.length);
+    const ktp = lines.map((l) => JSON.parse(l) as MaterialChecks).find((c) => c.key === 'ktp');
+    expect(Object.keys(ktp?.checks ?? {}).sort()).toEqual(['x/doe-1999', 'y/doe-1999', 'z/doe-1999']);
+    expect(ktp?.checks['x/doe-1999']?.[0]?.rows).toEqual([[0.5, 1.5, 1e-6]]);
+  });
+
+  it('states hash, date, version and size', () => {
+    expect(catalogue.hash).toMatch(/^[0-9a-f]{12}$/);
+    expect([catalogue.version, catalogue.date, catalogue.size]).toEqual([
+      '3.1',
+      '2026-01-02',
+      sampleMaterials.length,
+    ]);
+    expect(catalogue.keys()).toEqual(sampleMaterials.map((m) => m.key).sort());
+    expect(catalogue.sourceIds()).toEqual(['doe-1999']);
+  });
+
+  it('lists entries without parsing a material', () => {
+    const parse = vi.spyOn(JSON, 'parse');
+    const fresh = openPacked(packed.catalogue);
+    const headerOnly = parse.mock.calls.length;
+    const entry = fresh.entries().find((e) => e.key === 'crystal-quartz');
+    expect(parse.mock.calls.length).toBe(headerOnly);
+    expect(headerOnly).toBe(1);
+    fresh.lookup('quartz:o');
+    expect(parse.mock.calls.length).toBe(2);
+    parse.mockRestore();
+    expect(entry).toEqual({
+      key: 'crystal-quartz',
+      name: 'Crystal quartz',
+      formula: 'SiO2',
+      aliases: ['quartz', 'α-quartz'],
+      class: 'test class',
+      axes: ['ordinary', 'extraordinary'],
+    });
+  });
+
+  it('refuses bytes that are something else', () => {
+    expect(() => openPacked(Buffer.from('{}'))).toThrow(/packed catalogue/);
+    expect(() => openPacked(Buffer.alloc(0))).toThrow(/packed catalogue/);
+  });
+
+  it('refuses two materials of one key and line breaks in names', () => {
+    const twice = [sampleMaterial({ key: 'a' }), sampleMaterial({ key: 'a' })];
+    expect(() => packCatalogue({ ...input, materials: twice })).toThrow(/share the material key "a"/);
+    expect(() =>
+      packCatalogue({ ...input, materials: [sampleMaterial({ key: 'a', name: 'x\ty' })] }),
+    ).toThrow(/"a"/);
+  });
+});
+
+describe('the content hash', () => {
+  it('does not depend on the order of files or keys, and does on any value', () => {
+    const shuffled = [...sampleMaterials]
+      .reverse()
+      .map((m) => Object.fromEntries(Object.entries(m).reverse()));
+    expect(packCatalogue({ ...input, materials: shuffled as never }).hash).toBe(packCatalogue(input).hash);
+    const changed = sampleMaterials.map((m, i) => (i === 3 ? { ...m, note: 'changed' } : m));
+    expect(contentHash(changed, [])).not.toBe(contentHash(sampleMaterials, []));
+  });
+
+  it('canonical JSON is JSON of the same value', () => {
+    fc.assert(
+      fc.property(fc.jsonValue(), (value) => {
+        expect(JSON.parse(canonicalJson(value))).toEqual(JSON.parse(JSON.stringify(value)));
+      }),
+    );
+  });
+});
+
+describe('speed', () => {
+  it('looks a name up in well under a millisecond once open', () => {
+    const many = Array.from({ length: 2000 }, (_, i) =>
+      sampleMaterial({ key: `material-${i}`, aliases: [`m ${i}`] }),
+    );
+    const catalogue = packedSample(many);
+    catalogue.lookup('m 1');
+    const start = performance.now();
+    for (let i = 0; i < 200; i++) catalogue.lookup(`m ${i * 7}`);
+    // Generous for a busy machine: the measured figure is some 0.02 ms.
+    expect((performance.now() - start) / 200).toBeLessThan(2);
+  });
+});
