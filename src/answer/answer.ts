@@ -94,6 +94,9 @@ export interface InterfaceAnswer {
   /** Input that contributes most to R_uncertainty, in words. */
   readonly R_uncertaintyFrom: string | null;
   readonly T_uncertainty: number | null;
+  /** Spread of R and T where an accuracy is not stated and the disagreement with published values stands in: for digits only. */
+  readonly R_digitsGuide: number | null;
+  readonly T_digitsGuide: number | null;
   readonly rs: Complex;
   readonly rp: Complex;
   readonly ts: Complex;

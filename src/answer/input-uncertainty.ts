@@ -23,23 +23,24 @@ interface MovedInput {
   readonly move: (x: number) => Move;
 }
 
-/** Null where an accuracy that matters is not stated and the question states none either, or where nothing is uncertain. */
+/** Spread taken for the digits shown where neither an accuracy nor a disagreement with published values is known. */
+const UNKNOWN_ACCURACY = 1e-3;
+
 function uncertainInputs(
   question: Question,
   wave: FitWave,
   from: MediumSide,
   into: MediumSide,
-): readonly MovedInput[] | null {
+): readonly MovedInput[] {
   const { tolerances } = question;
-  const stated = Object.keys(tolerances).length > 0;
-  if (!stated && (from.accuracy === null || into.accuracy === null)) return null;
-  if (!stated && from.isLiteral && into.isLiteral) return null;
   const inputs: MovedInput[] = [];
-  const add = (name: string, u: number | null | undefined, move: MovedInput['move']): void => {
+  const add = (name: string, u: number | undefined, move: MovedInput['move']): void => {
     if (u) inputs.push({ name, u, move });
   };
-  add(`index of ${from.name}`, from.accuracy, (x) => ({ from: x }));
-  add(`index of ${into.name}`, into.accuracy, (x) => ({ into: x }));
+  const accuracy = (side: MediumSide): number =>
+    side.accuracy ?? side.answer.n_digitsGuide ?? UNKNOWN_ACCURACY * side.optics.n.re;
+  add(`index of ${from.name}`, accuracy(from), (x) => ({ from: x }));
+  add(`index of ${into.name}`, accuracy(into), (x) => ({ into: x }));
   add(`stated index tolerance of ${from.name}`, tolerances.indexFrom, (x) => ({ from: x }));
   add(`stated index tolerance of ${into.name}`, tolerances.index, (x) => ({ into: x }));
   const toVacuum = question.wave.inAir ? wave.vacuum_um / wave.air_um : 1;
@@ -51,6 +52,8 @@ function uncertainInputs(
 /** Spread of a power read off the Fresnel result by `power`. */
 export interface PowerSpread {
   of(value: number, power: (wave: FresnelResult) => number): Spread | null;
+  /** False where an accuracy that matters is not stated: the spread then guides digits and is no uncertainty. */
+  readonly stated: boolean;
 }
 
 export function powerSpread(
@@ -66,9 +69,10 @@ export function powerSpread(
     const angle = Math.min(Math.abs(question.incidenceAngle_rad + (move.angle ?? 0)), Math.PI / 2 - 1e-9);
     return fresnel(moved(from, move.from ?? 0, shift_um), moved(into, move.into ?? 0, shift_um), angle);
   };
+  const givenByPerson = Object.keys(question.tolerances).length > 0;
   return {
+    stated: givenByPerson || (from.accuracy !== null && into.accuracy !== null),
     of: (value, power) =>
-      inputs &&
       propagate(
         value,
         inputs.map((i) => ({ name: i.name, standardUncertainty: i.u, at: (x) => power(at(i.move(x))) })),

@@ -20,7 +20,10 @@ export const LOSSY_INCIDENCE = 1e-3;
 const NO_REFLECTION = 1e-31;
 
 export interface InterfaceParts {
-  readonly answer: Omit<InterfaceAnswer, 'R_uncertainty' | 'R_uncertaintyFrom' | 'T_uncertainty'>;
+  readonly answer: Omit<
+    InterfaceAnswer,
+    'R_uncertainty' | 'R_uncertaintyFrom' | 'T_uncertainty' | 'R_digitsGuide' | 'T_digitsGuide'
+  >;
   readonly wave: FresnelResult;
 }
 

@@ -1,24 +1,21 @@
 /** The wave of a question in both references, and the conversions every answer states. Exact c, h, e (SI Brochure, 9th ed.). */
 import type { FitWave } from '../catalog/choose-fit.ts';
 import { airToVacuum_um, vacuumToAir_um } from '../dispersion/air-index.ts';
-import { photonEnergy_eV } from '../interface/energy.ts';
 import { type Refusal, refuse } from '../medium/refusal.ts';
-import { SPEED_OF_LIGHT_m_per_s as c } from '../units/constants.ts';
+import { LONGEST_WAVE_m, SHORTEST_WAVE_m } from '../units/parse-wave.ts';
+import { waveMeasures } from '../units/wave.ts';
 import type { Answer } from './answer.ts';
 import type { WaveSpec } from './question.ts';
-
-export const SHORTEST_m = 50e-9;
-export const LONGEST_m = 1e6;
 
 /** Both wavelengths in um; the one given stays digit for digit. */
 export function bothReferences(spec: WaveSpec): FitWave | Refusal {
   const { wavelength_m } = spec;
-  if (!(wavelength_m >= SHORTEST_m * (1 - 1e-9) && wavelength_m <= LONGEST_m * (1 + 1e-9))) {
+  if (!(wavelength_m >= SHORTEST_WAVE_m * (1 - 1e-9) && wavelength_m <= LONGEST_WAVE_m * (1 + 1e-9))) {
     return refuse(
       'wave-out-of-reach',
       2,
       `a wavelength of ${spec.text} is outside what the program covers`,
-      'give a wave from 50 nm to 1000 km',
+      'give a wave from 50 nm to 100 000 km',
     );
   }
   const um = wavelength_m * 1e6;
@@ -28,15 +25,5 @@ export function bothReferences(spec: WaveSpec): FitWave | Refusal {
 }
 
 export function waveAnswer(wave: FitWave, givenInAir: boolean): Answer['wave'] {
-  const vacuumWavelength_m = wave.vacuum_um * 1e-6;
-  const frequency_Hz = c / vacuumWavelength_m;
-  return {
-    vacuumWavelength_m,
-    airWavelength_m: wave.air_um * 1e-6,
-    givenInAir,
-    frequency_Hz,
-    photonEnergy_eV: photonEnergy_eV(vacuumWavelength_m),
-    wavenumber_per_m: 1 / vacuumWavelength_m,
-    angularFrequency_rad_per_s: 2 * Math.PI * frequency_Hz,
-  };
+  return { ...waveMeasures(wave.vacuum_um * 1e-6), airWavelength_m: wave.air_um * 1e-6, givenInAir };
 }

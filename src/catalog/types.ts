@@ -52,6 +52,8 @@ export interface Fit {
   readonly reference: Reference;
   /** Standard uncertainty of n as stated by (or derived from) the source; absent where none is stated. */
   readonly accuracy_n?: number;
+  /** Largest disagreement with the published values it is checked against; derived when packing, guides the digits shown where no accuracy is stated. */
+  readonly digitsGuide_n?: number;
   /** Change of index with temperature around `temperature_C`; see dispersion/thermal.ts. */
   readonly thermal?: ThermalForm;
   /** Part of the range in which a recommended fit is preferred, where narrower than the range. */

@@ -10,7 +10,6 @@
 import { abs, abs2, type Complex, div } from '../num/complex.ts';
 import {
   SPEED_OF_LIGHT_m_per_s as c,
-  ELEMENTARY_CHARGE_C,
   PLANCK_J_s,
   VACUUM_IMPEDANCE_ohm as Z0,
 } from '../units/constants.ts';
@@ -123,6 +122,3 @@ export function radiationPressure_Pa(
 export function photonFlux_per_s(power_W: number, vacuumWavelength_m: number): number {
   return (power_W * vacuumWavelength_m) / (PLANCK_J_s * c);
 }
-
-export const photonEnergy_eV = (vacuumWavelength_m: number): number =>
-  (PLANCK_J_s * c) / (vacuumWavelength_m * ELEMENTARY_CHARGE_C);

@@ -33,7 +33,7 @@ export interface WaveReading {
 
 /** The waves covered, as wavelengths in metres. */
 export const SHORTEST_WAVE_m = 50e-9;
-export const LONGEST_WAVE_m = 1e6;
+export const LONGEST_WAVE_m = 1e8;
 
 const EXAMPLES = '633nm, 10.6um, 474THz, 1.96eV, 15800cm-1 or d-line';
 
@@ -82,7 +82,7 @@ export function parseWave(text: string, reading: WaveReading = {}): TypedWave | 
   }
   const wavelength_m = value > 0 ? vacuumOrAsGiven(kind, value) : Number.NaN;
   if (!(wavelength_m >= SHORTEST_WAVE_m && wavelength_m <= LONGEST_WAVE_m)) {
-    const message = `${quoteInput(trimmed)} is out of range: waves from 50 nm to 1000 km are covered`;
+    const message = `${quoteInput(trimmed)} is out of range: waves from 50 nm to 100000 km are covered`;
     return problem('out-of-range', message, `write for example ${EXAMPLES}`);
   }
   const inAir = reading.airWavelength === true;
