@@ -27,7 +27,7 @@ export const EMPTY_ROW: CellRow = { glyphs: [], styles: [], agreed: true };
 
 const BLANK_BRAILLE = '\u2800';
 const CONTROL_SEQUENCE =
-  /\x1b\[([0-?]*)[ -/]*([@-~])|\x1b[\]PX^_][^\x07\x1b]*(?:\x07|\x1b\\)?|\x1b[ -/]*[0-~]?/y;
+  /\x1b\[([0-?]*)[ -/]*([@-~])?|\x1b[\]PX^_][^\x07\x1b]*(?:\x07|\x1b\\)?|\x1b[ -/]*[0-~]?/y;
 
 /** Reads one line, which starts in the default style, into at most `columns` cells. */
 export function parseRow(line: string, columns: number): CellRow {

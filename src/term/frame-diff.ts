@@ -61,10 +61,9 @@ function diffRow(old: CellRow, row: CellRow, y: number, pen: Pen, columns: numbe
     out += moveTo(pen, x, y);
     let stop = x;
     while (stop < end && !isSame(old, row, stop)) stop++;
-    while (glyphAt(row, stop) === '' && stop < end) stop++;
     out += writeCells(row, x, stop, pen, columns);
     const next = nextChange(old, row, stop, end);
-    if (next < end && pen.x !== UNKNOWN) out += bridge(row, stop, next, y, pen, columns);
+    if (next < end) out += bridge(row, stop, next, y, pen, columns);
     x = next;
   }
   if (end < old.glyphs.length) out += moveTo(pen, end, y) + setStyle(pen, PLAIN) + '\x1b[K';
@@ -79,7 +78,6 @@ function bridge(row: CellRow, from: number, to: number, y: number, pen: Pen, col
   const nextStyle = styleAt(row, to);
   const trial = { ...pen };
   const again = writeCells(row, from, to, trial, columns);
-  if (trial.x !== to) return '';
   const bytesAgain = utf8Length(again) + styleTransition(trial.style, nextStyle).length;
   if (bytesAgain > step.length + styleTransition(pen.style, nextStyle).length) return '';
   Object.assign(pen, trial);
@@ -118,11 +116,10 @@ function widthAt(row: CellRow, x: number): number {
   return width;
 }
 
-/** The first column at or after `x` that has to be written, moved back to the left half of a wide glyph. */
+/** The first column at or after `x` that has to be written. The halves of a wide glyph always change together. */
 function nextChange(old: CellRow, row: CellRow, x: number, end: number): number {
   let next = x;
   while (next < end && isSame(old, row, next)) next++;
-  while (next < end && next > 0 && glyphAt(row, next) === '') next--;
   return next;
 }
 
