@@ -69,11 +69,7 @@ const WORDING: Readonly<Record<CautionCode, Wording>> = {
   'temperature-first-order': [
     'caution',
     (d, s) =>
-      `${s}: temperature by a single dn/dT of ${d['dn_dT']} per K: first order, near room temperature only`,
-  ],
-  'temperature-outside-range': [
-    'caution',
-    (d, s) => `${s}: the thermal form holds for ${d['range']}; ${round(d['asked_C'])} C lies outside`,
+      `${s}: temperature by a single dn/dT of ${Number(d['dn_dT']).toPrecision(3)} per K (${d['range']}): first order`,
   ],
   'condition-not-used': ['note', (d, s) => `${s}: this model takes no ${d['condition']}; it was not used`],
   'no-dispersion': ['note', (_, s) => `${s}: a single published value: no group index, no dispersion`],

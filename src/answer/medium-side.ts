@@ -24,7 +24,6 @@ export interface MediumSide {
   readonly optics: Optics;
   /** n, k and derivatives by vacuum wavelength in um; zero derivatives for literal media. */
   readonly jet: IndexJet;
-  readonly hasDerivative: boolean;
   readonly groupIndex: number | null;
   /** Standard uncertainty of n by the fit alone; 0 where exact, null where not stated. */
   readonly accuracy: number | null;
@@ -56,7 +55,6 @@ function literalSide(literal: Parameters<typeof literalOptics>[0], text: string,
     name: text,
     optics,
     jet,
-    hasDerivative: !dispersive,
     groupIndex,
     accuracy: 0,
     isLiteral: true,
@@ -64,7 +62,7 @@ function literalSide(literal: Parameters<typeof literalOptics>[0], text: string,
       key: null,
       name: text,
       axis: 'isotropic',
-      ...waveInMedium(optics, jet, !dispersive, wave, true),
+      ...waveInMedium(optics, jet, dispersive ? 0 : 3, wave, true),
       n_published: optics.n.re,
       publishedReference: 'vacuum',
       n_uncertainty: null,
@@ -86,12 +84,17 @@ function catalogueSide(medium: MediumAtWave, wave: FitWave, sourceOf: SourceOf):
   const { material, fit, jet, optics, used } = medium;
   const transparency = material.transparency_um;
   const exactVacuum = fit.accuracy_n === 0 && fit.parameters.model === 'constant';
-  const parts = waveInMedium(optics, jet, medium.hasDerivative, wave, medium.absorptionKnown || exactVacuum);
+  const parts = waveInMedium(
+    optics,
+    jet,
+    medium.derivativeOrder,
+    wave,
+    medium.absorptionKnown || exactVacuum,
+  );
   return {
     name: material.name,
     optics,
     jet,
-    hasDerivative: medium.hasDerivative,
     groupIndex: parts.groupIndex,
     accuracy: fit.accuracy_n ?? null,
     isLiteral: false,
@@ -148,7 +151,7 @@ function sourceLine(id: string, sourceOf: SourceOf): SourceLine {
 function waveInMedium(
   optics: Optics,
   jet: IndexJet,
-  hasDerivative: boolean,
+  derivativeOrder: number,
   wave: FitWave,
   absorptionKnown: boolean,
 ): Pick<
@@ -173,7 +176,7 @@ function waveInMedium(
   const L_um = wave.vacuum_um;
   const L_m = L_um * 1e-6;
   const { n, eps, mu } = optics;
-  const groupIndex = hasDerivative ? jet[N]! - L_um * jet[N + 1]! : null;
+  const groupIndex = derivativeOrder >= 1 ? jet[N]! - L_um * jet[N + 1]! : null;
   const second_per_m2 = jet[N + 2]! * 1e12;
   const third_per_m3 = jet[N + 3]! * 1e18;
   const alpha_per_m = (4 * Math.PI * n.im) / L_m;
@@ -182,11 +185,12 @@ function waveInMedium(
     k: n.im,
     groupIndex,
     groupVelocity_m_per_s: groupIndex === null || groupIndex === 0 ? null : c / groupIndex,
-    gvd_s2_per_m: hasDerivative ? clean((L_m ** 3 * second_per_m2) / (2 * Math.PI * c ** 2)) : null,
-    tod_s3_per_m: hasDerivative
-      ? clean((-(L_m ** 4) * (3 * second_per_m2 + L_m * third_per_m3)) / (4 * Math.PI ** 2 * c ** 3))
-      : null,
-    dispersion_per_m: hasDerivative ? clean((-L_m * second_per_m2) / c) : null,
+    gvd_s2_per_m: derivativeOrder >= 2 ? clean((L_m ** 3 * second_per_m2) / (2 * Math.PI * c ** 2)) : null,
+    tod_s3_per_m:
+      derivativeOrder >= 3
+        ? clean((-(L_m ** 4) * (3 * second_per_m2 + L_m * third_per_m3)) / (4 * Math.PI ** 2 * c ** 3))
+        : null,
+    dispersion_per_m: derivativeOrder >= 2 ? clean((-L_m * second_per_m2) / c) : null,
     wavelength_m: n.re === 0 ? null : L_m / Math.abs(n.re),
     phaseVelocity_m_per_s: n.re === 0 ? null : c / n.re,
     relativePermittivity: eps,

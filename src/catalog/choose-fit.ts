@@ -21,11 +21,16 @@ const ROUNDING = 1e-9;
 export const fitWavelength_um = (fit: Fit, wave: FitWave): number =>
   fit.reference === 'air' ? wave.air_um : wave.vacuum_um;
 
-export function inRange(fit: Fit, wave: FitWave): boolean {
-  const [lo, hi] = fit.range_um;
+export const inRange = (fit: Fit, wave: FitWave): boolean => reaches(fit.range_um, wave);
+
+function reaches([lo, hi]: readonly [number, number], wave: FitWave): boolean {
   const within = (l: number): boolean => l >= lo * (1 - ROUNDING) && l <= hi * (1 + ROUNDING);
   return within(wave.vacuum_um) || within(wave.air_um);
 }
+
+/** A fit may be the recommended one over a part of its range only. */
+export const isRecommended = (fit: Fit, wave: FitWave): boolean =>
+  fit.recommendedRange_um ? reaches(fit.recommendedRange_um, wave) : fit.recommended;
 
 /** Axes a material is described for, in the usual order. */
 export function axesOf(material: Material): readonly Axis[] {
@@ -56,7 +61,7 @@ export function chooseFit(
   const reaching = fits.filter((f) => inRange(f, wave));
   const rank = (f: Fit): readonly number[] => [
     prefers(f),
-    f.recommended ? 1 : 0,
+    isRecommended(f, wave) ? 1 : 0,
     -(f.accuracy_n ?? Number.POSITIVE_INFINITY),
     f.grade === 'A' ? 2 : f.grade === 'B' ? 1 : 0,
   ];

@@ -19,7 +19,6 @@ export type CautionCode =
   | 'own-entry'
   | 'temperature-not-modelled'
   | 'temperature-first-order'
-  | 'temperature-outside-range'
   | 'condition-not-used'
   | 'no-dispersion'
   | 'lossy-incidence'

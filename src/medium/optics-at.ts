@@ -10,12 +10,14 @@ import {
   type FitWave,
   fitWavelength_um,
   inRange,
+  isRecommended,
 } from '../catalog/choose-fit.ts';
 import type { Axis, Fit, Material } from '../catalog/types.ts';
 import { standardAirIndexJet } from '../dispersion/air-index.ts';
 import { type Conditions, type IndexJet, JET_LENGTH, K, N } from '../dispersion/evaluator.ts';
 import { bindModel, honours } from '../dispersion/registry.ts';
-import { applyThermalForm } from '../dispersion/thermal.ts';
+import { applyThermalForm, describesAbsoluteIndex } from '../dispersion/thermal.ts';
+import type { ThermalForm } from '../dispersion/thermal-form.ts';
 import { type Optics, opticsFromIndex } from '../interface/optics.ts';
 import { type Complex, ONE } from '../num/complex.ts';
 import { bindAbsorption } from './absorption.ts';
@@ -39,7 +41,8 @@ export interface MediumAtWave {
   readonly optics: Optics;
   /** n, k and derivatives relative to vacuum, by vacuum wavelength in um. */
   readonly jet: IndexJet;
-  readonly hasDerivative: boolean;
+  /** Highest derivative that means something, 0 to 3. */
+  readonly derivativeOrder: number;
   readonly nPublished: number;
   /** False where the fit is real and no absorption data reach the wave. */
   readonly absorptionKnown: boolean;
@@ -74,18 +77,26 @@ export function mediumAtWave(
 
   const { fit } = choice;
   const notes: CautionNote[] = [];
-  const state = evaluateFit(fit, wave, conditions, notes);
+  const state = evaluateFit(fit, material, wave, conditions, notes);
   const jet = state.jet;
+  if (!Number.isFinite(jet[N]!)) {
+    return refuse(
+      'no-index-here',
+      3,
+      `the fit of ${material.name} gives no index at ${lengthText(wave.vacuum_um)}: it runs into a pole`,
+      `stay near its range, ${rangeText(fit.range_um)}`,
+    );
+  }
   let absorptionKnown = state.complexFit;
   if (!absorptionKnown && jet[N]! > 0) {
     absorptionKnown = bindAbsorption(material.absorption)(wave.vacuum_um, jet);
   }
-  const second = secondOpinion(choice.others, wave, conditions, jet[N]!);
+  const second = secondOpinion(choice.others, material, wave, conditions, jet[N]!);
   noteFit(notes, material, fit, theAxis, choice.inRange, wave, axis);
   noteAbsorption(notes, material, fit, wave, jet, absorptionKnown);
   noteDisagreement(notes, fit, second, jet[N]!);
   noteHandling(notes, material);
-  if (!state.hasDerivative) notes.push({ code: 'no-dispersion', details: {} });
+  if (state.derivativeOrder === 0) notes.push({ code: 'no-dispersion', details: {} });
   return {
     material,
     axis: theAxis,
@@ -93,7 +104,7 @@ export function mediumAtWave(
     inRange: choice.inRange,
     optics: opticsFromIndex({ re: jet[N]!, im: jet[K]! }, state.mu),
     jet,
-    hasDerivative: state.hasDerivative,
+    derivativeOrder: state.derivativeOrder,
     nPublished: state.nPublished,
     absorptionKnown,
     used: state.used,
@@ -105,7 +116,8 @@ export function mediumAtWave(
 interface FitState {
   readonly jet: IndexJet;
   readonly mu: Complex;
-  readonly hasDerivative: boolean;
+  /** Highest derivative that means something, 0 to 3. */
+  readonly derivativeOrder: number;
   readonly nPublished: number;
   /** The fit itself gives k, or is exact. */
   readonly complexFit: boolean;
@@ -113,7 +125,13 @@ interface FitState {
 }
 
 /** Absolute index of one fit at one wave; temperature by the model itself, by the fit's thermal form, or with a note that neither can. */
-function evaluateFit(fit: Fit, wave: FitWave, conditions: Conditions, notes: CautionNote[]): FitState {
+function evaluateFit(
+  fit: Fit,
+  material: Material,
+  wave: FitWave,
+  conditions: Conditions,
+  notes: CautionNote[],
+): FitState {
   const bound = bindModel(fit.parameters, conditions);
   const L = fitWavelength_um(fit, wave);
   const own = new Float64Array(JET_LENGTH);
@@ -123,31 +141,33 @@ function evaluateFit(fit: Fit, wave: FitWave, conditions: Conditions, notes: Cau
   const fit_K = fit.temperature_C === undefined ? undefined : fit.temperature_C + ZERO_CELSIUS_K;
   let temperature_K = bound.used.temperature_K ?? fit_K;
 
-  const warming = !takesTemperature && asked_K !== undefined && asked_K !== fit_K ? asked_K : undefined;
-  if (warming !== undefined && fit.thermal && fit.thermal.form !== 'dispersive') {
-    applyThermalForm(fit.thermal, fit_K ?? warming, warming, L, own);
+  const warmTo_K = !takesTemperature && asked_K !== undefined && asked_K !== fit_K ? asked_K : undefined;
+  const thermal = warmTo_K === undefined ? undefined : thermalForm(fit, material);
+  if (warmTo_K !== undefined && thermal && !describesAbsoluteIndex(thermal)) {
+    applyThermalForm(thermal, fit_K ?? warmTo_K, warmTo_K, L, own);
   }
-  const nPublished = own[N]!;
+  let nPublished = own[N]!;
   let jet = own;
   if (fit.reference === 'air') {
     jet = new Float64Array(JET_LENGTH);
     toAbsolute(own, wave.vacuum_um, standardAirIndexJet(wave.vacuum_um), jet);
   }
-  let published = nPublished;
-  if (warming !== undefined) {
-    if (fit.thermal) {
-      if (fit.thermal.form === 'dispersive') {
-        const before = jet[N]!;
-        applyThermalForm(fit.thermal, fit_K ?? warming, warming, wave.vacuum_um, jet);
-        published += jet[N]! - before;
-      }
-      temperature_K = warming;
-    } else {
+  if (warmTo_K !== undefined && thermal) {
+    if (describesAbsoluteIndex(thermal)) {
+      const before = jet[N]!;
+      applyThermalForm(thermal, fit_K ?? warmTo_K, warmTo_K, wave.vacuum_um, jet);
+      nPublished += jet[N]! - before;
+    }
+    temperature_K = warmTo_K;
+    if (thermal.form === 'constant') {
       notes.push({
-        code: 'temperature-not-modelled',
-        details: { asked_C: warming - ZERO_CELSIUS_K, fit_C: fit.temperature_C ?? 'not stated' },
+        code: 'temperature-first-order',
+        details: { dn_dT: thermal.dn_dT_per_K, range: thermal.range },
       });
     }
+  } else if (warmTo_K !== undefined) {
+    const fit_C = fit.temperature_C ?? 'not stated';
+    notes.push({ code: 'temperature-not-modelled', details: { asked_C: warmTo_K - ZERO_CELSIUS_K, fit_C } });
   }
   for (const name of ['pressure_Pa', 'humidity', 'co2_ppm', 'salinity_g_per_kg'] as const) {
     if (conditions[name] !== undefined && bound.used[name] === undefined && isFluidCondition(fit, name)) {
@@ -159,11 +179,20 @@ function evaluateFit(fit: Fit, wave: FitWave, conditions: Conditions, notes: Cau
   return {
     jet,
     mu: bound.permeability ? { re: mu[0]!, im: mu[1]! } : ONE,
-    hasDerivative: bound.hasDerivative,
-    nPublished: published,
+    derivativeOrder: bound.hasDerivative ? bound.derivativeOrder : 0,
+    nPublished,
     complexFit: bound.complex,
     used: { ...bound.used, temperature_K },
   };
+}
+
+/** The fit's own form, else the single dn/dT among the handling facts. Both need to know the temperature of the fit. */
+function thermalForm(fit: Fit, material: Material): ThermalForm | undefined {
+  if (fit.thermal || fit.temperature_C === undefined) return fit.thermal;
+  const slope = material.handling?.dn_dT_1e6_per_K;
+  return slope === undefined
+    ? undefined
+    : { form: 'constant', dn_dT_per_K: slope * 1e-6, range: 'near room temperature' };
 }
 
 /** Pressure, humidity and salinity mean something for fluids alone: a solid beside the air they describe needs no remark. */
@@ -187,7 +216,7 @@ function preference(fit: Fit, wave: FitWave, conditions: Conditions): number {
       (fit_K !== undefined && Math.abs(fit_K - conditions.temperature_K) < 0.5);
     if (canHonour) score += 2;
   }
-  if (fit.recommended && givesAbsorption(fit, wave, conditions)) score += 1;
+  if (isRecommended(fit, wave) && givesAbsorption(fit, wave, conditions)) score += 1;
   return score;
 }
 
@@ -201,13 +230,14 @@ function givesAbsorption(fit: Fit, wave: FitWave, conditions: Conditions): boole
 
 function secondOpinion(
   others: readonly Fit[],
+  material: Material,
   wave: FitWave,
   conditions: Conditions,
   n: number,
 ): SecondOpinion | null {
   const fit = others[0];
   if (!fit) return null;
-  const other = evaluateFit(fit, wave, conditions, []).jet[N]!;
+  const other = evaluateFit(fit, material, wave, conditions, []).jet[N]!;
   return Number.isFinite(other) ? { fit, n: other, difference: other - n } : null;
 }
 
