@@ -3,7 +3,8 @@
  *   1. spellings that agree in the loose form beat those that agree only in the tight form ("CsI" is caesium iodide,
  *      although "c-Si", an alias of silicon, folds to the same letters);
  *   2. among these a key beats a name, a name an alias or glass code, an alias or code a formula;
- *   3. if several materials remain, the one written exactly as typed ("CO" against "Co"), if it is only one;
+ *   3. if several materials share a formula but for its case, the one typed exactly ("CO" against "Co"), since case means
+ *      something in formulas and in nothing else;
  *   4. else all of them are reported.
  * A trailing ":axis" picks a crystal axis. The whole text is tried first, since names may hold a colon ("MgO:LiNbO3").
  * Where the name alone fits several materials, the axis may leave one ("SiO2:o").
@@ -87,7 +88,7 @@ function matches(text: string, source: NameSource): readonly string[] {
   const best = Math.min(...pool.map((s) => SPELLING_RANK[s.kind]));
   const ranked = pool.filter((s) => SPELLING_RANK[s.kind] === best);
   const keys = distinct(ranked);
-  if (keys.length < 2) return keys;
+  if (keys.length < 2 || best !== SPELLING_RANK.formula) return keys;
   const typed = text.trim().normalize('NFKC');
   const asTyped = distinct(ranked.filter((s) => s.text.normalize('NFKC') === typed));
   return asTyped.length === 1 ? asTyped : keys;
