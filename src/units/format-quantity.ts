@@ -43,7 +43,7 @@ export function formatUncertainQuantity(
   const pair = value === null ? undefined : roundPair(value, uncertainty);
   if (!pair) return formatQuantity(value, unit, otherwise, format);
   const { style = SCREEN, form = 'parentheses' } = format;
-  const larger = leadingPlace(pair.value) >= leadingPlace(pair.uncertainty) ? pair.value : pair.uncertainty;
+  const larger = leadingPlace(pair.value) > leadingPlace(pair.uncertainty) ? pair.value : pair.uncertainty;
   const prefix = format.prefix ?? choosePrefix(shiftDecimal(larger, -unit.power), unit);
   const shift = -unit.power - prefix.power;
   const shown = {
@@ -110,8 +110,10 @@ function prefixFor(exact: Decimal, unit: DisplayUnit, precision: Precision): SiP
 /** For a rounded value: like `largestPrefix`, but where the last known digit lies above the unit, the next prefix writes no unknown zeros. */
 function choosePrefix(d: Decimal, unit: DisplayUnit): SiPrefix {
   const best = largestPrefix(d, unit);
-  const allowed = prefixesOf(unit);
-  return d.exponent > best.power && !isZero(d) ? (allowed[allowed.indexOf(best) + 1] ?? best) : best;
+  if (isZero(d) || d.exponent <= best.power) return best;
+  const next = prefixesOf(unit).find((p) => p.power > best.power);
+  const readsWell = next && notationPower(leadingPlace(d) - next.power, 0) === undefined;
+  return readsWell ? next : best;
 }
 
 /**

@@ -31,5 +31,5 @@ export function parseTemperatureInterval(text: string): number | Problem {
       'write for example 0.5C or 0.5K',
     );
   }
-  return parts[2]?.toUpperCase() === 'F' ? (number * 5) / 9 : number;
+  return parts[2]?.toUpperCase() === 'F' ? number / 1.8 : number;
 }

@@ -64,15 +64,21 @@ const ANGLES: readonly Unit[] = [
   ...['arcsec', '"', "''"].map((s) => one(s, 'second of arc', 'angle', byFactor(DEGREE / 3600))),
 ];
 
-/** 0 C in kelvin. Added in decimal, so that -40C is 233.15 K and not a neighbouring double. */
+/** Where the scales lie above absolute zero. Added in decimal, so that -40C is 233.15 K and not a neighbouring double. */
 const ICE_POINT_K = decimalOf(273.15);
+const ZERO_F_ABOVE_ABSOLUTE_ZERO = decimalOf(459.67);
 const TEMPERATURES: readonly Unit[] = [
   ...['C', '°C', 'degC'].map((s) =>
     one(s, 'degree Celsius', 'temperature', (number) => decimalToNumber(addDecimals(number, ICE_POINT_K))),
   ),
   one('K', 'kelvin', 'temperature', byPower(0)),
   ...['F', '°F', 'degF'].map((s) =>
-    one(s, 'degree Fahrenheit', 'temperature', (number) => ((decimalToNumber(number) - 32) * 5) / 9 + 273.15),
+    one(
+      s,
+      'degree Fahrenheit',
+      'temperature',
+      (number) => decimalToNumber(addDecimals(number, ZERO_F_ABOVE_ABSOLUTE_ZERO)) / 1.8,
+    ),
   ),
 ];
 
