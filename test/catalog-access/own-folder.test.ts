@@ -1,4 +1,4 @@
-import { chmodSync, mkdirSync, mkdtempSync, rmSync, writeFileSync } from 'node:fs';
+import { mkdirSync, mkdtempSync, rmSync, symlinkSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
@@ -42,11 +42,17 @@ describe('the folder of own entries', () => {
     ]);
   });
 
-  it.skipIf(process.getuid?.() === 0)('names a file it may not read', () => {
-    const own = join(folder, 'locked');
+  it('names a file that is there and cannot be read', () => {
+    const own = join(folder, 'dangling');
     mkdirSync(own);
-    writeFileSync(join(own, 'a.json'), '{}');
-    chmodSync(join(own, 'a.json'), 0);
-    expect(readOwnFolder(own)?.problems[0]?.message).toBe('cannot be read (EACCES)');
+    symlinkSync(join(own, 'nowhere'), join(own, 'a.json'));
+    expect(readOwnFolder(own)?.problems).toEqual([
+      {
+        file: join(own, 'a.json'),
+        path: '',
+        message: 'cannot be read (ENOENT)',
+        remedy: 'check that it exists and that you may read it',
+      },
+    ]);
   });
 });

@@ -1,0 +1,52 @@
+/**
+ * Which of many texts share the most letter pairs with a short one: a cheap sieve before an exact comparison. A typing slip
+ * spoils two or three pairs and leaves the others, so what the sieve drops is no near miss.
+ */
+export interface PairIndex {
+  /**
+   * Indices of at most `count` admitted texts that share pairs with the sought one, those with the most first, in the
+   * order of the texts among equals.
+   */
+  closest(sought: string, count: number, admit: (index: number) => boolean): readonly number[];
+}
+
+export function createPairIndex(texts: readonly string[]): PairIndex {
+  const postings = new Map<number, number[]>();
+  for (const [index, text] of texts.entries()) {
+    for (const pair of pairsOf(text)) {
+      const list = postings.get(pair);
+      if (list) list.push(index);
+      else postings.set(pair, [index]);
+    }
+  }
+  const shared = new Uint16Array(texts.length);
+  return {
+    closest(sought, count, admit) {
+      shared.fill(0);
+      const pairs = pairsOf(sought);
+      for (const pair of pairs)
+        for (const index of postings.get(pair) ?? []) shared[index] = (shared[index] ?? 0) + 1;
+      // One bucket for each number of pairs shared, best first.
+      const buckets: number[][] = Array.from({ length: pairs.size + 1 }, () => []);
+      for (const [index, n] of shared.entries())
+        if (n > 0 && admit(index)) buckets[pairs.size - n]?.push(index);
+      const out: number[] = [];
+      for (const bucket of buckets) {
+        if (out.length >= count) break;
+        out.push(...bucket.slice(0, count - out.length));
+      }
+      return out;
+    },
+  };
+}
+
+/** The distinct pairs of neighbouring characters as one number each; pairs across a line break are none. */
+function pairsOf(text: string): ReadonlySet<number> {
+  const pairs = new Set<number>();
+  for (let i = 1; i < text.length; i++) {
+    const a = text.charCodeAt(i - 1);
+    const b = text.charCodeAt(i);
+    if (a !== 10 && b !== 10) pairs.add(a * 65536 + b);
+  }
+  return pairs;
+}
