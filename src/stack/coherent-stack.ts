@@ -10,20 +10,19 @@
  * Special cases: an exit medium in total reflection takes T = 0 exactly; a zero-thickness layer is absent; an opaque
  * layer gives T = 0 by underflow, never NaN. An absorbing medium of incidence is refused.
  */
-import { abs2, type Complex, div, mul, neg, scale } from '../num/complex.ts';
+import { abs2, type Complex, neg } from '../num/complex.ts';
 import { checkPath, type LayeredPath, type Polarization } from './layered-path.ts';
 import {
-  complexAt,
-  dissipations,
   exitFlux,
+  fieldTransmissionP,
   incidentFlux,
   incidentKappa2,
-  refractiveIndexOf,
-  type SolvedStack,
   solveStack,
   tangentialReflection,
+  tangentialTransmission,
+  writeDissipations,
 } from './solved-stack.ts';
-import { EXIT_SCALE_P, EXIT_SCALE_S } from './stack-kernel.ts';
+import type { StackKernel } from './stack-kernel.ts';
 
 export interface StackFractions {
   /** Reflectance, transmittance, absorptance (the sum over the layers). */
@@ -54,9 +53,9 @@ export function coherentStack(
 ): CoherentStack {
   checkPath(path, vacuumWavelength_m, incidenceAngle_rad);
   const k0_rad_per_m = (2 * Math.PI) / vacuumWavelength_m;
-  const stack = solveStack(path, k0_rad_per_m, incidentKappa2(path.incidence, incidenceAngle_rad));
-  const s = polarized(path, stack, 's', incidenceAngle_rad);
-  const p = polarized(path, stack, 'p', incidenceAngle_rad);
+  const kernel = solveStack(path, k0_rad_per_m, incidentKappa2(path.incidence, incidenceAngle_rad));
+  const s = polarized(path, kernel, 's', incidenceAngle_rad);
+  const p = polarized(path, kernel, 'p', incidenceAngle_rad);
   return { s, p, unpolarized: meanFractions(s, p) };
 }
 
@@ -72,32 +71,23 @@ export function meanFractions(s: StackFractions, p: StackFractions): StackFracti
 
 function polarized(
   path: LayeredPath,
-  stack: SolvedStack,
+  kernel: StackKernel,
   polarization: Polarization,
   incidenceAngle_rad: number,
 ): PolarizedStack {
-  const incoming = incidentFlux(stack, polarization);
-  const rTangential = tangentialReflection(stack, polarization);
-  const layerAbsorptance = dissipations(stack, polarization).map((power) => power / incoming);
+  const overIncoming = 1 / incidentFlux(kernel, polarization);
+  const rTangential = tangentialReflection(kernel, polarization);
+  const layerAbsorptance = new Float64Array(path.layers.length);
+  writeDissipations(kernel, polarization, overIncoming, layerAbsorptance);
   return {
     R: abs2(rTangential),
-    T: exitFlux(stack, polarization) / incoming,
+    T: exitFlux(kernel, polarization) * overIncoming,
     A: layerAbsorptance.reduce((sum, a) => sum + a, 0),
-    layerAbsorptance,
+    layerAbsorptance: [...layerAbsorptance],
     r: polarization === 's' ? rTangential : neg(rTangential),
-    t: amplitudeTransmission(path, stack, polarization, incidenceAngle_rad),
+    t:
+      polarization === 's'
+        ? tangentialTransmission(kernel, 's')
+        : fieldTransmissionP(kernel, path.exit, incidenceAngle_rad),
   };
-}
-
-function amplitudeTransmission(
-  path: LayeredPath,
-  stack: SolvedStack,
-  polarization: Polarization,
-  incidenceAngle_rad: number,
-): Complex {
-  const { waves } = stack.kernel;
-  if (polarization === 's') return complexAt(waves, EXIT_SCALE_S);
-  // The scale is the transmitted H for unit incident tangential E, cos(theta) of the incident E; E = H n/eps beyond.
-  const overH = div(refractiveIndexOf(path.exit), path.exit.eps);
-  return scale(mul(complexAt(waves, EXIT_SCALE_P), overH), Math.cos(incidenceAngle_rad));
 }

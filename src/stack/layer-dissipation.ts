@@ -13,12 +13,7 @@ import { KAPPA, MEDIUM_STRIDE, Y_P, Y_S, Z_P, Z_S } from './stack-media.ts';
  * Dissipation of layer j in units of Re(E H*), for the scaled fields of `propagate` and divided by exp(2 k0 Im kappa d):
  * times |a_j|^2 rescale_j^2 it is the true one for unit incident tangential E.
  */
-export function layerDissipation(
-  kernel: StackKernel,
-  layer: number,
-  polarization: Polarization,
-  k0_rad_per_m: number,
-): number {
+export function layerDissipation(kernel: StackKernel, layer: number, polarization: Polarization): number {
   const { media, fields } = kernel;
   const m = (kernel.layerMedium[layer] as number) * MEDIUM_STRIDE;
   const s = polarization === 's';
@@ -42,7 +37,7 @@ export function layerDissipation(
   const k2 = kr * kr + ki * ki;
 
   // Integrals over the layer of |cos|^2, |sin/kappa|^2, cos conj(sin/kappa) of k0 kappa (distance from the lower face).
-  const x = k0_rad_per_m * (kernel.thickness_m[layer] as number);
+  const x = kernel.k0d[layer] as number;
   const a = Math.abs(kr) * x;
   const b = ki * x;
   const shrink = Math.exp(-2 * b);

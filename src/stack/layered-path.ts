@@ -59,20 +59,7 @@ export function checkPath(path: LayeredPath, vacuumWavelength_m: number, inciden
   path.layers.forEach((layer, i) => {
     const name = `layer ${i + 1}`;
     checkSubstance(layer, name);
-    if (!Number.isFinite(layer.thickness_m)) {
-      throw new StackRefusal(
-        'not-finite',
-        `the thickness of ${name} is not a finite number`,
-        'give a length',
-      );
-    }
-    if (layer.thickness_m < 0) {
-      throw new StackRefusal(
-        'negative-thickness',
-        `the thickness of ${name} is negative`,
-        'a thickness is zero or more',
-      );
-    }
+    checkThickness(layer.thickness_m, name);
   });
 }
 
@@ -89,6 +76,19 @@ export function checkWave(vacuumWavelength_m: number, incidenceAngle_rad: number
       'angle-out-of-range',
       `an angle of incidence of ${incidenceAngle_rad} rad is not between the normal and grazing`,
       'angles run from 0 (along the normal) to 90 degrees (grazing)',
+    );
+  }
+}
+
+export function checkThickness(thickness_m: number, name: string): void {
+  if (!Number.isFinite(thickness_m)) {
+    throw new StackRefusal('not-finite', `the thickness of ${name} is not a finite number`, 'give a length');
+  }
+  if (thickness_m < 0) {
+    throw new StackRefusal(
+      'negative-thickness',
+      `the thickness of ${name} is negative`,
+      'a thickness is zero or more',
     );
   }
 }
@@ -119,7 +119,7 @@ export function checkSubstance(x: Substance, name: string): void {
   }
 }
 
-function checkIncidence(x: Substance): void {
+export function checkIncidence(x: Substance): void {
   const name = 'the medium of incidence';
   checkSubstance(x, name);
   if (!isLossless(x)) {

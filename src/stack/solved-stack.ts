@@ -2,7 +2,7 @@
  * One path at one wave, solved: the kernel filled in, and what is read from it. Unlike `coherent-stack.ts` it takes the
  * normal wave vector instead of an angle, so that a group of layers can be met from inside an absorbing slab as well.
  */
-import { abs2, type Complex, mul, neg, scale, sqrtDecaying } from '../num/complex.ts';
+import { abs2, type Complex, div, mul, neg, scale, sqrtDecaying } from '../num/complex.ts';
 import { layerDissipation } from './layer-dissipation.ts';
 import { indexSquared, type LayeredPath, type Polarization, type Substance } from './layered-path.ts';
 import {
@@ -17,15 +17,10 @@ import {
   SCALE_S,
   type StackKernel,
 } from './stack-kernel.ts';
-import { KAPPA, MEDIUM_STRIDE, setIncidence, setMedium, Y_P, Z_S } from './stack-media.ts';
-
-export interface SolvedStack {
-  readonly kernel: StackKernel;
-  readonly k0_rad_per_m: number;
-}
+import { EPS, KAPPA, MEDIUM_STRIDE, MU, setIncidence, setMedium } from './stack-media.ts';
 
 /** `kappa2`: squared normal wave vector over k0 of the incident wave in the medium of incidence. No checks. */
-export function solveStack(path: LayeredPath, k0_rad_per_m: number, kappa2: Complex): SolvedStack {
+export function solveStack(path: LayeredPath, k0_rad_per_m: number, kappa2: Complex): StackKernel {
   const substances: Substance[] = [path.incidence, ...path.layers, path.exit];
   const kernel = createStackKernel(
     substances.length,
@@ -39,7 +34,7 @@ export function solveStack(path: LayeredPath, k0_rad_per_m: number, kappa2: Comp
   });
   setIncidence(kernel, kappa2.re, kappa2.im);
   propagate(kernel, k0_rad_per_m);
-  return { kernel, k0_rad_per_m };
+  return kernel;
 }
 
 /** Squared normal wave vector over k0 at an angle of incidence: eps mu cos^2. */
@@ -49,43 +44,64 @@ export function incidentKappa2(incidence: Substance, incidenceAngle_rad: number)
 }
 
 /** Reflected over incident tangential E. */
-export function tangentialReflection(stack: SolvedStack, polarization: Polarization): Complex {
-  return complexAt(stack.kernel.waves, polarization === 's' ? R_S : R_P_TANGENTIAL);
+export function tangentialReflection(kernel: StackKernel, polarization: Polarization): Complex {
+  return complexAt(kernel.waves, polarization === 's' ? R_S : R_P_TANGENTIAL);
 }
 
 /** Transmitted over incident tangential E. */
-export function tangentialTransmission(stack: SolvedStack, polarization: Polarization): Complex {
-  const { kernel } = stack;
+export function tangentialTransmission(kernel: StackKernel, polarization: Polarization): Complex {
   const last = kernel.layerCount * FIELD_STRIDE;
   return polarization === 's'
     ? complexAt(kernel.waves, EXIT_SCALE_S)
     : mul(complexAt(kernel.waves, EXIT_SCALE_P), complexAt(kernel.fields, last + 4));
 }
 
+/** Transmitted over incident E amplitude in p, for a wave that arrives at a real angle. */
+export function fieldTransmissionP(
+  kernel: StackKernel,
+  exit: Substance,
+  incidenceAngle_rad: number,
+): Complex {
+  // The scale is the transmitted H for unit incident tangential E, which is cos(theta) of the incident E.
+  const scaleP = complexAt(kernel.waves, EXIT_SCALE_P);
+  return scale(mul(scaleP, fieldPerH(exit)), Math.cos(incidenceAngle_rad));
+}
+
+/** E over Z0 H of a plane wave, n/eps; n is backward (Re < 0) in a lossless doubly negative medium. */
+export function fieldPerH(x: Substance): Complex {
+  const n = sqrtDecaying(indexSquared(x));
+  return div(n.im === 0 && x.mu.re < 0 ? neg(n) : n, x.eps);
+}
+
 /** Power into the exit medium, in units of Re(E H*) for unit incident tangential E. */
-export function exitFlux(stack: SolvedStack, polarization: Polarization): number {
-  const { kernel } = stack;
+export function exitFlux({ fields, waves, layerCount }: StackKernel, polarization: Polarization): number {
   const s = polarization === 's';
-  const at = kernel.layerCount * FIELD_STRIDE + (s ? 0 : 4);
-  const E = complexAt(kernel.fields, at);
-  const H = complexAt(kernel.fields, at + 2);
-  return (E.re * H.re + E.im * H.im) * abs2(complexAt(kernel.waves, s ? EXIT_SCALE_S : EXIT_SCALE_P));
+  const at = layerCount * FIELD_STRIDE + (s ? 0 : 4);
+  const to = s ? EXIT_SCALE_S : EXIT_SCALE_P;
+  const Er = fields[at] as number;
+  const Ei = fields[at + 1] as number;
+  const Hr = fields[at + 2] as number;
+  const Hi = fields[at + 3] as number;
+  const re = waves[to] as number;
+  const im = waves[to + 1] as number;
+  return (Er * Hr + Ei * Hi) * (re * re + im * im);
 }
 
 /** Real part of the admittance y0 of the incident wave: its power for unit tangential E, alone in the medium. */
-export function incidentFlux(stack: SolvedStack, polarization: Polarization): number {
-  const { media, incidence } = stack.kernel;
+export function incidentFlux({ media, incidence }: StackKernel, polarization: Polarization): number {
   const at = incidence * MEDIUM_STRIDE;
-  const kappa = complexAt(media, at + KAPPA);
-  // kappa/mu, or eps/kappa; Z_S holds mu and Y_P eps.
-  const [u, v] =
-    polarization === 's' ? [kappa, complexAt(media, at + Z_S)] : [complexAt(media, at + Y_P), kappa];
-  return (u.re * v.re + u.im * v.im) / abs2(v);
+  // kappa/mu, or eps/kappa.
+  const u = at + (polarization === 's' ? KAPPA : EPS);
+  const v = at + (polarization === 's' ? MU : KAPPA);
+  const ur = media[u] as number;
+  const ui = media[u + 1] as number;
+  const vr = media[v] as number;
+  const vi = media[v + 1] as number;
+  return (ur * vr + ui * vi) / (vr * vr + vi * vi);
 }
 
 /** Factor from the stored fields of interface j to the true ones for unit incident tangential E, for j = 0 .. N. */
-export function fieldScales(stack: SolvedStack, polarization: Polarization): Complex[] {
-  const { kernel } = stack;
+export function fieldScales(kernel: StackKernel, polarization: Polarization): Complex[] {
   const s = polarization === 's';
   const rescale = s ? kernel.rescaleS : kernel.rescaleP;
   const scales = [complexAt(kernel.waves, s ? SCALE_S : SCALE_P)];
@@ -95,23 +111,26 @@ export function fieldScales(stack: SolvedStack, polarization: Polarization): Com
   return scales;
 }
 
-/** Power dissipated in each layer, in units of Re(E H*) for unit incident tangential E. */
-export function dissipations(stack: SolvedStack, polarization: Polarization): number[] {
-  const { kernel, k0_rad_per_m } = stack;
-  const rescale = polarization === 's' ? kernel.rescaleS : kernel.rescaleP;
-  const scales = fieldScales(stack, polarization);
-  return Array.from({ length: kernel.layerCount }, (_, j) => {
-    const factor = rescale[j] as number;
-    return (
-      layerDissipation(kernel, j, polarization, k0_rad_per_m) * abs2(scales[j] as Complex) * factor * factor
-    );
-  });
-}
-
-/** Refractive index, backward (Re < 0) in a lossless doubly negative medium. */
-export function refractiveIndexOf(x: Substance): Complex {
-  const n = sqrtDecaying(indexSquared(x));
-  return n.im === 0 && x.mu.re < 0 ? neg(n) : n;
+/**
+ * Power dissipated in each layer, in units of Re(E H*) for unit incident tangential E, times `factor`; layer j goes to
+ * `target[start + j stride]`.
+ */
+export function writeDissipations(
+  kernel: StackKernel,
+  polarization: Polarization,
+  factor: number,
+  target: Float64Array,
+  start = 0,
+  stride = 1,
+): void {
+  const s = polarization === 's';
+  const rescale = s ? kernel.rescaleS : kernel.rescaleP;
+  let scale2 = factor * abs2(complexAt(kernel.waves, s ? SCALE_S : SCALE_P));
+  for (let j = 0; j < kernel.layerCount; j++) {
+    scale2 *= (rescale[j] as number) ** 2;
+    target[start + j * stride] = layerDissipation(kernel, j, polarization) * scale2;
+    scale2 *= (kernel.decay[j] as number) ** 2;
+  }
 }
 
 /** The complex number whose parts stand at `at` and `at + 1`. */

@@ -50,6 +50,8 @@ export interface StackKernel extends StackMedia {
   /** Index into `media` of each layer, in the order the wave meets them. */
   readonly layerMedium: Uint16Array;
   readonly thickness_m: Float64Array;
+  /** k0 d of each layer at the wave last propagated. */
+  readonly k0d: Float64Array;
   /** Interface j lies above layer j; the last one is the surface of the exit medium. Scaled, see `propagate`. */
   readonly fields: Float64Array;
   /** exp(-k0 Im kappa d) of each layer. */
@@ -58,6 +60,8 @@ export interface StackKernel extends StackMedia {
   readonly rescaleS: Float64Array;
   readonly rescaleP: Float64Array;
   readonly waves: Float64Array;
+  /** c and -i g of the complex layer in hand. */
+  readonly turning: Float64Array;
 }
 
 export function createStackKernel(
@@ -72,6 +76,7 @@ export function createStackKernel(
     layerCount,
     layerMedium: Uint16Array.from(layerMedium),
     thickness_m: Float64Array.from(thickness_m),
+    k0d: new Float64Array(layerCount),
     incidence,
     exit,
     media: new Float64Array(mediumCount * MEDIUM_STRIDE),
@@ -81,6 +86,7 @@ export function createStackKernel(
     rescaleS: new Float64Array(layerCount),
     rescaleP: new Float64Array(layerCount),
     waves: new Float64Array(12),
+    turning: new Float64Array(4),
   };
 }
 
@@ -90,191 +96,180 @@ export function createStackKernel(
  * incident tangential E are a_j times these, a_(j+1) = a_j decay_j rescale_j. `waves` holds r and the scales.
  */
 export function propagate(kernel: StackKernel, k0_rad_per_m: number): void {
-  const { media, kind, layerMedium, thickness_m, fields, decay, rescaleS, rescaleP, waves } = kernel;
-  const n = kernel.layerCount;
-  const exit = kernel.exit * MEDIUM_STRIDE;
-  const xkr = media[exit + KAPPA] as number;
-  const xki = media[exit + KAPPA + 1] as number;
-  const xmr = media[exit + MU] as number;
-  const xmi = media[exit + MU + 1] as number;
-  const xer = media[exit + EPS] as number;
-  const xei = media[exit + EPS + 1] as number;
-  const overMu = 1 / (xmr * xmr + xmi * xmi);
-  const overEps = 1 / (xer * xer + xei * xei);
-  let sEr = 1;
-  let sEi = 0;
-  let sHr = (xkr * xmr + xki * xmi) * overMu;
-  let sHi = (xki * xmr - xkr * xmi) * overMu;
-  let pEr = (xkr * xer + xki * xei) * overEps;
-  let pEi = (xki * xer - xkr * xei) * overEps;
-  let pHr = 1;
-  let pHi = 0;
-  let at = n * FIELD_STRIDE;
-  fields[at] = sEr;
-  fields[at + 1] = sEi;
-  fields[at + 2] = sHr;
-  fields[at + 3] = sHi;
-  fields[at + 4] = pEr;
-  fields[at + 5] = pEi;
-  fields[at + 6] = pHr;
-  fields[at + 7] = pHi;
+  startAtExit(kernel);
+  const { kind, layerMedium, thickness_m, k0d, decay, rescaleS, rescaleP, media, fields, waves } = kernel;
   let stepS = 1;
   let stepP = 1;
-
-  for (let j = n - 1; j >= 0; j--) {
-    const medium = layerMedium[j] as number;
-    const m = medium * MEDIUM_STRIDE;
-    const x = k0_rad_per_m * (thickness_m[j] as number);
-    const layerKind = kind[medium];
-    const kr = media[m + KAPPA] as number;
-    const ki = media[m + KAPPA + 1] as number;
-    let e = 1;
-    if (layerKind !== COMPLEX) {
-      let c = 1;
-      let g = x;
-      if (layerKind === PROPAGATING) {
-        const phase = kr * x;
-        c = Math.cos(phase);
-        g = Math.sin(phase) / kr;
-      } else if (layerKind === EVANESCENT) {
-        e = Math.exp(-ki * x);
-        const sinh = -Math.expm1(-2 * ki * x) / 2;
-        c = 1 - sinh;
-        g = sinh / ki;
-      }
-      const zs = (media[m + Z_S] as number) * g;
-      const ys = (media[m + Y_S] as number) * g;
-      const zp = (media[m + Z_P] as number) * g;
-      const yp = (media[m + Y_P] as number) * g;
-      const er = c * sEr + zs * sHi;
-      const ei = c * sEi - zs * sHr;
-      sHr = c * sHr + ys * sEi;
-      sHi = c * sHi - ys * sEr;
-      sEr = er;
-      sEi = ei;
-      const fr = c * pEr + zp * pHi;
-      const fi = c * pEi - zp * pHr;
-      pHr = c * pHr + yp * pEi;
-      pHi = c * pHi - yp * pEr;
-      pEr = fr;
-      pEi = fi;
-    } else {
-      const a = kr * x;
-      const b = ki * x;
-      const sinh = -Math.expm1(-2 * b) / 2;
-      const cosh = 1 - sinh;
-      const sin = Math.sin(a);
-      const cos = Math.cos(a);
-      e = Math.exp(-b);
-      const cr = cos * cosh;
-      const ci = -sin * sinh;
-      const overK = 1 / (kr * kr + ki * ki);
-      const sr = sin * cosh;
-      const si = cos * sinh;
-      // -i g, so that the products below are plain complex ones.
-      const gr = (si * kr - sr * ki) * overK;
-      const gi = -(sr * kr + si * ki) * overK;
-      let vr = media[m + Z_S] as number;
-      let vi = media[m + Z_S + 1] as number;
-      let zr = vr * gr - vi * gi;
-      let zi = vr * gi + vi * gr;
-      vr = media[m + Y_S] as number;
-      vi = media[m + Y_S + 1] as number;
-      let yr = vr * gr - vi * gi;
-      let yi = vr * gi + vi * gr;
-      const er = cr * sEr - ci * sEi + zr * sHr - zi * sHi;
-      const ei = cr * sEi + ci * sEr + zr * sHi + zi * sHr;
-      const hr = cr * sHr - ci * sHi + yr * sEr - yi * sEi;
-      sHi = cr * sHi + ci * sHr + yr * sEi + yi * sEr;
-      sHr = hr;
-      sEr = er;
-      sEi = ei;
-      vr = media[m + Z_P] as number;
-      vi = media[m + Z_P + 1] as number;
-      zr = vr * gr - vi * gi;
-      zi = vr * gi + vi * gr;
-      vr = media[m + Y_P] as number;
-      vi = media[m + Y_P + 1] as number;
-      yr = vr * gr - vi * gi;
-      yi = vr * gi + vi * gr;
-      const fr = cr * pEr - ci * pEi + zr * pHr - zi * pHi;
-      const fi = cr * pEi + ci * pEr + zr * pHi + zi * pHr;
-      const ir = cr * pHr - ci * pHi + yr * pEr - yi * pEi;
-      pHi = cr * pHi + ci * pHr + yr * pEi + yi * pEr;
-      pHr = ir;
-      pEr = fr;
-      pEi = fi;
-    }
-    let us = 1;
-    const sizeS = Math.abs(sEr) + Math.abs(sEi) + Math.abs(sHr) + Math.abs(sHi);
-    if (sizeS > TOO_LARGE || sizeS < TOO_SMALL) {
-      us = sizeS > TOO_LARGE ? TOO_SMALL : TOO_LARGE;
-      sEr *= us;
-      sEi *= us;
-      sHr *= us;
-      sHi *= us;
-    }
-    let up = 1;
-    const sizeP = Math.abs(pEr) + Math.abs(pEi) + Math.abs(pHr) + Math.abs(pHi);
-    if (sizeP > TOO_LARGE || sizeP < TOO_SMALL) {
-      up = sizeP > TOO_LARGE ? TOO_SMALL : TOO_LARGE;
-      pEr *= up;
-      pEi *= up;
-      pHr *= up;
-      pHi *= up;
-    }
-    decay[j] = e;
-    rescaleS[j] = us;
-    rescaleP[j] = up;
-    stepS *= e * us;
-    stepP *= e * up;
-    at = j * FIELD_STRIDE;
-    fields[at] = sEr;
-    fields[at + 1] = sEi;
-    fields[at + 2] = sHr;
-    fields[at + 3] = sHi;
-    fields[at + 4] = pEr;
-    fields[at + 5] = pEi;
-    fields[at + 6] = pHr;
-    fields[at + 7] = pHi;
+  for (let j = kernel.layerCount - 1; j >= 0; j--) {
+    k0d[j] = k0_rad_per_m * (thickness_m[j] as number);
+    if (kind[layerMedium[j] as number] === COMPLEX) crossComplexLayer(kernel, j);
+    else crossRealLayer(kernel, j);
+    rescaleS[j] = keepInRange(fields, j * FIELD_STRIDE);
+    rescaleP[j] = keepInRange(fields, j * FIELD_STRIDE + 4);
+    stepS *= (decay[j] as number) * (rescaleS[j] as number);
+    stepP *= (decay[j] as number) * (rescaleP[j] as number);
   }
-
   // r = (y0 E - H)/(y0 E + H), scale = 2 y0/(y0 E + H); y0 = kappa0/mu0 (s), eps0/kappa0 (p), multiplied through.
   const from = kernel.incidence * MEDIUM_STRIDE;
-  const kr = media[from + KAPPA] as number;
-  const ki = media[from + KAPPA + 1] as number;
-  enter(waves, R_S, kr, ki, media[from + MU] as number, media[from + MU + 1] as number, sEr, sEi, sHr, sHi);
-  enter(
-    waves,
-    R_P_TANGENTIAL,
-    media[from + EPS] as number,
-    media[from + EPS + 1] as number,
-    kr,
-    ki,
-    pEr,
-    pEi,
-    pHr,
-    pHi,
-  );
+  enter(waves, R_S, media, from + KAPPA, from + MU, fields, 0);
+  enter(waves, R_P_TANGENTIAL, media, from + EPS, from + KAPPA, fields, 4);
   waves[EXIT_SCALE_S] = (waves[SCALE_S] as number) * stepS;
   waves[EXIT_SCALE_S + 1] = (waves[SCALE_S + 1] as number) * stepS;
   waves[EXIT_SCALE_P] = (waves[SCALE_P] as number) * stepP;
   waves[EXIT_SCALE_P + 1] = (waves[SCALE_P + 1] as number) * stepP;
 }
 
-/** r = (u E - v H)/(u E + v H) at `at`, 2 u/(u E + v H) four places on. */
+/** E, H of the exit wave: (1, kappa/mu) in s, (kappa/eps, 1) in p. */
+function startAtExit({ media, fields, exit, layerCount }: StackKernel): void {
+  const x = exit * MEDIUM_STRIDE;
+  const kr = media[x + KAPPA] as number;
+  const ki = media[x + KAPPA + 1] as number;
+  const mr = media[x + MU] as number;
+  const mi = media[x + MU + 1] as number;
+  const er = media[x + EPS] as number;
+  const ei = media[x + EPS + 1] as number;
+  const overMu = 1 / (mr * mr + mi * mi);
+  const overEps = 1 / (er * er + ei * ei);
+  const at = layerCount * FIELD_STRIDE;
+  fields[at] = 1;
+  fields[at + 1] = 0;
+  fields[at + 2] = (kr * mr + ki * mi) * overMu;
+  fields[at + 3] = (ki * mr - kr * mi) * overMu;
+  fields[at + 4] = (kr * er + ki * ei) * overEps;
+  fields[at + 5] = (ki * er - kr * ei) * overEps;
+  fields[at + 6] = 1;
+  fields[at + 7] = 0;
+}
+
+/** Fields above layer j from those below, where eps and mu are real: c, g, Z and Y are real too. */
+function crossRealLayer(kernel: StackKernel, j: number): void {
+  const { media, fields } = kernel;
+  const medium = kernel.layerMedium[j] as number;
+  const m = medium * MEDIUM_STRIDE;
+  const kind = kernel.kind[medium];
+  const x = kernel.k0d[j] as number;
+  let e = 1;
+  let c = 1;
+  let g = x;
+  if (kind === PROPAGATING) {
+    const k = media[m + KAPPA] as number;
+    c = Math.cos(k * x);
+    g = Math.sin(k * x) / k;
+  } else if (kind === EVANESCENT) {
+    const k = media[m + KAPPA + 1] as number;
+    e = Math.exp(-k * x);
+    const sinh = -Math.expm1(-2 * k * x) / 2;
+    c = 1 - sinh;
+    g = sinh / k;
+  }
+  const zs = (media[m + Z_S] as number) * g;
+  const ys = (media[m + Y_S] as number) * g;
+  const zp = (media[m + Z_P] as number) * g;
+  const yp = (media[m + Y_P] as number) * g;
+  const at = (j + 1) * FIELD_STRIDE;
+  const sEr = fields[at] as number;
+  const sEi = fields[at + 1] as number;
+  const sHr = fields[at + 2] as number;
+  const sHi = fields[at + 3] as number;
+  const pEr = fields[at + 4] as number;
+  const pEi = fields[at + 5] as number;
+  const pHr = fields[at + 6] as number;
+  const pHi = fields[at + 7] as number;
+  const to = j * FIELD_STRIDE;
+  kernel.decay[j] = e;
+  fields[to] = c * sEr + zs * sHi;
+  fields[to + 1] = c * sEi - zs * sHr;
+  fields[to + 2] = c * sHr + ys * sEi;
+  fields[to + 3] = c * sHi - ys * sEr;
+  fields[to + 4] = c * pEr + zp * pHi;
+  fields[to + 5] = c * pEi - zp * pHr;
+  fields[to + 6] = c * pHr + yp * pEi;
+  fields[to + 7] = c * pHi - yp * pEr;
+}
+
+/** The same where eps or mu is complex. */
+function crossComplexLayer(kernel: StackKernel, j: number): void {
+  const { media } = kernel;
+  const m = (kernel.layerMedium[j] as number) * MEDIUM_STRIDE;
+  const x = kernel.k0d[j] as number;
+  const kr = media[m + KAPPA] as number;
+  const ki = media[m + KAPPA + 1] as number;
+  const sinh = -Math.expm1(-2 * ki * x) / 2;
+  const cosh = 1 - sinh;
+  const sin = Math.sin(kr * x);
+  const cos = Math.cos(kr * x);
+  const sr = sin * cosh;
+  const si = cos * sinh;
+  const overK = 1 / (kr * kr + ki * ki);
+  const { turning } = kernel;
+  turning[0] = cos * cosh;
+  turning[1] = -sin * sinh;
+  // -i g, so that what follows are plain complex products.
+  turning[2] = (si * kr - sr * ki) * overK;
+  turning[3] = -(sr * kr + si * ki) * overK;
+  // Im kappa d = -ln decay; expm1 above has the accuracy near 0 that 1 - decay^2 would lose.
+  kernel.decay[j] = Math.exp(-ki * x);
+  turn(kernel, j, 0, m + Z_S, m + Y_S);
+  turn(kernel, j, 4, m + Z_P, m + Y_P);
+}
+
+/** E = c E + Z g H, H = c H + Y g E for one polarization, with the layer's complex c and -i g in `turning`. */
+function turn({ media, fields, turning }: StackKernel, j: number, side: number, Z: number, Y: number): void {
+  const cr = turning[0] as number;
+  const ci = turning[1] as number;
+  const gr = turning[2] as number;
+  const gi = turning[3] as number;
+  const Zr = media[Z] as number;
+  const Zi = media[Z + 1] as number;
+  const Yr = media[Y] as number;
+  const Yi = media[Y + 1] as number;
+  const zr = Zr * gr - Zi * gi;
+  const zi = Zr * gi + Zi * gr;
+  const yr = Yr * gr - Yi * gi;
+  const yi = Yr * gi + Yi * gr;
+  const at = (j + 1) * FIELD_STRIDE + side;
+  const Er = fields[at] as number;
+  const Ei = fields[at + 1] as number;
+  const Hr = fields[at + 2] as number;
+  const Hi = fields[at + 3] as number;
+  const to = j * FIELD_STRIDE + side;
+  fields[to] = cr * Er - ci * Ei + zr * Hr - zi * Hi;
+  fields[to + 1] = cr * Ei + ci * Er + zr * Hi + zi * Hr;
+  fields[to + 2] = cr * Hr - ci * Hi + yr * Er - yi * Ei;
+  fields[to + 3] = cr * Hi + ci * Hr + yr * Ei + yi * Er;
+}
+
+/** Brings four fields back into the range of doubles if they left it; returns the factor used, as a rule 1. */
+function keepInRange(fields: Float64Array, at: number): number {
+  const size =
+    Math.abs(fields[at] as number) +
+    Math.abs(fields[at + 1] as number) +
+    Math.abs(fields[at + 2] as number) +
+    Math.abs(fields[at + 3] as number);
+  if (size <= TOO_LARGE && size >= TOO_SMALL) return 1;
+  const factor = size > TOO_LARGE ? TOO_SMALL : TOO_LARGE;
+  for (let i = at; i < at + 4; i++) fields[i] = (fields[i] as number) * factor;
+  return factor;
+}
+
+/** r = (u E - v H)/(u E + v H) at `to`, 2 u/(u E + v H) four places on; u, v, E, H complex numbers in the arrays. */
 function enter(
   waves: Float64Array,
+  to: number,
+  media: Float64Array,
+  u: number,
+  v: number,
+  fields: Float64Array,
   at: number,
-  ur: number,
-  ui: number,
-  vr: number,
-  vi: number,
-  Er: number,
-  Ei: number,
-  Hr: number,
-  Hi: number,
 ): void {
+  const ur = media[u] as number;
+  const ui = media[u + 1] as number;
+  const vr = media[v] as number;
+  const vi = media[v + 1] as number;
+  const Er = fields[at] as number;
+  const Ei = fields[at + 1] as number;
+  const Hr = fields[at + 2] as number;
+  const Hi = fields[at + 3] as number;
   const er = ur * Er - ui * Ei;
   const ei = ur * Ei + ui * Er;
   const hr = vr * Hr - vi * Hi;
@@ -284,8 +279,8 @@ function enter(
   const dr = er - hr;
   const di = ei - hi;
   const over = 1 / (sr * sr + si * si);
-  waves[at] = (dr * sr + di * si) * over;
-  waves[at + 1] = (di * sr - dr * si) * over;
-  waves[at + 4] = 2 * (ur * sr + ui * si) * over;
-  waves[at + 5] = 2 * (ui * sr - ur * si) * over;
+  waves[to] = (dr * sr + di * si) * over;
+  waves[to + 1] = (di * sr - dr * si) * over;
+  waves[to + 4] = 2 * (ur * sr + ui * si) * over;
+  waves[to + 5] = 2 * (ui * sr - ur * si) * over;
 }
