@@ -12,6 +12,9 @@ export interface CursorPosition {
 
 export const UNKNOWN = -1;
 
+/** Next line (NEL). Not CR LF: the line discipline of the terminal device would add a second CR to that. */
+const NEXT_LINE = '\x1bE';
+
 /** The shortest move; '' where the cursor is certain to be there already. */
 export function cursorMove(from: CursorPosition, to: CursorPosition): string {
   if (from.x === to.x && from.y === to.y) return '';
@@ -24,7 +27,7 @@ export function cursorMove(from: CursorPosition, to: CursorPosition): string {
     consider(to.x === 0 ? '\r' : `\x1b[${to.x + 1}G`);
     if (from.x !== UNKNOWN) consider(sideways(to.x - from.x));
   } else if (to.x === 0 && to.y === from.y + 1) {
-    consider('\r\n');
+    consider(NEXT_LINE);
   } else if (from.x === to.x) {
     consider(counted(Math.abs(to.y - from.y), to.y > from.y ? 'B' : 'A'));
   }

@@ -8,14 +8,14 @@ describe('cursor moves', () => {
     [{ x: 4, y: 4 }, { x: 4, y: 4 }, ''],
     [{ x: 4, y: 4 }, { x: 0, y: 0 }, '\x1b[H'],
     [{ x: 4, y: 4 }, { x: 0, y: 4 }, '\r'],
-    [{ x: 4, y: 4 }, { x: 0, y: 5 }, '\r\n'],
+    [{ x: 4, y: 4 }, { x: 0, y: 5 }, '\x1bE'],
     [{ x: 4, y: 4 }, { x: 5, y: 4 }, '\x1b[C'],
     [{ x: 4, y: 4 }, { x: 2, y: 4 }, '\b\b'],
     [{ x: 24, y: 4 }, { x: 12, y: 4 }, '\x1b[13G'],
     [{ x: 4, y: 14 }, { x: 4, y: 12 }, '\x1b[2A'],
     [{ x: 4, y: 14 }, { x: 9, y: 11 }, '\x1b[12;10H'],
     [{ x: UNKNOWN, y: 4 }, { x: 9, y: 4 }, '\x1b[10G'],
-    [{ x: UNKNOWN, y: 4 }, { x: 0, y: 5 }, '\r\n'],
+    [{ x: UNKNOWN, y: 4 }, { x: 0, y: 5 }, '\x1bE'],
     [{ x: UNKNOWN, y: UNKNOWN }, { x: 9, y: 0 }, '\x1b[;10H'],
   ])('from %j to %j', (from, to, sequence) => {
     expect(cursorMove(from, to)).toBe(sequence);
