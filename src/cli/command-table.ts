@@ -1,0 +1,162 @@
+/**
+ * The one table of commands. To add one: add its row here, write `commands/<name>.ts` exporting `run`, and register it in
+ * load-command.ts. Help, man page, completions and the argument parser follow by themselves.
+ */
+import { OPTION_KEYS, type OptionKey, optionSpec } from './options.ts';
+
+export interface OperandSpec {
+  /** In help: `FROM`. */
+  readonly name: string;
+  /** One phrase without a full stop, ASCII. */
+  readonly meaning: string;
+  readonly optional?: true;
+  /** May be repeated. */
+  readonly many?: true;
+  readonly completes?: 'medium' | 'command' | 'file' | readonly string[];
+}
+
+export interface Example {
+  /** Without the program's name. */
+  readonly line: string;
+  readonly meaning: string;
+}
+
+export interface CommandSpec {
+  readonly name: string;
+  /** The command run where none is named. */
+  readonly unnamed?: true;
+  /** One phrase without a full stop, ASCII. */
+  readonly summary: string;
+  readonly operands: readonly OperandSpec[];
+  /** Beside those taken everywhere. */
+  readonly options: readonly OptionKey[];
+  readonly examples: readonly Example[];
+  readonly hidden?: true;
+}
+
+/** Option sets for rows to spread. */
+export const QUESTION_OPTIONS = [
+  'angle_rad',
+  'polarization',
+  'airWavelength',
+  'temperature_K',
+  'pressure_Pa',
+  'humidity',
+  'co2_ppm',
+  'salinity_g_per_kg',
+  'tolerances',
+  'extrapolate',
+  'catalog',
+] as const satisfies readonly OptionKey[];
+
+export const BEAM_OPTIONS = [
+  'power_W',
+  'beamDiameter_m',
+  'profile',
+  'irradiance_W_per_m2',
+  'field_V_per_m',
+] as const satisfies readonly OptionKey[];
+
+export const FORM_OPTIONS = ['json', 'csv', 'markdown', 'plain'] as const satisfies readonly OptionKey[];
+
+/** Options that start the full-screen program where no operand is given. */
+export const SCREEN_OPTIONS = [
+  'quiet',
+  'color',
+  'noColor',
+  'ascii',
+  'linear',
+  'catalog',
+  'noInput',
+] as const satisfies readonly OptionKey[];
+
+const MEDIUM =
+  'a key, name, alias, formula or glass code, any case; KEY:AXIS for a crystal axis; or numbers: n=1.5, n=1.5+0.02i, eps=9.8, eps=2.1,tand=0.0003, eps=4,sigma=0.01';
+
+export const COMMANDS = [
+  {
+    name: 'answer',
+    unnamed: true,
+    summary: 'what a wave does at the interface between two media',
+    operands: [
+      { name: 'FROM', meaning: `medium of incidence: ${MEDIUM}`, completes: 'medium' },
+      {
+        name: 'LAYER',
+        meaning: 'a layer between them, MEDIUM@THICKNESS: mgf2@100nm, n=1.38@qw',
+        optional: true,
+        many: true,
+        completes: 'medium',
+      },
+      { name: 'INTO', meaning: 'medium beyond', completes: 'medium' },
+      { name: 'WAVE', meaning: '633nm, 10.6um, 474THz, 10GHz, 1.96eV, 15800cm-1, d-line' },
+    ],
+    options: [...QUESTION_OPTIONS, ...BEAM_OPTIONS, ...FORM_OPTIONS, 'log', 'strict'],
+    examples: [
+      { line: 'air fused-silica 633nm', meaning: 'normal incidence, one answer as text' },
+      { line: 'air sapphire:o 1064nm --angle 45 --pol p', meaning: 'ordinary ray, p polarization' },
+      { line: 'water n=1.38+0.001i 474THz --json', meaning: 'a medium by its numbers, for a script' },
+      { line: 'vacuum eps=9.8,tand=0.0003 10GHz', meaning: 'a radio wave' },
+      { line: 'air znse 10.6um --power 30W --beam 6mm', meaning: 'fields and irradiance too' },
+    ],
+  },
+  {
+    name: 'help',
+    summary: 'help for the program or for one command',
+    operands: [{ name: 'COMMAND', meaning: 'the command to explain', optional: true, completes: 'command' }],
+    options: [],
+    examples: [{ line: 'help completion', meaning: 'help for one command' }],
+  },
+  {
+    name: 'completion',
+    summary: 'completions for a shell, to be sourced by it',
+    operands: [
+      { name: 'SHELL', meaning: 'bash, zsh or fish', optional: true, completes: ['bash', 'zsh', 'fish'] },
+    ],
+    options: ['names', 'catalog'],
+    examples: [
+      { line: 'completion bash > halfspace.bash', meaning: 'for bash; source the file in ~/.bashrc' },
+      { line: 'completion zsh > _halfspace', meaning: 'for zsh; put the file in a folder of fpath' },
+      { line: 'completion fish > halfspace.fish', meaning: 'for fish; put it in ~/.config/fish/completions' },
+    ],
+  },
+  {
+    name: 'man',
+    summary: 'the manual page, in roff',
+    operands: [],
+    options: [],
+    examples: [{ line: 'man | man -l -', meaning: 'read it' }],
+  },
+] as const satisfies readonly CommandSpec[];
+
+export type CommandName = (typeof COMMANDS)[number]['name'];
+
+export const COMMAND_NAMES: readonly CommandName[] = COMMANDS.map((command) => command.name);
+
+export const UNNAMED_COMMAND: CommandName = 'answer';
+
+export function isCommandName(text: string): text is CommandName {
+  return COMMAND_NAMES.some((name) => name === text);
+}
+
+export function commandSpec(name: CommandName): CommandSpec {
+  const found: CommandSpec | undefined = COMMANDS.find((command) => command.name === name);
+  if (!found) throw new RangeError(`no row for the command ${name}`);
+  return found;
+}
+
+/** The commands that are listed: all but the unnamed and the hidden ones. */
+export function namedCommands(): readonly CommandSpec[] {
+  const all: readonly CommandSpec[] = COMMANDS;
+  return all.filter((command) => !command.unnamed && !command.hidden);
+}
+
+/** Every option the command takes, in the order of the table of options. */
+export function optionsOf(name: CommandName): readonly OptionKey[] {
+  const own = commandSpec(name).options;
+  return OPTION_KEYS.filter((key) => optionSpec(key).everywhere === true || own.includes(key));
+}
+
+/** Commands that take the option. */
+export function commandsWith(key: OptionKey): readonly CommandName[] {
+  return COMMAND_NAMES.filter((name) => optionsOf(name).includes(key));
+}

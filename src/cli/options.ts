@@ -1,0 +1,272 @@
+/**
+ * The one table of options. A key is what the option's value is called in the program, unit included; `name` is what
+ * people type. To add an option: add its row, and its key to the rows of the commands that take it (command-table.ts).
+ */
+import { parseIncidence } from '../units/parse-angle.ts';
+import { choiceParser } from '../units/parse-choice.ts';
+import { parseCo2 } from '../units/parse-co2.ts';
+import { parseField } from '../units/parse-field.ts';
+import { parseFraction } from '../units/parse-fraction.ts';
+import { parseIrradiance } from '../units/parse-irradiance.ts';
+import { parseLength } from '../units/parse-length.ts';
+import { parsePower } from '../units/parse-power.ts';
+import { parsePressure } from '../units/parse-pressure.ts';
+import { parseSalinity } from '../units/parse-salinity.ts';
+import { parseTemperature } from '../units/parse-temperature.ts';
+import { parseTolerances } from '../units/parse-tolerance.ts';
+import { type Problem, problem } from '../units/problem.ts';
+import { choice, flag, type OptionSpec, type ValueOf, value } from './option-spec.ts';
+
+const POLARIZATIONS = ['s', 'p', 'unpolarized'] as const;
+const PROFILES = ['gaussian', 'flat'] as const;
+const COLOURS = ['auto', 'always', 'never'] as const;
+
+export const OPTIONS = {
+  angle_rad: value({
+    name: 'angle',
+    placeholder: 'ANGLE',
+    meaning: 'angle of incidence, from the surface normal; degrees, or with a unit: 0.78rad, 30mrad',
+    fallback: '0',
+    group: 'question',
+    parse: parseIncidence,
+  }),
+  polarization: choice({
+    name: 'pol',
+    choices: POLARIZATIONS,
+    meaning: 'polarization; unpolarized is the mean of s and p',
+    fallback: 'unpolarized',
+    group: 'question',
+    parse: choiceParser('a polarization', POLARIZATIONS),
+  }),
+  airWavelength: flag({
+    name: 'air-wavelength',
+    meaning: 'the WAVE given is a wavelength in standard air, not in vacuum',
+    group: 'question',
+  }),
+  temperature_K: value({
+    name: 'temperature',
+    placeholder: 'TEMPERATURE',
+    meaning: 'temperature of the media, such as 25C or 298.15K',
+    fallback: 'that of the recommended fit',
+    group: 'question',
+    parse: parseTemperature,
+  }),
+  pressure_Pa: value({
+    name: 'pressure',
+    placeholder: 'PRESSURE',
+    meaning: 'pressure of a gas, such as 101.325kPa, 1atm or 980hPa',
+    fallback: '101325Pa',
+    group: 'question',
+    parse: parsePressure,
+  }),
+  humidity: value({
+    name: 'humidity',
+    placeholder: 'FRACTION',
+    meaning: 'relative humidity of air, such as 50% or 0.5',
+    fallback: '0',
+    group: 'question',
+    parse: parseFraction,
+  }),
+  co2_ppm: value({
+    name: 'co2',
+    placeholder: 'CONTENT',
+    meaning: 'CO2 content of air in umol/mol (1e-6)',
+    fallback: '450',
+    group: 'question',
+    parse: parseCo2,
+  }),
+  salinity_g_per_kg: value({
+    name: 'salinity',
+    placeholder: 'SALINITY',
+    meaning: 'salt in sea water, in g/kg',
+    fallback: 'that of the recommended fit',
+    group: 'question',
+    parse: parseSalinity,
+  }),
+  tolerances: value({
+    name: 'tolerance',
+    placeholder: 'NAME=VALUE,...',
+    meaning:
+      'standard uncertainties of what is given: wave=1nm, angle=0.5deg, n=1e-4 (beyond the interface), n1=1e-4 (before it), thickness=5nm, temperature=0.5C',
+    group: 'question',
+    parse: parseTolerances,
+  }),
+  extrapolate: flag({
+    name: 'extrapolate',
+    meaning: "answer outside a fit's range too, with the caution",
+    group: 'question',
+  }),
+
+  power_W: value({
+    name: 'power',
+    placeholder: 'POWER',
+    meaning: 'power of the beam, such as 5mW or 10dBm',
+    group: 'beam',
+    parse: parsePower,
+    excludes: ['irradiance', 'field'],
+  }),
+  beamDiameter_m: value({
+    name: 'beam',
+    placeholder: 'DIAMETER',
+    meaning: 'beam diameter: 1/e^2 of the irradiance for a gaussian beam, full width for a flat one',
+    group: 'beam',
+    parse: parseLength,
+    needs: 'power',
+  }),
+  profile: choice({
+    name: 'profile',
+    choices: PROFILES,
+    meaning: 'profile of the beam; the irradiance stated is the one on the axis',
+    fallback: 'gaussian',
+    group: 'beam',
+    parse: choiceParser('a beam profile', PROFILES),
+    needs: 'beam',
+  }),
+  irradiance_W_per_m2: value({
+    name: 'irradiance',
+    placeholder: 'IRRADIANCE',
+    meaning: 'irradiance instead of power and diameter, such as 1kW/m2 or 5W/cm2',
+    group: 'beam',
+    parse: parseIrradiance,
+    excludes: ['power', 'field'],
+  }),
+  field_V_per_m: value({
+    name: 'field',
+    placeholder: 'FIELD',
+    meaning: 'peak electric field instead of power and diameter, such as 100V/m',
+    group: 'beam',
+    parse: parseField,
+    excludes: ['power', 'irradiance'],
+  }),
+
+  json: flag({
+    name: 'json',
+    meaning: 'one JSON document, SI units, full precision',
+    group: 'form',
+    excludes: ['csv', 'markdown', 'plain'],
+  }),
+  csv: flag({
+    name: 'csv',
+    meaning: 'comma-separated values with a header line',
+    group: 'form',
+    excludes: ['json', 'markdown', 'plain'],
+  }),
+  markdown: flag({
+    name: 'markdown',
+    meaning: 'a Markdown table',
+    group: 'form',
+    excludes: ['json', 'csv', 'plain'],
+  }),
+  plain: flag({
+    name: 'plain',
+    meaning: 'one quantity a line, never wrapped or cut',
+    group: 'form',
+    excludes: ['json', 'csv', 'markdown'],
+  }),
+
+  output: value({
+    name: 'output',
+    short: 'o',
+    placeholder: 'FILE',
+    meaning: 'write to FILE instead of standard output; - is standard output',
+    group: 'output',
+    everywhere: true,
+    completes: 'file',
+    parse: parsePath,
+  }),
+  log: flag({ name: 'log', meaning: 'add the answer to the logbook too', group: 'output' }),
+  quiet: flag({
+    name: 'quiet',
+    short: 'q',
+    meaning: 'no cautions or notes on standard error',
+    group: 'output',
+    everywhere: true,
+  }),
+  strict: flag({ name: 'strict', meaning: 'a caution makes the exit status 1', group: 'output' }),
+  color: choice({
+    name: 'color',
+    choices: COLOURS,
+    meaning: 'when to use colour',
+    fallback: 'auto',
+    group: 'output',
+    everywhere: true,
+    parse: choiceParser('a time for colour', COLOURS),
+    excludes: ['no-color'],
+  }),
+  noColor: flag({
+    name: 'no-color',
+    meaning: 'the same as --color=never',
+    group: 'output',
+    everywhere: true,
+    excludes: ['color'],
+  }),
+  ascii: flag({
+    name: 'ascii',
+    meaning: 'only printable ASCII: um, deg, +/-, lambda',
+    group: 'output',
+    everywhere: true,
+  }),
+  linear: flag({
+    name: 'linear',
+    meaning: 'plain lines in place of the picture, for screen readers',
+    group: 'output',
+    everywhere: true,
+  }),
+
+  catalog: value({
+    name: 'catalog',
+    placeholder: 'FOLDER',
+    meaning: 'folder with entries of your own, used beside the catalogue',
+    group: 'general',
+    completes: 'folder',
+    parse: parsePath,
+  }),
+  noInput: flag({
+    name: 'no-input',
+    meaning: 'ask nothing; fail where a question would be needed',
+    group: 'general',
+    everywhere: true,
+  }),
+  help: flag({ name: 'help', short: 'h', meaning: 'show this help', group: 'general', everywhere: true }),
+  version: flag({
+    name: 'version',
+    short: 'V',
+    meaning: 'show the versions of program and catalogue',
+    group: 'general',
+    everywhere: true,
+  }),
+
+  names: value({
+    name: 'names',
+    placeholder: 'PREFIX',
+    meaning: 'list the catalogue keys that begin so, one a line',
+    group: 'general',
+    hidden: true,
+    parse: (text: string) => text,
+  }),
+} as const satisfies Readonly<Record<string, OptionSpec>>;
+
+export type OptionKey = keyof typeof OPTIONS;
+
+/** Parsed values of the options given, by key; absent where not given. */
+export type OptionValues = { readonly [Key in OptionKey]?: ValueOf<(typeof OPTIONS)[Key]> };
+
+export const OPTION_KEYS = Object.keys(OPTIONS) as readonly OptionKey[];
+
+export function optionSpec(key: OptionKey): OptionSpec {
+  return OPTIONS[key];
+}
+
+export function optionKeyByName(name: string): OptionKey | undefined {
+  return OPTION_KEYS.find((key) => OPTIONS[key].name === name);
+}
+
+export function optionKeyByLetter(letter: string): OptionKey | undefined {
+  return OPTION_KEYS.find((key) => optionSpec(key).short === letter);
+}
+
+function parsePath(text: string): string | Problem {
+  return text === '' || text.includes('\0')
+    ? problem('empty', 'the name is empty or holds a null character', 'write a path such as answer.json')
+    : text;
+}
