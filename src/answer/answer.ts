@@ -54,11 +54,21 @@ export interface MediumAnswer {
   readonly n_uncertainty: number | null;
   /** Largest disagreement with published values, where no accuracy is stated: guides the digits shown. */
   readonly n_digitsGuide: number | null;
+  /** Of the printed formula, in `publishedReference`, as handbooks state it; 0.03 % below the absolute one for fits relative to air. */
   readonly groupIndex: number | null;
+  /** c/groupIndex. */
   readonly groupVelocity_m_per_s: number | null;
   readonly gvd_s2_per_m: number | null;
   readonly tod_s3_per_m: number | null;
-  readonly dispersion_per_m: number | null;
+  /** D = -(lambda/c) n''. */
+  readonly dispersion_s_per_m2: number | null;
+  /** The same relative to vacuum, the air converted exactly. */
+  readonly absolute: {
+    readonly groupIndex: number | null;
+    readonly groupVelocity_m_per_s: number | null;
+    readonly gvd_s2_per_m: number | null;
+    readonly tod_s3_per_m: number | null;
+  };
   /** Null where no wave advances (Re n = 0). */
   readonly wavelength_m: number | null;
   readonly phaseVelocity_m_per_s: number | null;

@@ -24,6 +24,7 @@ export interface MediumSide {
   readonly optics: Optics;
   /** n, k and derivatives by vacuum wavelength in um; zero derivatives for literal media. */
   readonly jet: IndexJet;
+  /** Relative to vacuum. */
   readonly groupIndex: number | null;
   /** Standard uncertainty of n by the fit alone; 0 where exact, null where not stated. */
   readonly accuracy: number | null;
@@ -62,7 +63,10 @@ function literalSide(literal: Parameters<typeof literalOptics>[0], text: string,
       key: null,
       name: text,
       axis: 'isotropic',
-      ...waveInMedium(optics, jet, dispersive ? 0 : 3, wave, true),
+      ...waveInMedium(
+        { optics, jet, formulaJet: jet, derivativeOrder: dispersive ? 0 : 3, absorptionKnown: true },
+        wave,
+      ),
       n_published: optics.n.re,
       publishedReference: 'vacuum',
       n_uncertainty: null,
@@ -84,18 +88,12 @@ function catalogueSide(medium: MediumAtWave, wave: FitWave, sourceOf: SourceOf):
   const { material, fit, jet, optics, used } = medium;
   const transparency = material.transparency_um;
   const exactVacuum = fit.accuracy_n === 0 && fit.parameters.model === 'constant';
-  const parts = waveInMedium(
-    optics,
-    jet,
-    medium.derivativeOrder,
-    wave,
-    medium.absorptionKnown || exactVacuum,
-  );
+  const parts = waveInMedium({ ...medium, absorptionKnown: medium.absorptionKnown || exactVacuum }, wave);
   return {
     name: material.name,
     optics,
     jet,
-    groupIndex: parts.groupIndex,
+    groupIndex: parts.absolute.groupIndex,
     accuracy: fit.accuracy_n ?? null,
     isLiteral: false,
     answer: {
@@ -143,46 +141,21 @@ function sourceLine(id: string, sourceOf: SourceOf): SourceLine {
   return { id, text: source ? sourceText(source) : id, doi: source?.DOI ?? null };
 }
 
-/**
- * What the wave is inside a medium.
- *   n_g = n - L n';  beta2 = L^3 n''/(2 pi c^2);  beta3 = -L^4 (3 n'' + L n''')/(4 pi^2 c^3);  D = -L n''/c
- * (Agrawal, Nonlinear Fiber Optics, 1.2.3); Z = Z0 mu/n; alpha = 4 pi k/L. Derivatives are by vacuum wavelength.
- */
-function waveInMedium(
-  optics: Optics,
-  jet: IndexJet,
-  derivativeOrder: number,
-  wave: FitWave,
-  absorptionKnown: boolean,
-): Pick<
+type Dispersion = Pick<
   MediumAnswer,
-  | 'n'
-  | 'k'
-  | 'groupIndex'
-  | 'groupVelocity_m_per_s'
-  | 'gvd_s2_per_m'
-  | 'tod_s3_per_m'
-  | 'dispersion_per_m'
-  | 'wavelength_m'
-  | 'phaseVelocity_m_per_s'
-  | 'relativePermittivity'
-  | 'relativePermeability'
-  | 'impedance_ohm'
-  | 'lossTangent'
-  | 'absorptionCoefficient_per_m'
-  | 'penetrationDepth_m'
-  | 'skinDepth_m'
-> {
-  const L_um = wave.vacuum_um;
+  'groupIndex' | 'groupVelocity_m_per_s' | 'gvd_s2_per_m' | 'tod_s3_per_m' | 'dispersion_s_per_m2'
+>;
+
+/**
+ * n_g = n - L n';  beta2 = L^3 n''/(2 pi c^2);  beta3 = -L^4 (3 n'' + L n''')/(4 pi^2 c^3);  D = -L n''/c
+ * (Agrawal, Nonlinear Fiber Optics, 1.2.3). Null from the order on whose derivative the fit does not carry.
+ */
+function dispersion(jet: IndexJet, derivativeOrder: number, L_um: number): Dispersion {
   const L_m = L_um * 1e-6;
-  const { n, eps, mu } = optics;
   const groupIndex = derivativeOrder >= 1 ? jet[N]! - L_um * jet[N + 1]! : null;
   const second_per_m2 = jet[N + 2]! * 1e12;
   const third_per_m3 = jet[N + 3]! * 1e18;
-  const alpha_per_m = (4 * Math.PI * n.im) / L_m;
   return {
-    n: n.re,
-    k: n.im,
     groupIndex,
     groupVelocity_m_per_s: groupIndex === null || groupIndex === 0 ? null : c / groupIndex,
     gvd_s2_per_m: derivativeOrder >= 2 ? clean((L_m ** 3 * second_per_m2) / (2 * Math.PI * c ** 2)) : null,
@@ -190,7 +163,47 @@ function waveInMedium(
       derivativeOrder >= 3
         ? clean((-(L_m ** 4) * (3 * second_per_m2 + L_m * third_per_m3)) / (4 * Math.PI ** 2 * c ** 3))
         : null,
-    dispersion_per_m: derivativeOrder >= 2 ? clean((-L_m * second_per_m2) / c) : null,
+    dispersion_s_per_m2: derivativeOrder >= 2 ? clean((-L_m * second_per_m2) / c) : null,
+  };
+}
+
+type WavePart = Dispersion &
+  Pick<
+    MediumAnswer,
+    | 'n'
+    | 'k'
+    | 'absolute'
+    | 'wavelength_m'
+    | 'phaseVelocity_m_per_s'
+    | 'relativePermittivity'
+    | 'relativePermeability'
+    | 'impedance_ohm'
+    | 'lossTangent'
+    | 'absorptionCoefficient_per_m'
+    | 'penetrationDepth_m'
+    | 'skinDepth_m'
+  >;
+
+interface WaveInput {
+  readonly optics: Optics;
+  readonly jet: IndexJet;
+  readonly formulaJet: IndexJet;
+  readonly derivativeOrder: number;
+  readonly absorptionKnown: boolean;
+}
+
+/** What the wave is inside a medium: Z = Z0 mu/n; alpha = 4 pi k/L. */
+function waveInMedium(input: WaveInput, wave: FitWave): WavePart {
+  const { optics, jet, formulaJet, derivativeOrder, absorptionKnown } = input;
+  const L_m = wave.vacuum_um * 1e-6;
+  const { n, eps, mu } = optics;
+  const alpha_per_m = (4 * Math.PI * n.im) / L_m;
+  const { dispersion_s_per_m2: _, ...absolute } = dispersion(jet, derivativeOrder, wave.vacuum_um);
+  return {
+    n: n.re,
+    k: n.im,
+    ...dispersion(formulaJet, derivativeOrder, wave.vacuum_um),
+    absolute,
     wavelength_m: n.re === 0 ? null : L_m / Math.abs(n.re),
     phaseVelocity_m_per_s: n.re === 0 ? null : c / n.re,
     relativePermittivity: eps,

@@ -41,6 +41,11 @@ export interface MediumAtWave {
   readonly optics: Optics;
   /** n, k and derivatives relative to vacuum, by vacuum wavelength in um. */
   readonly jet: IndexJet;
+  /**
+   * n and derivatives of the printed formula itself, in its own reference, taken at the vacuum wavelength: what published
+   * group indices and dispersions are computed from. The same as `jet` where the fit is relative to vacuum.
+   */
+  readonly formulaJet: IndexJet;
   /** Highest derivative that means something, 0 to 3. */
   readonly derivativeOrder: number;
   readonly nPublished: number;
@@ -104,6 +109,7 @@ export function mediumAtWave(
     inRange: choice.inRange,
     optics: opticsFromIndex({ re: jet[N]!, im: jet[K]! }, state.mu),
     jet,
+    formulaJet: state.formulaJet,
     derivativeOrder: state.derivativeOrder,
     nPublished: state.nPublished,
     absorptionKnown,
@@ -115,6 +121,7 @@ export function mediumAtWave(
 
 interface FitState {
   readonly jet: IndexJet;
+  readonly formulaJet: IndexJet;
   readonly mu: Complex;
   /** Highest derivative that means something, 0 to 3. */
   readonly derivativeOrder: number;
@@ -143,19 +150,27 @@ function evaluateFit(
 
   const warmTo_K = !takesTemperature && asked_K !== undefined && asked_K !== fit_K ? asked_K : undefined;
   const thermal = warmTo_K === undefined ? undefined : thermalForm(fit, material);
-  if (warmTo_K !== undefined && thermal && !describesAbsoluteIndex(thermal)) {
-    applyThermalForm(thermal, fit_K ?? warmTo_K, warmTo_K, L, own);
-  }
+  const warm = (wavelength_um: number, index: IndexJet, absolute: boolean): void => {
+    if (warmTo_K !== undefined && thermal && describesAbsoluteIndex(thermal) === absolute) {
+      applyThermalForm(thermal, fit_K ?? warmTo_K, warmTo_K, wavelength_um, index);
+    }
+  };
+  warm(L, own, false);
   let nPublished = own[N]!;
   let jet = own;
+  let formulaJet = own;
   if (fit.reference === 'air') {
     jet = new Float64Array(JET_LENGTH);
     toAbsolute(own, wave.vacuum_um, standardAirIndexJet(wave.vacuum_um), jet);
+    formulaJet = new Float64Array(JET_LENGTH);
+    bound.evaluate(wave.vacuum_um, formulaJet);
+    warm(wave.vacuum_um, formulaJet, false);
+    warm(wave.vacuum_um, formulaJet, true);
   }
   if (warmTo_K !== undefined && thermal) {
     if (describesAbsoluteIndex(thermal)) {
       const before = jet[N]!;
-      applyThermalForm(thermal, fit_K ?? warmTo_K, warmTo_K, wave.vacuum_um, jet);
+      warm(wave.vacuum_um, jet, true);
       nPublished += jet[N]! - before;
     }
     temperature_K = warmTo_K;
@@ -178,6 +193,7 @@ function evaluateFit(
   if (bound.permeability) bound.permeability(L, mu);
   return {
     jet,
+    formulaJet,
     mu: bound.permeability ? { re: mu[0]!, im: mu[1]! } : ONE,
     derivativeOrder: bound.hasDerivative ? bound.derivativeOrder : 0,
     nPublished,

@@ -40,17 +40,18 @@ export function mediumRows(
   const groupIndex = medium.groupIndex;
   // A fit's slope is known less well than its value: one place less.
   const slope = precisionFor(groupIndex, known.uncertainty * 10, EXACT_DIGITS);
-  rows.add('groupIndex', 'n_g', 'group index', formatNumber(groupIndex, slope, style));
+  const reference = medium.fit && medium.publishedReference === 'air' ? ', rel. to air' : '';
+  rows.add('groupIndex', 'n_g', `group index${reference}`, formatNumber(groupIndex, slope, style));
   const v = medium.phaseVelocity_m_per_s;
   rows.add('phaseVelocity_m_per_s', 'v', 'phase velocity', ofLight(v, derived(v), style));
-  const vg = medium.groupVelocity_m_per_s;
+  const vg = medium.absolute.groupVelocity_m_per_s;
   const vgDigits = precisionFor(vg, Math.abs(vg ?? 0) * share * 10, EXACT_DIGITS);
   rows.add('groupVelocity_m_per_s', 'v_g', 'group velocity', ofLight(vg, vgDigits, style));
   rows.add(
     'gvd_s2_per_m',
     'GVD',
     'group-velocity dispersion',
-    formatQuantity(medium.gvd_s2_per_m, FS2_PER_MM, { significant: 4 }, { style }),
+    formatQuantity(medium.gvd_s2_per_m, FS2_PER_MM, { significant: 3 }, { style }),
   );
   rows.add('absorption', 'α', 'absorption coefficient', absorptionText(medium, style));
   if (medium.penetrationDepth_m !== null) {

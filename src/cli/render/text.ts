@@ -1,0 +1,122 @@
+/**
+ * The answer as text for people, within 72 columns: the question as understood, the two media side by side, the interface,
+ * the beam, cautions, sources. No escape codes.
+ */
+import type { Answer, Caution, MediumAnswer } from '../../answer/answer.ts';
+import { beamRows, waveEnergyRows } from '../../present/energy-rows.ts';
+import { interfaceRows } from '../../present/interface-rows.ts';
+import { mediumRows } from '../../present/medium-rows.ts';
+import { mediumTitle, questionLine, waveAliases } from '../../present/question-line.ts';
+import type { PresentStyle, Shown } from '../../present/shown.ts';
+import { conditionsText, fitLine, GRADE_WORDS } from '../../present/source-lines.ts';
+import { wrap } from '../../present/wrap.ts';
+import { toAscii } from '../../units/to-ascii.ts';
+
+const WIDTH = 72;
+const SYMBOL = 6;
+const LABEL = 26;
+const VALUE = 20;
+
+export function renderText(answer: Answer, style: PresentStyle): string {
+  const lines = [
+    ...wrap(questionLine(answer, style), WIDTH, '  '),
+    ...wrap(waveAliases(answer, style).join(', '), WIDTH),
+    '',
+    ...mediaTable(answer, style),
+    '',
+    'Interface',
+    ...interfaceRows(answer, style).map(oneValue),
+    ...beamSection(answer, style),
+    ...cautionSection(answer.cautions),
+    ...sourceSection(answer, style),
+  ];
+  const text = lines.map((l) => l.trimEnd()).join('\n');
+  return `${style.ascii ? text.split('\n').map(toAscii).join('\n') : text}\n`;
+}
+
+const length = (text: string): number => [...text].length;
+const pad = (text: string, width: number): string => text + ' '.repeat(Math.max(0, width - length(text)));
+
+function mediaTable(answer: Answer, style: PresentStyle): readonly string[] {
+  const lambda = answer.wave.vacuumWavelength_m;
+  const left = [
+    ...mediumRows(answer.from, lambda, style),
+    ...waveEnergyRows(answer.energy?.incident ?? null, style),
+  ];
+  const right = [
+    ...mediumRows(answer.into, lambda, style),
+    ...waveEnergyRows(answer.energy?.transmitted ?? null, style),
+  ];
+  return [
+    ...sideBySide(title(answer.from, style), title(answer.into, style)),
+    ...paired(left, right).map(([symbol, label, a, b]) => {
+      const head = pad(symbol, SYMBOL) + pad(label, LABEL);
+      const row = `${head}${pad(a, VALUE)}${length(a) >= VALUE ? ' ' : ''}${b}`;
+      // A long complex value takes a line of its own rather than losing digits.
+      return length(row) <= WIDTH ? row : `${head}${a}\n${' '.repeat(SYMBOL + LABEL)}${b}`;
+    }),
+  ];
+}
+
+function title(medium: MediumAnswer, style: PresentStyle): string {
+  const conditions = conditionsText(medium, style);
+  return conditions === '' ? mediumTitle(medium) : `${mediumTitle(medium)} (${conditions})`;
+}
+
+function sideBySide(a: string, b: string): readonly string[] {
+  const left = wrap(a, VALUE - 1);
+  const right = wrap(b, VALUE - 1);
+  const count = Math.max(left.length, right.length);
+  return Array.from(
+    { length: count },
+    (_, i) => ' '.repeat(SYMBOL + LABEL) + pad(left[i] ?? '', VALUE) + (right[i] ?? ''),
+  );
+}
+
+/** Rows of both media under one name, in the order of whichever has more; a dash where one has none. */
+function paired(
+  left: readonly Shown[],
+  right: readonly Shown[],
+): readonly (readonly [string, string, string, string])[] {
+  const order = [...right];
+  for (const [i, row] of left.entries()) {
+    if (order.some((o) => o.id === row.id)) continue;
+    const before = left[i - 1];
+    const at = before ? order.findIndex((o) => o.id === before.id) + 1 : 0;
+    order.splice(at, 0, row);
+  }
+  return order.map((row) => [
+    row.symbol,
+    row.label,
+    left.find((l) => l.id === row.id)?.text ?? '-',
+    right.find((r) => r.id === row.id)?.text ?? '-',
+  ]);
+}
+
+const oneValue = (row: Shown): string => `${pad(`  ${row.symbol}`, 18)}${pad(row.text, 20)}${row.label}`;
+
+function beamSection(answer: Answer, style: PresentStyle): readonly string[] {
+  const rows = beamRows(answer, style);
+  return rows.length === 0 ? [] : ['', 'Beam', ...rows.map(oneValue)];
+}
+
+const MARK: Readonly<Record<Caution['level'], string>> = { hazard: '!! ', caution: '!  ', note: '-  ' };
+
+export function cautionSection(cautions: readonly Caution[]): readonly string[] {
+  if (cautions.length === 0) return [];
+  return ['', 'Cautions', ...cautions.flatMap((c) => wrap(`${MARK[c.level]}${c.text}`, WIDTH, '   '))];
+}
+
+function sourceSection(answer: Answer, style: PresentStyle): readonly string[] {
+  const lines = [answer.from, answer.into].flatMap((m) => fitLine(m, style));
+  const unique = lines.filter((l, i) => lines.indexOf(l) === i);
+  if (unique.length === 0) return [];
+  const grades = [answer.from, answer.into].flatMap((m) => (m.fit ? [m.fit.grade] : []));
+  const legend = [...new Set(grades)].sort().map((g) => `grade ${g}: ${GRADE_WORDS[g]}`);
+  return [
+    '',
+    'Sources',
+    ...unique.flatMap((l) => wrap(l, WIDTH, '  ')),
+    ...wrap(`Parentheses: standard uncertainty in the last digits. ${legend.join('; ')}.`, WIDTH, '  '),
+  ];
+}
