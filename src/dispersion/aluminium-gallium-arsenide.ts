@@ -8,9 +8,9 @@
  * L is the vacuum wavelength in um, T in K. Source: S. Gehrsitz, F. K. Reinhart, C. Gourgon, N. Herres, A. Vonlanthen,
  * H. Sigg, J. Appl. Phys. 87, 7825 (2000). Special case: at 0 K the gap is EG0, the limit of the formula.
  */
+import { polynomial } from '../num/polynomial.ts';
 import type { BoundModel, Conditions } from './evaluator.ts';
 import type { AluminiumGalliumArsenideParameters } from './parameters.ts';
-import { controlled } from './parametric-sellmeier.ts';
 import { boundSquareForm } from './sellmeier.ts';
 
 /** energy (1 - coth(energy/(2 k T))) = -2 energy/(exp(energy/(k T)) - 1). */
@@ -24,15 +24,15 @@ export function bindAluminiumGalliumArsenide(
 ): BoundModel {
   const T = conditions.temperature_K ?? p.default_K;
   const { x } = p;
-  const withoutConstant = (c: readonly number[]): number => x * controlled(c, x);
+  const withoutConstant = (c: readonly number[]): number => x * polynomial(c, x);
   const kT = p.k_eV_per_K * T;
   const [gap, s1, w1, s2, w2] = p.EG;
   const gap_eV = gap + s1 * phonons(w1, kT) + s2 * phonons(w2, kT);
   const E0 = (gap_eV / p.eV_um + withoutConstant(p.E0_x)) ** 2;
-  const E1 = controlled(p.E1_T, T) + withoutConstant(p.E1_x);
+  const E1 = polynomial(p.E1_T, T) + withoutConstant(p.E1_x);
   const resonances: [number, number][] = [
-    [1 / controlled(p.invC0_x, x), E0],
-    [controlled(p.C1_x, x), E1],
+    [1 / polynomial(p.invC0_x, x), E0],
+    [polynomial(p.C1_x, x), E1],
     [(1 - x) * p.R_GaAs[0], p.R_GaAs[1]],
     [x * p.R_AlAs[0], p.R_AlAs[1]],
   ];
@@ -43,7 +43,7 @@ export function bindAluminiumGalliumArsenide(
   });
   return {
     ...boundSquareForm({
-      offset: controlled(p.A_T, T) + withoutConstant(p.A_x),
+      offset: polynomial(p.A_T, T) + withoutConstant(p.A_x),
       poles: Float64Array.from(poles),
       rising: new Float64Array(0),
       falling: new Float64Array(0),

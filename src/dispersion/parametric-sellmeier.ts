@@ -9,6 +9,7 @@
  * for mixtures; the coefficients' source is the fit's.
  * Special case: binding fixes X, so that evaluation is that of an ordinary Sellmeier.
  */
+import { polynomial } from '../num/polynomial.ts';
 import type { BoundModel, ConditionName, Conditions } from './evaluator.ts';
 import type { Controlled, ControlVariable, ParametricSellmeierParameters, Pole } from './parameters.ts';
 import { bindSellmeier } from './sellmeier.ts';
@@ -20,9 +21,7 @@ export const controlCondition = (control: ControlVariable): ConditionName =>
 export function controlled(c: Controlled, X: number): number {
   if (typeof c === 'number') return c;
   if ('at0' in c) return c.at0 + X * (c.at1 - c.at0);
-  let value = 0;
-  for (let i = c.length - 1; i >= 0; i--) value = value * X + c[i]!;
-  return value;
+  return polynomial(c, X);
 }
 
 function state(control: ControlVariable, conditions: Conditions): { X: number; used: Conditions } {

@@ -9,6 +9,7 @@
  * S in g/kg, t in C. Source: T. Meissner, F. J. Wentz, IEEE Trans. Geosci. Remote Sens. 42, 1836 (2004); conductivity after
  * A. Stogryn et al. (1995).
  */
+import { polynomial } from '../num/polynomial.ts';
 import type { WaterRelaxationParameters } from './parameters.ts';
 
 type Salt = NonNullable<Extract<WaterRelaxationParameters, { form: 'meissner-wentz' }>['salt']>;
@@ -22,8 +23,6 @@ export interface SalineState {
   readonly f2_GHz: number;
   readonly sigma_S_per_m: number;
 }
-
-const polynomial = (c: readonly number[], x: number): number => c.reduceRight((sum, ci) => sum * x + ci, 0);
 
 export function saltFactors(salt: Salt, fresh: SalineState, t: number, S: number): SalineState {
   const b = (i: number): number => salt.b[i]!;

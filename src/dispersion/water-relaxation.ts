@@ -14,10 +14,10 @@
  */
 import * as C from '../num/complex-jet.ts';
 import * as J from '../num/jet.ts';
+import { polynomial } from '../num/polynomial.ts';
 import type { BoundModel, Conditions } from './evaluator.ts';
 import { conduction } from './ionic-conduction.ts';
 import type { WaterRelaxationParameters } from './parameters.ts';
-import { controlled as polynomial } from './parametric-sellmeier.ts';
 import { type SalineState, saltFactors } from './sea-salt.ts';
 import { frequency_Hz } from './spectral-variable.ts';
 import { writePermittivity } from './write-index.ts';
@@ -111,7 +111,7 @@ function twoRelaxations({ es, e1, ei, f1_GHz, f2_GHz, sigma_S_per_m }: SalineSta
 }
 
 function meissnerWentzState(p: Form<'meissner-wentz'>, t: number, S: number): WaterState {
-  const a = p.a as readonly number[] & { readonly length: 11 };
+  const { a } = p;
   const fresh: SalineState = {
     es: (p.es[0] + p.es[1] * t) / (p.es[2] + t),
     e1: a[0]! + (a[1]! + a[2]! * t) * t,
