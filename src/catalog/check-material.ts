@@ -6,6 +6,7 @@ import { JET_LENGTH, K, N } from '../dispersion/evaluator.ts';
 import { bindModel } from '../dispersion/registry.ts';
 import { parameterFaults } from './check-parameters.ts';
 import type { Fault } from './check-shape.ts';
+import { QUANTITIES, STATES } from './fit-optics.ts';
 import type { Fit, Material } from './types.ts';
 
 /** @param hasSource whether the bibliography has an item of this id. */
@@ -28,14 +29,16 @@ function* materialFaults(material: Material, hasSource: (id: string) => boolean)
         remedy: 'choose another',
       };
     seen.add(id);
-    if (!hasSource(fit.source))
-      yield {
-        path: `${path}.source`,
-        message: `"${fit.source}" is not in the bibliography`,
-        remedy: 'add the item or correct the id',
-      };
+    for (const [place, id] of sourcesOf(fit))
+      if (!hasSource(id))
+        yield {
+          path: `${path}.${place}`,
+          message: `"${id}" is not in the bibliography`,
+          remedy: 'add the item or correct the id',
+        };
     yield* rangeFaults(fit.range_um, `${path}.range_um`);
     yield* rangeFaults(fit.confirmedRange_um, `${path}.confirmedRange_um`);
+    yield* rangeFaults(fit.recommendedRange_um, `${path}.recommendedRange_um`);
     yield* checkRowFaults(fit, path);
     yield* thermalFaults(fit, path);
     const inner = parameterFaults(fit.parameters, `${path}.parameters`);
@@ -43,6 +46,11 @@ function* materialFaults(material: Material, hasSource: (id: string) => boolean)
     if (inner.length === 0) yield* evaluationFaults(fit, path);
   }
 }
+
+const sourcesOf = (fit: Fit): readonly (readonly [string, string])[] => [
+  ['source', fit.source],
+  ...(fit.furtherSources ?? []).map((id, i) => [`furtherSources[${i}]`, id] as const),
+];
 
 function* rangeFaults(range: readonly [number, number] | undefined, path: string): Generator<Fault> {
   if (range && range[0] > range[1])
@@ -54,7 +62,16 @@ function* rangeFaults(range: readonly [number, number] | undefined, path: string
 }
 
 function* checkRowFaults(fit: Fit, path: string): Generator<Fault> {
-  for (const [g, group] of fit.checks.entries())
+  for (const [g, group] of fit.checks.entries()) {
+    for (const [c, name] of group.columns.entries()) {
+      const known = Object.hasOwn(QUANTITIES, name.replace(/^tolerance_/, '')) || STATES.has(name);
+      if (!known && name !== 'wavelength_um')
+        yield {
+          path: `${path}.checks[${g}].columns[${c}]`,
+          message: `is "${name}", which cannot be recomputed`,
+          remedy: `known are wavelength_um, ${Object.keys(QUANTITIES).join(', ')}, each with its tolerance_, and states`,
+        };
+    }
     for (const [r, row] of group.rows.entries())
       if (row.length !== group.columns.length)
         yield {
@@ -62,6 +79,7 @@ function* checkRowFaults(fit: Fit, path: string): Generator<Fault> {
           message: `has ${row.length} values`,
           remedy: `must have ${group.columns.length}, one a column`,
         };
+  }
 }
 
 function* thermalFaults(fit: Fit, path: string): Generator<Fault> {

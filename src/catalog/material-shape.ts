@@ -102,7 +102,22 @@ const fitExtras = {
   confirmedBy: text(),
   film: record({ process: text() }, { spread_n: notNegative }),
   contradictedBy: list(anything),
+  recommendedRange_um: range,
+  estimateBetweenBands: yesNo,
+  furtherSources: list(text(), 1),
+  abbe: list(
+    record({ quantity: oneOf('Vd', 'Ve', 'VD'), published: positive, tolerance: positive, source: text() }),
+    1,
+  ),
 };
+
+const compositeCheck = record({
+  quantity: oneOf('mean-index', 'optic-angle'),
+  source: text(),
+  recalled: yesNo,
+  columns: list(text(), 3, 3),
+  rows: list(list(number(), 3, 3), 1),
+});
 
 const absorptionBasis = { wavelength_um: positive, source: text() };
 const absorption: Shape = {
@@ -145,6 +160,7 @@ const materialExtras = {
   transparencyBasis: text(),
   absorption: list(absorption),
   reflectanceTables: list(anything),
+  compositeChecks: list(compositeCheck, 1),
   bandGap: anything,
   handling,
   factsSource: text(),

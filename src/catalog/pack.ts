@@ -12,10 +12,11 @@
  * "\t" finds a line. Offsets and lengths are bytes. Used at build time and by tests, never by the running program.
  */
 import { createHash } from 'node:crypto';
+import { type CheckedValue, checkValues } from './check-values.ts';
 import { axesOf } from './choose-fit.ts';
 import { spellingsOf } from './names.ts';
 import { AXIS_LETTERS, MAGIC, type PackedHeader } from './packed-header.ts';
-import type { CheckGroup, Material, Source } from './types.ts';
+import type { AbbeNumber, CheckGroup, CompositeCheck, Fit, Material, Source } from './types.ts';
 
 export interface CatalogueSources {
   readonly version: string;
@@ -25,10 +26,12 @@ export interface CatalogueSources {
   readonly sources: readonly Source[];
 }
 
-/** Check values of one material as stored: by "axis/fit id". */
+/** Check values of one material as stored; those of a fit under "axis/fit id". */
 export interface MaterialChecks {
   readonly key: string;
   readonly checks: Readonly<Record<string, readonly CheckGroup[]>>;
+  readonly abbe?: Readonly<Record<string, readonly AbbeNumber[]>>;
+  readonly composite?: readonly CompositeCheck[];
 }
 
 export interface PackedCatalogue {
@@ -61,7 +64,7 @@ export function packCatalogue(input: CatalogueSources): PackedCatalogue {
   const entryLines = materials.map((m) =>
     line([
       m.key,
-      ...place(withoutChecks(m)),
+      ...place(forAnswers(m)),
       axesOf(m)
         .map((axis) => AXIS_LETTERS[axis])
         .join(''),
@@ -129,13 +132,52 @@ export function canonicalJson(value: unknown): string {
 }
 
 function checksOf(material: Material): MaterialChecks {
-  const checks: Record<string, readonly CheckGroup[]> = {};
-  for (const fit of material.fits) if (fit.checks.length > 0) checks[`${fit.axis}/${fit.id}`] = fit.checks;
-  return { key: material.key, checks };
+  const byFit = <T>(of: (fit: Fit) => readonly T[] | undefined): Record<string, readonly T[]> =>
+    Object.fromEntries(
+      material.fits.flatMap((fit) => {
+        const values = of(fit) ?? [];
+        return values.length > 0 ? [[`${fit.axis}/${fit.id}`, values]] : [];
+      }),
+    );
+  const abbe = byFit((fit) => fit.abbe);
+  return {
+    key: material.key,
+    checks: byFit((fit) => fit.checks),
+    ...(Object.keys(abbe).length > 0 ? { abbe } : {}),
+    ...(material.compositeChecks ? { composite: material.compositeChecks } : {}),
+  };
 }
 
-function withoutChecks(material: Material): Material {
-  return { ...material, fits: material.fits.map((fit) => ({ ...fit, checks: [] })) };
+/** The record as an answer needs it: without check values, and with what they say about the digits of each fit. */
+function forAnswers(material: Material): Material {
+  const { compositeChecks: _, ...rest } = material;
+  const values = checkValues(material);
+  const fits = material.fits.map((fit) => {
+    const { abbe: __, ...bare } = fit;
+    const guide = fit.accuracy_n === undefined ? digitsGuide_n(fit, values) : undefined;
+    return { ...bare, checks: [], ...(guide === undefined ? {} : { digitsGuide_n: guide }) };
+  });
+  return { ...rest, fits };
+}
+
+/**
+ * The largest difference between the fit and the values of n it is tested against, and not less than half a unit of the last
+ * digit of the most finely printed one: agreement with a coarse value does not make a fit fine.
+ */
+function digitsGuide_n(fit: Fit, values: readonly CheckedValue[]): number | undefined {
+  const mine = values.filter(
+    (v) => v.quantity === 'n' && v.fit === fit.id && v.axis === fit.axis && v.tolerance !== undefined,
+  );
+  const differences = mine.map((v) => Math.abs(v.computed - v.published)).filter(Number.isFinite);
+  if (differences.length === 0) return undefined;
+  const printed = Math.min(...mine.map((v) => halfUnit(v.published)));
+  return Number(Math.max(printed, ...differences).toPrecision(3));
+}
+
+/** Half a unit of the last decimal place that a number is written with. */
+function halfUnit(value: number): number {
+  const decimals = /\.(\d+)$/.exec(value.toString())?.[1]?.length ?? 0;
+  return 0.5 * 10 ** -decimals;
 }
 
 const keyOf = (material: Material): string => material.key;

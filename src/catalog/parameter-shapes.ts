@@ -35,7 +35,7 @@ const powerTerm = record({ c: any, power: any });
 const controlled = either(any, polynomial, record({ at0: any, at1: any }));
 const control = tagged('kind', {
   'temperature-K': record({ kind: text(), default_K: positive }),
-  'temperature-K-squared': record({ kind: text(), reference_K: positive, default_K: positive }),
+  'temperature-K-squared': record({ kind: text(), reference_K: number({ min: 0 }), default_K: positive }),
   'temperature-product': record({ kind: text(), minus_C: any, plus_C: any, default_K: positive }),
   composition: record({ kind: text(), default: number({ min: 0, max: 1 }), of: text() }),
 });
