@@ -95,6 +95,25 @@ describe('thermal forms', () => {
     );
   });
 
+  it('of glass makers count from their own reference, whatever the temperature of the fit', () => {
+    const plain = new Float64Array(JET_LENGTH);
+    bindModel(BK7, {}).evaluate(0.5, plain);
+    const n = plain[0]!;
+    const change = (t: number): number => {
+      const dT = t - 20;
+      const fixed = 1.86e-6 * dT + 1.31e-8 * dT ** 2 - 1.37e-11 * dT ** 3;
+      const resonant = (4.34e-7 * dT + 6.27e-10 * dT ** 2) / (0.5 ** 2 - 0.17 ** 2);
+      return ((n * n - 1) / (2 * n)) * (fixed + resonant);
+    };
+    for (const [from, to] of [
+      [20, 140],
+      [22, -80],
+      [25, 120],
+      [-30, 90],
+    ] as const)
+      expect(warmed(BK7_THERMAL, from, to, 0.5)[0]! - n).toBeCloseTo(change(to) - change(from), 14);
+  });
+
   it('gallium arsenide: dn/dT 2.3e-4 per K at 1.55 um, 2.0e-4 at 10.6 um (Skauli et al. 2003)', () => {
     for (const [um, expected] of [
       [1.55, 2.3e-4],
