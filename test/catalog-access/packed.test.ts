@@ -2,7 +2,7 @@ import fc from 'fast-check';
 import { describe, expect, it, vi } from 'vitest';
 import { canonicalJson, contentHash, type MaterialChecks, packCatalogue } from '../../src/catalog/pack.ts';
 import { openPacked } from '../../src/catalog/packed.ts';
-import { packedSample, sampleMaterial, sampleMaterials, sampleSource } from './sample.ts';
+import { packedSample, sampleFit, sampleMaterial, sampleMaterials, sampleSource } from './sample.ts';
 
 const input = { version: '3.1', date: '2026-01-02', materials: sampleMaterials, sources: [sampleSource] };
 
@@ -69,6 +69,40 @@ describe('the packed file', () => {
     expect(() =>
       packCatalogue({ ...input, materials: [sampleMaterial({ key: 'a', name: 'x\ty' })] }),
     ).toThrow(/"a"/);
+  });
+});
+
+describe('the digits guide', () => {
+  const guide = (
+    rows: readonly (readonly [number, number, number])[],
+    accuracy_n?: number,
+  ): number | undefined => {
+    const { accuracy_n: _, ...bare } = sampleFit();
+    const columns = ['wavelength_um', 'n', 'tolerance_n'];
+    const check = { source: 's', recalled: false, independent: true, columns, rows };
+    const fit = { ...bare, checks: [check], ...(accuracy_n === undefined ? {} : { accuracy_n }) };
+    const packed = packCatalogue({ ...input, materials: [sampleMaterial({ key: 'a', fits: [fit] })] });
+    return openPacked(packed.catalogue).material('a')?.fits[0]?.digitsGuide_n;
+  };
+  it('is the largest difference from the values the fit is tested against', () => {
+    expect(
+      guide([
+        [0.5, 1.5001, 1e-3],
+        [0.6, 1.5003, 1e-3],
+      ]),
+    ).toBe(0.0003);
+  });
+  it('is no finer than the finest of those values is printed', () => {
+    expect(
+      guide([
+        [0.5, 1.5, 1e-3],
+        [0.6, 1.5, 1e-3],
+      ]),
+    ).toBe(0.05);
+  });
+  it('is absent where the source states the accuracy, or where nothing is tested', () => {
+    expect(guide([[0.5, 1.5001, 1e-3]], 1e-5)).toBeUndefined();
+    expect(guide([])).toBeUndefined();
   });
 });
 

@@ -21,6 +21,7 @@ export function sampleFit(axis: Axis = 'isotropic', id = 'doe-1999'): Fit {
     parameters: { model: 'constant', n: 1.5 },
     range_um: [0.3, 2],
     reference: 'air',
+    accuracy_n: 1e-5,
     source: 'doe-1999',
     grade: 'B',
     recalled: false,
