@@ -46,7 +46,7 @@ const WORDING: Readonly<Record<CautionCode, Wording>> = {
   ],
   toxic: ['hazard', (d, s) => `${s}: ${d['hazard']}; follow the safety data sheet and local rules`],
   'hazardous-material': [
-    'hazard',
+    'caution',
     (d, s) => `${s}: ${d['hazard']}; follow the safety data sheet and local rules`,
   ],
   'recalled-data': [

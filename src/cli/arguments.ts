@@ -21,9 +21,9 @@ import { type OptionKey, type OptionValues, optionKeyByName, optionSpec } from '
 import { type GivenOption, readOptions } from './read-options.ts';
 import type { UsageCode, UsageError } from './usage-error.ts';
 
-/** A command to run. */
+/** A command to run; `help` is answered by its own kind of result. */
 export interface Invocation {
-  readonly command: CommandName;
+  readonly command: Exclude<CommandName, 'help'>;
   readonly operands: readonly string[];
   readonly options: OptionValues;
   /** The options as typed, in order, for the line that reproduces the answer. */
@@ -62,7 +62,7 @@ export function parseArguments(argv: readonly string[]): ParsedArguments {
   if (screen) return { kind: 'screen', options: options.values };
 
   const operands = named === undefined ? read.operands : read.operands.slice(1);
-  if (named === 'help') return helpTopic(operands, failed);
+  if (command === 'help') return helpTopic(operands, failed);
   const arity = checkOperands(operands, command, named);
   if (arity) return failed(arity);
   return { kind: 'run', invocation: { command, operands, options: options.values, given: read.given } };

@@ -1,19 +1,18 @@
 /** Where each command's code is; loaded only when it runs, so that one command never pays for another's imports. */
 import type { Invocation } from './arguments.ts';
-import type { CommandIo } from './command-io.ts';
-import type { CommandName } from './command-table.ts';
+import type { Command } from './context.ts';
 
-export interface CommandModule {
-  /** Resolves to the exit status. */
-  readonly run: (invocation: Invocation, io: CommandIo) => number | Promise<number>;
+interface CommandModule {
+  readonly run: Command;
 }
 
-const LOADERS: Readonly<Partial<Record<CommandName, () => Promise<CommandModule>>>> = {
+const LOADERS: Readonly<Record<Invocation['command'], () => Promise<CommandModule>>> = {
+  answer: () => import('./commands/answer.ts'),
   completion: () => import('./commands/completion.ts'),
   man: () => import('./commands/man.ts'),
 };
 
-/** Undefined for the commands that the caller answers itself (help). */
-export function loadCommand(name: CommandName): Promise<CommandModule> | undefined {
-  return LOADERS[name]?.();
+export async function loadCommand(name: Invocation['command']): Promise<Command> {
+  const module = await LOADERS[name]();
+  return module.run;
 }

@@ -22,11 +22,10 @@ const FILES: readonly (readonly [string, string])[] = [
 const STANDARDS =
   'Options follow the utility syntax guidelines of POSIX.1-2017 (XBD 12.2), with long options. Units and their writing: SI Brochure, 9th edition; quantities and symbols: ISO 80000-6 and -7; uncertainty: JCGM 100:2008 (GUM); reference lines: ISO 7944; time stamps: RFC 3339; folders: XDG Base Directory Specification.';
 
-/** `date`: day of the release, ISO 8601. */
-export function manPage(program: { readonly version: string; readonly date: string }): string {
+export function manPage(version: string): string {
   const commands = namedCommands();
   const answer = commandSpec(UNNAMED_COMMAND);
-  const title = ['HALFSPACE', '1', program.date, `halfspace ${program.version}`, 'User Commands'];
+  const title = ['HALFSPACE', '1', '', `halfspace ${version}`, 'User Commands'];
   const lines = [
     `.TH ${title.map(roffArgument).join(' ')}`,
     '.SH NAME',

@@ -96,7 +96,13 @@ export function mediumAtWave(
   if (!absorptionKnown && jet[N]! > 0) {
     absorptionKnown = bindAbsorption(material.absorption)(wave.vacuum_um, jet);
   }
-  const second = secondOpinion(choice.others, material, wave, conditions, jet[N]!);
+  const second = secondOpinion(
+    choice.others,
+    material,
+    wave,
+    { ...conditions, ...sharedState(state.used) },
+    jet[N]!,
+  );
   noteFit(notes, material, fit, theAxis, choice.inRange, wave, axis);
   noteAbsorption(notes, material, fit, wave, jet, absorptionKnown);
   noteDisagreement(notes, fit, second, jet[N]!);
@@ -244,6 +250,13 @@ function givesAbsorption(fit: Fit, wave: FitWave, conditions: Conditions): boole
   return jet[K]! > ABSORBING * jet[N]!;
 }
 
+/** A second opinion holds for the same state of a fluid: the one the answering fit used. */
+function sharedState(used: Conditions): Conditions {
+  return Object.fromEntries(
+    Object.entries(used).filter(([name, value]) => name !== 'composition' && value !== undefined),
+  );
+}
+
 function secondOpinion(
   others: readonly Fit[],
   material: Material,
@@ -286,7 +299,9 @@ function noteFit(
       },
     });
   }
-  if (fit.grade === 'C') notes.push({ code: 'recalled-data', details: {} });
+  const exact = fit.accuracy_n === 0;
+  if (fit.grade === 'C' && !exact && !fit.estimateBetweenBands)
+    notes.push({ code: 'recalled-data', details: {} });
   if (fit.accuracy_n === undefined) notes.push({ code: 'accuracy-not-stated', details: {} });
   if (fit.film) {
     notes.push({
@@ -316,10 +331,11 @@ function noteAbsorption(
       notes.push({ code: 'absorbs-here', details: { depth_m } });
     return;
   }
+  if (fit.estimateBetweenBands) return;
   const t = material.transparency_um;
   if (t && (wave.vacuum_um < t[0] || wave.vacuum_um > t[1])) {
     notes.push({ code: 'absorbs-here', details: { range: rangeText(t) } });
-  } else notes.push({ code: 'absorption-not-known', details: {} });
+  } else if (material.class !== 'gas') notes.push({ code: 'absorption-not-known', details: {} });
 }
 
 function noteDisagreement(notes: CautionNote[], fit: Fit, second: SecondOpinion | null, n: number): void {
@@ -332,7 +348,7 @@ function noteDisagreement(notes: CautionNote[], fit: Fit, second: SecondOpinion 
 }
 
 const TOXIC =
-  /toxic|poison|carcino|harmful|lead |lead-|arsen|cadmium|selen|tellur|thall|beryll|barium compound|nickel|mercury|irritant|sensiti[sz]er|chromium/i;
+  /toxic|poison|carcino|explosive|corrosive|lead |lead-|arsen|cadmium|selen|tellur|thall|beryll|barium compound|mercury/i;
 
 function noteHandling(notes: CautionNote[], material: Material): void {
   const { hygroscopic, hazard } = material.handling ?? {};

@@ -23,7 +23,7 @@ export function waveEnergyRows(wave: EnergyAnswer | null, style: PresentStyle): 
     formatQuantity(value, unit, DIGITS, { style });
   rows.add('irradiance_W_per_m2', 'I', 'irradiance', show(wave.irradiance_W_per_m2, WATT_PER_SQUARE_METRE));
   rows.add('peakE_V_per_m', 'E', 'electric field, peak', show(wave.peakE_V_per_m, VOLT_PER_METRE));
-  rows.add('peakB_T', 'B', 'magnetic flux density, peak', show(wave.peakB_T, TESLA));
+  rows.add('peakB_T', 'B', 'flux density, peak', show(wave.peakB_T, TESLA));
   rows.add(
     'energyDensity_J_per_m3',
     'u',

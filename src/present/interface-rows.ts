@@ -24,6 +24,12 @@ export function degreesText(angle_rad: number | null, decimals: number, style: P
   return formatQuantity(angle_rad === null ? null : angle_rad * PER_RADIAN, DEGREE, { decimals }, { style });
 }
 
+/** A phase: half a turn either way reads 180, not -180. */
+function phaseText(phase_rad: number | null, style: PresentStyle): string {
+  const almostMinusHalf = phase_rad !== null && phase_rad < -Math.PI + 5e-5;
+  return degreesText(almostMinusHalf ? -phase_rad : phase_rad, 2, style);
+}
+
 export function interfaceRows(answer: Answer, style: PresentStyle): readonly Shown[] {
   const rows = new RowList(style);
   const surface = answer.interface;
@@ -48,8 +54,8 @@ export function interfaceRows(answer: Answer, style: PresentStyle): readonly Sho
     rows.add('Rp', 'R_p', 'reflectance, p', powerText(surface.Rp, null, surface.R_digitsGuide, style));
   }
   if (surface.totalReflection) tunnelRows(rows, surface, style);
-  rows.add('phaseRs_rad', 'arg r_s', 'phase of reflection, s', degreesText(surface.phaseRs_rad, 2, style));
-  rows.add('phaseRp_rad', 'arg r_p', 'phase of reflection, p', degreesText(surface.phaseRp_rad, 2, style));
+  rows.add('phaseRs_rad', 'arg r_s', 'phase of reflection, s', phaseText(surface.phaseRs_rad, style));
+  rows.add('phaseRp_rad', 'arg r_p', 'phase of reflection, p', phaseText(surface.phaseRp_rad, style));
   return rows.list;
 }
 

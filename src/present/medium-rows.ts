@@ -40,8 +40,9 @@ export function mediumRows(
   const groupIndex = medium.groupIndex;
   // A fit's slope is known less well than its value: one place less.
   const slope = precisionFor(groupIndex, known.uncertainty * 10, EXACT_DIGITS);
-  const reference = medium.fit && medium.publishedReference === 'air' ? ', rel. to air' : '';
-  rows.add('groupIndex', 'n_g', `group index${reference}`, formatNumber(groupIndex, slope, style));
+  const reference =
+    medium.fit && medium.publishedReference === 'air' && groupIndex !== null ? ' rel. to air' : '';
+  rows.add('groupIndex', 'n_g', 'group index', `${formatNumber(groupIndex, slope, style)}${reference}`);
   const v = medium.phaseVelocity_m_per_s;
   rows.add('phaseVelocity_m_per_s', 'v', 'phase velocity', ofLight(v, derived(v), style));
   const vg = medium.absolute.groupVelocity_m_per_s;
@@ -56,7 +57,7 @@ export function mediumRows(
   rows.add('absorption', 'α', 'absorption coefficient', absorptionText(medium, style));
   if (medium.penetrationDepth_m !== null) {
     const depth = formatQuantity(medium.penetrationDepth_m, METRE, { significant: 3 }, { style });
-    rows.add('penetrationDepth_m', '1/α', 'penetration depth (power to 1/e)', depth);
+    rows.add('penetrationDepth_m', '1/α', 'penetration depth (power)', depth);
   }
   if (!radio && medium.k > 0.01 * Math.abs(medium.n)) electricRows(rows, medium, style);
   return rows.list;
@@ -90,7 +91,7 @@ function electricRows(rows: RowList, medium: MediumAnswer, style: PresentStyle):
   }
   if (medium.skinDepth_m !== null) {
     const depth = formatQuantity(medium.skinDepth_m, METRE, { significant: 4 }, { style });
-    rows.add('skinDepth_m', 'δ', 'skin depth (field to 1/e)', depth);
+    rows.add('skinDepth_m', 'δ', 'skin depth (field)', depth);
   }
   rows.add('impedance_ohm', 'Z', 'wave impedance', impedanceText(medium.impedance_ohm, style));
 }

@@ -39,7 +39,8 @@ export function conditionsText(medium: MediumAnswer, style: PresentStyle): strin
 export function fitLine(medium: MediumAnswer, style: PresentStyle): readonly string[] {
   const { fit } = medium;
   if (!fit) return [];
-  const range = formatRange(fit.range_m, METRE, { significant: 5 }, { style });
+  const ends = fit.range_m.map((x) => Number(x.toPrecision(6))) as [number, number];
+  const range = formatRange(ends, METRE, 'shortest', { style });
   const reference = medium.publishedReference === 'air' ? 'relative to air' : 'absolute';
   const published = `n ${formatNumber(Number(medium.n_published.toPrecision(8)), 'shortest', style)} as published, ${reference}`;
   const lines = [`${mediumTitle(medium)}: ${fit.source.text} [grade ${fit.grade}, ${range}; ${published}]`];
@@ -47,7 +48,7 @@ export function fitLine(medium: MediumAnswer, style: PresentStyle): readonly str
     const { difference, source } = fit.secondOpinion;
     const sign = difference < 0 ? '-' : '+';
     lines.push(
-      `  second opinion: ${source.text}: n differs by ${sign}${formatNumber(Math.abs(difference), { significant: 2 }, style)}`,
+      `second opinion: ${source.text}: n differs by ${sign}${formatNumber(Math.abs(difference), { significant: 2 }, style)}`,
     );
   }
   return lines;

@@ -1,9 +1,8 @@
 /** `halfspace man`: the manual page in roff on standard output. */
-import type { Invocation } from '../arguments.ts';
-import type { CommandIo } from '../command-io.ts';
+import type { Command } from '../context.ts';
 import { manPage } from '../man.ts';
 
-export function run(_invocation: Invocation, io: CommandIo): number {
-  io.out(manPage(io.program));
+export const run: Command = (_invocation, context) => {
+  context.write(manPage(context.version));
   return 0;
-}
+};

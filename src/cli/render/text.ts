@@ -6,6 +6,7 @@ import type { Answer, Caution, MediumAnswer } from '../../answer/answer.ts';
 import { beamRows, waveEnergyRows } from '../../present/energy-rows.ts';
 import { interfaceRows } from '../../present/interface-rows.ts';
 import { mediumRows } from '../../present/medium-rows.ts';
+import { pairRows } from '../../present/pair-rows.ts';
 import { mediumTitle, questionLine, waveAliases } from '../../present/question-line.ts';
 import type { PresentStyle, Shown } from '../../present/shown.ts';
 import { conditionsText, fitLine, GRADE_WORDS } from '../../present/source-lines.ts';
@@ -49,7 +50,7 @@ function mediaTable(answer: Answer, style: PresentStyle): readonly string[] {
   ];
   return [
     ...sideBySide(title(answer.from, style), title(answer.into, style)),
-    ...paired(left, right).map(([symbol, label, a, b]) => {
+    ...pairRows(left, right).map(({ symbol, label, left: a, right: b }) => {
       const head = pad(symbol, SYMBOL) + pad(label, LABEL);
       const row = `${head}${pad(a, VALUE)}${length(a) >= VALUE ? ' ' : ''}${b}`;
       // A long complex value takes a line of its own rather than losing digits.
@@ -71,26 +72,6 @@ function sideBySide(a: string, b: string): readonly string[] {
     { length: count },
     (_, i) => ' '.repeat(SYMBOL + LABEL) + pad(left[i] ?? '', VALUE) + (right[i] ?? ''),
   );
-}
-
-/** Rows of both media under one name, in the order of whichever has more; a dash where one has none. */
-function paired(
-  left: readonly Shown[],
-  right: readonly Shown[],
-): readonly (readonly [string, string, string, string])[] {
-  const order = [...right];
-  for (const [i, row] of left.entries()) {
-    if (order.some((o) => o.id === row.id)) continue;
-    const before = left[i - 1];
-    const at = before ? order.findIndex((o) => o.id === before.id) + 1 : 0;
-    order.splice(at, 0, row);
-  }
-  return order.map((row) => [
-    row.symbol,
-    row.label,
-    left.find((l) => l.id === row.id)?.text ?? '-',
-    right.find((r) => r.id === row.id)?.text ?? '-',
-  ]);
 }
 
 const oneValue = (row: Shown): string => `${pad(`  ${row.symbol}`, 18)}${pad(row.text, 20)}${row.label}`;
