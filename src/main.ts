@@ -75,7 +75,7 @@ function writeResult(text: string, file: string | undefined): void {
 function runCommand(invocation: Invocation, context: Context): number | Promise<number> {
   if (invocation.command === 'answer') return runAnswer(invocation, context);
   const { command } = invocation;
-  return loadCommand(command).then((run) => run(invocation, context));
+  return loadCommand(command).then((module) => module.run(invocation, context));
 }
 
 async function showHelp(topic: Parameters<typeof import('./cli/help.ts').helpText>[0]): Promise<number> {

@@ -2,7 +2,7 @@
 import type { Invocation } from './arguments.ts';
 import type { Command } from './context.ts';
 
-interface CommandModule {
+export interface CommandModule {
   readonly run: Command;
 }
 
@@ -12,7 +12,6 @@ const LOADERS: Readonly<Record<Invocation['command'], () => Promise<CommandModul
   man: () => import('./commands/man.ts'),
 };
 
-export async function loadCommand(name: Invocation['command']): Promise<Command> {
-  const module = await LOADERS[name]();
-  return module.run;
+export function loadCommand(name: Invocation['command']): Promise<CommandModule> {
+  return LOADERS[name]();
 }
