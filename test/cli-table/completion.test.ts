@@ -4,10 +4,10 @@ import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import type { Invocation } from '../../src/cli/arguments.ts';
-import type { CommandIo } from '../../src/cli/command-io.ts';
 import { run } from '../../src/cli/commands/completion.ts';
 import { completionScript, SHELLS } from '../../src/cli/completion.ts';
 import { allOptions, optionsOfCommand, spellings } from '../../src/cli/completion-words.ts';
+import type { Context } from '../../src/cli/context.ts';
 
 const KEYS = ['air', 'fused-silica', 'sapphire', 'silicon'];
 const everyOption = optionsOfCommand('answer').flatMap(spellings);
@@ -150,39 +150,41 @@ describe.runIf(has('fish'))('fish', () => {
 });
 
 describe('the completion command', () => {
-  function outcome(operands: readonly string[], options: Invocation['options'] = {}) {
-    let out = '';
-    let err = '';
-    const io: CommandIo = {
-      out: (text) => {
-        out += text;
+  async function outcome(operands: readonly string[], options: Invocation['options'] = {}) {
+    const written = { out: '', err: '' };
+    const context = {
+      ascii: false,
+      write: (text: string) => {
+        written.out += text;
       },
-      err: (text) => {
-        err += text;
+      warn: (text: string) => {
+        written.err += text;
       },
-      program: { version: '1', date: '2026-01-01' },
-      catalogueKeys: () => KEYS,
+      catalogue: () => ({ keys: () => KEYS }),
     };
-    return { status: run({ command: 'completion', operands, options, given: [] }, io), out, err };
+    // The command touches nothing else of its context.
+    const invocation = { command: 'completion', operands, options, given: [] } as const;
+    const status = await run(invocation, context as unknown as Context);
+    return { status, ...written };
   }
 
-  it.each(SHELLS)('prints the script of %s', (name) => {
-    expect(outcome([name])).toEqual({ status: 0, out: completionScript(name), err: '' });
+  it.each(SHELLS)('prints the script of %s', async (name) => {
+    expect(await outcome([name])).toEqual({ status: 0, out: completionScript(name), err: '' });
   });
 
-  it('lists the keys that begin with a prefix, any case', () => {
-    expect(outcome([], { names: 'S' })).toEqual({ status: 0, out: 'sapphire\nsilicon\n', err: '' });
-    expect(outcome([], { names: 'zz' })).toEqual({ status: 0, out: '', err: '' });
+  it('lists the keys that begin with a prefix, any case', async () => {
+    expect(await outcome([], { names: 'S' })).toEqual({ status: 0, out: 'sapphire\nsilicon\n', err: '' });
+    expect(await outcome([], { names: 'zz' })).toEqual({ status: 0, out: '', err: '' });
   });
 
-  it('refuses other shells', () => {
+  it('refuses other shells', async () => {
     const see = '\nsee halfspace completion --help\n';
-    expect(outcome(['tcsh'])).toEqual({
+    expect(await outcome(['tcsh'])).toEqual({
       status: 2,
       out: '',
       err: `halfspace: "tcsh" is not a shell known here; write bash, zsh or fish${see}`,
     });
-    expect(outcome([])).toEqual({
+    expect(await outcome([])).toEqual({
       status: 2,
       out: '',
       err: `halfspace: SHELL missing; write bash, zsh or fish${see}`,
