@@ -1,0 +1,34 @@
+/** A page to read, over the whole width or inside a half. */
+import type { PageLine } from '../picture/page-line.ts';
+import type { Page } from '../state.ts';
+import { blankLine, entrySpans, lineOfSpans, type Pen, type Span, span } from './pen.ts';
+
+export function pageView(
+  lines: readonly PageLine[],
+  top: number,
+  rows: number,
+  columns: number,
+  pen: Pen,
+): readonly string[] {
+  return Array.from({ length: rows }, (_, i) => {
+    const line = lines[top + i];
+    if (!line) return blankLine(columns);
+    const isMarked = line.mark !== '';
+    const mark = span(` ${line.mark}`.padEnd(2) + (isMarked ? ' ' : ''), isMarked ? line.role : 'text');
+    return lineOfSpans([mark, span(line.text, isMarked ? 'text' : line.role)], columns, pen);
+  });
+}
+
+/** Where a page is narrowed to the lines with a word: what is typed, and how much is out of sight. */
+export function pageStatus(page: Page, length: number, rows: number): readonly Span[] {
+  const filter = page.filter
+    ? [
+        span('/'),
+        ...(page.isFiltering ? entrySpans(page.filter, false, 30) : [span(page.filter.text)]),
+        span('   '),
+      ]
+    : [];
+  const below = Math.max(0, length - page.top - rows);
+  const more = below > 0 ? `${below} more lines below` : page.top > 0 ? 'end' : '';
+  return [...filter, span(more, 'aside')];
+}

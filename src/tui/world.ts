@@ -1,0 +1,21 @@
+/**
+ * What the full-screen program needs of the rest of the program, as plain functions: the same question gives the same
+ * result. The reducer and the views get it handed in, so they are pure and run in tests without files.
+ */
+import type { Answer } from '../answer/answer.ts';
+import type { Question } from '../answer/question.ts';
+import type { Lookup } from '../catalog/catalogue.ts';
+import type { CatalogueEntry } from '../catalog/entries.ts';
+import type { Material, Source } from '../catalog/types.ts';
+import type { Refusal } from '../medium/refusal.ts';
+import type { Bindings } from './keys/bindings.ts';
+
+export interface World {
+  answer(question: Question): Answer | Refusal;
+  /** Best match first; everything for an empty text. */
+  search(text: string): readonly CatalogueEntry[];
+  lookup(name: string): Lookup;
+  material(key: string): Material | undefined;
+  source(id: string): Source | undefined;
+  readonly bindings: Bindings;
+}
