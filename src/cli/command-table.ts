@@ -82,7 +82,7 @@ export const COMMANDS = [
       { name: 'FROM', meaning: `medium of incidence: ${MEDIUM}`, completes: 'medium' },
       {
         name: 'LAYER',
-        meaning: 'a layer between them, MEDIUM@THICKNESS: mgf2@100nm, n=1.38@qw',
+        meaning: 'a layer between them, MEDIUM@THICKNESS: magnesium-fluoride@100nm, n=1.38@qw',
         optional: true,
         many: true,
         completes: 'medium',
