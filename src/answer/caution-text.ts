@@ -17,6 +17,7 @@ const WORDING: Readonly<Record<CautionCode, Wording>> = {
     (d, s) =>
       `${s}: outside the fit's range (${d['range']}): extrapolated at your request, no digit is vouched for`,
   ],
+  'range-edge': ['note', (d, s) => `${s}: at the very edge of the fit's range (${d['range']})`],
   'outside-confirmed-range': [
     'note',
     (d, s) =>

@@ -15,7 +15,12 @@ export interface FitWave {
 
 export const AXIS_ORDER: readonly Axis[] = ['isotropic', 'ordinary', 'extraordinary', 'x', 'y', 'z'];
 
-const ROUNDING = 1e-9;
+/** A single value printed for a line holds for the names that line goes by: 589.3, 589.29 and 589.6 nm, and nearly for 587.6 nm. */
+const LINE_WIDTH = 3e-3;
+/** Limits often come from photon energies: 6.2 um for 0.2 eV, which is 6.199 um. */
+const CONVERSION = 3e-4;
+/** However few digits a limit is printed to, it is no further off than this. */
+const WIDEST = 0.022;
 
 /** Wavelength in the reference the fit is printed in. */
 export const fitWavelength_um = (fit: Fit, wave: FitWave): number =>
@@ -23,9 +28,26 @@ export const fitWavelength_um = (fit: Fit, wave: FitWave): number =>
 
 export const inRange = (fit: Fit, wave: FitWave): boolean => reaches(fit.range_um, wave);
 
+/**
+ * Limits are printed numbers: a wave within half a unit of a limit's last digit (at most 2.2 %) counts as inside, in either
+ * reference. `atEdge` tells the answer to say so.
+ */
 function reaches([lo, hi]: readonly [number, number], wave: FitWave): boolean {
-  const within = (l: number): boolean => l >= lo * (1 - ROUNDING) && l <= hi * (1 + ROUNDING);
+  const [low, high] = lo === hi ? [LINE_WIDTH, LINE_WIDTH] : [margin(lo), margin(hi)];
+  const within = (l: number): boolean => l >= lo * (1 - low) && l <= hi * (1 + high);
   return within(wave.vacuum_um) || within(wave.air_um);
+}
+
+function margin(limit_um: number): number {
+  const decimals = /\.(\d+)$/.exec(String(limit_um))?.[1]?.length ?? 0;
+  return Math.max(CONVERSION, Math.min(WIDEST, (0.5 * 10 ** -decimals) / limit_um));
+}
+
+/** True where the wave lies outside the printed limits, though not by more than they are rounded. */
+export function atEdge(fit: Fit, wave: FitWave): boolean {
+  const l = fitWavelength_um(fit, wave);
+  const [lo, hi] = fit.range_um;
+  return lo !== hi && inRange(fit, wave) && (l < lo * (1 - CONVERSION) || l > hi * (1 + CONVERSION));
 }
 
 /** A fit may be the recommended one over a part of its range only. */

@@ -4,6 +4,7 @@
  */
 export type CautionCode =
   | 'outside-fit-range'
+  | 'range-edge'
   | 'outside-confirmed-range'
   | 'absorbs-here'
   | 'absorption-not-known'

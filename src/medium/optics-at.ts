@@ -4,6 +4,7 @@
  * Pure; refuses (as data) where the catalogue does not reach the wave and the question does not insist.
  */
 import {
+  atEdge,
   axesOf,
   chooseFit,
   defaultAxis,
@@ -59,6 +60,8 @@ export interface MediumAtWave {
 /** From this ratio k/n on a medium counts as absorbing where complex data compete with real ones. */
 const ABSORBING = 1e-4;
 const ZERO_CELSIUS_K = 273.15;
+/** Over this step of temperature a single dn/dT serves as well as a second fit. */
+const FIRST_ORDER_K = 10;
 
 export function mediumAtWave(
   material: Material,
@@ -69,7 +72,7 @@ export function mediumAtWave(
 ): MediumAtWave | Refusal {
   const theAxis = axis ?? defaultAxis(material, wave);
   if (!theAxis) return noOpticalConstants(material);
-  const choice = chooseFit(material, theAxis, wave, (fit) => preference(fit, wave, conditions));
+  const choice = chooseFit(material, theAxis, wave, (fit) => preference(fit, material, wave, conditions));
   if (!choice) {
     return refuse(
       'no-such-axis',
@@ -228,14 +231,17 @@ function isFluidCondition(fit: Fit, name: string): boolean {
 }
 
 /** Complex data where the medium absorbs; a fit that can honour the temperature where the others can't. */
-function preference(fit: Fit, wave: FitWave, conditions: Conditions): number {
+function preference(fit: Fit, material: Material, wave: FitWave, conditions: Conditions): number {
   let score = 0;
   if (conditions.temperature_K !== undefined) {
     const fit_K = fit.temperature_C === undefined ? undefined : fit.temperature_C + ZERO_CELSIUS_K;
+    const step_K =
+      fit_K === undefined ? Number.POSITIVE_INFINITY : Math.abs(fit_K - conditions.temperature_K);
     const canHonour =
       fit.thermal !== undefined ||
       honours(fit.parameters).includes('temperature_K') ||
-      (fit_K !== undefined && Math.abs(fit_K - conditions.temperature_K) < 0.5);
+      step_K < 0.5 ||
+      (step_K <= FIRST_ORDER_K && material.handling?.dn_dT_1e6_per_K !== undefined);
     if (canHonour) score += 2;
   }
   if (isRecommended(fit, wave) && givesAbsorption(fit, wave, conditions)) score += 1;
@@ -281,6 +287,8 @@ function noteFit(
 ): void {
   if (!reached) {
     notes.push({ code: 'outside-fit-range', details: { range: rangeText(fit.range_um) } });
+  } else if (atEdge(fit, wave)) {
+    notes.push({ code: 'range-edge', details: { range: rangeText(fit.range_um) } });
   } else if (fit.confirmedRange_um) {
     const l = fitWavelength_um(fit, wave);
     if (l < fit.confirmedRange_um[0] * (1 - 1e-3) || l > fit.confirmedRange_um[1] * (1 + 1e-3)) {
