@@ -82,6 +82,11 @@ export class PtySession {
     this.#pty.write(keys);
   }
 
+  /** Types bytes that are no whole characters. */
+  sendBytes(bytes: Buffer): void {
+    this.#pty.write(bytes as unknown as string);
+  }
+
   /** Everything the program has written, from byte number `from` on. */
   output(from = 0): string {
     return Buffer.concat(this.#chunks).subarray(from).toString('utf8');
