@@ -26,6 +26,32 @@ function meanSlope_1e6(fit: Fit, air_um: number, from_C: number, to_C: number): 
   return ((at(to_C) - at(from_C)) / (to_C - from_C)) * 1e6;
 }
 
+/** Temperature between 20 and 250 C at which n of one fit at 1064.2 nm equals n of another at half the wavelength. */
+function meeting_C(
+  key: string,
+  fundamental: readonly [axis: string, id: string],
+  harmonic: readonly [axis: string, id: string],
+): number {
+  const at = ([axis, id]: readonly [string, string], L: number, t: number): number => {
+    const fit = material(key).fits.find((f) => f.axis === axis && f.id === id);
+    if (!fit?.thermal || fit.temperature_C === undefined) return Number.NaN;
+    const jet = new Float64Array(8);
+    jet[0] = indexOf(fit, L).n;
+    applyThermalForm(fit.thermal, fit.temperature_C + 273.15, t + 273.15, L, jet);
+    return jet[0] as number;
+  };
+  const mismatch = (t: number): number => at(fundamental, 1.0642, t) - at(harmonic, 0.5321, t);
+  let low = 20;
+  let high = 250;
+  if (!(mismatch(low) * mismatch(high) < 0)) return Number.NaN;
+  while (high - low > 0.01) {
+    const middle = (low + high) / 2;
+    if (mismatch(low) * mismatch(middle) <= 0) high = middle;
+    else low = middle;
+  }
+  return low;
+}
+
 describe('thermal constants', () => {
   it('of N-BK7 give the nine values of its data sheet (SCHOTT catalogue, absolute index, from memory)', () => {
     const fit = recommended(material('n-bk7'), 'isotropic', 0.5461) as Fit;
@@ -64,6 +90,20 @@ describe('thermal constants', () => {
     }
     expect(bad.join('\n')).toBe('');
     expect(tested).toBeGreaterThan(180);
+  });
+
+  it('bring crystals to the temperature at which they double 1064 nm without angle (papers and makers, from memory)', () => {
+    // LBO: n_z of the fundamental meets n_y of the harmonic at 148 to 149.5 C; LiNbO3 with 5 % MgO: n_o meets n_e at 105 to 111 C.
+    const lbo = meeting_C('lithium-triborate', ['z', 'kato-1994'], ['y', 'kato-1994']);
+    expect(lbo).toBeGreaterThan(147);
+    expect(lbo).toBeLessThan(150.5);
+    const niobate = meeting_C(
+      'lithium-niobate-mgo',
+      ['ordinary', 'matsuda-2015'],
+      ['extraordinary', 'umemura-2014'],
+    );
+    expect(niobate).toBeGreaterThan(100);
+    expect(niobate).toBeLessThan(116);
   });
 
   it('have the sign of the substance: liquids and polymers expand and lose index', () => {
