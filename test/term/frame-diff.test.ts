@@ -177,9 +177,9 @@ describe('frame differences on a terminal', () => {
           }
         },
       ),
-      { numRuns: 220 },
+      { numRuns: 180 },
     );
-    expect(drawn).toBeGreaterThan(2000);
+    expect(drawn).toBeGreaterThan(1500);
   });
 
   it('shows exactly the frame after a repaint over garbage', async () => {
