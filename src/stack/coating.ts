@@ -154,9 +154,9 @@ export function twoLayerCoating(
   checkIndices(outsideIndex, outerIndex, innerIndex, substrateIndex);
   const step = substrateIndex - outsideIndex;
   const wanted = outsideIndex * substrateIndex;
-  const cross = outerIndex ** 2 * substrateIndex - outsideIndex * innerIndex ** 2;
-  const outer = wanted - outerIndex ** 2;
-  const inner = innerIndex ** 2 - wanted;
+  const cross = difference(outerIndex ** 2 * substrateIndex, outsideIndex * innerIndex ** 2);
+  const outer = difference(wanted, outerIndex ** 2);
+  const inner = difference(innerIndex ** 2, wanted);
   if (step * cross * outer * inner < 0) {
     const bounds = [outerIndex * Math.sqrt(substrateIndex / outsideIndex), Math.sqrt(wanted)];
     const [low, high] = [Math.min(...bounds).toFixed(3), Math.max(...bounds).toFixed(3)];
@@ -186,6 +186,9 @@ export function twoLayerCoating(
   const total = (x: TwoLayerCoating): number => x.outerThickness_m + x.innerThickness_m;
   return total(a) <= total(b) ? [a, b] : [b, a];
 }
+
+/** a - b, zero where they agree to rounding: there the sign would be chance. */
+const difference = (a: number, b: number): number => (Math.abs(a - b) < 1e-13 * a ? 0 : a - b);
 
 function checkIndices(...indices: number[]): void {
   for (const n of indices) {
