@@ -202,6 +202,37 @@ describe('no layers', () => {
   });
 });
 
+describe('frustrated total reflection', () => {
+  it('T = 1/(1 + X sinh^2), X = (a^2 + b^2)^2/(4 a^2 b^2), both polarizations', () => {
+    fc.assert(
+      fc.property(
+        between(1.4, 4),
+        between(1, 1.3),
+        between(0.02, 1),
+        between(0.01, 0.99),
+        (n1, n2, gap, share) => {
+          const critical = Math.asin(n2 / n1);
+          const angle = critical + share * (Math.PI / 2 - critical);
+          const prism = substanceFromIndex(n1);
+          const stack = { incidence: prism, layers: [layerFromIndex(gap * 1e-6, n2)], exit: prism };
+          const result = coherentStack(stack, 1e-6, angle);
+          const decay = Math.sqrt((n1 * Math.sin(angle)) ** 2 - n2 ** 2);
+          const inside = n1 * Math.cos(angle);
+          for (const [side, a, b] of [
+            ['s', inside, decay],
+            ['p', inside / n1 ** 2, decay / n2 ** 2],
+          ] as const) {
+            const X = (a * a + b * b) ** 2 / (4 * a * a * b * b);
+            const T = 1 / (1 + X * Math.sinh(2 * Math.PI * gap * decay) ** 2);
+            expect(Math.abs(result[side].T / T - 1)).toBeLessThan(1e-9);
+            expect(result[side].R).toBeCloseTo(1 - T, 11);
+          }
+        },
+      ),
+    );
+  });
+});
+
 describe('special cases', () => {
   it('a metre of silver transmits nothing and hides nothing above it', () => {
     const metal = layerFromIndex(1, 0.05, 4.2);
