@@ -6,8 +6,8 @@ import { writeFileSync } from 'node:fs';
 import { join, resolve } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { CATALOG_FOLDER } from '../src/catalog/from-sources.ts';
-import { MATERIAL_SHAPE, OWN_MATERIAL_SHAPE, SOURCE_SHAPE } from '../src/catalog/material-shape.ts';
-import { PARAMETER_SHAPES } from '../src/catalog/parameter-shapes.ts';
+import { materialShape, ownMaterialShape, sourceShape } from '../src/catalog/material-shape.ts';
+import { parameterShapes } from '../src/catalog/parameter-shapes.ts';
 import { list, type RecordShape, type Shape } from '../src/catalog/shape.ts';
 
 type Json = { readonly [key: string]: unknown };
@@ -20,7 +20,7 @@ export interface SchemaFile {
 /** The three schema files. */
 export function schemaFiles(): readonly SchemaFile[] {
   const models = Object.fromEntries(
-    Object.entries(PARAMETER_SHAPES).map(([model, shape]) => [`parameters-${model}`, toSchema(shape)]),
+    Object.entries(parameterShapes()).map(([model, shape]) => [`parameters-${model}`, toSchema(shape)]),
   );
   const file = (
     name: string,
@@ -45,21 +45,21 @@ export function schemaFiles(): readonly SchemaFile[] {
       'material.schema.json',
       'Catalogue entry',
       `${units}Strict: every entry under catalog/materials/ follows it.`,
-      MATERIAL_SHAPE,
+      materialShape(),
       models,
     ),
     file(
       'own-material.schema.json',
       'Own entry',
       `${units}For files of a user's own folder, which may leave more out and may bring their sources along.`,
-      OWN_MATERIAL_SHAPE,
+      ownMaterialShape(),
       models,
     ),
     file(
       'bibliography.schema.json',
       'Bibliography',
       'CSL-JSON items (citation style language data schema 1.0), the subset used here.',
-      list(SOURCE_SHAPE, 1),
+      list(sourceShape(), 1),
     ),
   ];
 }

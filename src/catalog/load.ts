@@ -2,13 +2,13 @@
  * Opens the catalogue: the packed file beside the running program, and the user's own entries beside it. One read and no
  * parsing beyond a short header (see packed.ts). Run from the sources, it takes the file of the last build.
  */
-import { readFileSync } from 'node:fs';
+import { existsSync, openSync, readFileSync, readSync } from 'node:fs';
 import { dirname, join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import type { IndexedCatalogue } from './entries.ts';
 import { type OwnProblem, readOwnFiles, withOwn } from './own.ts';
 import { ownFolderPath, readOwnFolder } from './own-folder.ts';
-import { openPacked } from './packed.ts';
+import { indexLength, openPacked } from './packed.ts';
 import { CATALOGUE_FILE, CHECKS_FILE } from './packed-header.ts';
 
 export interface LoadedCatalogue {
@@ -45,32 +45,41 @@ export function loadCatalogue(options: LoadOptions = {}): LoadedCatalogue {
 
 /** The bundled catalogue alone. */
 export function openBundled(): IndexedCatalogue {
-  const bytes = readPacked(CATALOGUE_FILE);
+  const path = pathOf(CATALOGUE_FILE);
   try {
-    return openPacked(bytes);
+    // Stays open: records are read when they are asked for, and from this file even if another replaces it meanwhile.
+    const file = openSync(path, 'r');
+    const read = (from: number, length: number): Buffer => {
+      const bytes = Buffer.allocUnsafe(length);
+      return bytes.subarray(0, readSync(file, bytes, 0, length, from));
+    };
+    const start = read(0, FIRST_READ);
+    const length = indexLength(start) ?? FIRST_READ;
+    return openPacked(length <= start.length ? start : read(0, length), read);
   } catch (error) {
-    throw new CatalogueFileError(
-      `${CATALOGUE_FILE}: ${error instanceof Error ? error.message : String(error)}`,
-    );
+    throw new CatalogueFileError(`${path}: ${error instanceof Error ? error.message : String(error)}`);
   }
 }
+
+/** Holds header and index at once unless the catalogue has grown; reading the whole file would take five times as long. */
+const FIRST_READ = 160_000;
 
 /** The check values, one JSON document a line (see pack.ts); only the self-test reads them. */
 export function readCheckValues(): string {
-  return readPacked(CHECKS_FILE).toString('utf8');
+  const path = pathOf(CHECKS_FILE);
+  try {
+    return readFileSync(path, 'utf8');
+  } catch (error) {
+    throw new CatalogueFileError(`${path}: ${error instanceof Error ? error.message : String(error)}`);
+  }
 }
 
-function readPacked(name: string): Buffer {
+/** Beside the running program, or, where it runs from its sources, in the folder of the last build. */
+function pathOf(name: string): string {
   const here = dirname(fileURLToPath(import.meta.url));
   const beside = join(here, name);
-  for (const path of [beside, join(here, '..', '..', 'dist', name)]) {
-    try {
-      return readFileSync(path);
-    } catch {
-      // Not there: try the next place, then say where it should have been.
-    }
-  }
-  throw new CatalogueFileError(`${beside} cannot be read`);
+  const built = join(here, '..', '..', 'dist', name);
+  return !existsSync(beside) && existsSync(built) ? built : beside;
 }
 
 const noFolder = (path: string): OwnProblem => ({

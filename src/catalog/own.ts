@@ -12,7 +12,7 @@ import type { CatalogueEntry, IndexedCatalogue, Spelling } from './entries.ts';
 import { entryOf } from './entries.ts';
 import { foldTight } from './fold.ts';
 import { lookupIn } from './lookup.ts';
-import { OWN_MATERIAL_SHAPE, SOURCE_SHAPE } from './material-shape.ts';
+import { ownMaterialShape, sourceShape } from './material-shape.ts';
 import { SPELLING_RANK, spellingsOf } from './names.ts';
 import { readOwnCsv } from './own-csv.ts';
 import { list } from './shape.ts';
@@ -65,7 +65,7 @@ export function readOwnFiles(files: readonly OwnFile[], bundled: IndexedCatalogu
 
   const bibliography = files.find((f) => f.name === OWN_BIBLIOGRAPHY);
   if (bibliography) {
-    const items = parse(bibliography.text, list(SOURCE_SHAPE));
+    const items = parse(bibliography.text, list(sourceShape()));
     if (items.faults) report(bibliography, items.faults);
     else report(bibliography, addSources(items.value as readonly Source[], ''));
   }
@@ -100,7 +100,7 @@ function readCsv(file: OwnFile): Read {
 }
 
 function readJson(file: OwnFile): Read {
-  const parsed = parse(file.text, OWN_MATERIAL_SHAPE);
+  const parsed = parse(file.text, ownMaterialShape());
   if (parsed.faults) return { faults: parsed.faults };
   const { sources = [], ...raw } = parsed.value as OwnMaterial;
   return { material: completed(raw), sources };

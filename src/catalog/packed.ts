@@ -1,7 +1,7 @@
 /**
  * The catalogue over the bytes of one packed file (layout: pack.ts). Nothing is parsed up front but a header of a few
- * hundred bytes; a look-up finds its line by a byte search and parses the one record it is about. Pure: the bytes come
- * from load.ts.
+ * hundred bytes; a look-up finds its line by a byte search in the index, a tenth of the file, then reads and parses the one
+ * record it is about. Pure: the bytes come from load.ts.
  */
 import type { Lookup } from './catalogue.ts';
 import type { CatalogueEntry, IndexedCatalogue, Spelling, SpellingKind } from './entries.ts';
@@ -9,11 +9,24 @@ import { lookupIn } from './lookup.ts';
 import { AXIS_LETTERS, MAGIC, type PackedHeader, type SectionName } from './packed-header.ts';
 import type { Axis, Material, Source } from './types.ts';
 
+/** Bytes of the records section, from the start of the file. */
+export type ReadBytes = (from: number, length: number) => Buffer;
+
+/** How many bytes from the start of the file the header and the index take; undefined if `start` does not hold the header. */
+export function indexLength(start: Buffer): number | undefined {
+  const end = start.indexOf('\n');
+  return end < 0 ? undefined : end + 1 + readHeader(start).sections.records[0];
+}
+
 /**
- * @param bytes the whole file; kept, never written to.
+ * @param bytes the file, or as much of it as holds the index (see `indexLength`); kept, never written to.
+ * @param read fetches bytes beyond those; needed unless `bytes` is the whole file.
  * @throws Error if the bytes are not a packed catalogue of this layout.
  */
-export function openPacked(bytes: Buffer): IndexedCatalogue {
+export function openPacked(
+  bytes: Buffer,
+  read: ReadBytes = (from, length) => bytes.subarray(from, from + length),
+): IndexedCatalogue {
   const header = readHeader(bytes);
   const start = bytes.indexOf('\n') + 1;
   const part = (name: SectionName): Buffer => {
@@ -23,14 +36,12 @@ export function openPacked(bytes: Buffer): IndexedCatalogue {
   const names = part('names');
   const entryLines = part('entries');
   const sourceLines = part('sources');
-  const records = part('records');
+  const recordsAt = start + header.sections.records[0];
   const parsed = new Map<string, Material>();
   let listed: readonly CatalogueEntry[] | undefined;
 
-  const record = (offset: string | undefined, length: string | undefined): unknown => {
-    const from = Number(offset);
-    return JSON.parse(records.toString('utf8', from, from + Number(length)));
-  };
+  const record = (offset: string | undefined, length: string | undefined): unknown =>
+    JSON.parse(read(recordsAt + Number(offset), Number(length)).toString('utf8'));
   const catalogue: IndexedCatalogue = {
     version: header.version,
     hash: header.hash,

@@ -5,7 +5,7 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { checkShape } from '../../src/catalog/check-shape.ts';
 import { CATALOG_FOLDER, readCatalogueSources } from '../../src/catalog/from-sources.ts';
-import { MATERIAL_SHAPE, SOURCE_SHAPE } from '../../src/catalog/material-shape.ts';
+import { materialShape, sourceShape } from '../../src/catalog/material-shape.ts';
 import { list } from '../../src/catalog/shape.ts';
 import { schemaFiles, schemaText } from '../../tools/catalog-schema.ts';
 import { damagedJson } from './mutate.ts';
@@ -44,8 +44,8 @@ describe('the schema files', () => {
 
 describe('the hand-written check', () => {
   it('accepts every entry', () => {
-    for (const m of sources.materials) expect([m.key, checkShape(m, MATERIAL_SHAPE)]).toEqual([m.key, []]);
-    expect(checkShape(sources.sources, list(SOURCE_SHAPE, 1))).toEqual([]);
+    for (const m of sources.materials) expect([m.key, checkShape(m, materialShape())]).toEqual([m.key, []]);
+    expect(checkShape(sources.sources, list(sourceShape(), 1))).toEqual([]);
   });
 
   it('and the schema agree about damaged entries', () => {
@@ -70,7 +70,7 @@ describe('the hand-written check', () => {
         // Control characters are refused by the check alone; the schema has no say about the terminal.
         fc.pre(!/\\u00[01]|\\u007f|\\u2028|\\u2029|\\[bfnrt]/.test(text));
         const parsed: unknown = JSON.parse(text);
-        const faults = checkShape(parsed, MATERIAL_SHAPE);
+        const faults = checkShape(parsed, materialShape());
         expect(faults.length === 0).toBe(validate('material.schema.json', parsed) === '');
       }),
       { numRuns: 400 },

@@ -157,6 +157,11 @@ describe('speed of search', () => {
       };
     });
     const big = makeSearch(many);
+    // Time of the processor, not of the clock: other programs on the machine are none of this one's business.
+    const cpu_ms = (): number => {
+      const { user, system } = process.cpuUsage();
+      return (user + system) / 1000;
+    };
     const p99 = (): number => {
       const times: number[] = [];
       for (const word of [
@@ -169,14 +174,14 @@ describe('speed of search', () => {
         'quarz',
       ]) {
         for (let n = 1; n <= word.length; n++) {
-          const start = performance.now();
+          const before = cpu_ms();
           big(word.slice(0, n), 50);
-          times.push(performance.now() - start);
+          times.push(cpu_ms() - before);
         }
       }
       return times.sort((a, b) => a - b)[Math.floor(times.length * 0.99)] ?? Number.NaN;
     };
-    // The best of a few rounds: what the program needs, not what else the machine is doing.
-    expect(Math.min(p99(), p99(), p99(), p99())).toBeLessThan(16);
+    // The first rounds also compile.
+    expect(Math.min(p99(), p99(), p99())).toBeLessThan(16);
   });
 });
