@@ -28,9 +28,8 @@ const PERMISSION: Trouble = {
 };
 const NO_SUCH_PLACE: Trouble = {
   code: 'logbook-path',
-  message: (path) =>
-    `${path} cannot be a logbook file: its folder is missing, or a part of the path is no folder`,
-  remedy: ELSEWHERE,
+  message: (path) => `${path} cannot be opened: a folder on the way is missing, or is no folder`,
+  remedy: `make that folder or mount its disk, or ${ELSEWHERE}`,
 };
 const FOLDER: Trouble = {
   code: 'logbook-path',

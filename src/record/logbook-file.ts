@@ -21,6 +21,7 @@ import path from 'node:path';
 import { type Refusal, refuse } from '../medium/refusal.ts';
 import { diskTrouble, errorCode, shortWrite } from './disk-trouble.ts';
 import { LONGEST_LINE_BYTES, linesBackward, linesForward, type RawLine, type ReadAt } from './line-reader.ts';
+import type { LogbookPlace } from './logbook-path.ts';
 
 /** The file calls used, so that a test can stand in a disk that fails. */
 export type Files = Pick<
@@ -54,7 +55,8 @@ const ATTEMPTS = 8;
  * Appends one line and returns when it is confirmed.
  * @param line JSON text without a newline; throws RangeError for anything with one
  */
-export function appendToLogbook(file: string, line: string, files: Files = fs): Confirmed | Refusal {
+export function appendToLogbook(place: LogbookPlace, line: string, files: Files = fs): Confirmed | Refusal {
+  const { file } = place;
   if (line === '' || line.includes('\n')) throw new RangeError('a logbook line is one line of text');
   const bytes = Buffer.from(line, 'utf8');
   if (bytes.length > LONGEST_LINE_BYTES)
@@ -65,7 +67,7 @@ export function appendToLogbook(file: string, line: string, files: Files = fs): 
       'ask a smaller question',
     );
   try {
-    makeFolder(path.dirname(file), files);
+    makeFolders(place, files);
     for (let attempt = 0; attempt < ATTEMPTS; attempt++) {
       const outcome = tryToAppend(file, bytes, attempt > 0, files);
       if (outcome) return outcome;
@@ -201,25 +203,19 @@ function notAFile(file: string, stat: fs.Stats): Refusal {
   );
 }
 
-/** Makes a folder and those above it, each of them on disk before the next step. Ends where the system refuses. */
-function makeFolder(folder: string, files: Files): void {
+/** Makes the missing folders between the base and the file, each of them on disk before the next one. */
+function makeFolders({ file, base }: LogbookPlace, files: Files): void {
   const missing: string[] = [];
-  for (let at = folder; ; at = path.dirname(at)) {
-    try {
-      files.mkdirSync(at, { mode: 0o700 });
-      syncFolder(path.dirname(at), files);
-      break;
-    } catch (error) {
-      if (errorCode(error) === 'ENOENT' && path.dirname(at) !== at) missing.push(at);
-      else if (isExistingFolder(at, files)) break;
-      else throw error;
-    }
+  for (let at = path.dirname(file); at !== base && !isExistingFolder(at, files); at = path.dirname(at)) {
+    if (path.dirname(at) === at) break;
+    missing.push(at);
   }
   for (const at of missing.reverse()) {
     try {
       files.mkdirSync(at, { mode: 0o700 });
     } catch (error) {
-      if (errorCode(error) !== 'EEXIST') throw error;
+      // Another program may have made it meanwhile.
+      if (!isExistingFolder(at, files)) throw error;
     }
     syncFolder(path.dirname(at), files);
   }

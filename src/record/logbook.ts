@@ -6,6 +6,7 @@ import { isRefusal, type Refusal, refuse } from '../medium/refusal.ts';
 import { quoteInput } from '../units/quote-input.ts';
 import type { RawLine } from './line-reader.ts';
 import { appendToLogbook, type Confirmed, type Files, logbookLines } from './logbook-file.ts';
+import type { LogbookPlace } from './logbook-path.ts';
 import type { LogRecord } from './record.ts';
 import { parseRecordLine, recordLine } from './record-line.ts';
 
@@ -27,8 +28,8 @@ export type LogEntry =
 export type RecordEntry = Extract<LogEntry, { kind: 'record' }>;
 
 /** Returns when the record is on disk, or says why it is not. */
-export function keepRecord(file: string, record: LogRecord, files?: Files): Confirmed | Refusal {
-  return appendToLogbook(file, recordLine(record), files);
+export function keepRecord(place: LogbookPlace, record: LogRecord, files?: Files): Confirmed | Refusal {
+  return appendToLogbook(place, recordLine(record), files);
 }
 
 export function* logEntries(

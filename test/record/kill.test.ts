@@ -27,15 +27,18 @@ function takeStock(file: string) {
 }
 
 describe('the logbook', () => {
-  const KILLS = 200;
+  const MOST_KILLS = 300;
+  const LEAST_KILLS = 40;
+  const TIME_ms = 20_000;
   const AT_ONCE = 3;
-  it(`loses no confirmed record in ${KILLS} kills of ${AT_ONCE} writers at once`, async () => {
+  it(`loses no confirmed record in up to ${MOST_KILLS} kills of ${AT_ONCE} writers at once`, async () => {
     const file = path.join(folder, 'killed', 'logbook.jsonl');
     const confirmed: string[] = [];
     let killed = 0;
     let started = 0;
+    const end_ms = Date.now() + TIME_ms;
     const keepKilling = async (): Promise<void> => {
-      while (started < KILLS) {
+      while (started < MOST_KILLS && (Date.now() < end_ms || started < LEAST_KILLS)) {
         const name = `writer ${started++}`;
         const run = await runUntilEnd(process.execPath, [writer, file, name, '1000000', '12'], {
           onFirstOutput: async (child) => {
@@ -50,15 +53,15 @@ describe('the logbook', () => {
     };
     await Promise.all(Array.from({ length: AT_ONCE }, keepKilling));
 
-    expect(killed).toBe(KILLS);
-    expect(confirmed.length).toBeGreaterThan(2 * KILLS);
+    expect(killed).toBe(started);
+    expect(confirmed.length).toBeGreaterThan(started);
     expect(confirmed.every((line) => /^[0-9a-f]{12}$/.test(line))).toBe(true);
     const { ids, others } = takeStock(file);
     expect(confirmed.filter((id) => !ids.has(id))).toEqual([]);
     expect(others).toMatchObject({ altered: 0, foreign: 0, unreadable: 0 });
     // Each kill can leave one whole record that was not confirmed any more, and one line cut off.
-    expect(ids.size - confirmed.length).toBeLessThanOrEqual(KILLS);
-    expect(others.unfinished).toBeLessThanOrEqual(2 * KILLS);
+    expect(ids.size - confirmed.length).toBeLessThanOrEqual(started);
+    expect(others.unfinished).toBeLessThanOrEqual(2 * started);
   }, 120_000);
 
   it('keeps every record of two programs that write thousands at once, each once', async () => {

@@ -6,6 +6,7 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { isRefusal, type Refusal } from '../../src/medium/refusal.ts';
 import { keepRecord, type LogEntry, logEntries } from '../../src/record/logbook.ts';
 import { appendToLogbook, type Confirmed, type Files, logbookLines } from '../../src/record/logbook-file.ts';
+import { placeAt } from '../../src/record/logbook-path.ts';
 import { recordLine } from '../../src/record/record-line.ts';
 import { sampleRecord } from './sample-record.ts';
 import { bundleWriter, runUntilEnd, testFolder } from './writer.ts';
@@ -21,13 +22,13 @@ afterAll(() => {
 const freshFile = (): string => path.join(folder, `logbook-${fileCount++}.jsonl`);
 
 function keep(file: string, note: string, files?: Files): Confirmed {
-  const outcome = keepRecord(file, sampleRecord(note), files);
+  const outcome = keepRecord({ file, base: folder }, sampleRecord(note), files);
   if (isRefusal(outcome)) throw new Error(outcome.message);
   return outcome;
 }
 
 function refusal(file: string, files?: Files): Refusal {
-  const outcome = keepRecord(file, sampleRecord('refused'), files);
+  const outcome = keepRecord({ file, base: folder }, sampleRecord('refused'), files);
   if (!isRefusal(outcome)) throw new Error('the record was confirmed');
   return outcome;
 }
@@ -53,6 +54,17 @@ describe('appending', () => {
     );
     expect(second.offset).toBe(recordLine(sampleRecord('one')).length + 1);
     expect(fs.statSync(path.join(folder, 'a')).mode & 0o777).toBe(0o700);
+  });
+
+  it('makes no folder at or above the base, so that a disk not mounted does not go unnoticed', () => {
+    const unmounted = path.join(folder, 'mounts', 'lab');
+    const file = path.join(unmounted, 'notes', 'logbook.jsonl');
+    for (const place of [placeAt(file), { file, base: unmounted }]) {
+      const told = keepRecord(place, sampleRecord('x'));
+      expect(told).toMatchObject({ code: 'logbook-path', exit: 4 });
+    }
+    expect(fs.existsSync(path.join(folder, 'mounts'))).toBe(false);
+    expect(keepRecord({ file, base: '/' }, sampleRecord('x'))).toMatchObject({ confirmed: true });
   });
 
   it('writes once, then syncs the file and its folder, then reads back, and only then confirms', () => {
@@ -188,8 +200,8 @@ describe('appending', () => {
   });
 
   it('takes no text that is not one line', () => {
-    expect(() => appendToLogbook(freshFile(), 'a\nb')).toThrow(RangeError);
-    expect(() => appendToLogbook(freshFile(), '')).toThrow(RangeError);
+    expect(() => appendToLogbook(placeAt(freshFile()), 'a\nb')).toThrow(RangeError);
+    expect(() => appendToLogbook(placeAt(freshFile()), '')).toThrow(RangeError);
   });
 });
 
@@ -239,7 +251,7 @@ describe('a disk that refuses', () => {
         throw new TypeError('not a file matter');
       }) as unknown as Files['fstatSync'],
     });
-    expect(() => keepRecord(freshFile(), sampleRecord('x'), broken)).toThrow(TypeError);
+    expect(() => keepRecord(placeAt(freshFile()), sampleRecord('x'), broken)).toThrow(TypeError);
   });
 
   it('refuses a path below a file, a folder, a pipe, a name too long and a name with a NUL', () => {

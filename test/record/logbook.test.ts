@@ -12,6 +12,7 @@ import {
   recordsOf,
   searchRecords,
 } from '../../src/record/logbook.ts';
+import { placeAt } from '../../src/record/logbook-path.ts';
 import { recordLine } from '../../src/record/record-line.ts';
 import { FULL_RECORD } from './full-record.ts';
 import { sampleRecord } from './sample-record.ts';
@@ -22,11 +23,11 @@ let file: string;
 beforeAll(() => {
   folder = testFolder();
   file = path.join(folder, 'logbook.jsonl');
-  keepRecord(file, sampleRecord('first, Brewster window'));
+  keepRecord(placeAt(file), sampleRecord('first, Brewster window'));
   fs.appendFileSync(file, '# a note by hand\n\n{"other":"program"}\n[1,2]\n');
-  keepRecord(file, FULL_RECORD);
+  keepRecord(placeAt(file), FULL_RECORD);
   fs.appendFileSync(file, `${recordLine(sampleRecord('changed')).replaceAll('changed', 'Changed')}\n`);
-  keepRecord(file, sampleRecord('last, 10.6 µm on ZnSe'));
+  keepRecord(placeAt(file), sampleRecord('last, 10.6 µm on ZnSe'));
   fs.appendFileSync(file, '{"schema":1,"id":"0');
 });
 afterAll(() => fs.rmSync(folder, { recursive: true, force: true }));

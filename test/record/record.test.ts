@@ -2,7 +2,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { makeQuestion } from '../../src/answer/question.ts';
-import { logbookPath } from '../../src/record/logbook-path.ts';
+import { logbookPlace } from '../../src/record/logbook-path.ts';
 import { toPlainJson } from '../../src/record/plain-json.ts';
 import { describeQuestion, idOfRecord } from '../../src/record/record.ts';
 import { isRecord, parseRecordLine, recordLine } from '../../src/record/record-line.ts';
@@ -145,20 +145,38 @@ describe('the time of a record', () => {
 
 describe('the place of the logbook', () => {
   it.each([
-    [{}, '/home/ada', undefined, '/home/ada/.local/state/halfspace/logbook.jsonl'],
-    [{ XDG_STATE_HOME: '/state' }, '/home/ada', undefined, '/state/halfspace/logbook.jsonl'],
-    [{ XDG_STATE_HOME: 'state' }, '/home/ada', undefined, '/home/ada/.local/state/halfspace/logbook.jsonl'],
-    [{ XDG_STATE_HOME: '' }, '/home/ada', undefined, '/home/ada/.local/state/halfspace/logbook.jsonl'],
-    [{ XDG_STATE_HOME: '/state' }, undefined, undefined, '/state/halfspace/logbook.jsonl'],
-    [{ XDG_STATE_HOME: '/state' }, '/home/ada', 'bench/a.jsonl', '/work-place/bench/a.jsonl'],
-    [{}, undefined, '/data/a.jsonl', '/data/a.jsonl'],
-  ])('%j, home %s, given %s: %s', (environment, home, given, expected) => {
-    expect(logbookPath(environment, home, given, '/work-place')).toBe(expected);
+    [{}, '/home/ada', undefined, '/home/ada/.local/state/halfspace/logbook.jsonl', '/home/ada'],
+    [{ XDG_STATE_HOME: '/state' }, '/home/ada', undefined, '/state/halfspace/logbook.jsonl', '/'],
+    [
+      { XDG_STATE_HOME: 'state' },
+      '/home/ada',
+      undefined,
+      '/home/ada/.local/state/halfspace/logbook.jsonl',
+      '/home/ada',
+    ],
+    [
+      { XDG_STATE_HOME: '' },
+      '/home/ada',
+      undefined,
+      '/home/ada/.local/state/halfspace/logbook.jsonl',
+      '/home/ada',
+    ],
+    [{ XDG_STATE_HOME: '/state' }, undefined, undefined, '/state/halfspace/logbook.jsonl', '/'],
+    [
+      { XDG_STATE_HOME: '/state' },
+      '/home/ada',
+      'bench/a.jsonl',
+      '/work-place/bench/a.jsonl',
+      '/work-place/bench',
+    ],
+    [{}, undefined, '/data/a.jsonl', '/data/a.jsonl', '/data'],
+  ])('%j, home %s, given %s: %s', (environment, home, given, expected, base) => {
+    expect(logbookPlace(environment, home, given, '/work-place')).toEqual({ file: expected, base });
   });
 
   it('is refused where there is neither a home nor a name', () => {
-    expect(logbookPath({}, undefined, undefined, '/')).toMatchObject({ code: 'logbook-no-home', exit: 4 });
-    expect(logbookPath({ XDG_STATE_HOME: 'x' }, '', undefined, '/')).toMatchObject({
+    expect(logbookPlace({}, undefined, undefined, '/')).toMatchObject({ code: 'logbook-no-home', exit: 4 });
+    expect(logbookPlace({ XDG_STATE_HOME: 'x' }, '', undefined, '/')).toMatchObject({
       code: 'logbook-no-home',
     });
   });

@@ -12,7 +12,7 @@ const [file = '', name = '', count = '0', largeEvery = '0'] = process.argv.slice
 for (let i = 0; i < Number(count); i++) {
   const isLarge = Number(largeEvery) > 0 && i % Number(largeEvery) === 4;
   const record = sampleRecord(`${name} ${i} ${'x'.repeat(isLarge ? 150_000 : 37 * (i % 60))}`);
-  const outcome = keepRecord(file, record);
+  const outcome = keepRecord({ file, base: '/' }, record);
   if (isRefusal(outcome)) {
     writeSync(1, `refused ${outcome.exit} ${outcome.code}: ${outcome.message}; ${outcome.remedy}\n`);
     break;
