@@ -38,7 +38,12 @@ export function rayField(answer: Answer): RayField {
   const { from, geometry } = answer;
   const angle = geometry.incidenceAngle_rad;
   const isP = geometry.polarization === 'p';
-  const { rs, rp, ts, tp } = answer.interface;
+  const { Rs, Rp, Ts, Tp } = answer.interface;
+  // Layers summed as intensities have no amplitude: their size is drawn, without a phase.
+  const rs = answer.interface.rs ?? { re: Math.sqrt(Rs), im: 0 };
+  const rp = answer.interface.rp ?? { re: Math.sqrt(Rp), im: 0 };
+  const ts = answer.interface.ts ?? { re: Math.sqrt(Ts ?? 0), im: 0 };
+  const tp = answer.interface.tp ?? { re: Math.sqrt(Tp ?? 0), im: 0 };
   const cos2a = Math.cos(2 * angle);
   const g = isP ? { re: -rp.re * cos2a, im: -rp.im * cos2a } : rs;
   const t = isP ? tp : ts;
@@ -48,9 +53,9 @@ export function rayField(answer: Answer): RayField {
   const fieldBefore = (d: number): Complex => {
     const phase = TURN * from.n * d;
     const grown = Math.min(LARGEST, Math.exp(TURN * from.k * d));
-    const back = Math.exp(-TURN * from.k * d * cos2a);
-    const reflected = mul(g, { re: Math.cos(phase * cos2a) * back, im: Math.sin(phase * cos2a) * back });
-    return { re: Math.cos(phase) * grown + reflected.re, im: -Math.sin(phase) * grown + reflected.im };
+    const fallen = Math.exp(-TURN * from.k * d * cos2a);
+    const back = mul(g, { re: Math.cos(phase * cos2a) * fallen, im: Math.sin(phase * cos2a) * fallen });
+    return { re: Math.cos(phase) * grown + back.re, im: -Math.sin(phase) * grown + back.im };
   };
   const instant = instantOf(fieldBefore, from.n);
   const realPart = (z: Complex): number => z.re * instant.re + z.im * instant.im;

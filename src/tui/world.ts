@@ -3,10 +3,12 @@
  * result. The reducer and the views get it handed in, so they are pure and run in tests without files.
  */
 import type { Answer } from '../answer/answer.ts';
-import type { Question } from '../answer/question.ts';
+import type { MediumSpec, Question } from '../answer/question.ts';
 import type { Lookup } from '../catalog/catalogue.ts';
 import type { CatalogueEntry } from '../catalog/entries.ts';
 import type { Material, Source } from '../catalog/types.ts';
+import type { Conditions } from '../dispersion/evaluator.ts';
+import type { Optics } from '../interface/optics.ts';
 import type { Refusal } from '../medium/refusal.ts';
 import type { Bindings } from './keys/bindings.ts';
 
@@ -17,5 +19,11 @@ export interface World {
   lookup(name: string): Lookup;
   material(key: string): Material | undefined;
   source(id: string): Source | undefined;
+  /** Optical constants at equal ratios over a range; undefined while they are being worked out. */
+  opticsOver(
+    medium: MediumSpec,
+    conditions: Conditions,
+    range_m: readonly [number, number],
+  ): readonly (Optics | null)[] | undefined;
   readonly bindings: Bindings;
 }

@@ -12,6 +12,7 @@ import { lineOfSpans, penOf } from '../view/pen.ts';
 import { openingView, stripView } from '../view/strip-view.ts';
 import { tooSmallView } from '../view/too-small-view.ts';
 import type { World } from '../world.ts';
+import { Curves } from './curves.tsx';
 import { Halves } from './halves.tsx';
 import { Lines } from './lines.tsx';
 import { Part } from './part.tsx';
@@ -48,6 +49,7 @@ function Picture({ state, world }: ScreenProps) {
     <>
       <Strip state={state} world={world} />
       {plan.kind === 'full' ? <Halves state={state} world={world} /> : <Part state={state} world={world} />}
+      {plan.curve > 0 ? <Curves state={state} world={world} /> : null}
     </>
   );
 }

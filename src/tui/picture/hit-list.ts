@@ -3,12 +3,12 @@
  * the marked one below. It takes the place of the half's own rows; the other half stays as it is.
  */
 import { displayWidth } from '../../term/display-width.ts';
-import { fitToWidth } from '../../term/fit-width.ts';
+import { fitToWidth, padEndToWidth, padStartToWidth } from '../../term/fit-width.ts';
 import { toAscii } from '../../units/to-ascii.ts';
 import { hitsFor } from '../hits.ts';
 import type { Search, State } from '../state.ts';
 import type { World } from '../world.ts';
-import { hitFacts } from './hit-facts.ts';
+import { type HitFacts, hitFacts } from './hit-facts.ts';
 import { BLOCK_WIDTH, sceneOf } from './scene.ts';
 import { wrapText } from './wrap.ts';
 
@@ -40,7 +40,7 @@ export function listLines(state: State, search: Search, world: World, columns: n
   const facts = seen.map((hit) => hitFacts(hit, state.question, world, style));
   const lines: ListLine[] = facts.map((f, i) => ({
     kind: 'hit',
-    text: hitLine(f.name, f.index, f.transparency, width, style.ascii),
+    text: hitLine(f, columnsFor(facts, width), style.ascii),
     isSelected: search.top + i === search.selected,
   }));
   while (lines.length < rows) lines.push(BLANK);
@@ -57,14 +57,22 @@ export function listLines(state: State, search: Search, world: World, columns: n
 
 const BLANK: ListLine = { kind: 'blank', text: '', isSelected: false };
 
-const INDEX_WIDTH = 6;
-const STATE_WIDTH = 9;
+interface HitColumns {
+  readonly name: number;
+  readonly index: number;
+  readonly transparency: number;
+}
 
-/** "Fused silica     1.4570 clear": the name gives way where room is short. */
-function hitLine(name: string, index: string, state: string, width: number, ascii: boolean): string {
-  const plain = ascii ? toAscii(name) : name;
-  const indexWidth = Math.max(INDEX_WIDTH, displayWidth(index));
-  const room = width - 2 - indexWidth - STATE_WIDTH - 2;
-  const cut = fitToWidth(plain, Math.max(4, room), ascii ? '.' : '…');
-  return `${cut} ${index.padStart(indexWidth)} ${state}`;
+/** As wide as what is in sight needs; the name takes the rest. */
+function columnsFor(facts: readonly HitFacts[], width: number): HitColumns {
+  const index = Math.max(1, ...facts.map((f) => displayWidth(f.index)));
+  const transparency = Math.max(1, ...facts.map((f) => displayWidth(f.transparency)));
+  return { name: Math.max(4, width - 2 - index - transparency - 2), index, transparency };
+}
+
+/** "Fused silica     1.4570 clear" */
+function hitLine(facts: HitFacts, columns: HitColumns, ascii: boolean): string {
+  const name = ascii ? toAscii(facts.name) : facts.name;
+  const cut = fitToWidth(name, columns.name, ascii ? '.' : '…');
+  return `${cut} ${padStartToWidth(facts.index, columns.index)} ${padEndToWidth(facts.transparency, columns.transparency)}`;
 }

@@ -33,6 +33,8 @@ export interface PlanNeeds {
   readonly head: number;
   /** Lines of the notice, at least 1. */
   readonly notice: number;
+  /** Lines of the longest block. */
+  readonly body: number;
 }
 
 export function planScreen(size: ScreenSize, needs: PlanNeeds): Plan {
@@ -59,20 +61,21 @@ function nothing(columns: number): Plan {
   };
 }
 
-/** Lines the halves need before anything else grows. */
-const BODY_FIRST = 16;
+/** A curve of fewer lines says nothing; of more, nothing further. */
+const SHORTEST_CURVE = 8;
+const TALLEST_CURVE = 26;
 
 function fullPlan({ columns, rows }: ScreenSize, needs: PlanNeeds): Plan {
   const lines = rows - 1;
   const head = Math.min(needs.head, 4);
   const footer = 1;
   const joint = 1;
-  const strip = rows < 22 ? 3 : rows < 28 ? 4 : rows < 36 ? 5 : rows < 50 ? 6 : 8;
+  const strip = rows < 22 ? 3 : rows < 28 ? 4 : rows < 46 ? 5 : rows < 56 ? 7 : 9;
   const least = 8;
   const notice = Math.max(1, Math.min(needs.notice, lines - head - strip - joint - footer - least));
   const rest = lines - head - strip - joint - notice - footer;
-  const spare = rest - BODY_FIRST;
-  const curve = spare >= 7 ? Math.min(Math.floor(spare * 0.75), 20) : 0;
+  const spare = rest - Math.max(14, needs.body);
+  const curve = spare >= SHORTEST_CURVE ? Math.min(spare, TALLEST_CURVE) : 0;
   const middle = columns < 100 ? 22 : columns < 140 ? 28 : 32;
   const left = Math.floor((columns - middle - 2) / 2);
   return {

@@ -37,7 +37,11 @@ function makeScene(state: State, world: World): Scene {
   const blocks = blocksOf(state, world);
   const wide = [...flowItems(blocks.wave, columns), ...flowItems(blocks.conditions, columns)];
   const notice = noticeLines(state, world, columns);
-  const plan = planScreen(state.size, { head: wide.length, notice: Math.max(2, notice.length) });
+  const plan = planScreen(state.size, {
+    head: wide.length,
+    notice: Math.max(2, notice.length),
+    body: longest(blocks),
+  });
   const head = plan.kind === 'full' ? wide : flowItems(blocks.wave, columns);
   return {
     plan,
@@ -47,8 +51,16 @@ function makeScene(state: State, world: World): Scene {
   };
 }
 
+function longest(blocks: Blocks): number {
+  return Math.max(
+    ...PLACES.map(
+      (place) => blocks[place].top.length + blocks[place].body.length + blocks[place].bottom.length,
+    ),
+  );
+}
+
 /** Text of a block is at most this wide: on wide screens it stays near the boundary, where the eye is. */
-export const BLOCK_WIDTH = 44;
+export const BLOCK_WIDTH = 46;
 
 function arrangeAll(blocks: Blocks, plan: Plan, focus: StopId): Readonly<Record<Place, Arranged>> {
   const arrange = (block: Block, columns: number): Arranged =>

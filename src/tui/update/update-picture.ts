@@ -5,20 +5,10 @@ import type { FieldId } from '../fields/field.ts';
 import type { Side } from '../fields/medium-fields.ts';
 import type { ActionId } from '../keys/actions.ts';
 import { insertText } from '../line-edit.ts';
-import { focusOn, moveFocus, moveToEnd, moveToField } from '../moves.ts';
+import { moveFocus, moveToEnd, moveToField } from '../moves.ts';
 import { focusItem } from '../picture/notice.ts';
 import { recordText, resultText } from '../picture/record-text.ts';
-import {
-  answerOf,
-  askAnew,
-  fieldOfStop,
-  fieldStop,
-  redo,
-  refusalOf,
-  type State,
-  type Updated,
-  undo,
-} from '../state.ts';
+import { answerOf, askAnew, fieldOfStop, redo, refusalOf, type State, type Updated, undo } from '../state.ts';
 import type { World } from '../world.ts';
 import { setAngle, swapMedia } from './question-changes.ts';
 import { openEntry, typeInEntry } from './update-entry.ts';
@@ -113,9 +103,10 @@ function step(state: State, count: number, world: World): State {
   return stepField(state, id, count, world);
 }
 
+/** Steps a field wherever the focus is: one may turn the polarization while reading R. */
 function stepField(state: State, id: FieldId, count: number, world: World): State {
   const question = fieldById(id).step(count, { question: state.question, answer: answerOf(state) });
-  return question ? askAnew(focusOn(state, fieldStop(id), world), question, world) : state;
+  return question ? askAnew(state, question, world) : state;
 }
 
 function unset(state: State, world: World): State {

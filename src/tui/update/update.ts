@@ -16,7 +16,9 @@ export type Event =
   | { readonly kind: 'key'; readonly key: Key }
   | { readonly kind: 'paste'; readonly text: string }
   | { readonly kind: 'resize'; readonly size: ScreenSize }
-  | { readonly kind: 'message'; readonly message: Message };
+  | { readonly kind: 'message'; readonly message: Message }
+  /** Something the picture waits for has been worked out. */
+  | { readonly kind: 'ready' };
 
 export function update(state: State, event: Event, world: World): Updated {
   switch (event.kind) {
@@ -28,6 +30,8 @@ export function update(state: State, event: Event, world: World): Updated {
       return plain(sameSize(state.size, event.size) ? state : { ...state, size: event.size });
     case 'message':
       return plain({ ...state, message: event.message });
+    case 'ready':
+      return plain({ ...state });
   }
 }
 

@@ -10,6 +10,7 @@ import { catalogueFromSources } from '../../../src/catalog/from-sources.ts';
 import { makeSearch } from '../../../src/catalog/search.ts';
 import { charKey, type Key, type KeyName, namedKey } from '../../../src/term/key.ts';
 import { App } from '../../../src/tui/components/app.tsx';
+import { indexTable } from '../../../src/tui/index-tables.ts';
 import { bindKeys } from '../../../src/tui/keys/bindings.ts';
 import { type Effect, initialState, type Preferences, type State } from '../../../src/tui/state.ts';
 import { Store } from '../../../src/tui/store.ts';
@@ -35,6 +36,7 @@ export function testWorld(): World {
     lookup: (name) => catalogue.lookup(name),
     material: (key) => catalogue.material(key),
     source: (id) => catalogue.source(id),
+    opticsOver: indexTable,
     bindings: bindKeys().bindings,
   };
 }

@@ -1,0 +1,6 @@
+/** placeholder */
+import type { Start } from '../main.tsx';
+export async function runLinear(start: Start): Promise<number> {
+  start.host.warn('');
+  return 0;
+}

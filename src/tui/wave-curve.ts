@@ -1,0 +1,71 @@
+/**
+ * Reflectance over the wavelength, at the angle and polarization of the question: over the part of the spectrum around the
+ * present wave that the data of both media cover. The indices come as tables (world.opticsOver), which outlive a change of
+ * angle, polarization or wave, so that following a curve costs nothing.
+ */
+import type { Answer } from '../answer/answer.ts';
+import type { Question } from '../answer/question.ts';
+import { fresnel } from '../interface/fresnel.ts';
+import type { Optics } from '../interface/optics.ts';
+import { type Curve, clamp } from './reflectance-curves.ts';
+import type { World } from './world.ts';
+
+export interface WaveCurve {
+  readonly curve: Curve;
+  readonly range_m: readonly [number, number];
+  /** Largest value on it. */
+  readonly top: number;
+}
+
+/** Points of a table; between them a curve is straight. */
+export const TABLE_POINTS = 80;
+/** Two octaves to either side of the octave the wave is in: the window stays while the wave is stepped. */
+const OCTAVES = 2;
+
+/** null where a spectrum says nothing (media given by their numbers alone); undefined while the tables are being made. */
+export function waveCurve(question: Question, answer: Answer, world: World): WaveCurve | null | undefined {
+  const range_m = windowAround(answer);
+  if (!range_m) return null;
+  const from = world.opticsOver(question.from, question.conditions, range_m);
+  const into = world.opticsOver(question.into, question.conditions, range_m);
+  if (!from || !into) return undefined;
+  const values = from.map((optics, i) => reflectance(optics, into[i] ?? null, question));
+  return {
+    curve: { name: '', valueAt: (x) => between(values, x) },
+    range_m,
+    top: Math.max(0, ...values.map((v) => v ?? 0)),
+  };
+}
+
+function windowAround({ from, into, wave }: Answer): readonly [number, number] | undefined {
+  const ranges = [from.fit?.range_m, into.fit?.range_m].filter((r) => r !== undefined);
+  if (ranges.length === 0) return undefined;
+  const octave = 2 ** Math.round(Math.log2(wave.vacuumWavelength_m));
+  const low = Math.max(octave / 2 ** OCTAVES, ...ranges.map((r) => r[0]));
+  const high = Math.min(octave * 2 ** OCTAVES, ...ranges.map((r) => r[1]));
+  return high > low * 1.01 ? [low, high] : undefined;
+}
+
+/** The wavelength at a place from 0 to 1 along the axis: equal steps are equal ratios. */
+export function wavelengthAt([low, high]: readonly [number, number], x: number): number {
+  return low * (high / low) ** x;
+}
+
+export function placeOfWavelength([low, high]: readonly [number, number], wavelength_m: number): number {
+  return Math.log(wavelength_m / low) / Math.log(high / low);
+}
+
+function reflectance(from: Optics | null, into: Optics | null, question: Question): number | null {
+  if (!from || !into || from.n.re <= 0) return null;
+  const { Rs, Rp } = fresnel(from, into, question.incidenceAngle_rad);
+  const { polarization } = question;
+  return clamp(polarization === 's' ? Rs : polarization === 'p' ? Rp : (Rs + Rp) / 2);
+}
+
+function between(values: readonly (number | null)[], x: number): number | null {
+  const at = x * (values.length - 1);
+  const i = Math.min(values.length - 2, Math.floor(at));
+  const left = values[i] ?? null;
+  const right = values[i + 1] ?? null;
+  return left === null || right === null ? null : left + (right - left) * (at - i);
+}
