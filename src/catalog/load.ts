@@ -2,13 +2,13 @@
  * Opens the catalogue: the packed file beside the running program, and the user's own entries beside it. One read and no
  * parsing beyond a short header (see packed.ts). Run from the sources, it takes the file of the last build.
  */
-import { existsSync, openSync, readFileSync, readSync } from 'node:fs';
+import { existsSync, fstatSync, openSync, readFileSync, readSync } from 'node:fs';
 import { dirname, join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import type { IndexedCatalogue } from './entries.ts';
 import { type OwnProblem, readOwnFiles, withOwn } from './own.ts';
 import { ownFolderPath, readOwnFolder } from './own-folder.ts';
-import { indexLength, openPacked } from './packed.ts';
+import { indexLength, openPacked, packedLength } from './packed.ts';
 import { CATALOGUE_FILE, CHECKS_FILE } from './packed-header.ts';
 
 export interface LoadedCatalogue {
@@ -25,6 +25,8 @@ export class CatalogueFileError extends Error {
 export interface LoadOptions {
   /** The folder that the user names in place of the default one. */
   readonly ownFolder?: string | undefined;
+  /** The folder of the packed files; that of the program itself where absent. */
+  readonly folder?: string;
   /** Where XDG_DATA_HOME is looked up; `process.env` where absent. */
   readonly env?: Readonly<Record<string, string | undefined>>;
 }
@@ -34,7 +36,7 @@ export interface LoadOptions {
  * named but does not exist is among the problems.
  */
 export function loadCatalogue(options: LoadOptions = {}): LoadedCatalogue {
-  const bundled = openBundled();
+  const bundled = openBundled(options.folder);
   const path = options.ownFolder ?? ownFolderPath(options.env ?? process.env);
   const folder = readOwnFolder(path);
   if (!folder)
@@ -44,8 +46,8 @@ export function loadCatalogue(options: LoadOptions = {}): LoadedCatalogue {
 }
 
 /** The bundled catalogue alone. */
-export function openBundled(): IndexedCatalogue {
-  const path = pathOf(CATALOGUE_FILE);
+export function openBundled(folder?: string): IndexedCatalogue {
+  const path = pathOf(CATALOGUE_FILE, folder);
   try {
     // Stays open: records are read when they are asked for, and from this file even if another replaces it meanwhile.
     const file = openSync(path, 'r');
@@ -54,8 +56,10 @@ export function openBundled(): IndexedCatalogue {
       return bytes.subarray(0, readSync(file, bytes, 0, length, from));
     };
     const start = read(0, FIRST_READ);
-    const length = indexLength(start) ?? FIRST_READ;
-    return openPacked(length <= start.length ? start : read(0, length), read);
+    const length = indexLength(start);
+    const bytes = length <= start.length ? start : read(0, length);
+    if (fstatSync(file).size !== packedLength(bytes)) throw new Error('the file is cut short or changed');
+    return openPacked(bytes, read);
   } catch (error) {
     throw new CatalogueFileError(`${path}: ${error instanceof Error ? error.message : String(error)}`);
   }
@@ -65,8 +69,8 @@ export function openBundled(): IndexedCatalogue {
 const FIRST_READ = 160_000;
 
 /** The check values, one JSON document a line (see pack.ts); only the self-test reads them. */
-export function readCheckValues(): string {
-  const path = pathOf(CHECKS_FILE);
+export function readCheckValues(folder?: string): string {
+  const path = pathOf(CHECKS_FILE, folder);
   try {
     return readFileSync(path, 'utf8');
   } catch (error) {
@@ -75,7 +79,8 @@ export function readCheckValues(): string {
 }
 
 /** Beside the running program, or, where it runs from its sources, in the folder of the last build. */
-function pathOf(name: string): string {
+function pathOf(name: string, folder: string | undefined): string {
+  if (folder !== undefined) return join(folder, name);
   const here = dirname(fileURLToPath(import.meta.url));
   const beside = join(here, name);
   const built = join(here, '..', '..', 'dist', name);

@@ -40,7 +40,7 @@ export interface OwnEntries {
 
 /** One line for a person: where, what, remedy. */
 export function problemText(p: OwnProblem): string {
-  return `${p.file}: ${p.path === '' ? 'the file' : p.path} ${p.message}; ${p.remedy}`;
+  return `${p.file}${p.path === '' ? '' : `: ${p.path}`} ${p.message}; ${p.remedy}`;
 }
 
 export const OWN_BIBLIOGRAPHY = 'bibliography.json';

@@ -12,11 +12,17 @@ import type { Axis, Material, Source } from './types.ts';
 /** Bytes of the records section, from the start of the file. */
 export type ReadBytes = (from: number, length: number) => Buffer;
 
-/** How many bytes from the start of the file the header and the index take; undefined if `start` does not hold the header. */
-export function indexLength(start: Buffer): number | undefined {
-  const end = start.indexOf('\n');
-  return end < 0 ? undefined : end + 1 + readHeader(start).sections.records[0];
+/** How many bytes from the start of the file the header and the index take. Throws as `openPacked` does. */
+export const indexLength = (start: Buffer): number =>
+  headerLength(start) + readHeader(start).sections.records[0];
+
+/** How long the whole file must be. Throws as `openPacked` does. */
+export function packedLength(start: Buffer): number {
+  const [offset, length] = readHeader(start).sections.records;
+  return headerLength(start) + offset + length;
 }
+
+const headerLength = (start: Buffer): number => start.indexOf('\n') + 1;
 
 /**
  * @param bytes the file, or as much of it as holds the index (see `indexLength`); kept, never written to.
@@ -28,7 +34,7 @@ export function openPacked(
   read: ReadBytes = (from, length) => bytes.subarray(from, from + length),
 ): IndexedCatalogue {
   const header = readHeader(bytes);
-  const start = bytes.indexOf('\n') + 1;
+  const start = headerLength(bytes);
   const part = (name: SectionName): Buffer => {
     const [offset, length] = header.sections[name];
     return bytes.subarray(start + offset, start + offset + length);

@@ -148,8 +148,8 @@ describe('faults are named with file, place and remedy', () => {
   const fit = glass.fits[0]!;
   const withFit = (over: object): unknown => ({ ...glass, fits: [{ ...fit, ...over }] });
   it.each([
-    ['not JSON', '{"key": ', /^\/home\/u\/own\/a\.json: the file is not JSON \(.*\); correct it there$/],
-    ['a list', [], /the file is a list; must be an object in braces/],
+    ['not JSON', '{"key": ', /^\/home\/u\/own\/a\.json is not JSON \(.*\); correct it there$/],
+    ['a list', [], /a\.json is a list; must be an object in braces/],
     ['no name', { ...glass, name: undefined }, /: name is missing; add it: a text in quotes/],
     [
       'bad key',
@@ -236,10 +236,10 @@ describe('faults are named with file, place and remedy', () => {
   });
 
   it.each([
-    ['', /: the file has no lines; begin with a header line such as/],
+    ['', /bad\.csv has no lines; begin with a header line such as/],
     ['um,n\n1,2\n', /: line 1 reads "um,n"; must be a header line such as "wavelength_um,n"/],
     ['wavelength_um,n,k,x\n1,2,3,4\n', /: line 1 reads/],
-    ['wavelength_um,n\n1,1.5\n', /: the file has 1 rows of values; give at least two/],
+    ['wavelength_um,n\n1,1.5\n', /bad\.csv has 1 rows of values; give at least two/],
     ['wavelength_um,n\n1,1.5\n2\n', /: line 3 has 1 values; must have 2: wavelength_um, n/],
     ['wavelength_um;n\n1;1,5\n2;1,4\n', /: line 2, n is "1,5"; must be a number above 0, with a point: 1\.5/],
     ['wavelength_um,n,k\n1,1.5,-1e-3\n2,1.4,0\n', /: line 2, k is "-1e-3"; must be a number of at least 0/],
