@@ -10,6 +10,9 @@ import { type EnergyParts, energyParts } from './energy-answer.ts';
 import { indexUncertainty, powerSpread } from './input-uncertainty.ts';
 import { interfaceParts, LOSSY_INCIDENCE, powerOf } from './interface-answer.ts';
 import { type MediumSide, mediumSide, type SourceOf } from './medium-side.ts';
+import { type Path, readPath } from './path.ts';
+import { pathNotes, pathPower, pathSurface, solvePath, surfacePower } from './path-powers.ts';
+import { pulseAnswer, pulseNotes } from './pulse-answer.ts';
 import type { Question } from './question.ts';
 import { bothReferences, waveAnswer } from './wave.ts';
 
@@ -31,34 +34,31 @@ export function answerQuestion(question: Question, sourceOf: SourceOf): Answer |
   }
 
   const vacuumWavelength_m = wave.vacuum_um * 1e-6;
-  const { answer: surface, wave: amplitudes } = interfaceParts(
-    from,
-    into,
-    incidenceAngle_rad,
-    polarization,
-    vacuumWavelength_m,
-  );
-  const spread = powerSpread(question, wave, from, into);
-  const reflected = spread.of(surface.R, (w) => powerOf(polarization, w.Rs, w.Rp));
-  const crossing = surface.T === null ? null : spread.of(surface.T, (w) => powerOf(polarization, w.Ts, w.Tp));
+  const first = interfaceParts(from, into, incidenceAngle_rad, polarization, vacuumWavelength_m);
+  const path = question.layers.length > 0 ? readPath(question, wave, from, into, sourceOf) : null;
+  if (isRefusal(path)) return path;
+  const parts = path && solvePath(path, question, vacuumWavelength_m);
+  if (isRefusal(parts)) return parts;
+  const surface = parts ? pathSurface(first.answer, parts, polarization) : first.answer;
+
+  const layerSides = path?.layers.map((l) => l.side) ?? [];
+  const spread = powerSpread(question, wave, from, into, layerSides);
+  const power = path ? pathPower(path, question, vacuumWavelength_m) : surfacePower;
+  const reflected = spread.of(surface.R, (moved) => powerOf(polarization, ...power(moved).R));
+  const crossing =
+    surface.T === null ? null : spread.of(surface.T, (moved) => powerOf(polarization, ...power(moved).T));
+  const powers = { R: surface.R, T: surface.T, surface: parts ? null : first.wave };
   const energy: EnergyParts | null = question.beam
-    ? energyParts(
-        question.beam,
-        from,
-        into,
-        amplitudes,
-        polarization,
-        incidenceAngle_rad,
-        vacuumWavelength_m,
-        surface.T !== null,
-      )
+    ? energyParts(question.beam, from, into, powers, polarization, incidenceAngle_rad, vacuumWavelength_m)
     : null;
+  const pulse = pulseAnswer(question, parts);
 
   return {
     wave: waveAnswer(wave, question.wave.inAir),
     geometry: { incidenceAngle_rad, polarization },
     from: { ...from.answer, n_uncertainty: indexUncertainty(from, question, 'from') },
     into: { ...into.answer, n_uncertainty: indexUncertainty(into, question, 'into') },
+    layers: parts?.layers ?? [],
     interface: {
       ...surface,
       R_uncertainty: spread.stated ? (reflected?.standardUncertainty ?? null) : null,
@@ -67,8 +67,17 @@ export function answerQuestion(question: Question, sourceOf: SourceOf): Answer |
       R_digitsGuide: reflected?.standardUncertainty ?? null,
       T_digitsGuide: crossing?.standardUncertainty ?? null,
     },
+    stack: parts?.stack ?? null,
+    window: parts?.window ?? null,
+    pulse,
     energy: energy?.answer ?? null,
-    cautions: collectCautions(from, into, surfaceNotes(from, surface), energy?.notes ?? []),
+    cautions: collectCautions(
+      from,
+      into,
+      path,
+      [...surfaceNotes(from, surface), ...(parts ? pathNotes(parts) : []), ...pulseNotes(pulse)],
+      energy?.notes ?? [],
+    ),
   };
 }
 
@@ -93,11 +102,16 @@ function surfaceNotes(
 function collectCautions(
   from: MediumSide,
   into: MediumSide,
+  path: Path | null,
   surface: readonly CautionNote[],
   beam: readonly CautionNote[],
 ): readonly Caution[] {
+  const layers = (path?.layers ?? []).flatMap(({ side }, i) =>
+    side.notes.map((n) => wordCaution(n, `layer ${i + 1}`, side.name)),
+  );
   return orderCautions([
     ...from.notes.map((n) => wordCaution(n, 'from', from.name)),
+    ...layers,
     ...into.notes.map((n) => wordCaution(n, 'into', into.name)),
     ...surface.map((n) => wordCaution(n, 'interface', 'interface')),
     ...beam.map((n) => wordCaution(n, 'beam', 'beam')),

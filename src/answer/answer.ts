@@ -107,10 +107,11 @@ export interface InterfaceAnswer {
   /** Spread of R and T where an accuracy is not stated and the disagreement with published values stands in: for digits only. */
   readonly R_digitsGuide: number | null;
   readonly T_digitsGuide: number | null;
-  readonly rs: Complex;
-  readonly rp: Complex;
-  readonly ts: Complex;
-  readonly tp: Complex;
+  /** Amplitudes of the surface, or of a wholly coherent stack; null where layers are summed as intensities. */
+  readonly rs: Complex | null;
+  readonly rp: Complex | null;
+  readonly ts: Complex | null;
+  readonly tp: Complex | null;
   readonly phaseRs_rad: number | null;
   readonly phaseRp_rad: number | null;
   readonly refractionAngle_rad: number | null;
@@ -134,6 +135,106 @@ export interface EnergyAnswer {
   readonly energyDensity_J_per_m3: number | null;
 }
 
+/** A layer of the path, in the order the wave meets them. */
+export interface LayerAnswer {
+  readonly medium: MediumAnswer;
+  readonly thickness_m: number;
+  /** Optical thickness n d over the vacuum wavelength. */
+  readonly opticalThickness_waves: number;
+  readonly coherent: boolean;
+  /** 2 n d cos(theta inside). */
+  readonly roundTripOpticalPath_m: number;
+  /** One pass, oblique path included. */
+  readonly internalTransmittance: number;
+  /** Share of the incident power, for the asked polarization. */
+  readonly absorptance: number;
+}
+
+export interface DelayAnswer {
+  readonly phase_rad: number;
+  readonly groupDelay_s: number;
+  readonly gdd_s2: number;
+}
+
+/** The whole path; R, T, A for the asked polarization. */
+export interface StackAnswer {
+  readonly R: number;
+  readonly T: number;
+  readonly A: number;
+  readonly Rs: number;
+  readonly Rp: number;
+  readonly Ts: number;
+  readonly Tp: number;
+  /** Seen from the far side at the conjugate angle. */
+  readonly R_back: number | null;
+  readonly layerAbsorptance: readonly number[];
+  readonly insertionLoss_dB: number | null;
+  readonly coherence: 'coherent' | 'incoherent' | 'mixed';
+  readonly coherenceLength_m: number;
+  /** False where the length is the program's own assumption. */
+  readonly coherenceLengthStated: boolean;
+  /** Null where any layer is summed as intensities. */
+  readonly reflectionS: DelayAnswer | null;
+  readonly reflectionP: DelayAnswer | null;
+  readonly transmissionS: DelayAnswer | null;
+  readonly transmissionP: DelayAnswer | null;
+  /** Largest |E|^2 over that of the incident wave, and where: metres behind the first face (before it: negative). */
+  readonly fieldMaximum: null | {
+    readonly intensity: number;
+    readonly position_m: number;
+    readonly layer: number;
+  };
+  readonly fieldMaximumBefore: null | {
+    readonly intensity: number;
+    readonly position_m: number;
+    readonly period_m: number;
+  };
+}
+
+/** One plate with two faces. */
+export interface WindowAnswer {
+  readonly R1: number;
+  readonly R2: number;
+  readonly internalTransmittance: number;
+  /** 1 - T, the ghosts included in T. */
+  readonly totalLoss: number;
+  readonly insertionLoss_dB: number | null;
+  /** Shares of the incident power: the direct beam, then the ghosts. */
+  readonly transmittedBeams: readonly number[];
+  readonly reflectedBeams: readonly number[];
+  readonly opticalPath_m: number;
+  readonly groupDelay_s: number | null;
+  readonly gdd_s2: number | null;
+  readonly tod_s3: number | null;
+  readonly lateralDisplacement_m: number;
+  readonly etalon: {
+    readonly finesse: number;
+    readonly finesseFromWidth: number | null;
+    readonly coefficientOfFinesse: number;
+    readonly T_max: number;
+    readonly T_min: number;
+    readonly contrast: number | null;
+    readonly ripple_dB: number | null;
+    readonly freeSpectralRange_Hz: number | null;
+    readonly freeSpectralRange_m: number | null;
+  };
+  /** Per rad of wedge, near normal incidence. */
+  readonly wedgeDeviation_rad_per_rad: number;
+  readonly wedgeGhostSeparation_rad_per_rad: number;
+}
+
+export interface PulseAnswer {
+  readonly durationIn_s: number;
+  readonly durationOut_s: number;
+  readonly gdd_s2: number;
+  readonly tod_s3: number | null;
+  /** Above 1 the gaussian result is not to be trusted. */
+  readonly thirdOrderRatio: number | null;
+  readonly timeBandwidthProduct: number;
+  readonly peakPower_W: number | null;
+  readonly peakFluence_J_per_m2: number | null;
+}
+
 export interface Answer {
   readonly wave: {
     readonly vacuumWavelength_m: number;
@@ -147,7 +248,13 @@ export interface Answer {
   readonly geometry: { readonly incidenceAngle_rad: number; readonly polarization: Polarization };
   readonly from: MediumAnswer;
   readonly into: MediumAnswer;
+  /** Between the two; empty for a single surface. */
+  readonly layers: readonly LayerAnswer[];
+  /** Of the surface, or of the whole path where there are layers. */
   readonly interface: InterfaceAnswer;
+  readonly stack: StackAnswer | null;
+  readonly window: WindowAnswer | null;
+  readonly pulse: PulseAnswer | null;
   readonly energy: null | {
     readonly incident: EnergyAnswer | null;
     readonly reflected: EnergyAnswer | null;

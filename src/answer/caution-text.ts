@@ -123,7 +123,7 @@ const WORDING: Readonly<Record<CautionCode, Wording>> = {
     'note',
     () => 'close to the critical angle: a real beam spreads over it; shifts and R hold for a plane wave only',
   ],
-  approximation: ['note', (d, s) => `${s}: ${d['text']}`],
+  approximation: ['caution', (d) => String(d['text'])],
   coherence: ['note', (d) => String(d['text'])],
   'self-focusing': [
     'caution',

@@ -10,8 +10,8 @@ import {
 } from '../interface/energy.ts';
 import type { FresnelResult } from '../interface/fresnel.ts';
 import type { CautionNote } from '../medium/caution.ts';
-import type { Answer } from './answer.ts';
-import { powerOf } from './interface-answer.ts';
+import { peakIrradiance_W_per_m2 as beamIrradiance_W_per_m2 } from '../stack/beam.ts';
+import type { Answer, EnergyAnswer } from './answer.ts';
 import type { MediumSide } from './medium-side.ts';
 import type { Beam, Polarization } from './question.ts';
 
@@ -20,37 +20,39 @@ export interface EnergyParts {
   readonly notes: readonly CautionNote[];
 }
 
-/**
- * Peak irradiance across the beam: 2P/(pi w^2) for a gaussian of 1/e^2 radius w, P/(pi a^2) for a flat-top of radius a
- * (common practice; ISO 11145 defines both widths). `null` where a power came without a diameter.
- */
+/** Peak irradiance across the beam; null where a power came without a diameter. */
 export function peakIrradiance_W_per_m2(beam: Beam, from: MediumSide): number | null {
   if (beam.kind === 'irradiance') return beam.irradiance_W_per_m2;
   if (beam.kind === 'field') return irradianceOfField(from.optics, beam.peakE_V_per_m);
   if (beam.diameter_m === undefined) return null;
-  const area_m2 = Math.PI * (beam.diameter_m / 2) ** 2;
-  return ((beam.profile === 'gaussian' ? 2 : 1) * beam.power_W) / area_m2;
+  return beamIrradiance_W_per_m2(beam.power_W, beam.diameter_m / 2, beam.profile);
+}
+
+/** Power fractions of the surface or the path, for the asked polarization; T null where it has no meaning. */
+export interface PowerFractions {
+  readonly R: number;
+  readonly T: number | null;
+  /** Fields just beyond the surface follow from its amplitudes; behind a path of layers only powers are given. */
+  readonly surface: FresnelResult | null;
 }
 
 export function energyParts(
   beam: Beam,
   from: MediumSide,
   into: MediumSide,
-  wave: FresnelResult,
+  powers: PowerFractions,
   polarization: Polarization,
   angle_rad: number,
   vacuumWavelength_m: number,
-  powersKnown: boolean,
 ): EnergyParts {
   const I = peakIrradiance_W_per_m2(beam, from);
-  const R = powerOf(polarization, wave.Rs, wave.Rp);
-  const T = powerOf(polarization, wave.Ts, wave.Tp);
+  const { R, T, surface } = powers;
   const power_W = beam.kind === 'power' ? beam.power_W : null;
-  const fields = I === null ? null : fieldsOf(I, from, into, wave, polarization, R);
+  const fields = I === null ? null : fieldsOf(I, from, into, powers, polarization, angle_rad);
   const pressure =
-    I === null || !powersKnown
+    I === null || T === null || !surface
       ? null
-      : radiationPressure_Pa(from.optics, into.optics, wave, R, T, angle_rad, I);
+      : radiationPressure_Pa(from.optics, into.optics, surface, R, T, angle_rad, I);
   return {
     answer: {
       incident: fields?.incident ?? null,
@@ -60,7 +62,7 @@ export function energyParts(
       photonFlux_per_s: power_W === null ? null : photonFlux_per_s(power_W, vacuumWavelength_m),
       incidentPower_W: power_W,
       reflectedPower_W: power_W === null ? null : R * power_W,
-      transmittedPower_W: power_W === null || !powersKnown ? null : T * power_W,
+      transmittedPower_W: power_W === null || T === null ? null : T * power_W,
     },
     notes: beamNotes(beam, R, angle_rad, vacuumWavelength_m, I, pressure),
   };
@@ -70,16 +72,29 @@ function fieldsOf(
   I: number,
   from: MediumSide,
   into: MediumSide,
-  wave: FresnelResult,
+  { R, T, surface }: PowerFractions,
   polarization: Polarization,
-  R: number,
+  angle_rad: number,
 ): Pick<NonNullable<Answer['energy']>, 'incident' | 'reflected' | 'transmitted'> {
   const E0 = fieldOfIrradiance(from.optics, I);
-  const beyond = (p: 's' | 'p') => transmittedEnergy(into.optics, into.groupIndex, wave, p, E0);
+  const beyond = (p: 's' | 'p', wave: FresnelResult) =>
+    transmittedEnergy(into.optics, into.groupIndex, wave, p, E0);
+  const transmitted = (): EnergyAnswer | null => {
+    if (surface) {
+      return polarization === 'unpolarized'
+        ? meanEnergy(beyond('s', surface), beyond('p', surface))
+        : beyond(polarization, surface);
+    }
+    // Behind layers: the flux that leaves them, spread over the refracted beam's cross-section.
+    const sin = (from.optics.n.re * Math.sin(angle_rad)) / into.optics.n.re;
+    if (T === null || T === 0 || sin >= 1) return null;
+    const I_out = (T * I * Math.cos(angle_rad)) / Math.sqrt(1 - sin * sin);
+    return planeWaveEnergy(into.optics, into.groupIndex, I_out);
+  };
   return {
     incident: planeWaveEnergy(from.optics, from.groupIndex, I),
     reflected: planeWaveEnergy(from.optics, from.groupIndex, R * I),
-    transmitted: polarization === 'unpolarized' ? meanEnergy(beyond('s'), beyond('p')) : beyond(polarization),
+    transmitted: transmitted(),
   };
 }
 

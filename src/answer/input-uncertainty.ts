@@ -4,7 +4,6 @@
  */
 import type { FitWave } from '../catalog/choose-fit.ts';
 import { K, N } from '../dispersion/evaluator.ts';
-import { type FresnelResult, fresnel } from '../interface/fresnel.ts';
 import { type Optics, opticsFromIndex } from '../interface/optics.ts';
 import type { MediumSide } from './medium-side.ts';
 import type { Question } from './question.ts';
@@ -15,6 +14,14 @@ interface Move {
   readonly into?: number;
   readonly wavelength_um?: number;
   readonly angle?: number;
+  readonly thickness_m?: number;
+  /** Offset of the index of one layer. */
+  readonly layer?: LayerOffset;
+}
+
+export interface LayerOffset {
+  readonly number: number;
+  readonly n: number;
 }
 
 interface MovedInput {
@@ -31,6 +38,7 @@ function uncertainInputs(
   wave: FitWave,
   from: MediumSide,
   into: MediumSide,
+  layers: readonly MediumSide[],
 ): readonly MovedInput[] {
   const { tolerances } = question;
   const inputs: MovedInput[] = [];
@@ -46,12 +54,31 @@ function uncertainInputs(
   const toVacuum = question.wave.inAir ? wave.vacuum_um / wave.air_um : 1;
   add('wavelength', (tolerances.wavelength_m ?? 0) * 1e6 * toVacuum, (x) => ({ wavelength_um: x }));
   add('angle of incidence', tolerances.angle_rad, (x) => ({ angle: x }));
+  for (const [number, side] of layers.entries()) {
+    const name = `index of ${side.name} (layer ${number + 1})`;
+    add(name, accuracy(side), (n) => ({ layer: { number, n } }));
+  }
+  if (layers.length > 0) {
+    add('thickness', tolerances.thickness_m, (x) => ({ thickness_m: x }));
+  }
   return inputs;
 }
 
-/** Spread of a power read off the Fresnel result by `power`. */
+/** What the uncertain inputs were moved to: both media's optics and the angle. */
+export interface Moved {
+  readonly from: Optics;
+  readonly into: Optics;
+  readonly angle_rad: number;
+  /** Shift of the vacuum wavelength, um; layers follow it by themselves. */
+  readonly shift_um: number;
+  /** Offset added to the thickness of every layer. */
+  readonly thickness_m: number;
+  readonly layer: LayerOffset | null;
+}
+
+/** Spread of a power that `power` computes from the moved inputs. */
 export interface PowerSpread {
-  of(value: number, power: (wave: FresnelResult) => number): Spread | null;
+  of(value: number, power: (inputs: Moved) => number): Spread | null;
   /** False where an accuracy that matters is not stated: the spread then guides digits and is no uncertainty. */
   readonly stated: boolean;
 }
@@ -61,17 +88,24 @@ export function powerSpread(
   wave: FitWave,
   from: MediumSide,
   into: MediumSide,
+  layers: readonly MediumSide[] = [],
 ): PowerSpread {
-  const inputs = uncertainInputs(question, wave, from, into);
-  const at = (move: Move): FresnelResult => {
+  const inputs = uncertainInputs(question, wave, from, into, layers);
+  const at = (move: Move): Moved => {
     const shift_um = move.wavelength_um ?? 0;
-    // |angle|: a beam tilted past the normal comes from the other side. Grazing is the far limit.
-    const angle = Math.min(Math.abs(question.incidenceAngle_rad + (move.angle ?? 0)), Math.PI / 2 - 1e-9);
-    return fresnel(moved(from, move.from ?? 0, shift_um), moved(into, move.into ?? 0, shift_um), angle);
+    return {
+      from: movedOptics(from, move.from ?? 0, shift_um),
+      into: movedOptics(into, move.into ?? 0, shift_um),
+      // |angle|: a beam tilted past the normal comes from the other side. Grazing is the far limit.
+      angle_rad: Math.min(Math.abs(question.incidenceAngle_rad + (move.angle ?? 0)), Math.PI / 2 - 1e-9),
+      shift_um,
+      thickness_m: move.thickness_m ?? 0,
+      layer: move.layer ?? null,
+    };
   };
   const givenByPerson = Object.keys(question.tolerances).length > 0;
   return {
-    stated: givenByPerson || (from.accuracy !== null && into.accuracy !== null),
+    stated: givenByPerson || [from, ...layers, into].every((side) => side.accuracy !== null),
     of: (value, power) =>
       propagate(
         value,
@@ -81,7 +115,7 @@ export function powerSpread(
 }
 
 /** The medium with its index moved: by an offset of n, and along its dispersion by a shift of wavelength. */
-function moved(side: MediumSide, dn: number, shift_um: number): Optics {
+export function movedOptics(side: MediumSide, dn: number, shift_um: number): Optics {
   if (dn === 0 && shift_um === 0) return side.optics;
   const { optics, jet } = side;
   const n = optics.n.re + jet[N + 1]! * shift_um + dn;

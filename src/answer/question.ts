@@ -72,8 +72,10 @@ export interface Question {
   readonly extrapolate: boolean;
   /** Wave for which `@qw`, `@hw` are meant; the wave asked where absent. */
   readonly designWave?: WaveSpec | undefined;
-  /** Layers whose round trip is longer than this are summed as intensities. */
+  /** Layers whose round trip is longer than half of this are summed as intensities. */
   readonly coherenceLength_m?: number | undefined;
+  /** Duration (FWHM of the intensity) of a gaussian pulse that passes the path. */
+  readonly pulseDuration_s?: number | undefined;
 }
 
 /** A question with every default in place: normal incidence, unpolarized, no beam. */

@@ -44,7 +44,7 @@ export function interfaceRows(answer: Answer, style: PresentStyle): readonly Sho
   rows.add(
     'T',
     `T${suffix}`,
-    'transmittance of the surface',
+    answer.layers.length > 0 ? 'transmittance of the path' : 'transmittance of the surface',
     powerText(surface.T, surface.T_uncertainty, surface.T_digitsGuide, style),
   );
   lossRows(rows, surface, style);
@@ -54,6 +54,7 @@ export function interfaceRows(answer: Answer, style: PresentStyle): readonly Sho
     rows.add('Rp', 'R_p', 'reflectance, p', powerText(surface.Rp, null, surface.R_digitsGuide, style));
   }
   if (surface.totalReflection) tunnelRows(rows, surface, style);
+  if (!surface.rs) return rows.list;
   rows.add('phaseRs_rad', 'arg r_s', 'phase of reflection, s', phaseText(surface.phaseRs_rad, style));
   rows.add('phaseRp_rad', 'arg r_p', 'phase of reflection, p', phaseText(surface.phaseRp_rad, style));
   return rows.list;
@@ -84,6 +85,7 @@ function angleRows(rows: RowList, answer: Answer, style: PresentStyle): void {
     ? 'total reflection'
     : degreesText(surface.refractionAngle_rad, 2, style);
   rows.add('refractionAngle_rad', 'θ_t', 'angle of refraction', refraction);
+  if (answer.layers.length > 0) return;
   if (surface.brewsterAngle_rad === null && surface.pseudoBrewsterAngle_rad !== null) {
     const pseudo = degreesText(surface.pseudoBrewsterAngle_rad, 2, style);
     rows.add('pseudoBrewsterAngle_rad', 'pseudo-Brewster', 'pseudo-Brewster angle (least R_p)', pseudo);

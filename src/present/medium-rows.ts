@@ -71,6 +71,12 @@ export function indexText(medium: MediumAnswer, known: Known, style: PresentStyl
   return formatNumber(medium.n, precisionFor(medium.n, known.uncertainty, EXACT_DIGITS), style);
 }
 
+/** n, or n + i k where the medium absorbs. */
+export function complexIndexText(medium: MediumAnswer, known: Known, style: PresentStyle): string {
+  const n = indexText(medium, known, style);
+  return medium.k > 1e-6 ? `${n} + ${formatNumber(medium.k, { significant: 4 }, style)} i` : n;
+}
+
 function electricRows(rows: RowList, medium: MediumAnswer, style: PresentStyle): void {
   rows.add(
     'relativePermittivity',

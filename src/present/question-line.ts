@@ -29,17 +29,21 @@ export function waveAliases(answer: Answer, style: PresentStyle): readonly strin
   ];
 }
 
+/** "Air → Magnesium fluoride film 99.6 nm → N-BK7". */
+export function pathText(answer: Answer, style: PresentStyle): string {
+  const layers = answer.layers.map(
+    (l) =>
+      `${mediumTitle(l.medium)} ${formatQuantity(Number(l.thickness_m.toPrecision(5)), METRE, 'shortest', { style })}`,
+  );
+  return [mediumTitle(answer.from), ...layers, mediumTitle(answer.into)].join(' → ');
+}
+
 export function questionLine(answer: Answer, style: PresentStyle): string {
   const { incidenceAngle_rad, polarization } = answer.geometry;
   const angle =
     incidenceAngle_rad === 0
       ? 'normal incidence'
       : `${degreesText(Number(incidenceAngle_rad.toPrecision(12)), 2, style)} from the normal`;
-  const line = [
-    `${mediumTitle(answer.from)} → ${mediumTitle(answer.into)}`,
-    wavelengthText(answer, style),
-    angle,
-    polarization,
-  ].join(', ');
+  const line = [pathText(answer, style), wavelengthText(answer, style), angle, polarization].join(', ');
   return style.ascii ? toAscii(line) : line;
 }

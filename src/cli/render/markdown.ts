@@ -7,11 +7,12 @@ import { pairRows } from '../../present/pair-rows.ts';
 import { mediumTitle, questionLine, waveAliases } from '../../present/question-line.ts';
 import type { PresentStyle } from '../../present/shown.ts';
 import { conditionsText, fitLine } from '../../present/source-lines.ts';
+import { layerText, layerTitle, pulseRows, stackRows, windowRows } from '../../present/stack-rows.ts';
 import { toAscii } from '../../units/to-ascii.ts';
 
 export function renderMarkdown(answer: Answer, style: PresentStyle): string {
   const lambda = answer.wave.vacuumWavelength_m;
-  const { from, into, energy } = answer;
+  const { from, into, energy, layers } = answer;
   const title = (m: Answer['from']): string => {
     const conditions = conditionsText(m, style);
     return conditions === '' ? mediumTitle(m) : `${mediumTitle(m)} (${conditions})`;
@@ -31,12 +32,19 @@ export function renderMarkdown(answer: Answer, style: PresentStyle): string {
     '',
     row(['interface', '']),
     row(['---', '---']),
-    ...[...interfaceRows(answer, style), ...beamRows(answer, style)].map((r) =>
-      row([`${r.label} ${r.symbol}`, r.text].map(cell)),
-    ),
+    ...layers.map((l, i) => row([`layer ${layerTitle(l, i + 1)}`, layerText(l, style)].map(cell))),
+    ...[
+      ...interfaceRows(answer, style),
+      ...stackRows(answer, style),
+      ...windowRows(answer, style),
+      ...pulseRows(answer, style),
+      ...beamRows(answer, style),
+    ].map((r) => row([`${r.label} ${r.symbol}`, r.text].map(cell))),
     ...(answer.cautions.length > 0 ? ['', ...answer.cautions.map((c) => `- **${c.level}** ${c.text}`)] : []),
     '',
-    ...[...new Set([from, into].flatMap((m) => fitLine(m, style)))].map((l) => `- ${l.trim()}`),
+    ...[...new Set([from, ...layers.map((l) => l.medium), into].flatMap((m) => fitLine(m, style)))].map(
+      (l) => `- ${l.trim()}`,
+    ),
   ];
   return `${(style.ascii ? lines.map(toAscii) : lines).join('\n').trimEnd()}\n`;
 }

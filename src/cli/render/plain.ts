@@ -3,9 +3,10 @@ import type { Answer } from '../../answer/answer.ts';
 import { beamRows, waveEnergyRows } from '../../present/energy-rows.ts';
 import { interfaceRows } from '../../present/interface-rows.ts';
 import { mediumRows } from '../../present/medium-rows.ts';
-import { questionLine } from '../../present/question-line.ts';
+import { mediumTitle, questionLine } from '../../present/question-line.ts';
 import type { PresentStyle, Shown } from '../../present/shown.ts';
 import { fitLine } from '../../present/source-lines.ts';
+import { layerText, pulseRows, stackRows, windowRows } from '../../present/stack-rows.ts';
 import { toAscii } from '../../units/to-ascii.ts';
 
 export function renderPlain(answer: Answer, style: PresentStyle): string {
@@ -16,12 +17,18 @@ export function renderPlain(answer: Answer, style: PresentStyle): string {
     `question\t${questionLine(answer, style)}`,
     ...part('from', mediumRows(answer.from, lambda, style)),
     ...part('into', mediumRows(answer.into, lambda, style)),
+    ...answer.layers.map((l, i) => `layer.${i + 1}\t${layerText(l, style)}\t${mediumTitle(l.medium)}`),
     ...part('interface', interfaceRows(answer, style)),
+    ...part('stack', stackRows(answer, style)),
+    ...part('window', windowRows(answer, style)),
+    ...part('pulse', pulseRows(answer, style)),
     ...part('incident', waveEnergyRows(answer.energy?.incident ?? null, style)),
     ...part('transmitted', waveEnergyRows(answer.energy?.transmitted ?? null, style)),
     ...part('beam', beamRows(answer, style)),
     ...answer.cautions.map((c) => `caution.${c.code}\t${c.about}\t${c.text}`),
-    ...[answer.from, answer.into].flatMap((m) => fitLine(m, style).map((l) => `source\t${l.trim()}`)),
+    ...[answer.from, ...answer.layers.map((l) => l.medium), answer.into].flatMap((m) =>
+      fitLine(m, style).map((l) => `source\t${l.trim()}`),
+    ),
   ];
   return `${(style.ascii ? lines.map((l) => l.split('\t').map(toAscii).join('\t')) : lines).join('\n')}\n`;
 }

@@ -10,6 +10,7 @@ import { pairRows } from '../../present/pair-rows.ts';
 import { mediumTitle, questionLine, waveAliases } from '../../present/question-line.ts';
 import type { PresentStyle, Shown } from '../../present/shown.ts';
 import { conditionsText, fitLine, GRADE_WORDS } from '../../present/source-lines.ts';
+import { layerText, layerTitle, pulseRows, stackRows, windowRows } from '../../present/stack-rows.ts';
 import { wrap } from '../../present/wrap.ts';
 import { toAscii } from '../../units/to-ascii.ts';
 
@@ -25,8 +26,11 @@ export function renderText(answer: Answer, style: PresentStyle): string {
     '',
     ...mediaTable(answer, style),
     '',
-    'Interface',
-    ...interfaceRows(answer, style).map(oneValue),
+    ...layerSection(answer, style),
+    answer.layers.length > 0 ? 'Path' : 'Interface',
+    ...[...interfaceRows(answer, style), ...stackRows(answer, style)].map(oneValue),
+    ...section('Window', windowRows(answer, style)),
+    ...section('Pulse', pulseRows(answer, style)),
     ...beamSection(answer, style),
     ...cautionSection(answer.cautions),
     ...sourceSection(answer, style),
@@ -77,8 +81,20 @@ function sideBySide(a: string, b: string): readonly string[] {
 const oneValue = (row: Shown): string => `${pad(`  ${row.symbol}`, 18)}${pad(row.text, 20)}${row.label}`;
 
 function beamSection(answer: Answer, style: PresentStyle): readonly string[] {
-  const rows = beamRows(answer, style);
-  return rows.length === 0 ? [] : ['', 'Beam', ...rows.map(oneValue)];
+  return section('Beam', beamRows(answer, style));
+}
+
+function section(title: string, rows: readonly Shown[]): readonly string[] {
+  return rows.length === 0 ? [] : ['', title, ...rows.map(oneValue)];
+}
+
+function layerSection(answer: Answer, style: PresentStyle): readonly string[] {
+  if (answer.layers.length === 0) return [];
+  const lines = answer.layers.flatMap((layer, i) => [
+    ...wrap(layerTitle(layer, i + 1), WIDTH, '  '),
+    ...wrap(`  ${layerText(layer, style)}`.trim(), WIDTH - 2, '').map((l) => `  ${l}`),
+  ]);
+  return ['Layers', ...lines, ''];
 }
 
 const MARK: Readonly<Record<Caution['level'], string>> = { hazard: '!! ', caution: '!  ', note: '-  ' };
@@ -89,10 +105,11 @@ export function cautionSection(cautions: readonly Caution[]): readonly string[] 
 }
 
 function sourceSection(answer: Answer, style: PresentStyle): readonly string[] {
-  const lines = [answer.from, answer.into].flatMap((m) => fitLine(m, style));
+  const media = [answer.from, ...answer.layers.map((l) => l.medium), answer.into];
+  const lines = media.flatMap((m) => fitLine(m, style));
   const unique = lines.filter((l, i) => lines.indexOf(l) === i);
   if (unique.length === 0) return [];
-  const grades = [answer.from, answer.into].flatMap((m) => (m.fit ? [m.fit.grade] : []));
+  const grades = media.flatMap((m) => (m.fit ? [m.fit.grade] : []));
   const legend = [...new Set(grades)].sort().map((g) => `grade ${g}: ${GRADE_WORDS[g]}`);
   return [
     '',

@@ -138,12 +138,12 @@ const compute: Record<string, (i: Inputs) => number> = {
     // Impedances 100 and 300 ohm as two magnetic media of the same index.
     const a = permittivity(3, 0, 3 * (100 / 376.730313412) ** 2);
     const b = permittivity(3, 0, 3 * (300 / 376.730313412) ** 2);
-    return ask(a, b, wave).interface.rs.re;
+    return ask(a, b, wave).interface.rs!.re;
   },
   'fr-hayt127-t2': (i) => surface(i).interface.refractionAngle_rad! / DEGREE,
-  'fr-hayt127-Gp': (i) => -surface(i).interface.rp.re,
+  'fr-hayt127-Gp': (i) => -surface(i).interface.rp!.re,
   'fr-hayt127-Rp': (i) => surface(i).interface.Rp,
-  'fr-hayt127-Gs': (i) => surface(i).interface.rs.re,
+  'fr-hayt127-Gs': (i) => surface(i).interface.rs!.re,
   'fr-hayt127-Rs': (i) => surface(i).interface.Rs,
   'fr-sadiku-1': (i) => Math.atan2(i['kx']!, i['kz']!) / DEGREE,
   // Incident E_y = 8 V/m, s; H_x = -E cos(theta_t) n2/Z0.
@@ -153,14 +153,14 @@ const compute: Record<string, (i: Inputs) => number> = {
       polarization: 's',
     });
     return (
-      (-a.interface.ts.re * 8 * Math.cos(a.interface.refractionAngle_rad!) * 1e3) / a.into.impedance_ohm.re
+      (-a.interface.ts!.re * 8 * Math.cos(a.interface.refractionAngle_rad!) * 1e3) / a.into.impedance_ohm.re
     );
   },
   'fr-45-identity': (i) => surface(i).interface.Rp - surface(i).interface.Rs ** 2,
   // The row's angle is Brewster's, rounded; t_p = n1/n2 holds at the angle itself.
   'fr-tp-brew': (i) => {
     const angle = surface(i).interface.brewsterAngle_rad!;
-    return surface(i, { incidenceAngle_rad: angle }).interface.tp.re;
+    return surface(i, { incidenceAngle_rad: angle }).interface.tp!.re;
   },
   'fr-T-int': (i) => surface(i).interface.T!,
   'fr-kd-kx': () => {
@@ -211,7 +211,7 @@ const compute: Record<string, (i: Inputs) => number> = {
     });
     const ratio = (a: number) => {
       const s = ask(index(1), into, wave, { incidenceAngle_rad: a }).interface;
-      return abs(s.rp) / abs(s.rs);
+      return abs(s.rp!) / abs(s.rs!);
     };
     const second = minimum(ratio, 0.1, 1.5);
     const pseudo = minimum(

@@ -1,0 +1,114 @@
+/**
+ * Where the answer's powers come from: the one surface, or the whole path of layers; both also at moved inputs, for the
+ * uncertainty. Refusals of the laws become refusals of the answer here.
+ */
+import { fresnel } from '../interface/fresnel.ts';
+import { reflectionLoss_dB, returnLoss_dB } from '../interface/losses.ts';
+import type { CautionNote } from '../medium/caution.ts';
+import { lengthText } from '../medium/range-text.ts';
+import { type Refusal, refuse } from '../medium/refusal.ts';
+import { arg, complex } from '../num/complex.ts';
+import { mixedStack } from '../stack/mixed-stack.ts';
+import { StackRefusal } from '../stack/stack-refusal.ts';
+import { type Moved, movedOptics } from './input-uncertainty.ts';
+import { type InterfaceParts, powerOf } from './interface-answer.ts';
+import type { Path } from './path.ts';
+import type { Polarization, Question } from './question.ts';
+import { ASSUMED_COHERENCE_waves, type StackParts, stackParts } from './stack-answer.ts';
+
+/** [s, p] of reflectance and transmittance. */
+export interface BothPolarizations {
+  readonly R: readonly [number, number];
+  readonly T: readonly [number, number];
+}
+
+export function surfacePower({ from, into, angle_rad }: Moved): BothPolarizations {
+  const w = fresnel(from, into, angle_rad);
+  return { R: [w.Rs, w.Rp], T: [w.Ts, w.Tp] };
+}
+
+export function solvePath(path: Path, question: Question, vacuumWavelength_m: number): StackParts | Refusal {
+  try {
+    return stackParts(
+      path,
+      vacuumWavelength_m,
+      question.incidenceAngle_rad,
+      question.polarization,
+      question.coherenceLength_m,
+    );
+  } catch (error) {
+    if (error instanceof StackRefusal) return refuse(error.code, 3, error.message, error.remedy);
+    throw error;
+  }
+}
+
+/** The path's powers at moved inputs; layers follow the wavelength along their own dispersion and share a thickness offset. */
+export function pathPower(
+  path: Path,
+  question: Question,
+  vacuumWavelength_m: number,
+): (inputs: Moved) => BothPolarizations {
+  return ({ from, into, angle_rad, shift_um, thickness_m, layer: offset }) => {
+    const wavelength_m = vacuumWavelength_m + shift_um * 1e-6;
+    const layers = path.layers.map((layer, i) => {
+      const { eps, mu } = movedOptics(layer.side, offset?.number === i ? offset.n : 0, shift_um);
+      return { eps, mu, thickness_m: Math.max(0, layer.thickness_m + thickness_m) };
+    });
+    const incidence = { eps: complex((from.n.re * from.n.re) / from.mu.re), mu: complex(from.mu.re) };
+    const coherence_m = question.coherenceLength_m ?? ASSUMED_COHERENCE_waves * vacuumWavelength_m;
+    const m = mixedStack(
+      { incidence, layers, exit: { eps: into.eps, mu: into.mu } },
+      wavelength_m,
+      angle_rad,
+      coherence_m,
+    );
+    return { R: [m.s.R, m.p.R], T: [m.s.T, m.p.T] };
+  };
+}
+
+type Surface = InterfaceParts['answer'];
+
+/** The interface part of the answer for a path: powers, amplitudes and losses of the whole; angles of a bare surface fall away. */
+export function pathSurface(bare: Surface, parts: StackParts, polarization: Polarization): Surface {
+  const { s, p, amplitudes, stack } = parts;
+  const R = powerOf(polarization, s.R, p.R);
+  return {
+    ...bare,
+    Rs: s.R,
+    Rp: p.R,
+    R,
+    Ts: s.T,
+    Tp: p.T,
+    T: stack.T,
+    rs: amplitudes?.rs ?? null,
+    rp: amplitudes?.rp ?? null,
+    ts: amplitudes?.ts ?? null,
+    tp: amplitudes?.tp ?? null,
+    phaseRs_rad: amplitudes && s.R > 1e-31 ? arg(amplitudes.rs) : null,
+    phaseRp_rad: amplitudes && p.R > 1e-31 ? arg(amplitudes.rp) : null,
+    brewsterAngle_rad: null,
+    brewsterAngleS_rad: null,
+    pseudoBrewsterAngle_rad: null,
+    evanescentDepth_m: bare.evanescentDepth_m,
+    goosHanchenS_m: null,
+    goosHanchenP_m: null,
+    reflectionLoss_dB: reflectionLoss_dB(R),
+    returnLoss_dB: returnLoss_dB(R),
+  };
+}
+
+/** Which layers were summed as intensities, and on what ground. */
+export function pathNotes({ stack, layers }: StackParts): readonly CautionNote[] {
+  const length = lengthText(stack.coherenceLength_m * 1e6, 3);
+  const ground = stack.coherenceLengthStated
+    ? `coherence length ${length} as stated`
+    : `coherence length taken as ${length} (${ASSUMED_COHERENCE_waves} wavelengths; state --linewidth or --coherence)`;
+  const numbers = layers.flatMap((l, i) => (l.coherent ? [] : [i + 1]));
+  if (numbers.length === 0)
+    return [{ code: 'coherence', details: { text: `all layers coherent: ${ground}` } }];
+  const which = numbers.length === 1 ? `layer ${numbers[0]} is` : `layers ${numbers.join(', ')} are`;
+  return [
+    { code: 'coherence', details: { text: `${which} summed as intensities: ${ground}` } },
+    { code: 'coherent-sum-not-included', details: {} },
+  ];
+}

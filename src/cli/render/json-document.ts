@@ -1,0 +1,24 @@
+/**
+ * One JSON document in one line: schema and version first, full double precision, null where there is no value. NaN and
+ * infinities never get in. With `ascii` all else is escaped, which loses nothing.
+ */
+export interface DocumentHead {
+  readonly version: string;
+  /** Hash of the catalogue, where the document rests on it. */
+  readonly catalogue?: string;
+}
+
+export function jsonDocument(head: DocumentHead, body: object, ascii = false): string {
+  const text = JSON.stringify({ schema: 1, ...head, ...body }, finite);
+  return `${ascii ? escaped(text) : text}\n`;
+}
+
+/** A value that is not finite becomes null. */
+export function finite(_: string, value: unknown): unknown {
+  return typeof value === 'number' && !Number.isFinite(value) ? null : value;
+}
+
+/** The same document in the bytes 0x20 to 0x7E. */
+export function escaped(json: string): string {
+  return json.replace(/[^\x20-\x7e\n]/g, (unit) => `\\u${unit.charCodeAt(0).toString(16).padStart(4, '0')}`);
+}
