@@ -34,7 +34,7 @@ describe('cursor moves', () => {
         expect(move.length).toBeLessThanOrEqual(7);
         expect(model.scrollback()).toEqual([]);
       }),
-      { numRuns: 500 },
+      { numRuns: 250 },
     );
   });
 });

@@ -193,7 +193,7 @@ describe('torn sequences', () => {
         fc.pre(pieces.every((piece) => !/^[\udc00-\udfff]/.test(piece)));
         expect(events(...pieces)).toEqual(typed.map(([, chord]) => chord));
       }),
-      { numRuns: 3000 },
+      { numRuns: 1500 },
     );
   });
 
@@ -308,7 +308,7 @@ describe('any input', () => {
           if (event.kind === 'key') expect(event.key.name === 'char').toBe(event.key.char !== undefined);
         }
       }),
-      { numRuns: 5000 },
+      { numRuns: 2500 },
     );
   });
 });
