@@ -100,6 +100,15 @@ export function incidentFlux({ media, incidence }: StackKernel, polarization: Po
   return (ur * vr + ui * vi) / (vr * vr + vi * vi);
 }
 
+/** Admittance of the incident wave: kappa/mu in s, eps/kappa in p. */
+export function incidentAdmittance({ media, incidence }: StackKernel, polarization: Polarization): Complex {
+  const at = incidence * MEDIUM_STRIDE;
+  const kappa = complexAt(media, at + KAPPA);
+  return polarization === 's'
+    ? div(kappa, complexAt(media, at + MU))
+    : div(complexAt(media, at + EPS), kappa);
+}
+
 /** Factor from the stored fields of interface j to the true ones for unit incident tangential E, for j = 0 .. N. */
 export function fieldScales(kernel: StackKernel, polarization: Polarization): Complex[] {
   const s = polarization === 's';

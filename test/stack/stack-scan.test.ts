@@ -73,12 +73,12 @@ describe('scanStack', () => {
 
   it('60 layers at 2000 waves, both polarizations, take well under 100 ms', () => {
     const scan = stack60(2000);
-    // The best of several: the machine may be busy with other things.
+    // Processor time, and the best of several: the machine may be busy with other things.
     let best_ms = Number.POSITIVE_INFINITY;
-    for (let run = 0; run < 8; run++) {
-      const start = performance.now();
+    for (let run = 0; run < 12; run++) {
+      const start = process.cpuUsage();
       scanStack(scan);
-      best_ms = Math.min(best_ms, performance.now() - start);
+      best_ms = Math.min(best_ms, process.cpuUsage(start).user / 1000);
     }
     expect(best_ms).toBeLessThan(60);
   });

@@ -42,9 +42,10 @@ describe('windowFractions', () => {
           );
           fc.pre(mixed.layers[0]?.coherent === false);
           for (const side of sides) {
-            expect(closed[side].R).toBeCloseTo(mixed[side].R, 12);
-            expect(closed[side].T).toBeCloseTo(mixed[side].T, 12);
-            expect(closed[side].A).toBeCloseTo(mixed[side].A, 12);
+            // Near grazing incidence between nearly equal indices the two round kappa^2 = eps mu - q^2 differently.
+            expect(closed[side].R).toBeCloseTo(mixed[side].R, 9);
+            expect(closed[side].T).toBeCloseTo(mixed[side].T, 9);
+            expect(closed[side].A).toBeCloseTo(mixed[side].A, 9);
             expect(closed[side].R + closed[side].T + closed[side].A).toBeCloseTo(1, 11);
           }
         },
