@@ -5,16 +5,14 @@ import { copyText } from '../term/clipboard.ts';
 import type { TerminalGuard } from '../term/guard.ts';
 import type { KeyStream } from '../term/key-stream.ts';
 import { App } from './components/app.tsx';
-import { firstQuestion } from './first-question.ts';
+import { firstState } from './first-state.ts';
 import { bindKeys } from './keys/bindings.ts';
 import type { Start } from './main.tsx';
 import { realWorld } from './real-world.ts';
 import { KeptSettings } from './settings/kept-settings.ts';
-import { readQuestion } from './settings/plain-question.ts';
 import { SettingsFile } from './settings/settings-file.ts';
-import { type Effect, initialState, refusalOf, type State } from './state.ts';
+import type { Effect } from './state.ts';
 import { Store } from './store.ts';
-import type { World } from './world.ts';
 
 export interface Terminal {
   readonly guard: TerminalGuard;
@@ -57,7 +55,7 @@ export async function showPicture(start: Start, terminal: Terminal): Promise<num
   const copy = async (text: string): Promise<void> => {
     const write = (sequence: string): void => void process.stdout.write(sequence);
     const { message } = await copyText(text, { env: start.host.env, write });
-    const shown = text.includes('\n') ? '' : `${text}   `;
+    const shown = text.includes('\n') ? '' : `${text}.  `;
     store.dispatch({ kind: 'message', message: { tone: 'said', text: `${shown}${message}` } });
   };
   const quit = async (status: number): Promise<void> => {
@@ -94,21 +92,4 @@ export async function showPicture(start: Start, terminal: Terminal): Promise<num
   );
   // The guard ends the process.
   return new Promise<number>(() => {});
-}
-
-/** The question of last time, where it still has an answer; what is wrong with the settings is said first. */
-function firstState(start: Start, size: ScreenSize, world: World, keyProblems: readonly string[]): State {
-  const materialOf = (key: string) => world.material(key);
-  const usual = firstQuestion(materialOf);
-  const { last, recent } = start.settings;
-  const { question, problems } =
-    last === undefined ? { question: usual, problems: [] } : readQuestion(last, usual, materialOf);
-  const begin = (q: typeof question): State => initialState(q, size, start.preferences, world, recent);
-  const asked = begin(question);
-  const state = refusalOf(asked) ? { ...asked, answered: usual } : asked;
-  const wrong = [...start.problems, ...keyProblems, ...problems];
-  const [only] = wrong;
-  if (only === undefined) return state;
-  const more = wrong.length > 1 ? ` (and ${wrong.length - 1} more)` : '';
-  return { ...state, message: { tone: 'refused', text: `settings: ${only}${more}` } };
 }

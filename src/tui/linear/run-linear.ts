@@ -1,6 +1,58 @@
-/** placeholder */
+/**
+ * The linear layout on a terminal: lines in, lines out, in the terminal's own line editing. Nothing is drawn over, no cursor is
+ * placed and no mode is switched, so a screen reader reads everything once and in order.
+ */
+import { createInterface } from 'node:readline';
+import { firstState } from '../first-state.ts';
+import { bindKeys } from '../keys/bindings.ts';
 import type { Start } from '../main.tsx';
+import { realWorld } from '../real-world.ts';
+import { KeptSettings } from '../settings/kept-settings.ts';
+import { SettingsFile } from '../settings/settings-file.ts';
+import { beginSession, promptOf, type Reply, reply } from './session.ts';
+
+const INTERRUPTED = 130;
+/** A size no line depends on. */
+const SIZE = { columns: 80, rows: 24 } as const;
+
 export async function runLinear(start: Start): Promise<number> {
-  start.host.warn('');
-  return 0;
+  const world = realWorld(start.host.catalogue(), bindKeys(start.settings.keys).bindings, () => {});
+  await world.loadSearch();
+  const first = firstState(start, SIZE, world, []);
+  const write = (text: string): void => void process.stdout.write(text);
+  const kept = new KeptSettings(
+    new SettingsFile(start.settingsFolder, start.canWriteSettings),
+    first,
+    (text) => write(`${text}\n`),
+  );
+  const lines = createInterface({
+    input: process.stdin,
+    terminal: false,
+    crlfDelay: Number.POSITIVE_INFINITY,
+  });
+  return new Promise<number>((resolve) => {
+    const end = (status: number): void => {
+      lines.close();
+      process.off('SIGINT', onInterrupt);
+      world.stop();
+      void kept.save().then(() => resolve(status));
+    };
+    const onInterrupt = (): void => {
+      write('\n');
+      end(INTERRUPTED);
+    };
+    const tell = ({ session, lines: said, isOver }: Reply): void => {
+      write(said.map((line) => `${line}\n`).join(''));
+      current = session;
+      kept.follow(session.state);
+      if (isOver) end(0);
+      else write(promptOf(session));
+    };
+    const begin = beginSession(first);
+    let current = begin.session;
+    process.on('SIGINT', onInterrupt);
+    lines.on('line', (typed) => tell(reply(current, typed, world)));
+    lines.on('close', () => end(0));
+    tell(begin);
+  });
 }

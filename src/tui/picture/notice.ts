@@ -57,8 +57,9 @@ function noticeParts(state: State, world: World): readonly Part[] {
   if (refusal) parts.push(refused(refusalText(refusal, world)));
   if (state.message?.tone === 'refused') parts.push(refused(state.message.text));
   else if (state.message) parts.push(said(state.message.text));
-  else if (!refusal) parts.push(cautionPart(state, world));
-  parts.push(focusPart(state, world));
+  else if (!refusal && !state.page) parts.push(cautionPart(state, world));
+  // On a page the keys act on the page.
+  if (!state.page) parts.push(focusPart(state, world));
   return parts;
 }
 

@@ -4,28 +4,37 @@ import { keyText } from '../keys/key-names.ts';
 import type { State } from '../state.ts';
 import { contextOf } from '../update/context.ts';
 import type { World } from '../world.ts';
-import { lineOfSpans, type Pen, type Span, span } from './pen.ts';
+import { lineOfSpans, type Pen, type Span, span, spansWidth } from './pen.ts';
 
 const FOOTERS: Readonly<Record<Context, readonly ActionId[]>> = {
-  picture: ['go-from', 'go-into', 'go-wave', 'go-angle', 'polarization', 'help'],
+  picture: ['go-from', 'go-into', 'go-wave', 'go-angle', 'polarization'],
   entry: ['take', 'take-next', 'cancel', 'kill-to-start'],
   search: ['down', 'take', 'cancel', 'kill-to-start'],
-  page: ['down', 'page-down', 'search', 'back', 'help'],
+  page: ['down', 'page-down', 'search', 'back'],
 };
 
 export function footerView(state: State, columns: number, pen: Pen, world: World): string {
   const context = contextOf(state);
   const ascii = state.preferences.glyphs === 'ascii';
-  const items = FOOTERS[context].map((id) => footerItem(id, context, ascii, world));
-  // While typing "?" is text: the keys are one Esc away.
-  if (context === 'entry' || context === 'search') {
-    const back = keyText(world.bindings.keyOf(context, 'cancel') ?? 'escape', ascii);
-    const help = keyText(world.bindings.keyOf('picture', 'help') ?? '?', ascii);
-    items.push([span(`${back} ${help}`, 'key'), span(' keys')]);
-  }
   const gap = columns >= 60 ? '   ' : '  ';
-  const spans = items.flatMap((item, i) => [span(i === 0 ? ' ' : gap), ...item]);
+  const items = FOOTERS[context].map((id) => footerItem(id, context, ascii, world));
+  const help = helpItem(context, ascii, world);
+  // The key for all keys always finds room; others give way from the right.
+  while (items.length > 0 && footerWidth([...items, help], gap) > columns) items.pop();
+  const spans = [...items, help].flatMap((item, i) => [span(i === 0 ? ' ' : gap), ...item]);
   return lineOfSpans(spans, columns, pen);
+}
+
+const footerWidth = (items: readonly (readonly Span[])[], gap: string): number =>
+  1 + items.reduce((sum, item) => sum + spansWidth(item), 0) + gap.length * (items.length - 1);
+
+/** While typing "?" is text: the keys are one Esc away. */
+function helpItem(context: Context, ascii: boolean, world: World): readonly Span[] {
+  const { bindings } = world;
+  const isTyping = context === 'entry' || context === 'search';
+  const help = keyText(bindings.keyOf(isTyping ? 'picture' : context, 'help') ?? '?', ascii);
+  const back = isTyping ? `${keyText(bindings.keyOf(context, 'cancel') ?? 'escape', ascii)} ` : '';
+  return [span(`${back}${help}`, 'key'), span(' keys')];
 }
 
 function footerItem(id: ActionId, context: Context, ascii: boolean, world: World): Span[] {

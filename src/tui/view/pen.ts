@@ -88,7 +88,8 @@ export function rowSpans(row: Row, labelWidth: number, columns: number, pen: Pen
   const [first, second] = row;
   if (!first) return [];
   if (!second) {
-    const spans = itemSpans(first, labelColumn(first, labelWidth, columns), columns, pen);
+    const item = fitted(first, columns, pen);
+    const spans = itemSpans(item, labelColumn(item, labelWidth, columns), columns, pen);
     return first.chord === undefined ? spans : withChord(spans, first.chord, columns);
   }
   // Two results side by side stand in columns; anything else follows its neighbour.
@@ -100,10 +101,18 @@ export function rowSpans(row: Row, labelWidth: number, columns: number, pen: Pen
   return [...left, span(' '.repeat(gap)), ...itemSpans(second, 0, columns, pen)];
 }
 
-/** The numbers people come for stand close to their names, and so does a value that would not fit: no number is cut. */
+/** The numbers people come for stand close to their names. */
 function labelColumn(item: Item, labelWidth: number, columns: number): number {
   if (item.role === 'result') return RESULT_LABEL;
   return 2 + labelWidth + displayWidth(item.text) > columns ? 0 : labelWidth;
+}
+
+/** No number is cut: where a row is too long its label gives way. */
+function fitted(item: Item, columns: number, pen: Pen): Item {
+  if (item.stop === undefined || item.role === 'field') return item;
+  const room = Math.max(1, columns - 2 - displayWidth(item.text));
+  const label = cutToWidth(item.label, room, pen.glyphs.more);
+  return label === item.label ? item : { ...item, label };
 }
 
 function withChord(spans: readonly Span[], chord: string, columns: number): readonly Span[] {
