@@ -11,7 +11,6 @@ import {
   type FitWave,
   fitWavelength_um,
   inRange,
-  isRecommended,
 } from '../catalog/choose-fit.ts';
 import type { Axis, Fit, Material } from '../catalog/types.ts';
 import { standardAirIndexJet } from '../dispersion/air-index.ts';
@@ -24,6 +23,8 @@ import { type Complex, ONE } from '../num/complex.ts';
 import { bindAbsorption } from './absorption.ts';
 import { toAbsolute } from './air-reference.ts';
 import type { CautionNote } from './caution.ts';
+import { fitPreference } from './fit-preference.ts';
+import { hazardLevel } from './hazard-level.ts';
 import { lengthText, rangeText } from './range-text.ts';
 import { type Refusal, refuse } from './refusal.ts';
 
@@ -57,11 +58,7 @@ export interface MediumAtWave {
   readonly notes: readonly CautionNote[];
 }
 
-/** From this ratio k/n on a medium counts as absorbing where complex data compete with real ones. */
-const ABSORBING = 1e-4;
 const ZERO_CELSIUS_K = 273.15;
-/** Over this step of temperature a single dn/dT serves as well as a second fit. */
-const FIRST_ORDER_K = 10;
 
 export function mediumAtWave(
   material: Material,
@@ -72,7 +69,7 @@ export function mediumAtWave(
 ): MediumAtWave | Refusal {
   const theAxis = axis ?? defaultAxis(material, wave);
   if (!theAxis) return noOpticalConstants(material);
-  const choice = chooseFit(material, theAxis, wave, (fit) => preference(fit, material, wave, conditions));
+  const choice = chooseFit(material, theAxis, wave, (fit) => fitPreference(fit, material, wave, conditions));
   if (!choice) {
     return refuse(
       'no-such-axis',
@@ -230,32 +227,6 @@ function isFluidCondition(fit: Fit, name: string): boolean {
   return false;
 }
 
-/** Complex data where the medium absorbs; a fit that can honour the temperature where the others can't. */
-function preference(fit: Fit, material: Material, wave: FitWave, conditions: Conditions): number {
-  let score = 0;
-  if (conditions.temperature_K !== undefined) {
-    const fit_K = fit.temperature_C === undefined ? undefined : fit.temperature_C + ZERO_CELSIUS_K;
-    const step_K =
-      fit_K === undefined ? Number.POSITIVE_INFINITY : Math.abs(fit_K - conditions.temperature_K);
-    const canHonour =
-      fit.thermal !== undefined ||
-      honours(fit.parameters).includes('temperature_K') ||
-      step_K < 0.5 ||
-      (step_K <= FIRST_ORDER_K && material.handling?.dn_dT_1e6_per_K !== undefined);
-    if (canHonour) score += 2;
-  }
-  if (isRecommended(fit, wave) && givesAbsorption(fit, wave, conditions)) score += 1;
-  return score;
-}
-
-function givesAbsorption(fit: Fit, wave: FitWave, conditions: Conditions): boolean {
-  const bound = bindModel(fit.parameters, conditions);
-  if (!bound.complex) return false;
-  const jet = new Float64Array(JET_LENGTH);
-  bound.evaluate(fitWavelength_um(fit, wave), jet);
-  return jet[K]! > ABSORBING * jet[N]!;
-}
-
 /** A second opinion holds for the same state of a fluid: the one the answering fit used. */
 function sharedState(used: Conditions): Conditions {
   return Object.fromEntries(
@@ -355,15 +326,13 @@ function noteDisagreement(notes: CautionNote[], fit: Fit, second: SecondOpinion 
   }
 }
 
-const TOXIC =
-  /toxic|poison|carcino|explosive|corrosive|lead |lead-|arsen|cadmium|selen|tellur|thall|beryll|barium compound|mercury/i;
-
 function noteHandling(notes: CautionNote[], material: Material): void {
   const { hygroscopic, hazard } = material.handling ?? {};
   if (hygroscopic && hygroscopic !== 'no')
     notes.push({ code: 'hygroscopic', details: { degree: hygroscopic } });
-  if (!hazard || /^(none known|low)/i.test(hazard)) return;
-  notes.push({ code: TOXIC.test(hazard) ? 'toxic' : 'hazardous-material', details: { hazard } });
+  const level = hazardLevel(material);
+  if (hazard && level !== 'none-on-file')
+    notes.push({ code: level === 'toxic' ? 'toxic' : 'hazardous-material', details: { hazard } });
 }
 
 function outsideRange(material: Material, axis: Axis, wave: FitWave): Refusal {

@@ -1,0 +1,16 @@
+/**
+ * How grave the hazard is that a material's handling facts name. `none-on-file` means that nothing is written down, which is
+ * no statement about the material.
+ */
+import type { Material } from '../catalog/types.ts';
+
+export type HazardLevel = 'none-on-file' | 'hazardous' | 'toxic';
+
+const TOXIC =
+  /toxic|poison|carcino|explosive|corrosive|lead |lead-|arsen|cadmium|selen|tellur|thall|beryll|barium compound|mercury/i;
+
+export function hazardLevel(material: Material): HazardLevel {
+  const hazard = material.handling?.hazard;
+  if (!hazard || /^(none known|low)/i.test(hazard)) return 'none-on-file';
+  return TOXIC.test(hazard) ? 'toxic' : 'hazardous';
+}
