@@ -1,16 +1,18 @@
 /**
  * Builds dist/: the packed catalogue and the program.
  *
- * halfspace.js   CommonJS, minified: the one-shot path and nothing else. It starts 8 ms faster than the same as an ES module.
+ * halfspace.js   a few lines that start core.js from its code cache (code-cache.ts).
+ * core.js        CommonJS, minified: the one-shot path and nothing else, as one function of `require` and its own path.
  * *.mjs          ES modules with shared chunks: the full-screen program and every command, loaded by `import()` only when
  *                asked for. Which modules these are is read off the dynamic imports of src/, so there is no list to keep.
  *
  * The build fails if the one-shot bundle contains a package that must stay out of it.
  */
-import { chmodSync, mkdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
+import { chmodSync, copyFileSync, mkdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { type BuildOptions, build, type Metafile, type Plugin } from 'esbuild';
+import { makeCodeCache } from './code-cache.ts';
 import { writePackedCatalogue } from './pack-catalog.ts';
 
 const root = path.dirname(path.dirname(fileURLToPath(import.meta.url)));
@@ -74,6 +76,16 @@ function refuseHeavyEntry(meta: Metafile): void {
   if (heavy.length > 0) throw new Error(`the one-shot bundle must not contain ${heavy.join(', ')}`);
 }
 
+/** Code compiled from a cache has no loader for `import()`: the entry's own is handed to it. */
+function importThroughEntry(core: string): void {
+  const text = readFileSync(core, 'utf8');
+  const imports = text.match(/\bimport\("\.\//g)?.length ?? 0;
+  if (imports === 0 || imports !== (text.match(/\bimport\(/g)?.length ?? 0)) {
+    throw new Error('the one-shot bundle loads parts in a way the build does not know');
+  }
+  writeFileSync(core, text.replace(/\bimport\("\.\//g, 'importPart("./'));
+}
+
 export async function buildAll(): Promise<void> {
   rmSync(dist, { recursive: true, force: true });
   mkdirSync(dist, { recursive: true });
@@ -84,17 +96,21 @@ export async function buildAll(): Promise<void> {
   const parts = new Map<string, string>();
   const entry = await build({
     ...common,
-    entryPoints: { halfspace: path.join(root, 'src/main.ts') },
+    entryPoints: { core: path.join(root, 'src/main.ts') },
     outdir: dist,
     format: 'cjs',
     define: { ...define, 'import.meta.url': 'moduleUrl' },
     banner: {
-      js: '#!/usr/bin/env node\nconst moduleUrl=require("node:url").pathToFileURL(__filename).href;',
+      js: '(function(require,__filename,importPart){const moduleUrl=require("node:url").pathToFileURL(__filename).href;',
     },
+    footer: { js: '})' },
     plugins: [lazyParts(parts)],
   });
   refuseHeavyEntry(entry.metafile!);
+  importThroughEntry(path.join(dist, 'core.js'));
+  copyFileSync(path.join(root, 'tools/entry.cjs'), path.join(dist, 'halfspace.js'));
   chmodSync(path.join(dist, 'halfspace.js'), 0o755);
+  makeCodeCache(dist);
 
   const rest = await build({
     ...common,
