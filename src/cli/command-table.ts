@@ -100,6 +100,17 @@ export const COMMANDS = [
     ],
   },
   {
+    name: 'verify',
+    summary: 'every published value of the catalogue, recomputed',
+    operands: [],
+    options: ['full', 'json', 'csv', 'catalog'],
+    examples: [
+      { line: 'verify', meaning: 'how many agree, and the worst of each grade; status 1 if one does not' },
+      { line: 'verify --full', meaning: 'every value beside its source' },
+      { line: 'verify --csv -o checks.csv', meaning: 'the same for a spreadsheet' },
+    ],
+  },
+  {
     name: 'help',
     summary: 'help for the program or for one command',
     operands: [{ name: 'COMMAND', meaning: 'the command to explain', optional: true, completes: 'command' }],

@@ -164,6 +164,12 @@ export const OPTIONS = {
     excludes: ['json', 'csv', 'markdown'],
   }),
 
+  full: flag({
+    name: 'full',
+    meaning: 'everything: every check value, every coefficient, every row of absorption',
+    group: 'form',
+  }),
+
   output: value({
     name: 'output',
     short: 'o',

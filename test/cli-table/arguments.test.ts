@@ -191,10 +191,7 @@ describe('what is not understood is refused with what would be right', () => {
       'options-conflict: --power and --field contradict each other; give one of them',
     ],
     ['air bk7 633nm --beam 1mm', 'option-needs: --beam says nothing without --power; give --power too'],
-    [
-      'man --json',
-      'option-not-here: halfspace man takes no --json; it belongs to a question (FROM INTO WAVE)',
-    ],
+    ['man --names x', 'option-not-here: halfspace man takes no --names; it belongs to completion'],
     ['man bk7', 'extra-operand: "bk7" is one operand too many; halfspace man takes no operands'],
     [
       'completion bash zsh',

@@ -4,6 +4,7 @@ import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import type { Invocation } from '../../src/cli/arguments.ts';
+import { namedCommands } from '../../src/cli/command-table.ts';
 import { run } from '../../src/cli/commands/completion.ts';
 import { completionScript, SHELLS } from '../../src/cli/completion.ts';
 import { allOptions, optionsOfCommand, spellings } from '../../src/cli/completion-words.ts';
@@ -12,6 +13,7 @@ import type { Context } from '../../src/cli/context.ts';
 const KEYS = ['air', 'fused-silica', 'sapphire', 'silicon'];
 const everyOption = optionsOfCommand('answer').flatMap(spellings);
 const ofMan = optionsOfCommand('man').flatMap(spellings);
+const commandNames = namedCommands().map((command) => command.name);
 const has = (shell: string): boolean => spawnSync(shell, ['--version']).status === 0;
 
 let folder = '';
@@ -55,7 +57,7 @@ const ROWS: Row[] = [
   ['halfspace --angle ', []],
   ['halfspace completion ', ['bash', 'zsh', 'fish']],
   ['halfspace -q completion z', ['zsh']],
-  ['halfspace help c', ['completion']],
+  ['halfspace help compl', ['completion']],
   ['halfspace man x', []],
 ];
 
@@ -75,7 +77,7 @@ describe('bash', () => {
     ['halfspace -', everyOption],
     ['halfspace man -', ofMan],
     ['halfspace --pol=u', ['unpolarized']],
-    ['halfspace ', ['help', 'completion', 'man']],
+    ['halfspace ', commandNames],
     ['halfspace -o two', ['two words.json']],
     ['halfspace --catalog=f', ['folder']],
   ])('%j', (line, offered) => {
@@ -114,7 +116,7 @@ describe.runIf(has('zsh'))('zsh', () => {
     ['halfspace -', everyOption],
     ['halfspace man -', ofMan],
     ['halfspace --pol=u', ['unpolarized']],
-    ['halfspace ', ['help', 'completion', 'man']],
+    ['halfspace ', commandNames],
     ['halfspace -o two', ['files ']],
     ['halfspace --catalog f', ['files -/']],
   ])('%j', (line, offered) => {
@@ -142,7 +144,7 @@ describe.runIf(has('fish'))('fish', () => {
     ],
     ['halfspace man --', optionsOfCommand('man').map((spec) => `--${spec.name}`)],
     ['halfspace --pol=u', ['--pol=unpolarized']],
-    ['halfspace ', ['help', 'completion', 'man', ...KEYS]],
+    ['halfspace ', [...commandNames, ...KEYS]],
     ['halfspace -o two', ['two words.json']],
   ])('%j', (line, offered) => {
     expect(complete(line).toSorted()).toEqual(offered.toSorted());

@@ -9,9 +9,8 @@ export function csvTable(
   records: readonly (readonly CsvValue[])[],
   ascii = false,
 ): string {
-  const lines = [names, ...records].map((record) => record.map(cell).map(field).join(','));
-  const shown = ascii ? lines.map(toAscii) : lines;
-  return shown.map((line) => `${line}\n`).join('');
+  const written = (value: CsvValue): string => field(ascii ? toAscii(cell(value)) : cell(value));
+  return [names, ...records].map((record) => `${record.map(written).join(',')}\n`).join('');
 }
 
 function cell(value: CsvValue): string {

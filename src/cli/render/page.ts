@@ -10,7 +10,10 @@ export const PAGE_WIDTH = 72;
 
 export function page(lines: readonly string[], ascii: boolean): string {
   const shown = ascii ? lines.map(toAscii) : lines;
-  return `${shown.map((line) => line.trimEnd()).join('\n')}\n`;
+  return `${shown
+    .map((line) => line.trimEnd())
+    .join('\n')
+    .trimEnd()}\n`;
 }
 
 /** A paragraph `indent` columns in, its later lines two further. */
