@@ -123,10 +123,18 @@ function coherentOnly(
     reflectionP: delays.p.reflection,
     transmissionS: delays.s.transmission,
     transmissionP: delays.p.transmission,
-    fieldMaximum: { intensity: inside.intensity, position_m: inside.position_m, layer: inside.region + 1 },
+    fieldMaximum: {
+      intensity: inside.intensity,
+      position_m: nearFace(inside.position_m, vacuumWavelength_m),
+      layer: inside.region + 1,
+    },
     fieldMaximumBefore: before,
   };
 }
+
+/** The search for the maximum ends a rounding away from a face. */
+const nearFace = (position_m: number, vacuumWavelength_m: number): number =>
+  Math.abs(position_m) < 1e-6 * vacuumWavelength_m ? 0 : position_m;
 
 /** Null where no ray passes the plate (total reflection at its first face, or a metal). */
 function windowPart(

@@ -52,12 +52,13 @@ export function stackRows(answer: Answer, style: PresentStyle): readonly Shown[]
   delayRows(rows, stack, answer.geometry.polarization === 'p', style);
   if (stack.fieldMaximum) {
     const { intensity, position_m, layer } = stack.fieldMaximum;
-    const place = formatQuantity(position_m, METRE, FOUR, { style });
+    const place =
+      position_m === 0 ? 'at the first face' : `${formatQuantity(position_m, METRE, FOUR, { style })} deep`;
     const where = layer > answer.layers.length ? 'at the last face' : `in layer ${layer}`;
     rows.add(
       'fieldMaximum',
       '|E|²',
-      `highest, ${where}, ${place} deep`,
+      `highest, ${where}, ${place}`,
       `${formatNumber(intensity, FOUR, style)} × incident`,
     );
   }
