@@ -33,6 +33,9 @@ export const inRange = (fit: Fit, wave: FitWave): boolean => reaches(fit.range_u
  * reference. `atEdge` tells the answer to say so.
  */
 function reaches([lo, hi]: readonly [number, number], wave: FitWave): boolean {
+  // Well inside or well outside no margin matters; a pass over the whole catalogue lives by this.
+  if (wave.vacuum_um >= lo && wave.vacuum_um <= hi) return true;
+  if (wave.vacuum_um < lo * (1 - 2 * WIDEST) || wave.vacuum_um > hi * (1 + 2 * WIDEST)) return false;
   const [low, high] = lo === hi ? [LINE_WIDTH, LINE_WIDTH] : [margin(lo), margin(hi)];
   const within = (l: number): boolean => l >= lo * (1 - low) && l <= hi * (1 + high);
   return within(wave.vacuum_um) || within(wave.air_um);
