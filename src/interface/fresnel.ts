@@ -72,7 +72,21 @@ export function fresnel(from: Optics, into: Optics, incidenceAngle_rad: number):
   const evanescent = isLossless(into) && kappa2.re === 0;
   const Ts = evanescent ? 0 : (ys2.re / ys1.re) * abs2(ts);
   const Tp = evanescent ? 0 : (yp2.re / yp1.re) * abs2(mul(tpOverKappa2, kappa2));
-  return { rs, rp, ts, tp, Rs: abs2(rs), Rp: abs2(rp), Ts, Tp, q, kappa1, kappa2 };
+  // Nothing crosses, so all returns: exactly, where |r|^2 would miss it by a rounding.
+  const all = evanescent && isLossless(from);
+  return {
+    rs,
+    rp,
+    ts,
+    tp,
+    Rs: all ? 1 : abs2(rs),
+    Rp: all ? 1 : abs2(rp),
+    Ts,
+    Tp,
+    q,
+    kappa1,
+    kappa2,
+  };
 }
 
 /** Derivatives of r_s and r_p by the angle of incidence, per rad. Source: differentiation of the forms above. */

@@ -12,6 +12,8 @@ import { SPEED_OF_LIGHT_m_per_s, VACUUM_PERMITTIVITY_F_per_m } from '../units/co
 export interface LiteralMedium {
   /** n + ik, where the index was given. */
   readonly n?: Complex;
+  /** Extraordinary index of a uniaxial crystal, whose ordinary one is `n`. */
+  readonly ne?: Complex;
   readonly eps?: Complex;
   readonly mu?: Complex;
   readonly lossTangent?: number;

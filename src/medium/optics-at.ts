@@ -186,7 +186,7 @@ function evaluateFit(
         details: { dn_dT: thermal.dn_dT_per_K, range: thermal.range },
       });
     }
-  } else if (warmTo_K !== undefined) {
+  } else if (warmTo_K !== undefined && fit.accuracy_n !== 0) {
     const fit_C = fit.temperature_C ?? 'not stated';
     notes.push({ code: 'temperature-not-modelled', details: { asked_C: warmTo_K - ZERO_CELSIUS_K, fit_C } });
   }
@@ -310,11 +310,12 @@ function noteAbsorption(
       notes.push({ code: 'absorbs-here', details: { depth_m } });
     return;
   }
-  if (fit.estimateBetweenBands) return;
+  // A gas is told by its fits alone: its bands are lines, not a range.
+  if (material.class === 'gas') return;
   const t = material.transparency_um;
   if (t && (wave.vacuum_um < t[0] || wave.vacuum_um > t[1])) {
     notes.push({ code: 'absorbs-here', details: { range: rangeText(t) } });
-  } else if (material.class !== 'gas') notes.push({ code: 'absorption-not-known', details: {} });
+  } else notes.push({ code: 'absorption-not-known', details: {} });
 }
 
 function noteDisagreement(notes: CautionNote[], fit: Fit, second: SecondOpinion | null, n: number): void {
