@@ -100,6 +100,24 @@ export const COMMANDS = [
     ],
   },
   {
+    name: 'cite',
+    summary: 'the works behind the numbers of a medium',
+    operands: [
+      {
+        name: 'MEDIUM',
+        meaning: 'media as in a question, or ids of works',
+        many: true,
+        completes: 'medium',
+      },
+    ],
+    options: ['text', 'bibtex', 'csl', 'json', 'plain', 'catalog'],
+    examples: [
+      { line: 'cite fused-silica', meaning: 'every work, and which fit it is the source of' },
+      { line: 'cite sapphire:o air --bibtex -o media.bib', meaning: 'one axis of a crystal, and air' },
+      { line: 'cite malitson-1965-interspecimen --csl', meaning: 'one work, for a reference manager' },
+    ],
+  },
+  {
     name: 'verify',
     summary: 'every published value of the catalogue, recomputed',
     operands: [],

@@ -10,6 +10,7 @@ const LOADERS: Readonly<Record<Invocation['command'], () => Promise<CommandModul
   answer: () => import('./commands/answer.ts'),
   completion: () => import('./commands/completion.ts'),
   man: () => import('./commands/man.ts'),
+  cite: () => import('./commands/cite.ts'),
   verify: () => import('./commands/verify.ts'),
 };
 

@@ -143,7 +143,7 @@ export const OPTIONS = {
     name: 'json',
     meaning: 'one JSON document, SI units, full precision',
     group: 'form',
-    excludes: ['csv', 'markdown', 'plain'],
+    excludes: ['csv', 'markdown', 'plain', 'text', 'bibtex', 'csl'],
   }),
   csv: flag({
     name: 'csv',
@@ -161,9 +161,27 @@ export const OPTIONS = {
     name: 'plain',
     meaning: 'one quantity a line, never wrapped or cut',
     group: 'form',
-    excludes: ['json', 'csv', 'markdown'],
+    excludes: ['json', 'csv', 'markdown', 'text', 'bibtex', 'csl'],
   }),
 
+  text: flag({
+    name: 'text',
+    meaning: 'text for people, which is what comes without it',
+    group: 'form',
+    excludes: ['json', 'plain', 'bibtex', 'csl'],
+  }),
+  bibtex: flag({
+    name: 'bibtex',
+    meaning: 'BibTeX entries',
+    group: 'form',
+    excludes: ['json', 'plain', 'text', 'csl'],
+  }),
+  csl: flag({
+    name: 'csl',
+    meaning: 'a CSL-JSON list of works, as reference managers read it',
+    group: 'form',
+    excludes: ['json', 'plain', 'text', 'bibtex'],
+  }),
   full: flag({
     name: 'full',
     meaning: 'everything: every check value, every coefficient, every row of absorption',
