@@ -83,7 +83,9 @@ function importThroughEntry(core: string): void {
   if (imports === 0 || imports !== (text.match(/\bimport\(/g)?.length ?? 0)) {
     throw new Error('the one-shot bundle loads parts in a way the build does not know');
   }
-  writeFileSync(core, text.replace(/\bimport\("\.\//g, 'importPart("./'));
+  // Pure ASCII, so that it can be read without decoding; the bundler leaves other characters in regular expressions.
+  const ascii = text.replace(/[^\x00-\x7f]/g, (c) => `\\u${c.charCodeAt(0).toString(16).padStart(4, '0')}`);
+  writeFileSync(core, ascii.replace(/\bimport\("\.\//g, 'importPart("./'));
 }
 
 export async function buildAll(): Promise<void> {
