@@ -1,0 +1,57 @@
+/** The facts of an entry that a buyer asks for first, with null where nothing is on file. */
+import type { Material } from '../catalog/types.ts';
+import { type HazardLevel, hazardLevel } from '../medium/hazard-level.ts';
+
+export interface MaterialFacts {
+  readonly key: string;
+  readonly name: string;
+  readonly class: string;
+  readonly formula: string | null;
+  /** Where the bulk transmits usefully, vacuum wavelengths. */
+  readonly transparency_m: readonly [number, number] | null;
+  /** "no", "slightly" or "yes". */
+  readonly hygroscopic: string | null;
+  readonly hazardLevel: HazardLevel;
+  readonly hazard: string | null;
+  readonly care: string | null;
+  /** Knoop number, kgf/mm^2. */
+  readonly knoop: number | null;
+  readonly density_kg_per_m3: number | null;
+  readonly expansion_per_K: number | null;
+  readonly solubility_g_per_100g: number | null;
+  /** Where transparency and handling facts come from. */
+  readonly factsSource: string | null;
+}
+
+export function materialFacts(material: Material): MaterialFacts {
+  const { transparency_um, handling = {} } = material;
+  return {
+    key: material.key,
+    name: material.name,
+    class: material.class,
+    formula: material.formula ?? null,
+    transparency_m: transparency_um ? [fromMicro(transparency_um[0]), fromMicro(transparency_um[1])] : null,
+    hygroscopic: handling.hygroscopic ?? null,
+    hazardLevel: hazardLevel(material),
+    hazard: hazardLevel(material) === 'none-on-file' ? null : (handling.hazard ?? null),
+    care: textOf(handling['care']),
+    knoop: handling.knoop ?? null,
+    density_kg_per_m3: scaled(handling.density_g_per_cm3, 3),
+    expansion_per_K: scaled(handling.expansion_1e6_per_K, -6),
+    solubility_g_per_100g: numberOf(handling['solubility_g_per_100g']),
+    factsSource: material.factsSource ?? null,
+  };
+}
+
+/** By the decimal text, so that 0.21 um is 2.1e-7 m and no neighbour of it. */
+const shifted = (value: number, power: number): number => Number(`${value}e${power}`);
+
+const fromMicro = (um: number): number => (String(um).includes('e') ? um * 1e-6 : shifted(um, -6));
+
+function scaled(value: number | undefined, power: number): number | null {
+  if (value === undefined) return null;
+  return String(value).includes('e') ? value * 10 ** power : shifted(value, power);
+}
+
+const textOf = (value: unknown): string | null => (typeof value === 'string' ? value : null);
+const numberOf = (value: unknown): number | null => (typeof value === 'number' ? value : null);

@@ -1,0 +1,115 @@
+/** The order of a list of hits. A hit without the value sorted by stands last, whichever way the order runs. */
+
+import { orList } from '../units/parse-choice.ts';
+import { type Problem, problem } from '../units/problem.ts';
+import { quoteInput } from '../units/quote-input.ts';
+import type { Candidate } from './candidate.ts';
+import type { Criteria } from './criteria.ts';
+import type { Found } from './find-materials.ts';
+import { isUndecided, type Undecided } from './undecided.ts';
+
+export const SORT_KEYS = [
+  'key',
+  'name',
+  'class',
+  'n',
+  'loss',
+  'group-index',
+  'gvd',
+  'birefringence',
+  'abbe',
+  'hardness',
+  'density',
+] as const;
+export type SortKey = (typeof SORT_KEYS)[number];
+
+export interface SortOrder {
+  readonly key: SortKey;
+  readonly descending: boolean;
+}
+
+/** `n`, or `-n` from the greatest down. */
+export function parseSortOrder(text: string): SortOrder | Problem {
+  const trimmed = text.trim().toLowerCase();
+  const descending = trimmed.startsWith('-');
+  const key = SORT_KEYS.find((k) => k === (descending ? trimmed.slice(1) : trimmed));
+  if (key) return { key, descending };
+  return problem(
+    'not-a-choice',
+    `${quoteInput(text)} is nothing to sort by`,
+    `write ${orList(SORT_KEYS)}, with a dash before it for the greatest first`,
+  );
+}
+
+/** By index where the index is asked for, else in the order of the keys. */
+export function defaultOrder(criteria: Criteria): SortOrder {
+  const { ranges, maxLoss } = criteria;
+  const key: SortKey = ranges.n
+    ? 'n'
+    : maxLoss !== undefined
+      ? 'loss'
+      : ranges.gvd_s2_per_m
+        ? 'gvd'
+        : ranges.groupIndex
+          ? 'group-index'
+          : ranges.birefringence
+            ? 'birefringence'
+            : ranges.abbe
+              ? 'abbe'
+              : 'key';
+  return { key, descending: false };
+}
+
+export function sortFound(
+  found: readonly Found[],
+  { key, descending }: SortOrder,
+  criteria: Criteria,
+): readonly Found[] {
+  const valued = found.map((f) => ({ f, value: sortValue(f.candidate, key, criteria) }));
+  const sign = descending ? -1 : 1;
+  return valued
+    .sort((a, b) => {
+      if (a.value === undefined || b.value === undefined) {
+        return Number(a.value === undefined) - Number(b.value === undefined);
+      }
+      return sign * compare(a.value, b.value);
+    })
+    .map(({ f }) => f);
+}
+
+function compare(a: number | string, b: number | string): number {
+  return a < b ? -1 : a > b ? 1 : 0;
+}
+
+function sortValue(candidate: Candidate, key: SortKey, criteria: Criteria): number | string | undefined {
+  const { material } = candidate;
+  const number = (value: number | Undecided): number | undefined => (isUndecided(value) ? undefined : value);
+  switch (key) {
+    case 'key':
+      return material.key;
+    case 'name':
+      return material.name.toLowerCase();
+    case 'class':
+      return material.class;
+    case 'n':
+      return number(candidate.n);
+    case 'loss': {
+      const loss = candidate.loss(criteria.thickness_m);
+      return isUndecided(loss) ? undefined : loss.fraction;
+    }
+    case 'group-index':
+      return number(candidate.groupIndex);
+    case 'gvd':
+      return number(candidate.gvd_s2_per_m);
+    case 'birefringence': {
+      const value = number(candidate.birefringence);
+      return value === undefined ? undefined : Math.abs(value);
+    }
+    case 'abbe':
+      return number(candidate.abbe);
+    case 'hardness':
+      return material.handling?.knoop;
+    case 'density':
+      return material.handling?.density_g_per_cm3;
+  }
+}
