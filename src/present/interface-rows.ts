@@ -16,6 +16,8 @@ export function powerText(
   guide: number | null,
   style: PresentStyle,
 ): string {
+  // Exactly nothing (total reflection) has no digits to doubt.
+  if (value === 0) return formatQuantity(0, PER_CENT, { significant: 1 }, { style });
   const otherwise = precisionFor(value, guide ?? 0, EXACT_DIGITS);
   return formatUncertainQuantity(value, uncertainty, PER_CENT, otherwise, { style });
 }
@@ -81,10 +83,12 @@ function lossRows(rows: RowList, surface: InterfaceAnswer, style: PresentStyle):
 
 function angleRows(rows: RowList, answer: Answer, style: PresentStyle): void {
   const surface = answer.interface;
-  const refraction = surface.totalReflection
-    ? 'total reflection'
-    : degreesText(surface.refractionAngle_rad, 2, style);
-  rows.add('refractionAngle_rad', 'θ_t', 'angle of refraction', refraction);
+  if (answer.geometry.incidenceAngle_rad > 0) {
+    const refraction = surface.totalReflection
+      ? 'total reflection'
+      : degreesText(surface.refractionAngle_rad, 2, style);
+    rows.add('refractionAngle_rad', 'θ_t', 'angle of refraction', refraction);
+  }
   if (answer.layers.length > 0) return;
   if (surface.brewsterAngle_rad === null && surface.pseudoBrewsterAngle_rad !== null) {
     const pseudo = degreesText(surface.pseudoBrewsterAngle_rad, 2, style);

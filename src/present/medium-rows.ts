@@ -13,6 +13,9 @@ import type { PresentStyle, Shown } from './shown.ts';
 /** Digits of a quantity that follows from exact numbers. */
 const EXACT_DIGITS = 7;
 
+/** From this ratio k/n on a group velocity says nothing about a pulse. */
+const PULSES_UP_TO_k = 0.1;
+
 /** From this vacuum wavelength on a person thinks in permittivity. */
 const RADIO_FROM_m = 1e-3;
 
@@ -37,23 +40,9 @@ export function mediumRows(
     'wavelength in the medium',
     formatQuantity(wavelength, METRE, derived(wavelength), { style }),
   );
-  const groupIndex = medium.groupIndex;
-  // A fit's slope is known less well than its value: one place less.
-  const slope = precisionFor(groupIndex, known.uncertainty * 10, EXACT_DIGITS);
-  const reference =
-    medium.fit && medium.publishedReference === 'air' && groupIndex !== null ? ' rel. to air' : '';
-  rows.add('groupIndex', 'n_g', 'group index', `${formatNumber(groupIndex, slope, style)}${reference}`);
   const v = medium.phaseVelocity_m_per_s;
   rows.add('phaseVelocity_m_per_s', 'v', 'phase velocity', ofLight(v, derived(v), style));
-  const vg = medium.absolute.groupVelocity_m_per_s;
-  const vgDigits = precisionFor(vg, Math.abs(vg ?? 0) * share * 10, EXACT_DIGITS);
-  rows.add('groupVelocity_m_per_s', 'v_g', 'group velocity', ofLight(vg, vgDigits, style));
-  rows.add(
-    'gvd_s2_per_m',
-    'GVD',
-    'group-velocity dispersion',
-    formatQuantity(medium.gvd_s2_per_m, FS2_PER_MM, { significant: 3 }, { style }),
-  );
+  if (medium.k < PULSES_UP_TO_k * Math.abs(medium.n)) groupRows(rows, medium, known, share, style);
   rows.add('absorption', 'α', 'absorption coefficient', absorptionText(medium, style));
   if (medium.penetrationDepth_m !== null) {
     const depth = formatQuantity(medium.penetrationDepth_m, METRE, { significant: 3 }, { style });
@@ -61,6 +50,27 @@ export function mediumRows(
   }
   if (!radio && medium.k > 0.01 * Math.abs(medium.n)) electricRows(rows, medium, style);
   return rows.list;
+}
+
+/** How a pulse travels; left out where the medium swallows it within a wavelength or so. */
+function groupRows(
+  rows: RowList,
+  medium: MediumAnswer,
+  known: Known,
+  share: number,
+  style: PresentStyle,
+): void {
+  const { groupIndex } = medium;
+  // A fit's slope is known less well than its value: one place less.
+  const slope = precisionFor(groupIndex, known.uncertainty * 10, EXACT_DIGITS);
+  const reference =
+    medium.fit && medium.publishedReference === 'air' && groupIndex !== null ? ' rel. to air' : '';
+  rows.add('groupIndex', 'n_g', 'group index', `${formatNumber(groupIndex, slope, style)}${reference}`);
+  const vg = medium.absolute.groupVelocity_m_per_s;
+  const vgDigits = precisionFor(vg, Math.abs(vg ?? 0) * share * 10, EXACT_DIGITS);
+  rows.add('groupVelocity_m_per_s', 'v_g', 'group velocity', ofLight(vg, vgDigits, style));
+  const gvd = formatQuantity(medium.gvd_s2_per_m, FS2_PER_MM, { significant: 3 }, { style });
+  rows.add('gvd_s2_per_m', 'GVD', 'group-velocity dispersion', medium.gvd_s2_per_m === 0 ? 'none' : gvd);
 }
 
 /** 1.45702(3), or as many digits as hold. */

@@ -15,9 +15,6 @@ import { wrap } from '../../present/wrap.ts';
 import { toAscii } from '../../units/to-ascii.ts';
 
 const WIDTH = 72;
-const SYMBOL = 6;
-const LABEL = 26;
-const VALUE = 20;
 
 export function renderText(answer: Answer, style: PresentStyle): string {
   const lines = [
@@ -52,13 +49,19 @@ function mediaTable(answer: Answer, style: PresentStyle): readonly string[] {
     ...mediumRows(answer.into, lambda, style),
     ...waveEnergyRows(answer.energy?.transmitted ?? null, style),
   ];
+  const rows = pairRows(left, right);
+  const symbol = 1 + Math.max(...rows.map((r) => length(r.symbol)));
+  const head = symbol + 1 + Math.max(...rows.map((r) => length(r.label)));
+  const value = Math.floor((WIDTH - head) / 2);
   return [
-    ...sideBySide(title(answer.from, style), title(answer.into, style)),
-    ...pairRows(left, right).map(({ symbol, label, left: a, right: b }) => {
-      const head = pad(symbol, SYMBOL) + pad(label, LABEL);
-      const row = `${head}${pad(a, VALUE)}${length(a) >= VALUE ? ' ' : ''}${b}`;
+    ...sideBySide(title(answer.from, style), title(answer.into, style), head, value),
+    ...rows.flatMap((r) => {
+      const name = pad(pad(r.symbol, symbol) + r.label, head);
+      const row = `${name}${pad(r.left, value)}${length(r.left) >= value ? ' ' : ''}${r.right}`;
       // A long complex value takes a line of its own rather than losing digits.
-      return length(row) <= WIDTH ? row : `${head}${a}\n${' '.repeat(SYMBOL + LABEL)}${b}`;
+      return length(row) <= WIDTH
+        ? [row]
+        : [name + r.left, ' '.repeat(head) + r.right.padStart(WIDTH - head)];
     }),
   ];
 }
@@ -68,13 +71,13 @@ function title(medium: MediumAnswer, style: PresentStyle): string {
   return conditions === '' ? mediumTitle(medium) : `${mediumTitle(medium)} (${conditions})`;
 }
 
-function sideBySide(a: string, b: string): readonly string[] {
-  const left = wrap(a, VALUE - 1);
-  const right = wrap(b, VALUE - 1);
+function sideBySide(a: string, b: string, head: number, value: number): readonly string[] {
+  const left = wrap(a, value - 1);
+  const right = wrap(b, value);
   const count = Math.max(left.length, right.length);
   return Array.from(
     { length: count },
-    (_, i) => ' '.repeat(SYMBOL + LABEL) + pad(left[i] ?? '', VALUE) + (right[i] ?? ''),
+    (_, i) => ' '.repeat(head) + pad(left[i] ?? '', value) + (right[i] ?? ''),
   );
 }
 
