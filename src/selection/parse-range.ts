@@ -14,6 +14,8 @@ export interface RangeSpec {
   readonly what: string;
   /** "1.37..1.39, 1.7.. or ..1.4" */
   readonly examples: string;
+  /** Whether a unit on the second end counts for both. */
+  readonly hasUnit?: true;
   /** One end. */
   readonly parse: (text: string) => number | Problem;
 }
@@ -27,7 +29,7 @@ export function parseRange(text: string, spec: RangeSpec): ValueRange | Problem 
   if (ends.length === 1) return notARange(trimmed, spec);
   if (isOverDotted(trimmed)) return overDotted(trimmed, spec);
   if (low === '' && high === '') return problem('empty', 'a range needs at least one end', write);
-  const from = low === '' ? undefined : spec.parse(withUnitOf(low, high));
+  const from = low === '' ? undefined : spec.parse(spec.hasUnit ? withUnitOf(low, high) : low);
   if (isProblem(from)) return from;
   const to = high === '' ? undefined : spec.parse(high);
   if (isProblem(to)) return to;
@@ -91,6 +93,7 @@ export const BIREFRINGENCE_RANGE = numberRange('a range of the birefringence', '
 export const GVD_RANGE: RangeSpec = {
   what: 'a range of the group-velocity dispersion',
   examples: '..50, -20..20 or 0..50fs2/mm',
+  hasUnit: true,
   parse(text) {
     const bare = text.trim().replace(/\s*(?:fs(?:2|\^2|²)\/mm|ps(?:2|\^2|²)\/km)$/iu, '');
     const value = parseNumber(bare);
@@ -107,6 +110,7 @@ export const GVD_RANGE: RangeSpec = {
 const SPAN: RangeSpec = {
   what: 'a span of wavelengths',
   examples: '3um..5um, 400..700nm or 10.6um',
+  hasUnit: true,
   parse(end) {
     const wave = parseWave(end);
     if (isProblem(wave)) return wave;
