@@ -21,6 +21,8 @@ export interface ChartScale {
 
 const LARGEST = 1e300;
 const SMALLEST = 1e-300;
+/** Stands for places too far outside for a double. */
+const FARTHEST = 1e300;
 /** Below this share of its size a change of the data is rounding noise, and the data count as flat. */
 const FLAT = 1e-10;
 
@@ -54,10 +56,15 @@ function makeScale(
   const scale = (isLog ? scaleLog() : scaleLinear()).domain(range).range([0, 1]);
   if (niceEnds && !isLog) (scale as ReturnType<typeof scaleLinear>).nice(Math.max(1, tickCount));
   const [low = 0, high = 1] = scale.domain();
+  const place = (value: number): number => {
+    if (!canBeShown(value, axis)) return Number.NaN;
+    const at = scale(value);
+    return Number.isFinite(at) ? at : value > high ? FARTHEST : -FARTHEST;
+  };
   return {
     axis,
     domain: [low, high],
-    place: (value) => (canBeShown(value, axis) ? scale(value) : Number.NaN),
+    place,
     valueAt: (place) => scale.invert(place),
     ticks: (count) => (isLog ? logTicks(low, high, count) : linearTicks(low, high, count)),
   };
@@ -77,14 +84,14 @@ function logTicks(low: number, high: number, count: number): readonly number[] {
   const all = scaleLog().domain([low, high]).ticks(most);
   const within = all.filter((tick) => tick >= low && tick <= high);
   for (const mantissas of [[1, 2, 5], [1]]) {
-    const chosen = within.filter((tick) => mantissas.includes(leadingDigit(tick)));
+    const chosen = within.filter((tick) => mantissas.includes(mantissaOf(tick)));
     if (chosen.length >= 2 && chosen.length <= 2 * most) return chosen;
   }
   return high / low < 10 ? linearTicks(low, high, most) : thinned(within, most);
 }
 
-function leadingDigit(value: number): number {
-  return Number(value.toExponential(6).slice(0, 1));
+function mantissaOf(value: number): number {
+  return Number(value.toExponential(6).split('e')[0]);
 }
 
 function thinned(ticks: readonly number[], most: number): readonly number[] {
@@ -106,7 +113,8 @@ function rangeOf(values: readonly number[], axis: ChartAxis): readonly [number, 
   if (low > high) return axis.scale === 'log' ? [1, 10] : [0, 1];
   const limited = axis.scale === 'log' ? limitLog(low, high) : limitLinear(low, high);
   const [from, to] = limited;
-  return to - from > FLAT * Math.max(Math.abs(from), Math.abs(to)) ? limited : roomAround(from, axis);
+  const flat = Math.max(FLAT * Math.abs(from), FLAT * Math.abs(to), axis.scale === 'log' ? 0 : SMALLEST);
+  return to - from > flat ? limited : roomAround(from, axis);
 }
 
 function limitLinear(low: number, high: number): readonly [number, number] {

@@ -9,14 +9,13 @@ export interface TextCluster {
 /** Cuts a text into clusters. Callers with wide characters in their labels hand in a measure of their own. */
 export type Clusters = (text: string) => readonly TextCluster[];
 
-/** One cell a character; combining marks join the character before. */
+/** One cell a character; combining marks join the character before, and are left out where there is none. */
 export const simpleClusters: Clusters = (text) => {
   const out: TextCluster[] = [];
   for (const character of text) {
     const before = out.at(-1);
-    if (before && /^[\p{M}\u200d]$/u.test(character))
-      out[out.length - 1] = { text: before.text + character, width: before.width };
-    else out.push({ text: character, width: 1 });
+    if (!/^[\p{M}\u200d]$/u.test(character)) out.push({ text: character, width: 1 });
+    else if (before) out[out.length - 1] = { text: before.text + character, width: before.width };
   }
   return out;
 };

@@ -80,9 +80,10 @@ function lastPlaceOf(step: number): number {
 }
 
 function logText(value: number, ascii: boolean): string {
-  const power = Number(value.toExponential().split('e')[1]);
-  if (power >= -3 && power < 5) return formatNumber(value, 'shortest');
-  const mantissa = value.toExponential(0).split('e')[0] ?? '1';
+  const round = Number(value.toPrecision(9));
+  const [mantissa = '1', exponent = '0'] = round.toExponential().split('e');
+  const power = Number(exponent);
+  if (power >= -3 && power < 5) return formatNumber(round, 'shortest');
   if (ascii) return `${mantissa}e${power}`;
   return mantissa === '1' ? `10${superscript(power)}` : `${mantissa}×10${superscript(power)}`;
 }
