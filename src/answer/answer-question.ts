@@ -11,6 +11,7 @@ import { indexUncertainty, powerSpread } from './input-uncertainty.ts';
 import { interfaceParts, LOSSY_INCIDENCE, powerOf } from './interface-answer.ts';
 import { type MediumSide, mediumSide, type SourceOf } from './medium-side.ts';
 import { type Path, readPath } from './path.ts';
+import { type PathFields, pathFields, surfaceFields } from './path-fields.ts';
 import { pathNotes, pathPower, pathSurface, solvePath, surfacePower } from './path-powers.ts';
 import { pulseAnswer, pulseNotes } from './pulse-answer.ts';
 import type { Question } from './question.ts';
@@ -48,10 +49,20 @@ export function answerQuestion(question: Question, sourceOf: SourceOf): Answer |
   const crossing =
     surface.T === null ? null : spread.of(surface.T, (moved) => powerOf(polarization, ...power(moved).T));
   const powers = { R: surface.R, T: surface.T, surface: parts ? null : first.wave };
-  const energy: EnergyParts | null = question.beam
-    ? energyParts(question.beam, from, into, powers, polarization, incidenceAngle_rad, vacuumWavelength_m)
-    : null;
   const pulse = pulseAnswer(question, parts);
+  const fields = (): PathFields =>
+    path && parts
+      ? pathFields(path, question, parts, vacuumWavelength_m)
+      : surfaceFields(from, into, question, vacuumWavelength_m);
+  const energy: EnergyParts | null = question.beam
+    ? energyParts(
+        question,
+        question.beam,
+        { from, into, powers, fields: fields(), polarization, angle_rad: incidenceAngle_rad },
+        vacuumWavelength_m,
+        pulse ? pulse.durationOut_s / pulse.durationIn_s : 1,
+      )
+    : null;
 
   return {
     wave: waveAnswer(wave, question.wave.inAir),

@@ -5,6 +5,7 @@
 
 import type { CautionCode } from '../medium/caution.ts';
 import type { Complex } from '../num/complex.ts';
+import type { BeamAnswer } from './beam-answer.ts';
 import type { Polarization } from './question.ts';
 
 export interface Caution {
@@ -128,12 +129,7 @@ export interface InterfaceAnswer {
   readonly returnLoss_dB: number | null;
 }
 
-export interface EnergyAnswer {
-  readonly irradiance_W_per_m2: number;
-  readonly peakE_V_per_m: number;
-  readonly peakB_T: number;
-  readonly energyDensity_J_per_m3: number | null;
-}
+export type { EnergyAnswer } from './beam-answer.ts';
 
 /** A layer of the path, in the order the wave meets them. */
 export interface LayerAnswer {
@@ -173,6 +169,8 @@ export interface StackAnswer {
   readonly coherenceLength_m: number;
   /** False where the length is the program's own assumption. */
   readonly coherenceLengthStated: boolean;
+  /** "pulse": the transform limit of the stated pulse, where it is shorter than what is assumed. */
+  readonly coherenceLengthFrom: 'stated' | 'pulse' | 'assumed';
   /** Null where any layer is summed as intensities. */
   readonly reflectionS: DelayAnswer | null;
   readonly reflectionP: DelayAnswer | null;
@@ -189,6 +187,19 @@ export interface StackAnswer {
     readonly position_m: number;
     readonly period_m: number;
   };
+  /** Where asked for and the path is coherent; of s for unpolarized light. */
+  readonly fieldProfile: readonly FieldPointAnswer[] | null;
+}
+
+export interface FieldPointAnswer {
+  /** Behind the first face; negative in front of it. */
+  readonly position_m: number;
+  /** 0 in front, then the layers, one more behind the last. */
+  readonly layer: number;
+  /** |E|^2 over that of the incident wave. */
+  readonly intensity: number;
+  /** Share of the incident power absorbed per length. */
+  readonly absorbed_per_m: number;
 }
 
 /** One plate with two faces. */
@@ -255,15 +266,7 @@ export interface Answer {
   readonly stack: StackAnswer | null;
   readonly window: WindowAnswer | null;
   readonly pulse: PulseAnswer | null;
-  readonly energy: null | {
-    readonly incident: EnergyAnswer | null;
-    readonly reflected: EnergyAnswer | null;
-    readonly transmitted: EnergyAnswer | null;
-    readonly radiationPressure_Pa: number | null;
-    readonly photonFlux_per_s: number | null;
-    readonly incidentPower_W: number | null;
-    readonly reflectedPower_W: number | null;
-    readonly transmittedPower_W: number | null;
-  };
+  /** With a stated beam. */
+  readonly energy: BeamAnswer | null;
   readonly cautions: readonly Caution[];
 }

@@ -111,6 +111,11 @@ const WORDING: Readonly<Record<CautionCode, Wording>> = {
     () =>
       'damage thresholds need the definition of area and pulse length (ISO 21254); fields inside coatings can exceed the incident one',
   ],
+  'pulse-train': [
+    'hazard',
+    () =>
+      'exposure and damage limits of pulses depend on energy, duration and number in the train: compare single pulse, train and mean with the applicable standard',
+  ],
   'ideal-surface': [
     'note',
     () => 'smooth, clean, plane surfaces assumed; for a hazard analysis take the larger reflectance',

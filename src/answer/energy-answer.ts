@@ -1,135 +1,146 @@
-/** The energy part of the answer: what a stated beam carries before and beyond the interface, and the cautions that go with it. */
-import {
-  fieldOfIrradiance,
-  irradianceOfField,
-  meanEnergy,
-  photonFlux_per_s,
-  planeWaveEnergy,
-  radiationPressure_Pa,
-  transmittedEnergy,
-} from '../interface/energy.ts';
-import type { FresnelResult } from '../interface/fresnel.ts';
+/** The energy part of the answer: what a stated beam carries before, in and beyond the layers, and the cautions that go with it. */
+import { irradianceOfField, photonFlux_per_s, radiationPressure_Pa } from '../interface/energy.ts';
 import type { CautionNote } from '../medium/caution.ts';
-import { peakIrradiance_W_per_m2 as beamIrradiance_W_per_m2 } from '../stack/beam.ts';
-import type { Answer, EnergyAnswer } from './answer.ts';
+import {
+  peakIrradiance_W_per_m2 as beamIrradiance_W_per_m2,
+  bIntegral_rad,
+  footprint,
+} from '../stack/beam.ts';
+import { peakPower_W } from '../stack/pulse.ts';
+import type { BeamAnswer, FootprintAnswer, NonlinearAnswer, PulsedBeamAnswer } from './beam-answer.ts';
+import { beamNotes } from './beam-notes.ts';
 import type { MediumSide } from './medium-side.ts';
-import type { Beam, Polarization } from './question.ts';
+import type { Beam, PulseTrain, Question } from './question.ts';
+import { fieldsFor, type Scene } from './wave-fields.ts';
 
 export interface EnergyParts {
-  readonly answer: NonNullable<Answer['energy']>;
+  readonly answer: BeamAnswer;
   readonly notes: readonly CautionNote[];
 }
 
-/** Peak irradiance across the beam; null where a power came without a diameter. */
-export function peakIrradiance_W_per_m2(beam: Beam, from: MediumSide): number | null {
+type WideBeam = Extract<Beam, { readonly profile: unknown }>;
+
+const isWide = (beam: Beam): beam is WideBeam => beam.kind === 'power' || beam.kind === 'pulse';
+
+/** Peak of a profile that carries `amount` (power or energy); null without a diameter. */
+function centreOf(amount: number | null, beam: WideBeam): number | null {
+  if (amount === null || beam.diameter_m === undefined) return null;
+  return beamIrradiance_W_per_m2(amount, beam.diameter_m / 2, beam.profile);
+}
+
+/** Mean irradiance at the centre of the beam; null where no power or no diameter is known. */
+function meanIrradiance_W_per_m2(beam: Beam, from: MediumSide): number | null {
   if (beam.kind === 'irradiance') return beam.irradiance_W_per_m2;
   if (beam.kind === 'field') return irradianceOfField(from.optics, beam.peakE_V_per_m);
-  if (beam.diameter_m === undefined) return null;
-  return beamIrradiance_W_per_m2(beam.power_W, beam.diameter_m / 2, beam.profile);
+  return beam.kind === 'power' ? centreOf(beam.power_W, beam) : null;
 }
 
-/** Power fractions of the surface or the path, for the asked polarization; T null where it has no meaning. */
-export interface PowerFractions {
-  readonly R: number;
-  readonly T: number | null;
-  /** Fields just beyond the surface follow from its amplitudes; behind a path of layers only powers are given. */
-  readonly surface: FresnelResult | null;
-}
-
+/** `stretched`: see `fieldsFor`. */
 export function energyParts(
+  question: Question,
   beam: Beam,
-  from: MediumSide,
-  into: MediumSide,
-  powers: PowerFractions,
-  polarization: Polarization,
-  angle_rad: number,
+  scene: Scene,
   vacuumWavelength_m: number,
+  stretched: number,
 ): EnergyParts {
-  const I = peakIrradiance_W_per_m2(beam, from);
-  const { R, T, surface } = powers;
+  const { from, into, powers, angle_rad } = scene;
+  const I = meanIrradiance_W_per_m2(beam, from);
   const power_W = beam.kind === 'power' ? beam.power_W : null;
-  const fields = I === null ? null : fieldsOf(I, from, into, powers, polarization, angle_rad);
+  const fields = I === null ? null : fieldsFor(I, scene);
+  const { R, T, surface } = powers;
   const pressure =
     I === null || T === null || !surface
       ? null
       : radiationPressure_Pa(from.optics, into.optics, surface, R, T, angle_rad, I);
+  const train = isWide(beam) ? beam.pulse : undefined;
+  const pulse =
+    train && isWide(beam) ? pulsedBeam(train, beam, power_W, scene, vacuumWavelength_m, stretched) : null;
+  const nonlinear = nonlinearPart(question, scene, pulse?.peakIrradiance_W_per_m2 ?? I, vacuumWavelength_m);
+  const answer: BeamAnswer = {
+    incident: fields?.incident ?? null,
+    reflected: fields?.reflected ?? null,
+    transmitted: fields?.transmitted ?? null,
+    radiationPressure_Pa: pressure,
+    photonFlux_per_s: power_W === null ? null : photonFlux_per_s(power_W, vacuumWavelength_m),
+    incidentPower_W: power_W,
+    reflectedPower_W: power_W === null ? null : R * power_W,
+    transmittedPower_W: power_W === null || T === null ? null : T * power_W,
+    layers: fields?.layers ?? [],
+    fieldMaximum: fields?.fieldMaximum ?? null,
+    fieldMaximumBefore: fields?.fieldMaximumBefore ?? null,
+    footprint: footprintPart(beam, angle_rad, I),
+    pulse,
+    nonlinear,
+  };
+  return { answer, notes: beamNotes(beam, R, angle_rad, vacuumWavelength_m, answer) };
+}
+
+function footprintPart(beam: Beam, angle_rad: number, I: number | null): FootprintAnswer | null {
+  if (!isWide(beam) || beam.diameter_m === undefined) return null;
+  const seen = footprint(beam.diameter_m / 2, angle_rad);
   return {
-    answer: {
-      incident: fields?.incident ?? null,
-      reflected: fields?.reflected ?? null,
-      transmitted: fields?.transmitted ?? null,
-      radiationPressure_Pa: pressure,
-      photonFlux_per_s: power_W === null ? null : photonFlux_per_s(power_W, vacuumWavelength_m),
-      incidentPower_W: power_W,
-      reflectedPower_W: power_W === null ? null : R * power_W,
-      transmittedPower_W: power_W === null || T === null ? null : T * power_W,
-    },
-    notes: beamNotes(beam, R, angle_rad, vacuumWavelength_m, I, pressure),
+    acrossDiameter_m: 2 * seen.acrossRadius_m,
+    alongDiameter_m: 2 * seen.alongRadius_m,
+    irradianceOnSurface_W_per_m2: I === null ? null : I * seen.irradianceFactor,
   };
 }
 
-function fieldsOf(
-  I: number,
-  from: MediumSide,
-  into: MediumSide,
-  { R, T, surface }: PowerFractions,
-  polarization: Polarization,
-  angle_rad: number,
-): Pick<NonNullable<Answer['energy']>, 'incident' | 'reflected' | 'transmitted'> {
-  const E0 = fieldOfIrradiance(from.optics, I);
-  const beyond = (p: 's' | 'p', wave: FresnelResult) =>
-    transmittedEnergy(into.optics, into.groupIndex, wave, p, E0);
-  const transmitted = (): EnergyAnswer | null => {
-    if (surface) {
-      return polarization === 'unpolarized'
-        ? meanEnergy(beyond('s', surface), beyond('p', surface))
-        : beyond(polarization, surface);
-    }
-    // Behind layers: the flux that leaves them, spread over the refracted beam's cross-section.
-    const sin = (from.optics.n.re * Math.sin(angle_rad)) / into.optics.n.re;
-    if (T === null || T === 0 || sin >= 1) return null;
-    const I_out = (T * I * Math.cos(angle_rad)) / Math.sqrt(1 - sin * sin);
-    return planeWaveEnergy(into.optics, into.groupIndex, I_out);
-  };
-  return {
-    incident: planeWaveEnergy(from.optics, from.groupIndex, I),
-    reflected: planeWaveEnergy(from.optics, from.groupIndex, R * I),
-    transmitted: transmitted(),
-  };
-}
-
-const VISIBLE_m = [400e-9, 700e-9] as const;
-/** Longer waves fall under the radio exposure guidelines instead of the laser ones (300 GHz). */
-const RADIO_FROM_m = 1e-3;
-
-function beamNotes(
-  beam: Beam,
-  R: number,
-  angle_rad: number,
+function pulsedBeam(
+  train: PulseTrain,
+  beam: WideBeam,
+  averagePower_W: number | null,
+  scene: Scene,
   vacuumWavelength_m: number,
-  I: number | null,
-  pressure: number | null,
-): readonly CautionNote[] {
-  const notes: CautionNote[] = [];
-  if (vacuumWavelength_m >= RADIO_FROM_m) notes.push({ code: 'rf-exposure', details: {} });
-  else {
-    const reflected =
-      beam.kind === 'power'
-        ? `${short(R * beam.power_W)} W`
-        : I === null
-          ? 'the reflection'
-          : `${short(R * I)} W/m2`;
-    const angle = `${((angle_rad * 180) / Math.PI).toFixed(1)} deg`;
-    if (R > 0) notes.push({ code: 'stray-reflection', details: { power: reflected, angle } });
-    notes.push({ code: 'laser-hazard', details: {} });
-    if (vacuumWavelength_m < VISIBLE_m[0] || vacuumWavelength_m > VISIBLE_m[1]) {
-      notes.push({ code: 'invisible-beam', details: {} });
-    }
-  }
-  if (beam.kind === 'power' && beam.pulse) notes.push({ code: 'damage-definition', details: {} });
-  if (pressure !== null) notes.push({ code: 'momentum-convention', details: {} });
-  notes.push({ code: 'ideal-surface', details: {} });
-  return notes;
+  stretched: number,
+): PulsedBeamAnswer {
+  const { energy_J, duration_s = null, repetition_Hz = null } = train;
+  const peak_W = duration_s === null ? null : peakPower_W(energy_J, duration_s, 'gaussian');
+  const peak = centreOf(peak_W, beam);
+  const fluence = centreOf(energy_J, beam);
+  const { R, T } = scene.powers;
+  return {
+    energy_J,
+    duration_s,
+    repetition_Hz,
+    averagePower_W,
+    dutyCycle: duration_s === null || repetition_Hz === null ? null : duration_s * repetition_Hz,
+    peakPower_W: peak_W,
+    peakIrradiance_W_per_m2: peak,
+    peakFluence_J_per_m2: fluence,
+    fluenceOnSurface_J_per_m2: fluence === null ? null : fluence * Math.cos(scene.angle_rad),
+    reflectedEnergy_J: R * energy_J,
+    transmittedEnergy_J: T === null ? null : T * energy_J,
+    photonsPerPulse: photonFlux_per_s(energy_J, vacuumWavelength_m),
+    fields: peak === null ? null : fieldsFor(peak, scene, stretched),
+  };
 }
 
-const short = (x: number): string => String(Number(x.toPrecision(2)));
+/** Null where no n2 was given or no irradiance is known. Absorption along a layer is taken off. */
+function nonlinearPart(
+  question: Question,
+  { fields }: Scene,
+  irradiance_W_per_m2: number | null,
+  vacuumWavelength_m: number,
+): NonlinearAnswer | null {
+  if (irradiance_W_per_m2 === null) return null;
+  const layers = question.layers.flatMap(({ nonlinearIndex_m2_per_W: n2 }, i) => {
+    const field = fields.layers[i];
+    if (n2 === undefined || !field || field.enteringShare === null || field.rayLength_m === null) return [];
+    const stretch = {
+      length_m: field.rayLength_m,
+      nonlinearIndex_m2_per_W: n2,
+      irradiance_W_per_m2: field.enteringShare * irradiance_W_per_m2,
+      absorptionCoefficient_per_m: field.absorptionCoefficient_per_m,
+    };
+    return [
+      {
+        layer: i + 1,
+        nonlinearIndex_m2_per_W: n2,
+        rayLength_m: field.rayLength_m,
+        bIntegral_rad: bIntegral_rad([stretch], vacuumWavelength_m),
+      },
+    ];
+  });
+  if (layers.length === 0) return null;
+  return { bIntegral_rad: layers.reduce((sum, l) => sum + l.bIntegral_rad, 0), layers };
+}

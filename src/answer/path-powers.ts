@@ -10,11 +10,12 @@ import { type Refusal, refuse } from '../medium/refusal.ts';
 import { arg, complex } from '../num/complex.ts';
 import { mixedStack } from '../stack/mixed-stack.ts';
 import { StackRefusal } from '../stack/stack-refusal.ts';
+import { ASSUMED_COHERENCE_waves, coherenceTaken } from './coherence-taken.ts';
 import { type Moved, movedOptics } from './input-uncertainty.ts';
 import { type InterfaceParts, powerOf } from './interface-answer.ts';
 import type { Path } from './path.ts';
 import type { Polarization, Question } from './question.ts';
-import { ASSUMED_COHERENCE_waves, type StackParts, stackParts } from './stack-answer.ts';
+import { type StackParts, stackParts } from './stack-answer.ts';
 
 /** [s, p] of reflectance and transmittance. */
 export interface BothPolarizations {
@@ -29,13 +30,7 @@ export function surfacePower({ from, into, angle_rad }: Moved): BothPolarization
 
 export function solvePath(path: Path, question: Question, vacuumWavelength_m: number): StackParts | Refusal {
   try {
-    return stackParts(
-      path,
-      vacuumWavelength_m,
-      question.incidenceAngle_rad,
-      question.polarization,
-      question.coherenceLength_m,
-    );
+    return stackParts(path, question, vacuumWavelength_m);
   } catch (error) {
     if (error instanceof StackRefusal) return refuse(error.code, 3, error.message, error.remedy);
     throw error;
@@ -48,6 +43,7 @@ export function pathPower(
   question: Question,
   vacuumWavelength_m: number,
 ): (inputs: Moved) => BothPolarizations {
+  const coherence_m = coherenceTaken(question, vacuumWavelength_m).length_m;
   return ({ from, into, angle_rad, shift_um, thickness_m, layer: offset }) => {
     const wavelength_m = vacuumWavelength_m + shift_um * 1e-6;
     const layers = path.layers.map((layer, i) => {
@@ -55,7 +51,6 @@ export function pathPower(
       return { eps, mu, thickness_m: Math.max(0, layer.thickness_m + thickness_m) };
     });
     const incidence = { eps: complex((from.n.re * from.n.re) / from.mu.re), mu: complex(from.mu.re) };
-    const coherence_m = question.coherenceLength_m ?? ASSUMED_COHERENCE_waves * vacuumWavelength_m;
     const m = mixedStack(
       { incidence, layers, exit: { eps: into.eps, mu: into.mu } },
       wavelength_m,
@@ -100,9 +95,12 @@ export function pathSurface(bare: Surface, parts: StackParts, polarization: Pola
 /** Which layers were summed as intensities, and on what ground. */
 export function pathNotes({ stack, layers }: StackParts): readonly CautionNote[] {
   const length = lengthText(stack.coherenceLength_m * 1e6, 3);
-  const ground = stack.coherenceLengthStated
-    ? `coherence length ${length} as stated`
-    : `coherence length taken as ${length} (${ASSUMED_COHERENCE_waves} wavelengths; state --linewidth or --coherence)`;
+  const grounds = {
+    stated: `coherence length ${length} as stated`,
+    pulse: `coherence length taken as ${length}, that of the pulse`,
+    assumed: `coherence length taken as ${length} (${ASSUMED_COHERENCE_waves} wavelengths; state --linewidth or --coherence)`,
+  };
+  const ground = grounds[stack.coherenceLengthFrom];
   const numbers = layers.flatMap((l, i) => (l.coherent ? [] : [i + 1]));
   if (numbers.length === 0)
     return [{ code: 'coherence', details: { text: `all layers coherent: ${ground}` } }];

@@ -10,14 +10,15 @@ import type { StackParts } from './stack-answer.ts';
 const THIRD_ORDER_MATTERS = 1;
 
 export function pulseAnswer(question: Question, parts: StackParts | null): PulseAnswer | null {
-  const train = question.beam?.kind === 'power' ? question.beam.pulse : undefined;
+  const { beam } = question;
+  const wide = beam?.kind === 'power' || beam?.kind === 'pulse' ? beam : undefined;
+  const train = wide?.pulse;
   const durationIn_s = question.pulseDuration_s ?? train?.duration_s;
   if (durationIn_s === undefined) return null;
   const dispersed = dispersionOf(parts, question);
   const gdd_s2 = dispersed?.gdd_s2 ?? 0;
   const tod_s3 = dispersed?.tod_s3 ?? null;
   const ratio = tod_s3 === null ? null : thirdOrderRatio(durationIn_s, gdd_s2, tod_s3);
-  const beam = question.beam?.kind === 'power' ? question.beam : undefined;
   return {
     durationIn_s,
     durationOut_s: broadenedDuration_s(durationIn_s, gdd_s2),
@@ -25,10 +26,10 @@ export function pulseAnswer(question: Question, parts: StackParts | null): Pulse
     tod_s3,
     thirdOrderRatio: ratio !== null && Number.isFinite(ratio) ? ratio : null,
     timeBandwidthProduct: TIME_BANDWIDTH.gaussian,
-    peakPower_W: train ? peakPower_W(train.energy_J, train.duration_s, 'gaussian') : null,
+    peakPower_W: train ? peakPower_W(train.energy_J, durationIn_s, 'gaussian') : null,
     peakFluence_J_per_m2:
-      train && beam?.diameter_m !== undefined
-        ? peakFluence_J_per_m2(train.energy_J, beam.diameter_m / 2, beam.profile)
+      train && wide?.diameter_m !== undefined
+        ? peakFluence_J_per_m2(train.energy_J, wide.diameter_m / 2, wide.profile)
         : null,
   };
 }

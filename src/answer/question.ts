@@ -13,6 +13,8 @@ export type MediumSpec =
 export interface Layer {
   readonly medium: MediumSpec;
   readonly thickness: LayerThickness;
+  /** n2 of n = n0 + n2 I, where the person gave it. */
+  readonly nonlinearIndex_m2_per_W?: number;
 }
 
 /** A length, or a part of the wavelength in the layer at the design wave and the angle there. */
@@ -39,14 +41,31 @@ export type Beam =
       readonly profile: 'gaussian' | 'flat';
       readonly pulse?: PulseTrain;
     }
+  /** Pulses of known energy but unknown rate: there is no average power. */
+  | {
+      readonly kind: 'pulse';
+      readonly pulse: PulseTrain;
+      readonly diameter_m?: number;
+      readonly profile: 'gaussian' | 'flat';
+    }
   | { readonly kind: 'irradiance'; readonly irradiance_W_per_m2: number }
   | { readonly kind: 'field'; readonly peakE_V_per_m: number };
 
-/** Pulsed beam: energy and duration (FWHM) of one pulse. */
+/** Energy and duration (FWHM) of one pulse; without a duration only fluences are known. */
 export interface PulseTrain {
   readonly energy_J: number;
-  readonly duration_s: number;
+  readonly duration_s?: number;
   readonly repetition_Hz?: number;
+}
+
+/** How the one uniaxial crystal of the path is cut, and what plate is wanted of it. */
+export interface CrystalCut {
+  /** Between the surface normal and the optic axis, 0 to pi/2. */
+  readonly angle_rad: number;
+  /** Between the plane of incidence and the plane that holds normal and axis. */
+  readonly azimuth_rad: number;
+  /** Retardance of the waveplate wanted, in waves. */
+  readonly retardance_waves?: number;
 }
 
 /** Standard uncertainties stated by the person asking. `index` and `extinction` belong to the medium beyond the interface, `indexFrom` to the medium of incidence. */
@@ -76,6 +95,9 @@ export interface Question {
   readonly coherenceLength_m?: number | undefined;
   /** Duration (FWHM of the intensity) of a gaussian pulse that passes the path. */
   readonly pulseDuration_s?: number | undefined;
+  readonly cut?: CrystalCut | undefined;
+  /** Asks for the field through the layers, point by point. */
+  readonly fieldProfile?: boolean | undefined;
 }
 
 /** A question with every default in place: normal incidence, unpolarized, no beam. */

@@ -2,18 +2,22 @@
 import type { Complex } from '../num/complex.ts';
 import { coherentStack } from '../stack/coherent-stack.ts';
 import { etalonFringes, etalonSpacing } from '../stack/etalon.ts';
-import { frontField, solveField, stackMaximum } from '../stack/field-profile.ts';
+import {
+  fieldProfile,
+  frontField,
+  type StackField,
+  solveField,
+  stackMaximum,
+} from '../stack/field-profile.ts';
 import { stackDispersion } from '../stack/group-delay.ts';
 import { type MixedFractions, mixedStack } from '../stack/mixed-stack.ts';
 import { platePassage, wedgeNote } from '../stack/tilted-plate.ts';
 import { insertionLoss_dB, windowFractions } from '../stack/window.ts';
-import type { LayerAnswer, StackAnswer, WindowAnswer } from './answer.ts';
+import type { FieldPointAnswer, LayerAnswer, StackAnswer, WindowAnswer } from './answer.ts';
+import { coherenceTaken } from './coherence-taken.ts';
 import { powerOf } from './interface-answer.ts';
 import { dispersivePath, layeredPath, type Path } from './path.ts';
-import type { Polarization } from './question.ts';
-
-/** Where nothing is stated: light of a relative line width of 1/1000. Films are coherent then, windows are not. */
-export const ASSUMED_COHERENCE_waves = 1000;
+import type { Polarization, Question } from './question.ts';
 
 export interface StackParts {
   readonly layers: readonly LayerAnswer[];
@@ -30,14 +34,9 @@ export interface StackParts {
   } | null;
 }
 
-export function stackParts(
-  path: Path,
-  vacuumWavelength_m: number,
-  angle_rad: number,
-  polarization: Polarization,
-  statedCoherence_m: number | undefined,
-): StackParts {
-  const coherenceLength_m = statedCoherence_m ?? ASSUMED_COHERENCE_waves * vacuumWavelength_m;
+export function stackParts(path: Path, question: Question, vacuumWavelength_m: number): StackParts {
+  const { incidenceAngle_rad: angle_rad, polarization } = question;
+  const { length_m: coherenceLength_m, ground } = coherenceTaken(question, vacuumWavelength_m);
   const layered = layeredPath(path);
   const mixed = mixedStack(layered, vacuumWavelength_m, angle_rad, coherenceLength_m);
   const pick = (of: (f: MixedFractions) => number): number => powerOf(polarization, of(mixed.s), of(mixed.p));
@@ -66,8 +65,9 @@ export function stackParts(
       insertionLoss_dB: insertionLoss_dB(T),
       coherence: coherent ? 'coherent' : mixed.layers.some((l) => l.coherent) ? 'mixed' : 'incoherent',
       coherenceLength_m,
-      coherenceLengthStated: statedCoherence_m !== undefined,
-      ...coherentOnly(path, coherent, vacuumWavelength_m, angle_rad, polarization),
+      coherenceLengthStated: ground === 'stated',
+      coherenceLengthFrom: ground,
+      ...coherentOnly(path, coherent, vacuumWavelength_m, question),
     },
     window: path.layers.length === 1 ? windowPart(path, vacuumWavelength_m, angle_rad, polarization) : null,
     s: mixed.s,
@@ -88,7 +88,13 @@ const pickCoherence = (l: {
 
 type CoherentOnly = Pick<
   StackAnswer,
-  'reflectionS' | 'reflectionP' | 'transmissionS' | 'transmissionP' | 'fieldMaximum' | 'fieldMaximumBefore'
+  | 'reflectionS'
+  | 'reflectionP'
+  | 'transmissionS'
+  | 'transmissionP'
+  | 'fieldMaximum'
+  | 'fieldMaximumBefore'
+  | 'fieldProfile'
 >;
 
 const NOT_COHERENT: CoherentOnly = {
@@ -98,14 +104,14 @@ const NOT_COHERENT: CoherentOnly = {
   transmissionP: null,
   fieldMaximum: null,
   fieldMaximumBefore: null,
+  fieldProfile: null,
 };
 
 function coherentOnly(
   path: Path,
   coherent: boolean,
   vacuumWavelength_m: number,
-  angle_rad: number,
-  polarization: Polarization,
+  { incidenceAngle_rad: angle_rad, polarization, fieldProfile: profileWanted }: Question,
 ): CoherentOnly {
   if (!coherent) return NOT_COHERENT;
   const delays = stackDispersion(dispersivePath(path, vacuumWavelength_m), vacuumWavelength_m, angle_rad);
@@ -129,7 +135,23 @@ function coherentOnly(
       layer: inside.region + 1,
     },
     fieldMaximumBefore: before,
+    fieldProfile: profileWanted ? profileOf(field, before.period_m) : null,
   };
+}
+
+/** Enough points for a smooth curve of a few layers; never fewer than five a layer. */
+const PROFILE_POINTS = 400;
+
+/** From one fringe before the first face to as much behind the last. */
+function profileOf(field: StackField, margin_m: number): readonly FieldPointAnswer[] {
+  const samples = Math.max(5, Math.min(49, Math.ceil(PROFILE_POINTS / (field.kernel.layerCount + 2))));
+  const points = fieldProfile(field, { samples, front_m: margin_m, behind_m: margin_m });
+  return points.map(({ position_m, region, intensity, absorbed_per_m }) => ({
+    position_m,
+    layer: region + 1,
+    intensity,
+    absorbed_per_m,
+  }));
 }
 
 /** The search for the maximum ends a rounding away from a face. */

@@ -116,7 +116,7 @@ function parseValues(
 function findClash(given: readonly GivenOption[], command: CommandName): UsageError | undefined {
   const isGiven = (name: string): boolean => given.some(({ key }) => key === optionKeyByName(name));
   for (const { key } of given) {
-    const { name, excludes = [], needs } = optionSpec(key);
+    const { name, excludes = [], needs, needsOneOf } = optionSpec(key);
     const other = excludes.find(isGiven);
     if (other !== undefined) {
       return usageError(
@@ -131,6 +131,15 @@ function findClash(given: readonly GivenOption[], command: CommandName): UsageEr
         'option-needs',
         `--${name} says nothing without --${needs}`,
         `give --${needs} too`,
+        command,
+      );
+    }
+    if (needsOneOf && !needsOneOf.some(isGiven)) {
+      const others = orList(needsOneOf.map((other) => `--${other}`));
+      return usageError(
+        'option-needs',
+        `--${name} says nothing without ${others}`,
+        `give ${others} too`,
         command,
       );
     }

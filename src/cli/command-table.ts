@@ -55,6 +55,18 @@ export const BEAM_OPTIONS = [
   'profile',
   'irradiance_W_per_m2',
   'field_V_per_m',
+  'pulseDuration_s',
+  'pulseEnergy_J',
+  'repetition_Hz',
+  'nonlinearIndex',
+] as const satisfies readonly OptionKey[];
+
+/** Of paths of layers. */
+export const PATH_OPTIONS = [
+  'designWave',
+  'coherenceLength_m',
+  'linewidth',
+  'fieldProfile',
 ] as const satisfies readonly OptionKey[];
 
 export const FORM_OPTIONS = ['json', 'csv', 'markdown', 'plain'] as const satisfies readonly OptionKey[];
@@ -82,7 +94,8 @@ export const COMMANDS = [
       { name: 'FROM', meaning: `medium of incidence: ${MEDIUM}`, completes: 'medium' },
       {
         name: 'LAYER',
-        meaning: 'a layer between them, MEDIUM@THICKNESS: magnesium-fluoride@100nm, n=1.38@qw',
+        meaning:
+          'a layer between them, MEDIUM@THICKNESS: magnesium-fluoride@100nm, n=1.38@qw (a quarter wave), hw (a half); 8x: LAYER LAYER : repeats the layers between 8x: and the colon',
         optional: true,
         many: true,
         completes: 'medium',
@@ -90,13 +103,16 @@ export const COMMANDS = [
       { name: 'INTO', meaning: 'medium beyond', completes: 'medium' },
       { name: 'WAVE', meaning: '633nm, 10.6um, 474THz, 10GHz, 1.96eV, 15800cm-1, d-line' },
     ],
-    options: [...QUESTION_OPTIONS, ...BEAM_OPTIONS, ...FORM_OPTIONS, 'log', 'strict'],
+    options: [...QUESTION_OPTIONS, ...PATH_OPTIONS, ...BEAM_OPTIONS, ...FORM_OPTIONS, 'log', 'strict'],
     examples: [
       { line: 'air fused-silica 633nm', meaning: 'normal incidence, one answer as text' },
       { line: 'air sapphire:o 1064nm --angle 45 --pol p', meaning: 'ordinary ray, p polarization' },
       { line: 'water n=1.38+0.001i 474THz --json', meaning: 'a medium by its numbers, for a script' },
       { line: 'vacuum eps=9.8,tand=0.0003 10GHz', meaning: 'a radio wave' },
       { line: 'air znse 10.6um --power 30W --beam 6mm', meaning: 'fields and irradiance too' },
+      { line: 'air magnesium-fluoride-film@qw n-bk7 550nm', meaning: 'a quarter-wave film' },
+      { line: 'air fused-silica@5mm air 800nm --pulse 30fs', meaning: 'a window, and what a pulse suffers' },
+      { line: 'air 8x: n=2.3@qw n=1.46@qw : n-bk7 633nm', meaning: 'a mirror of eight pairs' },
     ],
   },
   {
@@ -115,6 +131,24 @@ export const COMMANDS = [
       { line: 'cite fused-silica', meaning: 'every work, and which fit it is the source of' },
       { line: 'cite sapphire:o air --bibtex -o media.bib', meaning: 'one axis of a crystal, and air' },
       { line: 'cite malitson-1965-interspecimen --csl', meaning: 'one work, for a reference manager' },
+    ],
+  },
+  {
+    name: 'material',
+    summary: 'all the catalogue holds of one material',
+    operands: [
+      {
+        name: 'NAME',
+        meaning: 'as in a question; the words of a name need no quotation marks',
+        many: true,
+        completes: 'medium',
+      },
+    ],
+    options: ['full', 'json', 'markdown', 'catalog'],
+    examples: [
+      { line: 'material fused-silica', meaning: 'names, index at known lines, fits, sources, handling' },
+      { line: 'material stainless-steel', meaning: 'reflectance of samples that have no optical constants' },
+      { line: 'material n-bk7 --full', meaning: 'coefficients and every row of absorption too' },
     ],
   },
   {

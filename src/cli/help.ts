@@ -24,6 +24,7 @@ const COLUMN = 26;
 
 export const GROUP_TITLES: Readonly<Record<OptionGroup, string>> = {
   question: 'The question',
+  path: 'Paths of layers',
   beam: 'The beam',
   form: 'Form of the answer',
   output: 'Output',

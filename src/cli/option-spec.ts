@@ -1,7 +1,7 @@
 /** What the table of options says about one option. Help, man page, completions and the parser read nothing else. */
 import type { Problem } from '../units/problem.ts';
 
-export type OptionGroup = 'question' | 'beam' | 'form' | 'output' | 'general';
+export type OptionGroup = 'question' | 'path' | 'beam' | 'form' | 'output' | 'general';
 
 interface AnyOption {
   /** Long name without dashes. */
@@ -17,6 +17,8 @@ interface AnyOption {
   readonly excludes?: readonly string[];
   /** Long name of an option without which this one says nothing. */
   readonly needs?: string;
+  /** Long names of options of which it needs one at least. */
+  readonly needsOneOf?: readonly string[];
   /** For programs (completions), not for people: not shown in help. */
   readonly hidden?: true;
 }

@@ -1,24 +1,21 @@
 /**
  * The one table of options. A key is what the option's value is called in the program, unit included; `name` is what
- * people type. To add an option: add its row, and its key to the rows of the commands that take it (command-table.ts).
+ * people type. To add an option: add its row, and its key to the rows of the commands that take it (command-table.ts). Rows
+ * of paths and beams stand in beam-options.ts.
  */
 import { parseIncidence } from '../units/parse-angle.ts';
 import { choiceParser } from '../units/parse-choice.ts';
 import { parseCo2 } from '../units/parse-co2.ts';
-import { parseField } from '../units/parse-field.ts';
 import { parseFraction } from '../units/parse-fraction.ts';
-import { parseIrradiance } from '../units/parse-irradiance.ts';
-import { parseLength } from '../units/parse-length.ts';
-import { parsePower } from '../units/parse-power.ts';
 import { parsePressure } from '../units/parse-pressure.ts';
 import { parseSalinity } from '../units/parse-salinity.ts';
 import { parseTemperature } from '../units/parse-temperature.ts';
 import { parseTolerances } from '../units/parse-tolerance.ts';
 import { type Problem, problem } from '../units/problem.ts';
+import { BEAM_OPTION_ROWS, PATH_OPTION_ROWS } from './beam-options.ts';
 import { choice, flag, type OptionSpec, type ValueOf, value } from './option-spec.ts';
 
 const POLARIZATIONS = ['s', 'p', 'unpolarized'] as const;
-const PROFILES = ['gaussian', 'flat'] as const;
 const COLOURS = ['auto', 'always', 'never'] as const;
 
 export const OPTIONS = {
@@ -97,47 +94,8 @@ export const OPTIONS = {
     group: 'question',
   }),
 
-  power_W: value({
-    name: 'power',
-    placeholder: 'POWER',
-    meaning: 'power of the beam, such as 5mW or 10dBm',
-    group: 'beam',
-    parse: parsePower,
-    excludes: ['irradiance', 'field'],
-  }),
-  beamDiameter_m: value({
-    name: 'beam',
-    placeholder: 'DIAMETER',
-    meaning: 'beam diameter: 1/e^2 of the irradiance for a gaussian beam, full width for a flat one',
-    group: 'beam',
-    parse: parseLength,
-    needs: 'power',
-  }),
-  profile: choice({
-    name: 'profile',
-    choices: PROFILES,
-    meaning: 'profile of the beam; the irradiance stated is the one on the axis',
-    fallback: 'gaussian',
-    group: 'beam',
-    parse: choiceParser('a beam profile', PROFILES),
-    needs: 'beam',
-  }),
-  irradiance_W_per_m2: value({
-    name: 'irradiance',
-    placeholder: 'IRRADIANCE',
-    meaning: 'irradiance instead of power and diameter, such as 1kW/m2 or 5W/cm2',
-    group: 'beam',
-    parse: parseIrradiance,
-    excludes: ['power', 'field'],
-  }),
-  field_V_per_m: value({
-    name: 'field',
-    placeholder: 'FIELD',
-    meaning: 'peak electric field instead of power and diameter, such as 100V/m',
-    group: 'beam',
-    parse: parseField,
-    excludes: ['power', 'irradiance'],
-  }),
+  ...PATH_OPTION_ROWS,
+  ...BEAM_OPTION_ROWS,
 
   json: flag({
     name: 'json',

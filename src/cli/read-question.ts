@@ -1,15 +1,19 @@
 /** From operands and options to the question, or to the refusal that says what is not understood. */
-import type { Beam, Layer, MediumSpec, Question, Tolerances, WaveSpec } from '../answer/question.ts';
+import type { Layer, MediumSpec, Question, Tolerances, WaveSpec } from '../answer/question.ts';
 import { makeQuestion } from '../answer/question.ts';
 import type { IndexedCatalogue } from '../catalog/entries.ts';
 import { isRefusal, type Refusal, refuse } from '../medium/refusal.ts';
-import { parseThickness } from '../units/parse-thickness.ts';
+import { coherenceLength_m } from '../stack/coherence.ts';
+import { linewidth_m } from '../units/parse-linewidth.ts';
+import type { TypedNonlinearIndex } from '../units/parse-nonlinear-index.ts';
 import { type TypedTolerances, wavelengthTolerance_m } from '../units/parse-tolerance.ts';
 import { parseWave } from '../units/parse-wave.ts';
 import { isProblem } from '../units/problem.ts';
 import { quoteInput } from '../units/quote-input.ts';
 import { findMedium, suggestMedia } from './find-medium.ts';
 import type { OptionValues } from './options.ts';
+import { readBeam } from './read-beam.ts';
+import { isGroupMark, isUnread, readLayers } from './read-path.ts';
 
 /** `operands`: FROM [LAYER@THICKNESS ...] INTO WAVE. */
 export function readQuestion(
@@ -22,30 +26,49 @@ export function readQuestion(
   const media = operands.slice(0, -1);
   const from = readEnd(media[0] ?? '', catalogue);
   if (isRefusal(from)) return suggestMedia(from, media[0] ?? '', catalogue);
-  const layers: Layer[] = [];
-  for (const text of media.slice(1, -1)) {
-    const layer = readLayer(text, catalogue);
-    if (isRefusal(layer)) return suggestMedia(layer, layerName(text), catalogue);
-    layers.push(layer);
-  }
+  const typed = readLayers(media.slice(1, -1), catalogue);
+  if (isUnread(typed)) return suggestMedia(typed.refusal, typed.name, catalogue);
   const into = readEnd(media.at(-1) ?? '', catalogue);
   if (isRefusal(into)) return suggestMedia(into, media.at(-1) ?? '', catalogue);
-  return makeQuestion(from, into, wave, { layers, ...questionOptions(options, wave) });
+  const layers = options.nonlinearIndex ? withNonlinearIndex(typed, options.nonlinearIndex) : typed;
+  if (isRefusal(layers)) return layers;
+  const stated = questionOptions(options, wave);
+  if (isRefusal(stated)) return stated;
+  const { beam } = stated;
+  if (options.nonlinearIndex && beam && 'profile' in beam && beam.diameter_m === undefined) {
+    return refuse(
+      'nonlinear-index-without-irradiance',
+      2,
+      '--nonlinear-index needs an irradiance, and the beam has no width',
+      'give --beam too',
+    );
+  }
+  return makeQuestion(from, into, wave, { layers, ...stated });
 }
 
 /** Everything of a question that options state. */
 export function questionOptions(
   options: OptionValues,
   wave: WaveSpec,
-): Partial<Omit<Question, 'from' | 'into' | 'wave'>> {
-  const { temperature_K, pressure_Pa, humidity, co2_ppm, salinity_g_per_kg } = options;
+): Partial<Omit<Question, 'from' | 'into' | 'wave'>> | Refusal {
+  const { temperature_K, pressure_Pa, humidity, co2_ppm, salinity_g_per_kg, linewidth } = options;
+  const beam = readBeam(options);
+  if (isRefusal(beam)) return beam;
+  const designWave = options.designWave && readWave(options.designWave.text, options);
+  if (isRefusal(designWave)) return designWave;
   return {
     incidenceAngle_rad: options.angle_rad ?? 0,
     polarization: options.polarization ?? 'unpolarized',
     conditions: dropUndefined({ temperature_K, pressure_Pa, humidity, co2_ppm, salinity_g_per_kg }),
-    beam: readBeam(options),
+    beam,
     tolerances: options.tolerances ? readTolerances(options.tolerances, wave) : {},
     extrapolate: options.extrapolate === true,
+    designWave,
+    coherenceLength_m: linewidth
+      ? coherenceLength_m(wave.wavelength_m, linewidth_m(linewidth, wave.wavelength_m))
+      : options.coherenceLength_m,
+    pulseDuration_s: options.pulseDuration_s,
+    fieldProfile: options.fieldProfile,
   };
 }
 
@@ -55,6 +78,14 @@ export function readWave(text: string, options: OptionValues): WaveSpec | Refusa
 }
 
 function readEnd(text: string, catalogue: IndexedCatalogue): MediumSpec | Refusal {
+  if (isGroupMark(text)) {
+    return refuse(
+      'bad-group',
+      2,
+      `${quoteInput(text)} stands where the first or the last medium belongs`,
+      'a group of layers stands between them: air 8x: n=2.3@qw n=1.46@qw : n-bk7 633nm',
+    );
+  }
   if (/@/.test(text)) {
     return refuse(
       'end-with-thickness',
@@ -66,38 +97,49 @@ function readEnd(text: string, catalogue: IndexedCatalogue): MediumSpec | Refusa
   return findMedium(text, catalogue);
 }
 
-const layerName = (text: string): string => text.split('@')[0] ?? '';
-
-export function readLayer(text: string, catalogue: IndexedCatalogue): Layer | Refusal {
-  const [name = '', size, ...more] = text.split('@');
-  if (size === undefined || more.length > 0) {
+/** The layers that a nonlinear index is stated for; without a number it belongs to all of them, if they are of one medium. */
+function withNonlinearIndex(
+  layers: readonly Layer[],
+  typed: readonly TypedNonlinearIndex[],
+): readonly Layer[] | Refusal {
+  const [first] = typed;
+  if (layers.length === 0) {
     return refuse(
-      'layer-without-thickness',
+      'nonlinear-index-without-layer',
       2,
-      `${quoteInput(text)} stands between two media and has no thickness`,
-      `write ${name}@THICKNESS, such as ${name}@100nm or ${name}@qw`,
+      '--nonlinear-index needs a layer: the B-integral grows along a thickness',
+      'write the medium as a layer, such as fused-silica@10mm, and a medium beyond',
     );
   }
-  const thickness = parseThickness(size);
-  if (isProblem(thickness)) return refuse('bad-thickness', 2, thickness.message, thickness.remedy);
-  const medium = findMedium(name, catalogue);
-  return isRefusal(medium) ? medium : { medium, thickness };
+  if (first && first.layer === undefined) {
+    const media = new Set(layers.map((l) => mediumName(l.medium)));
+    if (media.size > 1) {
+      return refuse(
+        'nonlinear-index-without-layer',
+        2,
+        `the path has layers of ${media.size} media, and --nonlinear-index names none`,
+        'give it by the number of the layer: --nonlinear-index 2=2.7e-20m2/W',
+      );
+    }
+    return layers.map((l) => ({ ...l, nonlinearIndex_m2_per_W: first.value_m2_per_W }));
+  }
+  const beyond = typed.find(({ layer = 0 }) => layer > layers.length);
+  if (beyond) {
+    return refuse(
+      'nonlinear-index-without-layer',
+      2,
+      `there is no layer ${beyond.layer} for --nonlinear-index`,
+      layers.length === 1 ? 'the path has one layer' : `layers are numbered from 1 to ${layers.length}`,
+    );
+  }
+  return layers.map((l, i) => {
+    const own = typed.find(({ layer }) => layer === i + 1);
+    return own ? { ...l, nonlinearIndex_m2_per_W: own.value_m2_per_W } : l;
+  });
 }
 
-function readBeam(options: OptionValues): Beam | undefined {
-  const { power_W, beamDiameter_m, irradiance_W_per_m2, field_V_per_m } = options;
-  if (power_W !== undefined) {
-    return {
-      kind: 'power',
-      power_W,
-      profile: options.profile ?? 'gaussian',
-      ...(beamDiameter_m === undefined ? {} : { diameter_m: beamDiameter_m }),
-    };
-  }
-  if (irradiance_W_per_m2 !== undefined) return { kind: 'irradiance', irradiance_W_per_m2 };
-  if (field_V_per_m !== undefined) return { kind: 'field', peakE_V_per_m: field_V_per_m };
-  return undefined;
-}
+const mediumName = (medium: MediumSpec): string =>
+  medium.kind === 'literal' ? medium.text : `${medium.material.key}:${medium.axis ?? ''}`;
 
 function readTolerances(typed: TypedTolerances, wave: WaveSpec): Tolerances {
   const { wave: ofWave, ...rest } = typed;

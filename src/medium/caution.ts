@@ -32,6 +32,7 @@ export type CautionCode =
   | 'invisible-beam'
   | 'rf-exposure'
   | 'damage-definition'
+  | 'pulse-train'
   | 'ideal-surface'
   | 'axis-assumed'
   | 'near-critical'

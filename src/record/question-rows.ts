@@ -90,13 +90,14 @@ function conditionsText(conditions: Conditions): string {
 function beamText(beam: Beam): string {
   if (beam.kind === 'irradiance') return exact(beam.irradiance_W_per_m2, WATT_PER_SQUARE_METRE);
   if (beam.kind === 'field') return `peak field ${exact(beam.peakE_V_per_m, VOLT_PER_METRE)}`;
-  const { power_W, diameter_m, profile, pulse } = beam;
+  const { diameter_m, profile, pulse } = beam;
   const shape = profile === 'gaussian' ? 'gaussian, diameter (1/e² of the irradiance)' : 'flat-top, diameter';
-  const parts = [exact(power_W, WATT)];
+  const parts = beam.kind === 'power' ? [exact(beam.power_W, WATT)] : [];
   if (diameter_m !== undefined) parts.push(`${shape} ${exact(diameter_m, METRE)}`);
   if (pulse) {
+    const time = pulse.duration_s === undefined ? '' : ` in ${exact(pulse.duration_s, SECOND)}`;
     const rate = pulse.repetition_Hz === undefined ? '' : ` at ${exact(pulse.repetition_Hz, HERTZ)}`;
-    parts.push(`pulses of ${exact(pulse.energy_J, JOULE)} in ${exact(pulse.duration_s, SECOND)}${rate}`);
+    parts.push(`pulses of ${exact(pulse.energy_J, JOULE)}${time}${rate}`);
   }
   return parts.join(', ');
 }

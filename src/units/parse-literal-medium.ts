@@ -1,6 +1,6 @@
 /**
  * A medium given by its numbers: `n=1.5`, `n=1.5+0.02i`, `n=1.5,k=0.02`, `eps=9.8+0.01i,mu=1.2`, `eps=2.1,tand=0.0003`,
- * `eps=4,sigma=0.01` (S/m). Fields go as exp(i(k r - w t)): imaginary parts >= 0 absorb, and gain is refused.
+ * `eps=4,sigma=0.01` (S/m); a uniaxial crystal is `no=1.6584,ne=1.4864`. Fields go as exp(i(k r - w t)): imaginary parts >= 0 absorb, and gain is refused.
  * Greek letters (ε, μ, σ, tanδ) are accepted as well.
  */
 import type { Complex } from '../num/complex.ts';
@@ -12,7 +12,10 @@ import { quoteInput } from './quote-input.ts';
 
 /** Either `n`, or `eps` with what goes with it. All relative to vacuum; only what was typed is present. */
 export interface TypedMedium {
+  /** Of a uniaxial crystal: the ordinary index. */
   readonly n?: Complex;
+  /** Extraordinary index of a uniaxial crystal. */
+  readonly ne?: Complex;
   readonly eps?: Complex;
   readonly mu?: Complex;
   /** eps'' / eps' */
@@ -20,7 +23,7 @@ export interface TypedMedium {
   readonly conductivity_S_per_m?: number;
 }
 
-const KEYS = ['n', 'k', 'eps', 'mu', 'tand', 'sigma'] as const;
+const KEYS = ['n', 'k', 'no', 'ne', 'eps', 'mu', 'tand', 'sigma'] as const;
 type Key = (typeof KEYS)[number];
 
 const EXAMPLES =
@@ -51,6 +54,7 @@ export function parseLiteralMedium(text: string): TypedMedium | Problem {
     if (values[key] !== undefined) return problem('not-a-medium', `${key} is given twice`, 'give it once');
     values[key] = value;
   }
+  if (values.no !== undefined || values.ne !== undefined) return fromPrincipalIndices(values);
   return values.n === undefined && values.k === undefined ? fromPermittivity(values) : fromIndex(values);
 }
 
@@ -64,6 +68,25 @@ function keyOf(name: string): Key | undefined {
     'tan δ': 'tand',
   };
   return KEYS.find((key) => key === plain) ?? (Object.hasOwn(greek, plain) ? greek[plain] : undefined);
+}
+
+function fromPrincipalIndices(values: Partial<Record<Key, string>>): TypedMedium | Problem {
+  const { no, ne, ...others } = values;
+  const [other] = Object.keys(others);
+  if (other !== undefined || no === undefined || ne === undefined) {
+    const wrong =
+      other === undefined ? 'one principal index is missing' : `no, ne and ${other} are given together`;
+    return problem(
+      'not-a-medium',
+      wrong,
+      'give a uniaxial crystal by both of its indices: no=1.658,ne=1.486',
+    );
+  }
+  const ordinary = fromIndex({ n: no });
+  if (isProblem(ordinary)) return ordinary;
+  const extraordinary = fromIndex({ n: ne });
+  if (isProblem(extraordinary)) return extraordinary;
+  return { ...ordinary, ...(extraordinary.n && { ne: extraordinary.n }) };
 }
 
 function fromIndex(values: Partial<Record<Key, string>>): TypedMedium | Problem {

@@ -115,6 +115,8 @@ export const UNITS: readonly Unit[] = [
   ...over('field', 'V', 'volt', 'num kMG', LENGTHS),
   ...PRESSURES,
   ...over('conductivity', 'S', 'siemens', 'num kM', LENGTHS.slice(0, 2)),
+  one('m2/W', 'square metre per watt', 'nonlinear-index', byPower(0)),
+  one('cm2/W', 'square centimetre per watt', 'nonlinear-index', byPower(-4)),
   one('', 'one', 'fraction', byPower(0)),
   one('%', 'per cent', 'fraction', byPower(-2)),
   ...['ppm', 'umol/mol'].map((s) => one(s, 'micromole per mole', 'mole-fraction', byPower(0))),

@@ -18,6 +18,7 @@ export type UnitKind =
   | 'field'
   | 'pressure'
   | 'conductivity'
+  | 'nonlinear-index'
   | 'fraction'
   | 'mole-fraction'
   | 'salinity';
@@ -61,6 +62,7 @@ export const KIND_NAMES: Readonly<Record<UnitKind, string>> = {
   field: 'a field strength',
   pressure: 'a pressure',
   conductivity: 'a conductivity',
+  'nonlinear-index': 'a nonlinear index',
   fraction: 'a fraction',
   'mole-fraction': 'an amount fraction',
   salinity: 'a salinity',

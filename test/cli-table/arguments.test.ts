@@ -190,7 +190,10 @@ describe('what is not understood is refused with what would be right', () => {
       'air bk7 633nm --power 1W --field 1V/m',
       'options-conflict: --power and --field contradict each other; give one of them',
     ],
-    ['air bk7 633nm --beam 1mm', 'option-needs: --beam says nothing without --power; give --power too'],
+    [
+      'air bk7 633nm --beam 1mm',
+      'option-needs: --beam says nothing without --power or --pulse-energy; give --power or --pulse-energy too',
+    ],
     ['man --names x', 'option-not-here: halfspace man takes no --names; it belongs to completion'],
     ['man bk7', 'extra-operand: "bk7" is one operand too many; halfspace man takes no operands'],
     [

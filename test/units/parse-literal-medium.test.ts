@@ -53,6 +53,8 @@ describe('media given by their numbers', () => {
     ['n=1.5+0.02i', { n: z(1.5, 0.02) }],
     ['n=1.5,k=0.02', { n: z(1.5, 0.02) }],
     ['n=0+3i', { n: z(0, 3) }],
+    ['no=1.6584,ne=1.4864', { n: z(1.6584), ne: z(1.4864) }],
+    ['NE=1.55, no=1.54+0.001i', { n: z(1.54, 0.001), ne: z(1.55) }],
     ['eps=9.8', { eps: z(9.8) }],
     ['eps=9.8+0.01i,mu=1.2', { eps: z(9.8, 0.01), mu: z(1.2) }],
     ['mu=1.2+0.1i, eps=9.8', { eps: z(9.8), mu: z(1.2, 0.1) }],
@@ -109,6 +111,14 @@ describe('media that are refused', () => {
     [
       'n=1.5-0.02j',
       'not-a-number: "1.5-0.02j" is written with j; the imaginary unit is i here, and n + ik absorbs: a loss written n - jk is n + ik',
+    ],
+    [
+      'no=1.658',
+      'not-a-medium: one principal index is missing; give a uniaxial crystal by both of its indices: no=1.658,ne=1.486',
+    ],
+    [
+      'no=1.658,ne=1.486,mu=2',
+      'not-a-medium: no, ne and mu are given together; give a uniaxial crystal by both of its indices: no=1.658,ne=1.486',
     ],
     ['n=glass', 'not-a-number: "glass" is not a real or complex number; write it as 1.5 or 1.5+0.02i'],
   ])('%j', (text, line) => {

@@ -1,6 +1,6 @@
 /** The beam: a power with a width, an irradiance, or a peak field; or none. */
 import type { Beam, Question } from '../../answer/question.ts';
-import { METRE, VOLT_PER_METRE, WATT, WATT_PER_SQUARE_METRE } from '../../units/display-unit.ts';
+import { JOULE, METRE, VOLT_PER_METRE, WATT, WATT_PER_SQUARE_METRE } from '../../units/display-unit.ts';
 import { formatQuantity } from '../../units/format-quantity.ts';
 import type { NumberStyle } from '../../units/number-style.ts';
 import { parseField } from '../../units/parse-field.ts';
@@ -19,6 +19,7 @@ const shortest = (value: number, unit: Parameters<typeof formatQuantity>[1], sty
 
 function strengthText(beam: Beam, style: NumberStyle): string {
   if (beam.kind === 'power') return shortest(beam.power_W, WATT, style);
+  if (beam.kind === 'pulse') return shortest(beam.pulse.energy_J, JOULE, style);
   if (beam.kind === 'irradiance') return shortest(beam.irradiance_W_per_m2, WATT_PER_SQUARE_METRE, style);
   return shortest(beam.peakE_V_per_m, VOLT_PER_METRE, style);
 }
@@ -49,6 +50,9 @@ function takeStrength(typed: string, question: Question): Question | Problem {
 /** The same beam with its strength multiplied. */
 function scaled(beam: Beam, change: (value: number) => number): Beam {
   if (beam.kind === 'power') return { ...beam, power_W: change(beam.power_W) };
+  if (beam.kind === 'pulse') {
+    return { ...beam, pulse: { ...beam.pulse, energy_J: change(beam.pulse.energy_J) } };
+  }
   if (beam.kind === 'irradiance') return { ...beam, irradiance_W_per_m2: change(beam.irradiance_W_per_m2) };
   return { ...beam, peakE_V_per_m: change(beam.peakE_V_per_m) };
 }
