@@ -32,13 +32,20 @@ export const inRange = (fit: Fit, wave: FitWave): boolean => reaches(fit.range_u
  * Limits are printed numbers: a wave within half a unit of a limit's last digit (at most 2.2 %) counts as inside, in either
  * reference. `atEdge` tells the answer to say so.
  */
-function reaches([lo, hi]: readonly [number, number], wave: FitWave): boolean {
+function reaches(range_um: readonly [number, number], wave: FitWave): boolean {
+  const [lo, hi] = range_um;
   // Well inside or well outside no margin matters; a pass over the whole catalogue lives by this.
   if (wave.vacuum_um >= lo && wave.vacuum_um <= hi) return true;
   if (wave.vacuum_um < lo * (1 - 2 * WIDEST) || wave.vacuum_um > hi * (1 + 2 * WIDEST)) return false;
-  const [low, high] = lo === hi ? [LINE_WIDTH, LINE_WIDTH] : [margin(lo), margin(hi)];
-  const within = (l: number): boolean => l >= lo * (1 - low) && l <= hi * (1 + high);
+  const [shortest, longest] = reachOf(range_um);
+  const within = (l: number): boolean => l >= shortest && l <= longest;
   return within(wave.vacuum_um) || within(wave.air_um);
+}
+
+/** The wavelengths that count as inside printed limits, in either reference. */
+export function reachOf([lo, hi]: readonly [number, number]): readonly [number, number] {
+  const [low, high] = lo === hi ? [LINE_WIDTH, LINE_WIDTH] : [margin(lo), margin(hi)];
+  return [lo * (1 - low), hi * (1 + high)];
 }
 
 function margin(limit_um: number): number {

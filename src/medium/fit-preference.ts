@@ -8,7 +8,7 @@ import { type BoundModel, type Conditions, JET_LENGTH, K, N } from '../dispersio
 import { bindModel, honours } from '../dispersion/registry.ts';
 
 /** From this ratio k/n on a medium counts as absorbing where complex data compete with real ones. */
-const ABSORBING = 1e-4;
+export const ABSORBING = 1e-4;
 /** Over this step of temperature a single dn/dT serves as well as a second fit. */
 const FIRST_ORDER_K = 10;
 const ZERO_CELSIUS_K = 273.15;

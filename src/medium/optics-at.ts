@@ -209,7 +209,7 @@ function evaluateFit(
 }
 
 /** The fit's own form, else the single dn/dT among the handling facts. Both need to know the temperature of the fit. */
-function thermalForm(fit: Fit, material: Material): ThermalForm | undefined {
+export function thermalForm(fit: Fit, material: Material): ThermalForm | undefined {
   if (fit.thermal || fit.temperature_C === undefined) return fit.thermal;
   const slope = material.handling?.dn_dT_1e6_per_K;
   return slope === undefined
