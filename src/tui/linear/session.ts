@@ -104,7 +104,8 @@ function takeValue(state: State, field: Field, text: string, world: World): Repl
   const question = field.take(text, contextOf(state));
   if (isProblem(question)) {
     // A word instead of a value: the person has something else in mind.
-    if (COMMANDS.some((c) => c.words.includes(text) && text.length > 1)) return takeCommand(state, text, world);
+    if (COMMANDS.some((c) => c.words.includes(text) && text.length > 1))
+      return takeCommand(state, text, world);
     return say(state, [problemText(question)], { kind: 'value', field });
   }
   return changed(state, field, askAnew(state, question, world));

@@ -6,7 +6,7 @@ import { displayWidth } from '../../term/display-width.ts';
 import { padStartToWidth } from '../../term/fit-width.ts';
 import { DotCanvas, type DotStyle } from '../dot-canvas.ts';
 import type { Curve } from '../reflectance-curves.ts';
-import { blankLine, lineOfSpans, type Pen, span } from './pen.ts';
+import { BLANK_LINE, blanks, lineOfSpans, type Pen, span } from './pen.ts';
 
 export interface Plot {
   readonly title: string;
@@ -32,8 +32,8 @@ export function curveView(
 ): readonly string[] {
   const width = columns - SCALE_WIDTH - 2;
   const height = rows - 2;
-  if (width < 8 || height < 3) return new Array<string>(rows).fill(blankLine(columns));
-  const title = lineOfSpans([span(blankLine(SCALE_WIDTH + 1)), span(plot.title, 'heading')], columns, pen);
+  if (width < 8 || height < 3) return new Array<string>(rows).fill(BLANK_LINE);
+  const title = lineOfSpans([span(blanks(SCALE_WIDTH + 1)), span(plot.title, 'heading')], columns, pen);
   const body = plot.curves.length > 0 ? drawn(plot, width, height, style, pen) : insteadLines(plot, height);
   const lines = body.map((row, y) =>
     lineOfSpans(
@@ -132,9 +132,5 @@ function axisLine(plot: Plot, width: number, columns: number, pen: Pen): string 
     const { text, x } = plot.present;
     put(` ${text} `, Math.round(x * (width - 1)) - Math.floor(displayWidth(text) / 2) - 1);
   }
-  return lineOfSpans(
-    [span(blankLine(SCALE_WIDTH)), span(pen.glyphs.axisCorner + cells.join(''))],
-    columns,
-    pen,
-  );
+  return lineOfSpans([span(blanks(SCALE_WIDTH)), span(pen.glyphs.axisCorner + cells.join(''))], columns, pen);
 }

@@ -3,7 +3,7 @@ import { keyText } from '../keys/key-names.ts';
 import { listLines } from '../picture/hit-list.ts';
 import type { Search, State } from '../state.ts';
 import type { World } from '../world.ts';
-import { blankLine, entrySpans, lineOfSpans, type Pen, span } from './pen.ts';
+import { BLANK_LINE, entrySpans, lineOfSpans, type Pen, span } from './pen.ts';
 
 export function listView(
   state: State,
@@ -20,7 +20,7 @@ export function listView(
     pen,
   );
   const lines = listLines(state, search, world, columns).map((line) => {
-    if (line.kind === 'blank') return blankLine(columns);
+    if (line.kind === 'blank') return BLANK_LINE;
     if (line.kind === 'detail') return lineOfSpans([span('  '), span(line.text, 'aside')], columns, pen);
     const mark = line.isSelected ? pen.glyphs.focus : ' ';
     return lineOfSpans(

@@ -1,6 +1,6 @@
 /** The lines under the picture. */
 import type { NoticeLine } from '../picture/notice.ts';
-import { blankLine, lineOfSpans, type Pen, span } from './pen.ts';
+import { BLANK_LINE, lineOfSpans, type Pen, span } from './pen.ts';
 
 export function noticeView(
   notice: readonly NoticeLine[],
@@ -10,7 +10,7 @@ export function noticeView(
 ): readonly string[] {
   return Array.from({ length: lines }, (_, i) => {
     const line = notice[i];
-    if (!line) return blankLine(columns);
+    if (!line) return BLANK_LINE;
     return lineOfSpans([span(line.mark.padEnd(1), line.markRole), span(' '), span(line.text)], columns, pen);
   });
 }

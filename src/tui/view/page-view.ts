@@ -1,7 +1,7 @@
 /** A page to read, over the whole width or inside a half. */
 import type { PageLine } from '../picture/page-line.ts';
 import type { Page } from '../state.ts';
-import { blankLine, entrySpans, lineOfSpans, type Pen, type Span, span } from './pen.ts';
+import { BLANK_LINE, entrySpans, lineOfSpans, type Pen, type Span, span } from './pen.ts';
 
 export function pageView(
   lines: readonly PageLine[],
@@ -12,7 +12,7 @@ export function pageView(
 ): readonly string[] {
   return Array.from({ length: rows }, (_, i) => {
     const line = lines[top + i];
-    if (!line) return blankLine(columns);
+    if (!line) return BLANK_LINE;
     const isMarked = line.mark !== '';
     const mark = span(` ${line.mark}`.padEnd(2) + (isMarked ? ' ' : ''), isMarked ? line.role : 'text');
     return lineOfSpans([mark, span(line.text, isMarked ? 'text' : line.role)], columns, pen);

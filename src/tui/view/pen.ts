@@ -1,5 +1,5 @@
 /**
- * Drawing items and text as lines for the terminal: every line has exactly the width asked for and begins and ends in the
+ * Drawing items and text as lines for the terminal: no line is wider than asked for, and each begins and ends in the
  * default style.
  */
 import { clusters, displayWidth } from '../../term/display-width.ts';
@@ -38,20 +38,31 @@ export function penOf(state: State): Pen {
   };
 }
 
-/** Spans as one line of exactly `columns` columns; what does not fit is cut. */
+/** Spans as one line of at most `columns` columns; what does not fit is cut, and no blank is drawn at the end. */
 export function lineOfSpans(spans: readonly Span[], columns: number, pen: Pen): string {
   let left = columns;
   let out = '';
+  let blanks = 0;
   for (const { text, role } of spans) {
     if (left <= 0) break;
     const cut = cutToWidth(text, left, pen.glyphs.more);
-    out += paint(cut, pen.theme[role]);
     left -= displayWidth(cut);
+    // Blanks wait until something follows them: what is not there need not be laid out.
+    const look = pen.theme[role];
+    const end = look.inverse || look.underline ? cut.length : cut.trimEnd().length;
+    if (end > 0) {
+      out += ' '.repeat(blanks) + paint(cut.slice(0, end), look);
+      blanks = 0;
+    }
+    blanks += cut.length - end;
   }
-  return out + ' '.repeat(Math.max(0, left));
+  return out;
 }
 
-export const blankLine = (columns: number): string => ' '.repeat(Math.max(0, columns));
+/** An empty line; one blank, since a text without any has no line. */
+export const BLANK_LINE = ' ';
+
+export const blanks = (columns: number): string => ' '.repeat(Math.max(0, columns));
 
 /** The spans of an item: mark of the focus, label (padded to `labelWidth`), value. */
 export function itemSpans(item: Item, labelWidth: number, room: number, pen: Pen): readonly Span[] {

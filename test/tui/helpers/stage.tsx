@@ -10,7 +10,8 @@ import { catalogueFromSources } from '../../../src/catalog/from-sources.ts';
 import { makeSearch } from '../../../src/catalog/search.ts';
 import { charKey, type Key, type KeyName, namedKey } from '../../../src/term/key.ts';
 import { App } from '../../../src/tui/components/app.tsx';
-import { indexTable } from '../../../src/tui/index-tables.ts';
+import { mediumName } from '../../../src/tui/fields/medium-fields.ts';
+import { type IndexTable, indexTable } from '../../../src/tui/index-tables.ts';
 import { bindKeys } from '../../../src/tui/keys/bindings.ts';
 import { type Effect, initialState, type Preferences, type State } from '../../../src/tui/state.ts';
 import { Store } from '../../../src/tui/store.ts';
@@ -24,6 +25,7 @@ export interface StageOptions {
   readonly preferences?: Partial<Preferences>;
 }
 
+const tables = new Map<string, IndexTable>();
 let search: ReturnType<typeof makeSearch> | undefined;
 
 export function testWorld(): World {
@@ -36,7 +38,12 @@ export function testWorld(): World {
     lookup: (name) => catalogue.lookup(name),
     material: (key) => catalogue.material(key),
     source: (id) => catalogue.source(id),
-    opticsOver: indexTable,
+    opticsOver: (medium, conditions, range_m) => {
+      const id = JSON.stringify([mediumName(medium), conditions, range_m]);
+      const table = tables.get(id) ?? indexTable(medium, conditions, range_m);
+      tables.set(id, table);
+      return table;
+    },
     bindings: bindKeys().bindings,
   };
 }
