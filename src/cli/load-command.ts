@@ -11,6 +11,7 @@ const LOADERS: Readonly<Record<Invocation['command'], () => Promise<CommandModul
   completion: () => import('./commands/completion.ts'),
   man: () => import('./commands/man.ts'),
   cite: () => import('./commands/cite.ts'),
+  material: () => import('./commands/material.ts'),
   verify: () => import('./commands/verify.ts'),
 };
 

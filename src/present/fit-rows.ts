@@ -1,10 +1,8 @@
 /** One fit of a material: what it is, where it holds, how good it is, where it comes from. */
 import type { Fit, Material, Source } from '../catalog/types.ts';
 import { sourceText } from '../cite/source-text.ts';
-import { SPEED_OF_LIGHT_m_per_s } from '../units/constants.ts';
-import { HERTZ, METRE } from '../units/display-unit.ts';
 import { formatNumber } from '../units/format-number.ts';
-import { formatQuantity, formatRange } from '../units/format-quantity.ts';
+import { lengthRange } from './length-text.ts';
 import { modelWords, thermalWords } from './model-words.ts';
 import { RowList } from './row-list.ts';
 import type { PresentStyle, Shown } from './shown.ts';
@@ -33,7 +31,7 @@ export function fitRows(
     if (text !== undefined && text !== '') rows.add(id, '', label, text);
   };
   const range = (part: readonly [number, number] | undefined): string | undefined =>
-    part && rangeOf(part, style);
+    part && lengthRange(part, style);
   add('model', 'form', modelWords(fit.parameters));
   add('range_um', 'range', range(fit.range_um));
   add('confirmedRange_um', 'confirmed over', range(fit.confirmedRange_um));
@@ -45,29 +43,16 @@ export function fitRows(
   );
   add('temperature_C', 'measured at', temperatureText(fit.temperature_C, style));
   add('accuracy_n', 'accuracy of n', accuracyText(fit, style));
-  add('thermal', 'temperature', thermalWords(fit, material, style));
+  add('thermal', 'thermal', thermalWords(fit, material, style));
   add('film', 'film', filmText(fit, style));
   add('grade', `grade ${fit.grade}`, GRADE_WORDS[fit.grade]);
   add('source', 'source', sourceOfFit(fit.source, sourceOf));
   for (const id of fit.furtherSources ?? []) add('furtherSources', 'and', sourceOfFit(id, sourceOf));
   add('confirmedBy', 'confirmed by', fit.confirmedBy);
   add('note', 'note', fit.note);
-  for (const one of fit.contradictedBy ?? [])
-    add('contradictedBy', 'elsewhere', contradictionText(one, style));
+  for (const text of contradictions(fit.contradictedBy ?? [], style))
+    add('contradictedBy', 'elsewhere', text);
   return rows.list;
-}
-
-/** Six digits, which no limit exceeds; the frequencies too where a person thinks in them. */
-function rangeOf([lo, hi]: readonly [number, number], style: PresentStyle): string {
-  const six = (x: number): number => Number(x.toPrecision(6));
-  const metres = [six(lo * 1e-6), six(hi * 1e-6)] as const;
-  const text =
-    lo === hi
-      ? `${formatQuantity(metres[0], METRE, 'shortest', { style })} only`
-      : formatRange(metres, METRE, 'shortest', { style });
-  if (hi < 1e3) return text;
-  const frequency = (um: number): number => six((SPEED_OF_LIGHT_m_per_s / um) * 1e6);
-  return `${text} (${formatRange([frequency(hi), frequency(lo)], HERTZ, 'shortest', { style })})`;
 }
 
 const temperatureText = (temperature_C: number | undefined, style: PresentStyle): string | undefined =>
@@ -93,17 +78,26 @@ function sourceOfFit(id: string, sourceOf: SourceOf): string {
   return source ? sourceText(source) : id;
 }
 
-/** Printed values that disagree are free records: their numbers, then who says so and why. */
-function contradictionText(value: unknown, style: PresentStyle): string | undefined {
-  if (typeof value !== 'object' || value === null) return undefined;
-  const record = value as Readonly<Record<string, unknown>>;
-  const { wavelength_um: at, source, note, quantity, published, ...rest } = record;
-  const numbers = Object.entries(typeof quantity === 'string' ? { [quantity]: published } : rest).flatMap(
-    ([name, x]) => (typeof x === 'number' ? [`${name} ${formatNumber(x, 'shortest', style)}`] : []),
+/** Printed values that disagree are free records: their numbers, then who says so and why; those of one source together. */
+function contradictions(records: readonly unknown[], style: PresentStyle): readonly string[] {
+  const numbersOf = new Map<string, string[]>();
+  for (const value of records) {
+    if (typeof value !== 'object' || value === null) continue;
+    const record = value as Readonly<Record<string, unknown>>;
+    const said = ['source', 'note']
+      .flatMap((k) => (typeof record[k] === 'string' ? [record[k]] : []))
+      .join('; ');
+    numbersOf.set(said, [...(numbersOf.get(said) ?? []), numbersText(record, style)]);
+  }
+  return [...numbersOf].map(([said, numbers]) => [...numbers, said].filter((part) => part !== '').join('; '));
+}
+
+function numbersText(record: Readonly<Record<string, unknown>>, style: PresentStyle): string {
+  const { wavelength_um: at, quantity, published } = record;
+  const { wavelength_um: _, ...named } = record;
+  const figures = typeof quantity === 'string' ? { [quantity]: published } : named;
+  const numbers = Object.entries(figures).flatMap(([name, x]) =>
+    typeof x === 'number' ? [`${name} ${formatNumber(x, 'shortest', style)}`] : [],
   );
-  const place = typeof at === 'number' ? ` at ${formatNumber(at, 'shortest', style)} µm` : '';
-  const parts = [`${numbers.join(', ')}${place}`, source, note].filter(
-    (p) => typeof p === 'string' && p !== '',
-  );
-  return parts.length === 0 ? undefined : parts.join('; ');
+  return `${numbers.join(', ')}${typeof at === 'number' ? ` at ${formatNumber(at, 'shortest', style)} µm` : ''}`;
 }

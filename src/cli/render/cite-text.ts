@@ -2,9 +2,9 @@
 import { type CitedSource, citedSources, factSources, type SourceUse } from '../../catalog/cited-sources.ts';
 import type { Fit, Source } from '../../catalog/types.ts';
 import { sourceText } from '../../cite/source-text.ts';
+import { lengthRange } from '../../present/length-text.ts';
 import type { NumberStyle } from '../../units/number-style.ts';
 import type { Cited } from '../find-cited.ts';
-import { lengthRange } from './length-range.ts';
 import { page, paragraph } from './page.ts';
 
 type SourceOf = (id: string) => Source | undefined;

@@ -2,12 +2,12 @@
 import { type CheckedValue, passes } from '../../catalog/check-values.ts';
 import type { Grade } from '../../catalog/types.ts';
 import { toleranceUsed, type VerifyReport } from '../../catalog/verify.ts';
+import { lengthAt, lengthColumn } from '../../present/length-text.ts';
 import { GRADE_WORDS } from '../../present/source-lines.ts';
 import { formatNumber } from '../../units/format-number.ts';
 import { ASCII, type NumberStyle } from '../../units/number-style.ts';
 import { checkedTexts } from './checked-number.ts';
 import { type Column, columns } from './columns.ts';
-import { lengthAt, lengthColumn } from './length-range.ts';
 import { page, paragraph } from './page.ts';
 import { quantitySymbol } from './quantity-symbol.ts';
 

@@ -1,8 +1,8 @@
 /** Wavelength and wavelength range of a fit as text: what is printed in um, at the prefix that reads best. */
-import { SPEED_OF_LIGHT_m_per_s } from '../../units/constants.ts';
-import { HERTZ, METRE } from '../../units/display-unit.ts';
-import { columnPrefix, formatQuantity, formatRange } from '../../units/format-quantity.ts';
-import type { NumberStyle } from '../../units/number-style.ts';
+import { SPEED_OF_LIGHT_m_per_s } from '../units/constants.ts';
+import { HERTZ, METRE } from '../units/display-unit.ts';
+import { columnPrefix, formatQuantity, formatRange } from '../units/format-quantity.ts';
+import type { NumberStyle } from '../units/number-style.ts';
 
 /** "589.3 nm". */
 export function lengthAt(wavelength_um: number, style: NumberStyle): string {
