@@ -1,6 +1,6 @@
 /**
  * An old record against the same question asked again: which values differ, by how much, and what may have caused it. Every value
- * of the answer counts, to the last bit.
+ * of the old answer counts, to the last bit; keys that a later version has added do not.
  */
 import { isJsonObject, type JsonValue } from './plain-json.ts';
 import { idOfRecord, type LogRecord } from './record.ts';
@@ -94,7 +94,8 @@ function differencesOf(
 ): readonly Difference[] {
   if (isTree(before) && isTree(now) && Array.isArray(before) === Array.isArray(now)) {
     const [a, b] = [childrenOf(before), childrenOf(now)];
-    return [...new Set([...a.keys(), ...b.keys()])].flatMap((key) =>
+    const keys = Array.isArray(before) ? new Set([...a.keys(), ...b.keys()]) : a.keys();
+    return [...keys].flatMap((key) =>
       differencesOf(a.get(key), b.get(key), path === '' ? key : `${path}.${key}`),
     );
   }

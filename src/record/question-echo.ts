@@ -2,17 +2,28 @@
 import type { Layer, MediumSpec, Question } from '../answer/question.ts';
 import { type JsonObject, toPlainObject } from './plain-json.ts';
 
+/** What stands for a part that was not stated. */
+const NOT_STATED: { readonly [Part in OptionalPart]: null | false } = {
+  beam: null,
+  designWave: null,
+  coherenceLength_m: null,
+  pulseDuration_s: null,
+  cut: null,
+  fieldProfile: false,
+};
+type OptionalPart = {
+  [Part in keyof Question]-?: undefined extends Question[Part] ? Part : never;
+}[keyof Question];
+
 export function questionEcho(question: Question): JsonObject {
-  const { from, layers, into, wave, beam, designWave, coherenceLength_m, ...rest } = question;
+  const { from, layers, into, ...rest } = question;
+  const stated = Object.fromEntries(Object.entries(rest).filter(([, value]) => value !== undefined));
   return toPlainObject({
     from: mediumEcho(from),
     layers: layers.map(layerEcho),
     into: mediumEcho(into),
-    wave,
-    ...rest,
-    beam: beam ?? null,
-    designWave: designWave ?? null,
-    coherenceLength_m: coherenceLength_m ?? null,
+    ...NOT_STATED,
+    ...stated,
   });
 }
 

@@ -1,5 +1,13 @@
 /** The question in words, one row for each thing that was asked or assumed, so that a record is complete without the program. */
-import type { Beam, Layer, MediumSpec, Question, Tolerances, WaveSpec } from '../answer/question.ts';
+import type {
+  Beam,
+  CrystalCut,
+  Layer,
+  MediumSpec,
+  Question,
+  Tolerances,
+  WaveSpec,
+} from '../answer/question.ts';
 import type { Conditions } from '../dispersion/evaluator.ts';
 import {
   CELSIUS,
@@ -21,27 +29,47 @@ import type { RecordRow } from './record.ts';
 
 const ZERO_CELSIUS_K = 273.15;
 const KELVIN: DisplayUnit = { symbol: 'K', power: 0 };
+const SQUARE_METRE_PER_WATT: DisplayUnit = { symbol: 'm²/W', power: 0 };
+
+/** One entry for every part of a question, in the order of the rows: a part added to questions asks for its row here. */
+const ROWS: { readonly [Part in keyof Required<Question>]: (question: Question) => readonly RecordRow[] } = {
+  from: ({ from }) => [row('medium of incidence', mediumText(from))],
+  layers: ({ layers }) => layers.map((layer, i) => row(`layer ${i + 1}`, layerText(layer))),
+  into: ({ into }) => [row('medium beyond', mediumText(into))],
+  wave: ({ wave }) => [row('wave', waveText(wave))],
+  incidenceAngle_rad: (question) => [row('angle of incidence', angleText(question.incidenceAngle_rad))],
+  polarization: ({ polarization }) => [row('polarization', polarization)],
+  cut: ({ cut }) => (cut ? [row('cut of the crystal', cutText(cut))] : []),
+  conditions: ({ conditions }) => [row('conditions', conditionsText(conditions))],
+  beam: ({ beam }) => [row('beam', beam ? beamText(beam) : 'none stated')],
+  pulseDuration_s: ({ pulseDuration_s }) =>
+    pulseDuration_s === undefined
+      ? []
+      : [row('pulse through the path', `gaussian, ${exact(pulseDuration_s, SECOND)}`)],
+  tolerances: ({ tolerances }) => [row('tolerances', tolerancesText(tolerances))],
+  extrapolate: ({ extrapolate }) => [
+    row('outside the range of a fit', extrapolate ? 'extrapolated, as asked' : 'refused'),
+  ],
+  designWave: ({ layers, designWave }) =>
+    layers.length === 0 ? [] : [row('design wave', designWave ? waveText(designWave) : 'the wave above')],
+  coherenceLength_m: ({ coherenceLength_m }) =>
+    coherenceLength_m === undefined ? [] : [row('coherence length', exact(coherenceLength_m, METRE))],
+  fieldProfile: ({ fieldProfile }) =>
+    fieldProfile ? [row('field through the layers', 'point by point')] : [],
+};
 
 export function questionRows(question: Question): readonly RecordRow[] {
-  const { from, layers, into, wave, beam, designWave, coherenceLength_m } = question;
-  return [
-    row('medium of incidence', mediumText(from)),
-    ...layers.map((layer, i) => row(`layer ${i + 1}`, layerText(layer))),
-    row('medium beyond', mediumText(into)),
-    row('wave', waveText(wave)),
-    row('angle of incidence', angleText(question.incidenceAngle_rad)),
-    row('polarization', question.polarization),
-    row('conditions', conditionsText(question.conditions)),
-    row('beam', beam ? beamText(beam) : 'none stated'),
-    row('tolerances', tolerancesText(question.tolerances)),
-    row('outside the range of a fit', question.extrapolate ? 'extrapolated, as asked' : 'refused'),
-    ...(layers.length > 0 ? [row('design wave', designWave ? waveText(designWave) : 'the wave above')] : []),
-    ...(coherenceLength_m === undefined ? [] : [row('coherence length', exact(coherenceLength_m, METRE))]),
-  ];
+  return Object.values(ROWS).flatMap((rows) => rows(question));
 }
 
 function row(label: string, text: string): RecordRow {
   return { about: '', symbol: '', label, text };
+}
+
+function cutText({ angle_rad, azimuth_rad, retardance_waves }: CrystalCut): string {
+  const degrees = (rad: number): string => exact((rad * 180) / Math.PI, DEGREE);
+  const plate = retardance_waves === undefined ? '' : `, plate of ${exact(retardance_waves, NUMBER)} waves`;
+  return `optic axis ${degrees(angle_rad)} from the normal, azimuth ${degrees(azimuth_rad)}${plate}`;
 }
 
 /** The value as it was given: twelve digits take off what the conversion of a typed unit added. */
@@ -56,12 +84,16 @@ function mediumText(medium: MediumSpec): string {
   return `${name} (${key})${axis}${own ? ', from the own folder' : ''}`;
 }
 
-function layerText({ medium, thickness }: Layer): string {
+function layerText({ medium, thickness, nonlinearIndex_m2_per_W }: Layer): string {
   const size =
     thickness.kind === 'length'
       ? exact(thickness.thickness_m, METRE)
       : `${exact(thickness.waves, NUMBER)} wavelengths thick`;
-  return `${mediumText(medium)}, ${size}`;
+  const nonlinear =
+    nonlinearIndex_m2_per_W === undefined
+      ? ''
+      : `, nonlinear index ${exact(nonlinearIndex_m2_per_W, SQUARE_METRE_PER_WATT)}`;
+  return `${mediumText(medium)}, ${size}${nonlinear}`;
 }
 
 function waveText({ wavelength_m, inAir, text }: WaveSpec): string {
@@ -103,14 +135,17 @@ function beamText(beam: Beam): string {
 }
 
 function tolerancesText(tolerances: Tolerances): string {
-  const { wavelength_m, angle_rad, index, indexFrom, temperature_K, thickness_m } = tolerances;
+  const { wavelength_m, angle_rad, index, indexFrom, indexLayers, temperature_K } = tolerances;
+  const { thickness_m, thicknessShare } = tolerances;
   const stated = [
     wavelength_m === undefined ? '' : `wavelength ${exact(wavelength_m, METRE)}`,
     angle_rad === undefined ? '' : `angle ${exact((angle_rad * 180) / Math.PI, DEGREE)}`,
     index === undefined ? '' : `n beyond ${exact(index, NUMBER)}`,
     indexFrom === undefined ? '' : `n of incidence ${exact(indexFrom, NUMBER)}`,
+    indexLayers === undefined ? '' : `n of each layer ${exact(indexLayers, NUMBER)}`,
     temperature_K === undefined ? '' : `temperature ${exact(temperature_K, KELVIN)}`,
     thickness_m === undefined ? '' : `thickness ${exact(thickness_m, METRE)}`,
+    thicknessShare === undefined ? '' : `thickness ${exact(thicknessShare, PER_CENT)}`,
   ].filter((text) => text !== '');
   return stated.length === 0 ? 'none stated' : `${stated.join(', ')} (standard uncertainties)`;
 }

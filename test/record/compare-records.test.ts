@@ -21,6 +21,19 @@ describe('comparing two answers', () => {
     ]);
   });
 
+  it('counts no key that a later version has added, but a caution more and a key less', () => {
+    const more = { ...ANSWER, interface: { ...ANSWER.interface, loss_dB: 0.2 }, further: null };
+    expect(compareRecords(record(ANSWER), record(more)).same).toBe(true);
+    expect(compareRecords(record(more), record(ANSWER)).differences.map(({ path }) => path)).toEqual([
+      'interface.loss_dB',
+      'further',
+    ]);
+    const cautious = compareRecords(record(ANSWER), record({ ...ANSWER, cautions: ['a', 'b'] }));
+    expect(cautious.differences).toEqual([
+      { path: 'cautions.1', before: undefined, now: 'b', relativeChange: null },
+    ]);
+  });
+
   it('lists every value that differs, with the relative change of numbers', () => {
     const { same, differences } = compareRecords(record(ANSWER), record(changed, { version: '0.2.0' }));
     expect(same).toBe(false);

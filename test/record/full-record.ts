@@ -1,15 +1,8 @@
-/** A record with everything in it: films, a beam, tolerances, cautions, sources, signs that each form must escape. */
-import { makeQuestion } from '../../src/answer/question.ts';
-import type { Material } from '../../src/catalog/types.ts';
-import { describeQuestion, type LogRecord, makeRecord } from '../../src/record/record.ts';
-
-const material = (key: string, name: string): Material => ({
-  key,
-  name,
-  aliases: [],
-  class: 'test',
-  fits: [],
-});
+/**
+ * A record with everything in it: films, a beam, tolerances, cautions, sources, signs that each form must escape. All of it is
+ * written out, so that its forms change only where the forms do.
+ */
+import { type LogRecord, makeRecord } from '../../src/record/record.ts';
 
 const SILICA_SOURCE = {
   id: 'malitson-1965',
@@ -22,37 +15,54 @@ const FILM_SOURCE = {
   doi: '10.1002/(sici)1097-0000(199901)27:4<175::aid-x>3.0.co;2-k',
 };
 
-const question = makeQuestion(
-  { kind: 'catalogue', material: material('air', 'Air') },
-  { kind: 'catalogue', material: material('sapphire', 'Sapphire'), axis: 'ordinary' },
-  { wavelength_m: 632.8e-9, inAir: true, text: '632.8nm' },
-  {
-    layers: [
-      {
-        medium: { kind: 'catalogue', material: material('magnesium-fluoride', 'Magnesium fluoride') },
-        thickness: { kind: 'waves', waves: 0.25 },
-      },
-      {
-        medium: { kind: 'literal', literal: { n: { re: 1.46, im: 0 } }, text: 'n=1.46' },
-        thickness: { kind: 'length', thickness_m: 10e-9 },
-      },
-    ],
-    incidenceAngle_rad: (56.3 * Math.PI) / 180,
-    polarization: 'p',
-    conditions: { temperature_K: 298.15, humidity: 0.4, co2_ppm: 420 },
-    beam: {
-      kind: 'power',
-      power_W: 5e-3,
-      diameter_m: 1e-3,
-      profile: 'gaussian',
-      pulse: { energy_J: 2e-9, duration_s: 80e-15, repetition_Hz: 80e6 },
+const question = {
+  from: { key: 'air', axis: null, own: false },
+  layers: [
+    {
+      medium: { key: 'magnesium-fluoride', axis: null, own: false },
+      thickness: { kind: 'waves', waves: 0.25 },
     },
-    tolerances: { wavelength_m: 1e-9, angle_rad: (0.5 * Math.PI) / 180, index: 1e-4 },
+    {
+      medium: { literal: { n: { re: 1.46, im: 0 } }, text: 'n=1.46' },
+      thickness: { kind: 'length', thickness_m: 1e-8 },
+    },
+  ],
+  into: { key: 'sapphire', axis: 'ordinary', own: false },
+  wave: { wavelength_m: 6.328e-7, inAir: true, text: '632.8nm' },
+  incidenceAngle_rad: 0.9826203688728075,
+  polarization: 'p',
+  conditions: { temperature_K: 298.15, humidity: 0.4, co2_ppm: 420 },
+  tolerances: { wavelength_m: 1e-9, angle_rad: 0.008726646259971648, index: 0.0001 },
+  extrapolate: false,
+  beam: {
+    kind: 'power',
+    power_W: 0.005,
+    diameter_m: 0.001,
+    profile: 'gaussian',
+    pulse: { energy_J: 2e-9, duration_s: 8e-14, repetition_Hz: 80000000 },
   },
-);
+  designWave: null,
+  coherenceLength_m: null,
+};
+
+const asked = [
+  ['medium of incidence', 'Air (air)'],
+  ['layer 1', 'Magnesium fluoride (magnesium-fluoride), 0.25 wavelengths thick'],
+  ['layer 2', 'n=1.46, 10 nm'],
+  ['medium beyond', 'Sapphire (sapphire), ordinary'],
+  ['wave', '632.8 nm in standard air, given as 632.8nm'],
+  ['angle of incidence', '56.3° from the normal'],
+  ['polarization', 'p'],
+  ['conditions', '25 °C, 40 % relative humidity, CO2 420 × 10⁻⁶; else those of the fits'],
+  ['beam', '5 mW, gaussian, diameter (1/e² of the irradiance) 1 mm, pulses of 2 nJ in 80 fs at 80 MHz'],
+  ['tolerances', 'wavelength 1 nm, angle 0.5°, n beyond 0.0001 (standard uncertainties)'],
+  ['outside the range of a fit', 'refused'],
+  ['design wave', 'the wave above'],
+].map(([label = '', text = '']) => ({ about: '', symbol: '', label, text }));
 
 export const FULL_RECORD: LogRecord = makeRecord({
-  ...describeQuestion(question),
+  question,
+  asked,
   time: '2026-03-14T09:26:53+01:00',
   version: '0.1.0',
   catalogue: { hash: '0123456789ab', date: '2026-02-01' },

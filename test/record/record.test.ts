@@ -47,6 +47,43 @@ describe('a record', () => {
     ]);
   });
 
+  it('names what else was stated: layers, pulses, tolerances', () => {
+    const glass = { kind: 'literal', literal: { n: { re: 1.5, im: 0 } }, text: 'n=1.5' } as const;
+    const question = makeQuestion(glass, glass, vacuumWave(1e-6), {
+      layers: [
+        { medium: glass, thickness: { kind: 'length', thickness_m: 5e-3 }, nonlinearIndex_m2_per_W: 2.6e-20 },
+        { medium: glass, thickness: { kind: 'waves', waves: 0.25 } },
+      ],
+      beam: {
+        kind: 'pulse',
+        pulse: { energy_J: 1e-3, duration_s: 3e-14 },
+        profile: 'flat',
+        diameter_m: 2e-3,
+      },
+      tolerances: { thickness_m: 1e-9, temperature_K: 0.5 },
+      extrapolate: true,
+      cut: { angle_rad: Math.PI / 4, azimuth_rad: 0, retardance_waves: 0.25 },
+      pulseDuration_s: 3e-14,
+      fieldProfile: true,
+      coherenceLength_m: 1e-3,
+      designWave: vacuumWave(550e-9),
+    });
+    const texts = describeQuestion(question).asked.map((row) => `${row.label}: ${row.text}`);
+    for (const expected of [
+      'layer 1: n=1.5, 5 mm, nonlinear index 2.6 × 10⁻²⁰ m²/W',
+      'layer 2: n=1.5, 0.25 wavelengths thick',
+      'beam: flat-top, diameter 2 mm, pulses of 1 mJ in 30 fs',
+      'tolerances: temperature 0.5 K, thickness 1 nm (standard uncertainties)',
+      'outside the range of a fit: extrapolated, as asked',
+      'cut of the crystal: optic axis 45° from the normal, azimuth 0°, plate of 0.25 waves',
+      'pulse through the path: gaussian, 30 fs',
+      'field through the layers: point by point',
+      'coherence length: 1 mm',
+      'design wave: 550 nm in vacuum, given as 5.5e-7 m',
+    ])
+      expect(texts).toContain(expected);
+  });
+
   it('has an id of its content: the same again, another after any change', () => {
     expect(FULL_RECORD.id).toMatch(/^[0-9a-f]{12}$/);
     expect(idOfRecord(FULL_RECORD)).toBe(FULL_RECORD.id);
