@@ -97,7 +97,9 @@ function parseValues(
   const texts = new Map<OptionKey, string | undefined>();
   for (const { key, text } of given) {
     const spec = optionSpec(key);
-    if (texts.has(key) && texts.get(key) !== text) {
+    const again = texts.has(key);
+    const repeatable = spec.kind === 'value' && spec.repeatable === true;
+    if (again && !repeatable && texts.get(key) !== text) {
       const both = `--${spec.name} is given as ${quoteInput(texts.get(key) ?? '')} and as ${quoteInput(text ?? '')}`;
       return usageError('given-twice', both, 'give it once', command);
     }
@@ -107,7 +109,7 @@ function parseValues(
       const candidates = spec.kind === 'value' && spec.choices ? nearest(text ?? '', spec.choices) : [];
       return usageError('bad-value', `--${spec.name}: ${value.message}`, value.remedy, command, candidates);
     }
-    values[key] = value;
+    values[key] = again && repeatable ? [...(values[key] as unknown[]), ...(value as unknown[])] : value;
   }
   // Each value came out of the parser of its own row, which is what OptionValues states.
   return { values: values as OptionValues };

@@ -3,6 +3,7 @@
  * load-command.ts. Help, man page, completions and the argument parser follow by themselves.
  */
 import { OPTION_KEYS, type OptionKey, optionSpec } from './options.ts';
+import { SELECTION_COMMANDS } from './selection-commands.ts';
 
 export interface OperandSpec {
   /** In help: `FROM`. */
@@ -162,6 +163,7 @@ export const COMMANDS = [
       { line: 'verify --csv -o checks.csv', meaning: 'the same for a spreadsheet' },
     ],
   },
+  ...SELECTION_COMMANDS,
   {
     name: 'help',
     summary: 'help for the program or for one command',

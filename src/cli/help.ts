@@ -26,6 +26,7 @@ export const GROUP_TITLES: Readonly<Record<OptionGroup, string>> = {
   question: 'The question',
   path: 'Paths of layers',
   beam: 'The beam',
+  selection: 'Choosing',
   form: 'Form of the answer',
   output: 'Output',
   general: 'General',

@@ -12,6 +12,7 @@ const LOADERS: Readonly<Record<Invocation['command'], () => Promise<CommandModul
   man: () => import('./commands/man.ts'),
   cite: () => import('./commands/cite.ts'),
   material: () => import('./commands/material.ts'),
+  find: () => import('./commands/find.ts'),
   verify: () => import('./commands/verify.ts'),
 };
 

@@ -1,7 +1,7 @@
 /** What the table of options says about one option. Help, man page, completions and the parser read nothing else. */
 import type { Problem } from '../units/problem.ts';
 
-export type OptionGroup = 'question' | 'path' | 'beam' | 'form' | 'output' | 'general';
+export type OptionGroup = 'question' | 'path' | 'beam' | 'selection' | 'form' | 'output' | 'general';
 
 interface AnyOption {
   /** Long name without dashes. */
@@ -37,6 +37,8 @@ export interface ValueOption<Value> extends AnyOption {
   /** The only words it takes. */
   readonly choices?: readonly string[];
   readonly completes?: 'file' | 'folder';
+  /** May be given several times; `parse` gives a list then, and the lists are joined. */
+  readonly repeatable?: true;
 }
 
 export type OptionSpec = FlagOption | ValueOption<unknown>;

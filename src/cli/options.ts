@@ -1,7 +1,7 @@
 /**
  * The one table of options. A key is what the option's value is called in the program, unit included; `name` is what
  * people type. To add an option: add its row, and its key to the rows of the commands that take it (command-table.ts). Rows
- * of paths and beams stand in beam-options.ts.
+ * of paths and beams stand in beam-options.ts, those of choosing among media in selection-options.ts.
  */
 import { parseIncidence } from '../units/parse-angle.ts';
 import { choiceParser } from '../units/parse-choice.ts';
@@ -14,6 +14,7 @@ import { parseTolerances } from '../units/parse-tolerance.ts';
 import { type Problem, problem } from '../units/problem.ts';
 import { BEAM_OPTION_ROWS, PATH_OPTION_ROWS } from './beam-options.ts';
 import { choice, flag, type OptionSpec, type ValueOf, value } from './option-spec.ts';
+import { SELECTION_OPTION_ROWS } from './selection-options.ts';
 
 const POLARIZATIONS = ['s', 'p', 'unpolarized'] as const;
 const COLOURS = ['auto', 'always', 'never'] as const;
@@ -84,7 +85,7 @@ export const OPTIONS = {
     name: 'tolerance',
     placeholder: 'NAME=VALUE,...',
     meaning:
-      'standard uncertainties of what is given: wave=1nm, angle=0.5deg, n=1e-4 (beyond the interface), n1=1e-4 (before it), thickness=5nm, temperature=0.5C',
+      'standard uncertainties of what is given: wave=1nm, angle=0.5deg, n=1e-4 (beyond), n1=1e-4 (before), nlayer=0.01 (each layer between), thickness=5nm or 1% (each layer on its own), temperature=0.5C',
     group: 'question',
     parse: parseTolerances,
   }),
@@ -96,6 +97,7 @@ export const OPTIONS = {
 
   ...PATH_OPTION_ROWS,
   ...BEAM_OPTION_ROWS,
+  ...SELECTION_OPTION_ROWS,
 
   json: flag({
     name: 'json',

@@ -39,8 +39,8 @@ export function clearWords([from_m, to_m]: readonly [number, number]): string {
 export function lossWords(maxLoss: number, thickness_m: number | undefined): string {
   const limit = `${formatNumber(Number((maxLoss * 100).toPrecision(6)), 'shortest', style)} %`;
   return thickness_m === undefined
-    ? `loss of one surface up to ${limit}`
-    : `loss of ${formatQuantity(thickness_m, METRE, 'shortest', { style })} up to ${limit}`;
+    ? `loss up to ${limit} at one surface`
+    : `loss up to ${limit} through ${formatQuantity(thickness_m, METRE, 'shortest', { style })}`;
 }
 
 /** All but the wave, which faces name in a place of its own. */

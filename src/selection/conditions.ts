@@ -111,7 +111,7 @@ export const CONDITIONS: readonly ConditionKind[] = [
       const maxLoss = parseFraction(text.replace(/^\s*(?:<=?|≤)\s*/u, ''));
       if (isProblem(maxLoss)) return maxLoss;
       return {
-        words: `loss up to ${lossWords(maxLoss, undefined).split('up to ')[1] ?? ''}`,
+        words: lossWords(maxLoss, undefined).replace(/ at one surface$/, ''),
         into: (c) => ({ ...c, maxLoss }),
       };
     },

@@ -9,7 +9,8 @@ import { abbeNumbers } from './abbe-numbers.ts';
 import { type Criteria, conditionWithoutWave } from './criteria.ts';
 import { type FindResult, type Found, findMaterials } from './find-materials.ts';
 import { type MaterialFacts, materialFacts } from './material-facts.ts';
-import { type SortOrder, sortFound } from './sort-found.ts';
+import { sortFound } from './sort-found.ts';
+import type { SortOrder } from './sort-order.ts';
 import type { Survey } from './survey.ts';
 import { isUndecided, UNDECIDED_WORDS, type Undecided, type UndecidedReason } from './undecided.ts';
 
@@ -20,6 +21,9 @@ export interface Hit {
   /** At the wave; null where none is given. */
   readonly medium: MediumAnswer | null;
   readonly birefringence: number | null;
+  /** At the d and e lines, relative to air. */
+  readonly n_d: number | null;
+  readonly n_e: number | null;
   readonly Vd: number | null;
   readonly Ve: number | null;
   /** One surface, in air, normal incidence. */
@@ -88,7 +92,9 @@ function describe(survey: Survey, { candidate, alsoAxes }: Found, criteria: Crit
     if (!medium) reasons[name] = NO_WAVE;
     else if (medium[name] === null) reasons[name] = UNDECIDED_WORDS['no-dispersion'];
   }
-  const { Vd, Ve } = abbeNumbers(survey, material, axis);
+  const { n_d, Vd, n_e, Ve } = abbeNumbers(survey, material, axis);
+  if (n_d === null) reasons['n_d'] = 'no data at the d line';
+  if (n_e === null) reasons['n_e'] = 'no data at the e line';
   if (Vd === null) reasons['Vd'] = UNDECIDED_WORDS['abbe-lines-not-reached'];
   if (Ve === null) reasons['Ve'] = "no fit that reaches the F', e and C' lines";
   const loss = given('loss', candidate.loss(criteria.thickness_m));
@@ -98,6 +104,8 @@ function describe(survey: Survey, { candidate, alsoAxes }: Found, criteria: Crit
     alsoAxes,
     medium,
     birefringence: given('birefringence', candidate.birefringence),
+    n_d,
+    n_e,
     Vd,
     Ve,
     surfaceReflectance: given('surfaceReflectance', candidate.surface),

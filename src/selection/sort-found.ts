@@ -1,45 +1,10 @@
 /** The order of a list of hits. A hit without the value sorted by stands last, whichever way the order runs. */
 
-import { orList } from '../units/parse-choice.ts';
-import { type Problem, problem } from '../units/problem.ts';
-import { quoteInput } from '../units/quote-input.ts';
 import type { Candidate } from './candidate.ts';
 import type { Criteria } from './criteria.ts';
 import type { Found } from './find-materials.ts';
+import type { SortKey, SortOrder } from './sort-order.ts';
 import { isUndecided, type Undecided } from './undecided.ts';
-
-export const SORT_KEYS = [
-  'key',
-  'name',
-  'class',
-  'n',
-  'loss',
-  'group-index',
-  'gvd',
-  'birefringence',
-  'abbe',
-  'hardness',
-  'density',
-] as const;
-export type SortKey = (typeof SORT_KEYS)[number];
-
-export interface SortOrder {
-  readonly key: SortKey;
-  readonly descending: boolean;
-}
-
-/** `n`, or `-n` from the greatest down. */
-export function parseSortOrder(text: string): SortOrder | Problem {
-  const trimmed = text.trim().toLowerCase();
-  const descending = trimmed.startsWith('-');
-  const key = SORT_KEYS.find((k) => k === (descending ? trimmed.slice(1) : trimmed));
-  if (key) return { key, descending };
-  return problem(
-    'not-a-choice',
-    `${quoteInput(text)} is nothing to sort by`,
-    `write ${orList(SORT_KEYS)}, with a dash before it for the greatest first`,
-  );
-}
 
 /** By index where the index is asked for, else in the order of the keys. */
 export function defaultOrder(criteria: Criteria): SortOrder {
