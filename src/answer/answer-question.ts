@@ -2,19 +2,24 @@
  * The one pure function: a question in, an answer (or a refusal that says why not) out. No I/O, no clock, no state; the same
  * question gives the same answer, digit for digit, on every face.
  */
+
+import type { FitWave } from '../catalog/choose-fit.ts';
 import type { CautionNote } from '../medium/caution.ts';
 import { isRefusal, type Refusal, refuse } from '../medium/refusal.ts';
 import type { Answer, Caution } from './answer.ts';
 import { orderCautions, wordCaution } from './caution-text.ts';
 import { type EnergyParts, energyParts } from './energy-answer.ts';
-import { indexUncertainty, powerSpread } from './input-uncertainty.ts';
-import { interfaceParts, LOSSY_INCIDENCE, powerOf } from './interface-answer.ts';
+import { indexUncertainty, type ThermalSide } from './input-uncertainty.ts';
+import { interfaceParts, LOSSY_INCIDENCE } from './interface-answer.ts';
 import { type MediumSide, mediumSide, type SourceOf } from './medium-side.ts';
 import { type Path, readPath } from './path.ts';
 import { type PathFields, pathFields, surfaceFields } from './path-fields.ts';
 import { pathNotes, pathPower, pathSurface, solvePath, surfacePower } from './path-powers.ts';
+import { powerSpread } from './power-spread.ts';
 import { pulseAnswer, pulseNotes } from './pulse-answer.ts';
-import type { Question } from './question.ts';
+import type { MediumSpec, Question } from './question.ts';
+import { spreadNotes, uncertaintyPart } from './spread-answer.ts';
+import { thermalSlope } from './thermal-slope.ts';
 import { bothReferences, waveAnswer } from './wave.ts';
 
 export function answerQuestion(question: Question, sourceOf: SourceOf): Answer | Refusal {
@@ -42,12 +47,10 @@ export function answerQuestion(question: Question, sourceOf: SourceOf): Answer |
   if (isRefusal(parts)) return parts;
   const surface = parts ? pathSurface(first.answer, parts, polarization) : first.answer;
 
-  const layerSides = path?.layers.map((l) => l.side) ?? [];
-  const spread = powerSpread(question, wave, from, into, layerSides);
-  const power = path ? pathPower(path, question, vacuumWavelength_m) : surfacePower;
-  const reflected = spread.of(surface.R, (moved) => powerOf(polarization, ...power(moved).R));
-  const crossing =
-    surface.T === null ? null : spread.of(surface.T, (moved) => powerOf(polarization, ...power(moved).T));
+  const whole: Path = path ?? { from, layers: [], into };
+  const media = thermalSides(whole, question, wave, sourceOf);
+  const power = parts ? pathPower(parts, vacuumWavelength_m) : surfacePower;
+  const spread = powerSpread(question, wave, whole, media, surface, power);
   const powers = { R: surface.R, T: surface.T, surface: parts ? null : first.wave };
   const pulse = pulseAnswer(question, parts);
   const fields = (): PathFields =>
@@ -64,20 +67,19 @@ export function answerQuestion(question: Question, sourceOf: SourceOf): Answer |
       )
     : null;
 
+  const nUncertainty = (i: number, stated: number | undefined): number | null =>
+    indexUncertainty(media[i] as ThermalSide, question, stated);
+
   return {
     wave: waveAnswer(wave, question.wave.inAir),
     geometry: { incidenceAngle_rad, polarization },
-    from: { ...from.answer, n_uncertainty: indexUncertainty(from, question, 'from') },
-    into: { ...into.answer, n_uncertainty: indexUncertainty(into, question, 'into') },
-    layers: parts?.layers ?? [],
-    interface: {
-      ...surface,
-      R_uncertainty: spread.stated ? (reflected?.standardUncertainty ?? null) : null,
-      R_uncertaintyFrom: spread.stated ? (reflected?.dominant ?? null) : null,
-      T_uncertainty: spread.stated ? (crossing?.standardUncertainty ?? null) : null,
-      R_digitsGuide: reflected?.standardUncertainty ?? null,
-      T_digitsGuide: crossing?.standardUncertainty ?? null,
-    },
+    from: { ...from.answer, n_uncertainty: nUncertainty(0, question.tolerances.indexFrom) },
+    into: { ...into.answer, n_uncertainty: nUncertainty(media.length - 1, question.tolerances.index) },
+    layers: (parts?.layers ?? []).map((layer, i) => ({
+      ...layer,
+      medium: { ...layer.medium, n_uncertainty: nUncertainty(i + 1, question.tolerances.indexLayers) },
+    })),
+    interface: { ...surface, ...uncertaintyPart(spread) },
     stack: parts?.stack ?? null,
     window: parts?.window ?? null,
     pulse,
@@ -86,10 +88,39 @@ export function answerQuestion(question: Question, sourceOf: SourceOf): Answer |
       from,
       into,
       path,
-      [...surfaceNotes(from, surface), ...(parts ? pathNotes(parts) : []), ...pulseNotes(pulse)],
+      [
+        ...surfaceNotes(from, surface),
+        ...(parts ? pathNotes(parts) : []),
+        ...pulseNotes(pulse),
+        ...spreadNotes(spread, surface),
+      ],
       energy?.notes ?? [],
+      media,
+      question.tolerances.temperature_K !== undefined,
     ),
   };
+}
+
+/** The first medium, the layers, the last one; how they change with temperature where that matters. */
+function thermalSides(
+  path: Path,
+  question: Question,
+  wave: FitWave,
+  sourceOf: SourceOf,
+): readonly ThermalSide[] {
+  const sides = [path.from, ...path.layers.map((l) => l.side), path.into];
+  if (!question.tolerances.temperature_K) return sides.map((side) => ({ side, slope: null }));
+  const specs: readonly MediumSpec[] = [
+    question.from,
+    ...question.layers.map((l) => l.medium),
+    question.into,
+  ];
+  const known = new Map<MediumSpec, ThermalSide['slope']>();
+  return sides.map((side, i) => {
+    const spec = specs[i] as MediumSpec;
+    if (!known.has(spec)) known.set(spec, thermalSlope(spec, side, question, wave, sourceOf));
+    return { side, slope: known.get(spec) ?? null };
+  });
 }
 
 function surfaceNotes(
@@ -116,15 +147,20 @@ function collectCautions(
   path: Path | null,
   surface: readonly CautionNote[],
   beam: readonly CautionNote[],
+  media: readonly ThermalSide[],
+  temperatureTolerance: boolean,
 ): readonly Caution[] {
-  const layers = (path?.layers ?? []).flatMap(({ side }, i) =>
-    side.notes.map((n) => wordCaution(n, `layer ${i + 1}`, side.name)),
-  );
+  const places = ['from', ...(path?.layers ?? []).map((_, i) => `layer ${i + 1}`), 'into'];
+  const about = (side: MediumSide, i: number): readonly Caution[] =>
+    [...side.notes, ...(temperatureTolerance && media[i]?.slope === null ? [THERMAL_GAP] : [])].map((n) =>
+      wordCaution(n, places[i] ?? '', side.name),
+    );
+  const sides = [from, ...(path?.layers ?? []).map((l) => l.side), into];
   return orderCautions([
-    ...from.notes.map((n) => wordCaution(n, 'from', from.name)),
-    ...layers,
-    ...into.notes.map((n) => wordCaution(n, 'into', into.name)),
+    ...sides.flatMap(about),
     ...surface.map((n) => wordCaution(n, 'interface', 'interface')),
     ...beam.map((n) => wordCaution(n, 'beam', 'beam')),
   ]);
 }
+
+const THERMAL_GAP: CautionNote = { code: 'tolerance-incomplete', details: {} };

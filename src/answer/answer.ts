@@ -104,7 +104,11 @@ export interface InterfaceAnswer {
   readonly R_uncertainty: number | null;
   /** Input that contributes most to R_uncertainty, in words. */
   readonly R_uncertaintyFrom: string | null;
+  /** Mean over the distribution of the inputs, where R bends too much for an expansion; null elsewhere. */
+  readonly R_mean: number | null;
   readonly T_uncertainty: number | null;
+  readonly T_uncertaintyFrom: string | null;
+  readonly T_mean: number | null;
   /** Spread of R and T where an accuracy is not stated and the disagreement with published values stands in: for digits only. */
   readonly R_digitsGuide: number | null;
   readonly T_digitsGuide: number | null;

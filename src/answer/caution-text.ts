@@ -128,6 +128,10 @@ const WORDING: Readonly<Record<CautionCode, Wording>> = {
     'note',
     () => 'close to the critical angle: a real beam spreads over it; shifts and R hold for a plane wave only',
   ],
+  'tolerance-incomplete': [
+    'caution',
+    (_, s) => `${s}: no thermal data: the temperature tolerance leaves its index as it is`,
+  ],
   approximation: ['caution', (d) => String(d['text'])],
   coherence: ['note', (d) => String(d['text'])],
   'self-focusing': [

@@ -1,138 +1,159 @@
 /**
- * Which inputs of a question are uncertain, by how much, and what that does to R and T: accuracy of the fits, and the
- * tolerances a person states for wave, angle and index.
+ * Which inputs of a question are uncertain, and by how much: accuracy of the fits, and the tolerances a person states for
+ * wave, angle, index, thickness and temperature. One material is one input wherever it occurs in the path, since its index is
+ * off by the same everywhere; thicknesses of layers are independent of each other.
  */
 import type { FitWave } from '../catalog/choose-fit.ts';
-import { K, N } from '../dispersion/evaluator.ts';
-import { type Optics, opticsFromIndex } from '../interface/optics.ts';
+import { N } from '../dispersion/evaluator.ts';
 import type { MediumSide } from './medium-side.ts';
+import type { Offsets } from './moved.ts';
+import type { PathLayer } from './path.ts';
 import type { Question } from './question.ts';
-import { propagate, type Spread } from './uncertainty.ts';
+import type { ThermalSlope } from './thermal-slope.ts';
+import type { UncertainInput } from './uncertainty.ts';
 
-interface Move {
-  readonly from?: number;
-  readonly into?: number;
-  readonly wavelength_um?: number;
-  readonly angle?: number;
-  readonly thickness_m?: number;
-  /** Offset of the index of one layer. */
-  readonly layer?: LayerOffset;
+export interface MovableInput extends UncertainInput {
+  /** Adds what a shift of this input means. */
+  readonly move: (offsets: Offsets, shift: number) => void;
 }
 
-export interface LayerOffset {
-  readonly number: number;
-  readonly n: number;
-}
-
-interface MovedInput {
-  readonly name: string;
-  readonly u: number;
-  readonly move: (x: number) => Move;
+/** A medium of the path with how it changes with temperature; null where that is not known or not asked. */
+export interface ThermalSide {
+  readonly side: MediumSide;
+  readonly slope: ThermalSlope | null;
 }
 
 /** Spread taken for the digits shown where neither an accuracy nor a disagreement with published values is known. */
 const UNKNOWN_ACCURACY = 1e-3;
+/** With more layers their thicknesses are moved together, in this many sets of random signs: the same variance on average. */
+const MOST_SINGLE_LAYERS = 48;
+const SIGN_SETS = 48;
 
-function uncertainInputs(
+/** `media`: the first medium, the layers, the last one. */
+export function movableInputs(
   question: Question,
   wave: FitWave,
-  from: MediumSide,
-  into: MediumSide,
-  layers: readonly MediumSide[],
-): readonly MovedInput[] {
+  media: readonly ThermalSide[],
+  layers: readonly PathLayer[],
+): readonly MovableInput[] {
   const { tolerances } = question;
-  const inputs: MovedInput[] = [];
-  const add = (name: string, u: number | undefined, move: MovedInput['move']): void => {
-    if (u) inputs.push({ name, u, move });
+  const inputs: MovableInput[] = [];
+  const add = (name: string, u: number | undefined, move: MovableInput['move']): void => {
+    if (u) inputs.push({ name, standardUncertainty: u, move });
   };
-  const accuracy = (side: MediumSide): number =>
-    side.accuracy ?? side.answer.n_digitsGuide ?? UNKNOWN_ACCURACY * side.optics.n.re;
-  add(`index of ${from.name}`, accuracy(from), (x) => ({ from: x }));
-  add(`index of ${into.name}`, accuracy(into), (x) => ({ into: x }));
-  add(`stated index tolerance of ${from.name}`, tolerances.indexFrom, (x) => ({ from: x }));
-  add(`stated index tolerance of ${into.name}`, tolerances.index, (x) => ({ into: x }));
-  const toVacuum = question.wave.inAir ? wave.vacuum_um / wave.air_um : 1;
-  add('wavelength', (tolerances.wavelength_m ?? 0) * 1e6 * toVacuum, (x) => ({ wavelength_um: x }));
-  add('angle of incidence', tolerances.angle_rad, (x) => ({ angle: x }));
-  for (const [number, side] of layers.entries()) {
-    const name = `index of ${side.name} (layer ${number + 1})`;
-    add(name, accuracy(side), (n) => ({ layer: { number, n } }));
+  for (const { name, places, accuracy } of distinctMedia(media.map((m) => m.side))) {
+    add(`index of ${name}`, accuracy, (o, x) => addTo(o.n, places, x));
+    const between = places.filter((i) => i > 0 && i < media.length - 1);
+    if (between.length > 0) {
+      add(`stated index tolerance of ${name}`, tolerances.indexLayers, (o, x) => addTo(o.n, between, x));
+    }
   }
-  if (layers.length > 0) {
-    add('thickness', tolerances.thickness_m, (x) => ({ thickness_m: x }));
+  const last = media.length - 1;
+  const nameOf = (i: number): string => media[i]?.side.name ?? '';
+  add(`stated index tolerance of ${nameOf(0)}`, tolerances.indexFrom, (o, x) => addTo(o.n, [0], x));
+  add(`stated index tolerance of ${nameOf(last)}`, tolerances.index, (o, x) => addTo(o.n, [last], x));
+  const toVacuum = question.wave.inAir ? wave.vacuum_um / wave.air_um : 1;
+  add('wavelength', (tolerances.wavelength_m ?? 0) * 1e6 * toVacuum, (o, x) => {
+    o.wavelength_um += x;
+  });
+  add('angle of incidence', tolerances.angle_rad, (o, x) => {
+    o.angle_rad += x;
+  });
+  for (const { u, signs } of thicknessMoves(question, layers)) {
+    add('thickness', u, (o, x) => {
+      for (const [i, share] of signs) o.thickness_m[i] = (o.thickness_m[i] ?? 0) + share * x;
+    });
+  }
+  if (media.some((m) => m.slope)) {
+    add('temperature', tolerances.temperature_K, (o, x) => warm(o, media, layers, x));
   }
   return inputs;
 }
 
-/** What the uncertain inputs were moved to: both media's optics and the angle. */
-export interface Moved {
-  readonly from: Optics;
-  readonly into: Optics;
-  readonly angle_rad: number;
-  /** Shift of the vacuum wavelength, um; layers follow it by themselves. */
-  readonly shift_um: number;
-  /** Offset added to the thickness of every layer. */
-  readonly thickness_m: number;
-  readonly layer: LayerOffset | null;
+function addTo(target: Float64Array, places: readonly number[], x: number): void {
+  for (const i of places) target[i] = (target[i] ?? 0) + x;
 }
 
-/** Spread of a power that `power` computes from the moved inputs. */
-export interface PowerSpread {
-  of(value: number, power: (inputs: Moved) => number): Spread | null;
-  /** False where an accuracy that matters is not stated: the spread then guides digits and is no uncertainty. */
-  readonly stated: boolean;
+interface DistinctMedium {
+  readonly name: string;
+  readonly places: readonly number[];
+  readonly accuracy: number;
 }
 
-export function powerSpread(
-  question: Question,
-  wave: FitWave,
-  from: MediumSide,
-  into: MediumSide,
-  layers: readonly MediumSide[] = [],
-): PowerSpread {
-  const inputs = uncertainInputs(question, wave, from, into, layers);
-  const at = (move: Move): Moved => {
-    const shift_um = move.wavelength_um ?? 0;
+function distinctMedia(sides: readonly MediumSide[]): readonly DistinctMedium[] {
+  const found = new Map<string, { side: MediumSide; places: number[] }>();
+  sides.forEach((side, i) => {
+    const { key, name, axis } = side.answer;
+    const id = key === null ? `=${name}` : `${key}:${axis}`;
+    const same = found.get(id);
+    if (same) same.places.push(i);
+    else found.set(id, { side, places: [i] });
+  });
+  return [...found.values()].map(({ side, places }) => {
+    const layer = places.length === 1 && places[0] !== 0 && places[0] !== sides.length - 1;
     return {
-      from: movedOptics(from, move.from ?? 0, shift_um),
-      into: movedOptics(into, move.into ?? 0, shift_um),
-      // |angle|: a beam tilted past the normal comes from the other side. Grazing is the far limit.
-      angle_rad: Math.min(Math.abs(question.incidenceAngle_rad + (move.angle ?? 0)), Math.PI / 2 - 1e-9),
-      shift_um,
-      thickness_m: move.thickness_m ?? 0,
-      layer: move.layer ?? null,
+      name: layer ? `${side.name} (layer ${places[0]})` : side.name,
+      places,
+      accuracy: side.accuracy ?? side.answer.n_digitsGuide ?? UNKNOWN_ACCURACY * side.optics.n.re,
     };
-  };
-  const givenByPerson = Object.keys(question.tolerances).length > 0;
-  return {
-    stated: givenByPerson || [from, ...layers, into].every((side) => side.accuracy !== null),
-    of: (value, power) =>
-      propagate(
-        value,
-        inputs.map((i) => ({ name: i.name, standardUncertainty: i.u, at: (x) => power(at(i.move(x))) })),
-      ),
-  };
+  });
 }
 
-/** The medium with its index moved: by an offset of n, and along its dispersion by a shift of wavelength. */
-export function movedOptics(side: MediumSide, dn: number, shift_um: number): Optics {
-  if (dn === 0 && shift_um === 0) return side.optics;
-  const { optics, jet } = side;
-  const n = optics.n.re + jet[N + 1]! * shift_um + dn;
-  const k = Math.max(0, optics.n.im + jet[K + 1]! * shift_um);
-  return opticsFromIndex({ re: n, im: k }, optics.mu);
+/** A standard uncertainty, and what a unit of it does to which layers. */
+interface ThicknessMove {
+  readonly u: number;
+  readonly signs: readonly (readonly [layer: number, share: number])[];
 }
 
-/** Fit accuracy, stated tolerance of the index and of the wave together; null where the fit states none and nothing else does. */
+function thicknessMoves({ tolerances }: Question, layers: readonly PathLayer[]): readonly ThicknessMove[] {
+  const each = layers.map(({ thickness_m }) =>
+    Math.hypot(tolerances.thickness_m ?? 0, (tolerances.thicknessShare ?? 0) * thickness_m),
+  );
+  if (each.every((u) => u === 0)) return [];
+  if (layers.length <= MOST_SINGLE_LAYERS) return each.map((u, i) => ({ u, signs: [[i, 1]] }));
+  const largest = Math.max(...each);
+  return Array.from({ length: SIGN_SETS }, (_, set) => ({
+    u: largest / Math.sqrt(SIGN_SETS),
+    signs: each.map((u, i) => [i, (u / largest) * randomSign(set, i)] as const),
+  }));
+}
+
+/** One bit of a mixed integer: the same signs every time. */
+function randomSign(set: number, layer: number): 1 | -1 {
+  let h = Math.imul(set + 1, 0x9e3779b1) ^ Math.imul(layer + 1, 0x85ebca6b);
+  h = Math.imul(h ^ (h >>> 15), 0x2c1b3c6d);
+  h = Math.imul(h ^ (h >>> 12), 0x297a2d39);
+  return ((h ^ (h >>> 15)) & 1) === 0 ? 1 : -1;
+}
+
+function warm(
+  offsets: Offsets,
+  media: readonly ThermalSide[],
+  layers: readonly PathLayer[],
+  by_K: number,
+): void {
+  media.forEach(({ slope }, i) => {
+    if (!slope) return;
+    offsets.n[i] = (offsets.n[i] ?? 0) + slope.dn_per_K * by_K;
+    offsets.k[i] = (offsets.k[i] ?? 0) + slope.dk_per_K * by_K;
+    const layer = layers[i - 1];
+    if (layer) {
+      const before = offsets.thickness_m[i - 1] ?? 0;
+      offsets.thickness_m[i - 1] = before + slope.expansion_per_K * layer.thickness_m * by_K;
+    }
+  });
+}
+
+/** Fit accuracy, stated tolerances of index, wave and temperature together; null where the fit states none and nothing else does. */
 export function indexUncertainty(
-  side: MediumSide,
+  { side, slope }: ThermalSide,
   question: Question,
-  which: 'from' | 'into',
+  stated: number | undefined,
 ): number | null {
   const { tolerances } = question;
-  const stated = which === 'into' ? tolerances.index : tolerances.indexFrom;
   const byWave = tolerances.wavelength_m ? side.jet[N + 1]! * tolerances.wavelength_m * 1e6 : 0;
+  const byTemperature = (slope?.dn_per_K ?? 0) * (tolerances.temperature_K ?? 0);
   if (side.accuracy === null && stated === undefined) return null;
-  const total = Math.hypot(side.accuracy ?? 0, stated ?? 0, byWave);
+  const total = Math.hypot(side.accuracy ?? 0, stated ?? 0, byWave, byTemperature);
   return side.isLiteral && total === 0 ? null : total;
 }

@@ -12,6 +12,7 @@ import { abs2, arg, type Complex } from '../num/complex.ts';
 import type { InterfaceAnswer } from './answer.ts';
 import type { MediumSide } from './medium-side.ts';
 import type { Polarization } from './question.ts';
+import type { UncertaintyPart } from './spread-answer.ts';
 
 /** From this ratio k/n of the medium of incidence on, T as a fraction of the incident power has no meaning. */
 export const LOSSY_INCIDENCE = 1e-3;
@@ -20,10 +21,7 @@ export const LOSSY_INCIDENCE = 1e-3;
 const NO_REFLECTION = 1e-31;
 
 export interface InterfaceParts {
-  readonly answer: Omit<
-    InterfaceAnswer,
-    'R_uncertainty' | 'R_uncertaintyFrom' | 'T_uncertainty' | 'R_digitsGuide' | 'T_digitsGuide'
-  >;
+  readonly answer: Omit<InterfaceAnswer, keyof UncertaintyPart>;
   readonly wave: FresnelResult;
 }
 

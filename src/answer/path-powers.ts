@@ -8,11 +8,12 @@ import type { CautionNote } from '../medium/caution.ts';
 import { lengthText } from '../medium/range-text.ts';
 import { type Refusal, refuse } from '../medium/refusal.ts';
 import { arg, complex } from '../num/complex.ts';
+import { coherentStack } from '../stack/coherent-stack.ts';
 import { mixedStack } from '../stack/mixed-stack.ts';
 import { StackRefusal } from '../stack/stack-refusal.ts';
-import { ASSUMED_COHERENCE_waves, coherenceTaken } from './coherence-taken.ts';
-import { type Moved, movedOptics } from './input-uncertainty.ts';
+import { ASSUMED_COHERENCE_waves } from './coherence-taken.ts';
 import { type InterfaceParts, powerOf } from './interface-answer.ts';
+import type { Moved } from './moved.ts';
 import type { Path } from './path.ts';
 import type { Polarization, Question } from './question.ts';
 import { type StackParts, stackParts } from './stack-answer.ts';
@@ -37,27 +38,29 @@ export function solvePath(path: Path, question: Question, vacuumWavelength_m: nu
   }
 }
 
-/** The path's powers at moved inputs; layers follow the wavelength along their own dispersion and share a thickness offset. */
+/** The path's powers at moved inputs; which layers are coherent stays as it was answered. */
 export function pathPower(
-  path: Path,
-  question: Question,
+  parts: StackParts,
   vacuumWavelength_m: number,
 ): (inputs: Moved) => BothPolarizations {
-  const coherence_m = coherenceTaken(question, vacuumWavelength_m).length_m;
-  return ({ from, into, angle_rad, shift_um, thickness_m, layer: offset }) => {
+  const { coherence, coherenceLength_m } = parts.stack;
+  return ({ from, into, angle_rad, shift_um, layers }) => {
     const wavelength_m = vacuumWavelength_m + shift_um * 1e-6;
-    const layers = path.layers.map((layer, i) => {
-      const { eps, mu } = movedOptics(layer.side, offset?.number === i ? offset.n : 0, shift_um);
-      return { eps, mu, thickness_m: Math.max(0, layer.thickness_m + thickness_m) };
-    });
-    const incidence = { eps: complex((from.n.re * from.n.re) / from.mu.re), mu: complex(from.mu.re) };
-    const m = mixedStack(
-      { incidence, layers, exit: { eps: into.eps, mu: into.mu } },
-      wavelength_m,
-      angle_rad,
-      coherence_m,
-    );
-    return { R: [m.s.R, m.p.R], T: [m.s.T, m.p.T] };
+    const path = {
+      incidence: { eps: complex((from.n.re * from.n.re) / from.mu.re), mu: complex(from.mu.re) },
+      layers: layers.map(({ optics: { eps, mu }, thickness_m }, i) => ({
+        eps,
+        mu,
+        thickness_m,
+        coherent: parts.layers[i]?.coherent,
+      })),
+      exit: { eps: into.eps, mu: into.mu },
+    };
+    const { s, p } =
+      coherence === 'coherent'
+        ? coherentStack(path, wavelength_m, angle_rad)
+        : mixedStack(path, wavelength_m, angle_rad, coherenceLength_m);
+    return { R: [s.R, p.R], T: [s.T, p.T] };
   };
 }
 

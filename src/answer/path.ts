@@ -46,12 +46,21 @@ export function readPath(
     );
   }
   const layers: PathLayer[] = [];
+  // Groups that repeat share their layers: each is worked out once.
+  const known = new Map<Layer, PathLayer>();
   for (const layer of question.layers) {
+    const before = known.get(layer);
+    if (before) {
+      layers.push(before);
+      continue;
+    }
     const side = mediumSide(layer.medium, wave, question.conditions, question.extrapolate, sourceOf);
     if (isRefusal(side)) return side;
     const thickness_m = thicknessOf(layer, side, question, from, wave, sourceOf);
     if (typeof thickness_m !== 'number') return thickness_m;
-    layers.push({ side, thickness_m });
+    const read = { side, thickness_m };
+    known.set(layer, read);
+    layers.push(read);
   }
   return { from, layers, into };
 }
@@ -121,6 +130,7 @@ export function dispersivePath(path: Path, vacuumWavelength_m: number): Dispersi
     mu: side.optics.mu,
   });
   const incidence = dispersive(path.from);
+  const known = new Map<PathLayer, DispersiveLayer>();
   return {
     incidence: {
       ...incidence,
@@ -128,9 +138,11 @@ export function dispersivePath(path: Path, vacuumWavelength_m: number): Dispersi
       dn_domega_s: complex(incidence.dn_domega_s.re),
       d2n_domega2_s2: complex(incidence.d2n_domega2_s2.re),
     },
-    layers: path.layers.map(
-      ({ side, thickness_m }): DispersiveLayer => ({ ...dispersive(side), thickness_m }),
-    ),
+    layers: path.layers.map((layer) => {
+      const made = known.get(layer) ?? { ...dispersive(layer.side), thickness_m: layer.thickness_m };
+      known.set(layer, made);
+      return made;
+    }),
     exit: dispersive(path.into),
   };
 }

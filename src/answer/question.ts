@@ -74,8 +74,12 @@ export interface Tolerances {
   readonly angle_rad?: number;
   readonly index?: number;
   readonly indexFrom?: number;
+  /** Of each layer's medium, beside the accuracy of its fit. */
+  readonly indexLayers?: number;
   readonly temperature_K?: number;
+  /** Of each layer, independent of the others: a length, and a share of its thickness. */
   readonly thickness_m?: number;
+  readonly thicknessShare?: number;
 }
 
 export interface Question {

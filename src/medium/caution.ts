@@ -36,6 +36,7 @@ export type CautionCode =
   | 'ideal-surface'
   | 'axis-assumed'
   | 'near-critical'
+  | 'tolerance-incomplete'
   | 'approximation'
   | 'coherence'
   | 'self-focusing';

@@ -1,9 +1,11 @@
 /**
  * Standard uncertainties stated with a question: `wave=1nm,angle=0.5deg,n=1e-4,thickness=5nm,temperature=0.5C`.
- * `n` belongs to the medium beyond the interface, `n1` to the medium of incidence; a bare angle is in degrees.
+ * `n` belongs to the medium beyond, `n1` to the medium of incidence, `nlayer` to every layer between them; a thickness may be
+ * a share of each layer's own, `thickness=1%`; a bare angle is in degrees.
  * The wave's may be in any of its units; `wavelengthTolerance_m` turns it into a wavelength once the wave is known.
  */
 import { parseAngleTolerance } from './parse-angle.ts';
+import { parseFraction } from './parse-fraction.ts';
 import { LENGTH_SPEC } from './parse-length.ts';
 import { parseNumber } from './parse-number.ts';
 import { NOT_BELOW_ZERO, parseQuantity, parseValue } from './parse-quantity.ts';
@@ -24,7 +26,9 @@ export interface TypedTolerances {
   readonly angle_rad?: number;
   readonly index?: number;
   readonly indexFrom?: number;
+  readonly indexLayers?: number;
   readonly thickness_m?: number;
+  readonly thicknessShare?: number;
   readonly temperature_K?: number;
 }
 
@@ -35,11 +39,14 @@ const PARTS: Readonly<Record<string, (text: string) => TypedTolerances | Problem
   angle: (text) => field('angle_rad', parseAngleTolerance(text)),
   n: (text) => field('index', parseIndexTolerance(text)),
   n1: (text) => field('indexFrom', parseIndexTolerance(text)),
+  nlayer: (text) => field('indexLayers', parseIndexTolerance(text)),
   thickness: (text) =>
-    field(
-      'thickness_m',
-      parseValue(text, { ...LENGTH_SPEC, what: 'a tolerance of the thickness', range: NOT_BELOW_ZERO }),
-    ),
+    /%\s*$/.test(text)
+      ? field('thicknessShare', parseFraction(text))
+      : field(
+          'thickness_m',
+          parseValue(text, { ...LENGTH_SPEC, what: 'a tolerance of the thickness', range: NOT_BELOW_ZERO }),
+        ),
   temperature: (text) => field('temperature_K', parseTemperatureInterval(text)),
 };
 

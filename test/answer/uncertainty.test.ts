@@ -1,23 +1,69 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { propagate } from '../../src/answer/uncertainty.ts';
+import { propagateAll, type Spread } from '../../src/answer/uncertainty.ts';
 import { ask, DEGREE, index, vacuumWave } from '../helpers/ask.ts';
 
-const input = (name: string, u: number, at: (x: number) => number) => ({ name, standardUncertainty: u, at });
+const input = (name: string, standardUncertainty: number) => ({ name, standardUncertainty });
+const spread = (
+  value: number,
+  inputs: readonly ReturnType<typeof input>[],
+  f: (...x: readonly number[]) => number,
+): Spread => {
+  const [only] = propagateAll([value], inputs, (shifts) => [f(...shifts)]);
+  if (!only) throw new Error('no spread');
+  return only;
+};
 
-describe('propagate', () => {
+describe('propagateAll', () => {
   it('adds independent first-order parts in squares (GUM 5.1.2)', () => {
-    const spread = propagate(0, [input('a', 3, (x) => x), input('b', 4, (x) => -x)])!;
-    expect(spread.standardUncertainty).toBeCloseTo(5, 12);
-    expect(spread.dominant).toBe('b');
+    const got = spread(0, [input('a', 3), input('b', 4)], (a = 0, b = 0) => a - b);
+    expect(got.standardUncertainty).toBeCloseTo(5, 12);
+    expect(got.dominant).toBe('b');
+    expect(got.method).toBe('expansion');
+  });
+
+  it('names the inputs that contribute most together where they share a name', () => {
+    const three = [input('thickness', 3), input('wave', 4), input('thickness', 3)];
+    expect(spread(0, three, (a = 0, b = 0, c = 0) => a + b + c).dominant).toBe('thickness');
   });
 
   it('keeps the second-order part where the slope vanishes: variance of x^2 is 2 u^4 for a normal x', () => {
-    const spread = propagate(0, [input('x', 0.1, (x) => x * x)])!;
-    expect(spread.standardUncertainty).toBeCloseTo(Math.SQRT2 * 0.01, 12);
+    const got = spread(0, [input('x', 0.1)], (x = 0) => x * x);
+    expect(got.standardUncertainty).toBeCloseTo(Math.SQRT2 * 0.01, 12);
+    expect(got.method).toBe('expansion');
   });
 
-  it('is null without inputs', () => expect(propagate(1, [])).toBeNull());
+  it('samples where the expansion fails: sin^2 over many fringes has mean 1/2 and variance 1/8', () => {
+    const got = spread(0, [input('x', 40)], (x = 0) => Math.sin(x) ** 2);
+    expect(got.method).toBe('sampled');
+    expect(got.mean).toBeCloseTo(0.5, 1);
+    expect(got.standardUncertainty / Math.sqrt(1 / 8)).toBeCloseTo(1, 1);
+  });
+
+  it('does not count fringes twice where two inputs run through them', () => {
+    const got = spread(0, [input('x', 40), input('y', 30)], (x = 0, y = 0) => Math.sin(x + y) ** 2);
+    expect(got.standardUncertainty / Math.sqrt(1 / 8)).toBeCloseTo(1, 1);
+  });
+
+  it('sees a fringe that ends where it began at one standard uncertainty', () => {
+    const got = spread(0, [input('x', Math.PI)], (x = 0) => Math.sin(x) ** 2);
+    expect(got.method).toBe('sampled');
+    // Normal x of standard deviation pi: mean (1 - exp(-2 pi^2))/2, variance (1 + exp(-8 pi^2) - 2 exp(-4 pi^2))/8.
+    expect(got.standardUncertainty / Math.sqrt(1 / 8)).toBeCloseTo(1, 1);
+  });
+
+  it('agrees with the exact moments of exp(x): mean exp(u^2/2), variance (exp(u^2) - 1) exp(u^2)', () => {
+    fc.assert(
+      fc.property(fc.double({ min: 0.01, max: 1, noNaN: true }), (u) => {
+        const got = spread(1, [input('x', u)], (x = 0) => Math.exp(x));
+        const exact = Math.sqrt(Math.expm1(u * u) * Math.exp(u * u));
+        expect(got.standardUncertainty / exact).toBeGreaterThan(0.87);
+        expect(got.standardUncertainty / exact).toBeLessThan(1.1);
+      }),
+    );
+  });
+
+  it('is null without inputs', () => expect(propagateAll([1], [], () => [1])).toEqual([null]));
 });
 
 describe('R_uncertainty', () => {
