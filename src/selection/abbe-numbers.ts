@@ -1,6 +1,7 @@
 /**
  * Abbe numbers V_d = (n_d - 1)/(n_F - n_C), V_e = (n_e - 1)/(n_F' - n_C') (ISO 7944), from indices relative to air at the
- * lines' wavelengths in air. All lines of one number come from one fit; where it does not reach them the number does not exist.
+ * lines' wavelengths in air. All lines of one number come from one fit; where it does not reach them the number does not exist,
+ * nor for gases, absorbers and tables under straight lines, whose small difference of indices means nothing.
  */
 import { type FitWave, inRange } from '../catalog/choose-fit.ts';
 import type { Axis, Material } from '../catalog/types.ts';
@@ -14,6 +15,9 @@ export interface AbbeNumbers {
   readonly Vd: number | null;
   readonly n_e: number | null;
   readonly Ve: number | null;
+  /** Guide the digits shown: of both indices, of both Abbe numbers. */
+  readonly n_digitsGuide: number | null;
+  readonly V_digitsGuide: number | null;
 }
 
 function lineWave(symbol: string): FitWave {
@@ -30,36 +34,50 @@ const WAVES = new Map([...D, ...E].map((symbol) => [symbol, lineWave(symbol)]));
 
 /** Above this k/n a medium is no glass, and its Abbe number no measure of anything. */
 const ABSORBING = 1e-3;
+/** n - 1 of anything condensed is larger. */
+const GAS = 0.01;
+/** Spread of n taken for the digits where neither an accuracy nor a disagreement with published values is known. */
+const UNKNOWN_ACCURACY = 1e-3;
+/** The errors of one fit at neighbouring lines go together; this part of each is taken as its own. */
+const OWN_ERROR = 0.1;
 
 export function abbeNumbers(survey: Survey, material: Material, axis: Axis): AbbeNumbers {
-  const [n_d, Vd] = oneNumber(survey, material, axis, D);
-  const [n_e, Ve] = oneNumber(survey, material, axis, E);
-  return { n_d, Vd, n_e, Ve };
+  const { n: n_d, u: u_d, V: Vd, spread: ofVd } = oneNumber(survey, material, axis, D);
+  const { n: n_e, u: u_e, V: Ve, spread: ofVe } = oneNumber(survey, material, axis, E);
+  return { n_d, Vd, n_e, Ve, n_digitsGuide: u_d ?? u_e, V_digitsGuide: ofVd ?? ofVe };
 }
 
 /** V_d alone, for passes over the catalogue. */
 export const abbeVd = (survey: Survey, material: Material, axis: Axis): number | null =>
-  oneNumber(survey, material, axis, D)[1];
+  oneNumber(survey, material, axis, D).V;
 
 type Lines = typeof D | typeof E;
 
-/** Index at the middle line, and the Abbe number. */
-function oneNumber(
-  survey: Survey,
-  material: Material,
-  axis: Axis,
-  [middle, short, long]: Lines,
-): readonly [number | null, number | null] {
+interface OneNumber {
+  /** At the middle line. */
+  readonly n: number | null;
+  /** How well n is known. */
+  readonly u: number | null;
+  readonly V: number | null;
+  readonly spread: number | null;
+}
+
+function oneNumber(survey: Survey, material: Material, axis: Axis, lines: Lines): OneNumber {
+  const [middle, short, long] = lines;
   const medium = quickMedium(survey, material, axis, waveOf(middle));
-  if (!medium) return [null, null];
+  if (!medium) return { n: null, u: null, V: null, spread: null };
   const n = relativeToAir(medium, middle);
   const { fit, bound } = medium;
-  const lines = [short, long].map(waveOf);
-  if (!bound.hasDerivative || !lines.every((wave) => inRange(fit, wave))) return [n, null];
+  const u = fit.accuracy_n ?? fit.digitsGuide_n ?? UNKNOWN_ACCURACY;
+  const without = { n, u, V: null, spread: null };
+  const reached = inRange(fit, waveOf(short)) && inRange(fit, waveOf(long));
+  if (!reached || !bound.hasDerivative || bound.derivativeOrder < 2 || n < 1 + GAS) return without;
   const { optics } = quickOptics(survey, medium);
-  if (optics.n.im > ABSORBING * Math.abs(optics.n.re)) return [n, null];
+  if (optics.n.im > ABSORBING * Math.abs(optics.n.re)) return without;
   const dispersion = relativeToAir(medium, short) - relativeToAir(medium, long);
-  return [n, dispersion > 0 ? (n - 1) / dispersion : null];
+  if (!(dispersion > 0)) return without;
+  const V = (n - 1) / dispersion;
+  return { n, u, V, spread: (V * OWN_ERROR * Math.SQRT2 * u) / dispersion };
 }
 
 function waveOf(symbol: Lines[number]): FitWave {

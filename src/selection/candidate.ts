@@ -54,6 +54,16 @@ export class Candidate {
     return this.matter;
   }
 
+  /** Undefined where no data reach the wave. */
+  get optics(): Optics | undefined {
+    return this.known?.optics;
+  }
+
+  /** The same material and wave on another axis. */
+  onAxis(axis: Axis): Candidate {
+    return new Candidate(this.survey, this.material, axis, this.wave);
+  }
+
   get n(): number | Undecided {
     return this.medium?.n ?? undecided('no-data-at-wave');
   }

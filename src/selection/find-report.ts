@@ -26,6 +26,8 @@ export interface Hit {
   readonly n_e: number | null;
   readonly Vd: number | null;
   readonly Ve: number | null;
+  readonly n_digitsGuide: number | null;
+  readonly V_digitsGuide: number | null;
   /** One surface, in air, normal incidence. */
   readonly surfaceReflectance: number | null;
   /** As the criteria define it (see `Criteria.maxLoss`). */
@@ -92,7 +94,7 @@ function describe(survey: Survey, { candidate, alsoAxes }: Found, criteria: Crit
     if (!medium) reasons[name] = NO_WAVE;
     else if (medium[name] === null) reasons[name] = UNDECIDED_WORDS['no-dispersion'];
   }
-  const { n_d, Vd, n_e, Ve } = abbeNumbers(survey, material, axis);
+  const { n_d, Vd, n_e, Ve, n_digitsGuide, V_digitsGuide } = abbeNumbers(survey, material, axis);
   if (n_d === null) reasons['n_d'] = 'no data at the d line';
   if (n_e === null) reasons['n_e'] = 'no data at the e line';
   if (Vd === null) reasons['Vd'] = UNDECIDED_WORDS['abbe-lines-not-reached'];
@@ -108,6 +110,8 @@ function describe(survey: Survey, { candidate, alsoAxes }: Found, criteria: Crit
     n_e,
     Vd,
     Ve,
+    n_digitsGuide,
+    V_digitsGuide,
     surfaceReflectance: given('surfaceReflectance', candidate.surface),
     loss: loss?.fraction ?? null,
     absorptionKnown: loss?.absorptionKnown ?? null,

@@ -4,7 +4,7 @@ export const UNDECIDED_WORDS = {
   'no-transparency-on-file': 'no transparency range on file',
   'absorption-not-known': 'absorption at this wave not known',
   'no-dispersion': 'single values or straight lines: no such derivative',
-  'abbe-lines-not-reached': 'no fit that reaches the F, d and C lines',
+  'abbe-lines-not-reached': 'no fit that gives an Abbe number',
   'one-axis-on-file': 'one crystal axis only on file at this wave',
   'not-on-file': 'the fact is not on file',
 } as const;

@@ -8,6 +8,7 @@ import type { SortOrder } from '../../selection/sort-order.ts';
 import { UNDECIDED_WORDS } from '../../selection/undecided.ts';
 import { formatNumber } from '../../units/format-number.ts';
 import { NO_VALUE, type NumberStyle } from '../../units/number-style.ts';
+import { abbeText } from './abbe-text.ts';
 import { type Column, columns } from './columns.ts';
 import { legendOf, marksOf } from './material-marks.ts';
 import { mediumKey } from './medium-key.ts';
@@ -91,13 +92,13 @@ const BIREFRINGENCE: HitColumn = {
 };
 const INDEX_D: HitColumn = {
   title: 'n_d',
-  cell: ({ n_d }, style) => text(n_d, { decimals: 5 }, style),
+  cell: ({ n_d, n_digitsGuide }, style) => text(n_d, precisionFor(n_d, n_digitsGuide ?? 0, 6), style),
   note: 'n_d: relative to air',
 };
 const ABBE: HitColumn = {
   title: 'V_d',
   right: true,
-  cell: ({ Vd }, style) => text(Vd, { decimals: 2 }, style),
+  cell: ({ Vd, V_digitsGuide }, style) => abbeText(Vd, V_digitsGuide, style),
 };
 const LOSS_OF_SURFACE = 'loss: reflectance of one bare surface in air, normal incidence';
 const lossColumn = ({ thickness_m }: Criteria): HitColumn => ({
