@@ -2,7 +2,6 @@
  * Entry of the program: picks the face from the arguments and the terminal. The only place, with src/term, that touches the
  * process, and the only one that sets the exit status. One question is answered without loading anything else.
  */
-import { writeFileSync } from 'node:fs';
 import { isatty } from 'node:tty';
 import type { IndexedCatalogue } from './catalog/entries.ts';
 import { CatalogueFileError, loadCatalogue } from './catalog/load.ts';
@@ -12,6 +11,7 @@ import { run as runAnswer } from './cli/commands/answer.ts';
 import type { Context } from './cli/context.ts';
 import { loadCommand } from './cli/load-command.ts';
 import type { OptionValues } from './cli/options.ts';
+import { saveFile } from './cli/save-file.ts';
 import { usageErrorJson, usageErrorText } from './cli/usage-error.ts';
 import { writeOut } from './cli/write-out.ts';
 import { decideFullScreen, decideGlyphs } from './term/ability.ts';
@@ -44,6 +44,7 @@ function makeContext(options: OptionValues): Context {
   };
   return {
     write: (text) => writeResult(text, options.output),
+    print: (text) => void writeOut(1, text),
     warn: (text) => void writeOut(2, text),
     version: VERSION,
     env,
@@ -64,12 +65,8 @@ function writeResult(text: string, file: string | undefined): void {
     writeOut(1, text);
     return;
   }
-  try {
-    writeFileSync(file, text);
-  } catch (error) {
-    const why = (error as NodeJS.ErrnoException).code ?? 'unknown error';
-    throw new FileTrouble(`${file} cannot be written (${why}); name a place you may write to`);
-  }
+  const trouble = saveFile(file, text, { replace: true });
+  if (trouble) throw new FileTrouble(`${trouble.message}; ${trouble.remedy}`);
 }
 
 function runCommand(invocation: Invocation, context: Context): number | Promise<number> {

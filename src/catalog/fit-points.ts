@@ -72,7 +72,8 @@ export interface PointFit {
   readonly warnings: readonly FitWarning[];
 }
 
-const TERMS = { sellmeier: [1, 4], cauchy: [2, 5] } as const;
+/** Fewest and most terms of each formula. */
+export const FIT_TERMS = { sellmeier: [1, 4], cauchy: [2, 5] } as const;
 
 export function fitPoints(points: readonly IndexPoint[], request: FitRequest): PointFit | FitFault {
   const fault = faultOf(points, request);
@@ -95,7 +96,7 @@ export function fitPoints(points: readonly IndexPoint[], request: FitRequest): P
 export const isFitFault = (result: PointFit | FitFault): result is FitFault => 'remedy' in result;
 
 function faultOf(points: readonly IndexPoint[], { model, terms }: FitRequest): FitFault | undefined {
-  const [fewest, most] = TERMS[model];
+  const [fewest, most] = FIT_TERMS[model];
   if (!Number.isInteger(terms) || terms < fewest || terms > most)
     return { message: `${terms} terms`, remedy: `a ${model} fit takes ${fewest} to ${most} terms` };
   const bad = points.find(

@@ -153,6 +153,39 @@ export const COMMANDS = [
     ],
   },
   {
+    name: 'fit',
+    summary: 'a dispersion formula fitted to measured indices',
+    operands: [
+      {
+        name: 'FILE',
+        meaning:
+          'table with a header line: wavelength_nm or wavelength_um, n, and u (standard uncertainty of n) where it is known; - is standard input',
+        completes: 'file',
+      },
+    ],
+    options: [
+      'model',
+      'terms',
+      'reference',
+      'temperature_K',
+      'key',
+      'entryName',
+      'entrySource',
+      'force',
+      'json',
+      'strict',
+      'catalog',
+    ],
+    examples: [
+      { line: 'fit oil.csv --model cauchy --terms 3', meaning: 'coefficients, residuals, doubts' },
+      {
+        line: 'fit oil.csv --terms 2 --temperature 25C -o my-oil.json',
+        meaning: 'the entry to FILE, what is said of it to standard output',
+      },
+      { line: 'fit oil.csv --key my-oil -o - > my-oil.json', meaning: 'the entry alone' },
+    ],
+  },
+  {
     name: 'verify',
     summary: 'every published value of the catalogue, recomputed',
     operands: [],

@@ -12,6 +12,8 @@ export interface Context {
   readonly ascii: boolean;
   /** Result; goes to the file of `--output` where one is given. */
   readonly write: (text: string) => void;
+  /** To standard output, whatever `--output` says. */
+  readonly print: (text: string) => void;
   /** Warnings and errors, to standard error. */
   readonly warn: (text: string) => void;
   /** Opens the catalogue (once), with the user's own entries; reports what is wrong with those on standard error. */

@@ -27,6 +27,7 @@ export const GROUP_TITLES: Readonly<Record<OptionGroup, string>> = {
   path: 'Paths of layers',
   beam: 'The beam',
   selection: 'Choosing',
+  fit: 'The fit',
   form: 'Form of the answer',
   output: 'Output',
   general: 'General',

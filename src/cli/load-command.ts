@@ -13,6 +13,7 @@ const LOADERS: Readonly<Record<Invocation['command'], () => Promise<CommandModul
   cite: () => import('./commands/cite.ts'),
   material: () => import('./commands/material.ts'),
   find: () => import('./commands/find.ts'),
+  fit: () => import('./commands/fit.ts'),
   verify: () => import('./commands/verify.ts'),
 };
 

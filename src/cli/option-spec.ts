@@ -1,7 +1,7 @@
 /** What the table of options says about one option. Help, man page, completions and the parser read nothing else. */
 import type { Problem } from '../units/problem.ts';
 
-export type OptionGroup = 'question' | 'path' | 'beam' | 'selection' | 'form' | 'output' | 'general';
+export type OptionGroup = 'question' | 'path' | 'beam' | 'selection' | 'fit' | 'form' | 'output' | 'general';
 
 interface AnyOption {
   /** Long name without dashes. */

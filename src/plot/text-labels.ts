@@ -10,7 +10,9 @@ import { plotColumnOf, plotRowOf, type TextLayout } from './text-layout.ts';
 /** Title of the y axis, then a sample and the label of each series and of each hatched range. */
 export function writeHeading(chart: Chart, layout: TextLayout, level: GlyphLevel, grid: TextGrid): void {
   if (!layout.hasHeading) return;
-  const samples = chart.series.map(({ label }, i) => `${lineSample(level, i)} ${label}`);
+  const samples = chart.series.flatMap(({ label }, i) =>
+    label === '' ? [] : [`${lineSample(level, i)} ${label}`],
+  );
   const needsSamples = chart.series.length > 1 || layout.endColumns === 0;
   const hatched = new Set((chart.hatched ?? []).map(({ label }) => label));
   const entries = [
