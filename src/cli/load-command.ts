@@ -13,6 +13,8 @@ const LOADERS: Readonly<Record<Invocation['command'], () => Promise<CommandModul
   cite: () => import('./commands/cite.ts'),
   material: () => import('./commands/material.ts'),
   find: () => import('./commands/find.ts'),
+  match: () => import('./commands/match.ts'),
+  compare: () => import('./commands/compare.ts'),
   fit: () => import('./commands/fit.ts'),
   verify: () => import('./commands/verify.ts'),
 };

@@ -41,4 +41,62 @@ export const SELECTION_COMMANDS = [
       { line: 'find --abbe 80.. --sort -abbe --csv', meaning: 'low-dispersion glasses, for a script' },
     ],
   },
+  {
+    name: 'match',
+    summary: 'media beside which a target reflects least',
+    operands: [
+      {
+        name: 'TARGET',
+        meaning: 'the medium to be matched: a name or numbers, as in a question',
+        completes: 'medium',
+      },
+      {
+        name: 'CONDITION',
+        meaning: 'what narrows the media, as for find: class liquid, not toxic, clear 400nm..700nm',
+        optional: true,
+        many: true,
+      },
+    ],
+    options: [
+      'at',
+      'within',
+      'mix',
+      'classNames',
+      'not',
+      'clear_m',
+      'airWavelength',
+      'catalog',
+      'json',
+      'csv',
+    ],
+    examples: [
+      {
+        line: 'match n-bk7 --at 589nm --class liquid',
+        meaning: 'an immersion liquid, and the temperature where it fits',
+      },
+      { line: 'match fused-silica --at 633nm --mix --not toxic', meaning: 'mixtures of two liquids too' },
+      { line: 'match n=2.4 --at 10.6um --within 0.02', meaning: 'every medium that near' },
+    ],
+  },
+  {
+    name: 'compare',
+    summary: 'two to six media or parts side by side',
+    operands: [
+      {
+        name: 'PART',
+        meaning: 'a medium, or a plate of it: MEDIUM@THICKNESS, such as germanium@3mm; two to six',
+        many: true,
+        completes: 'medium',
+      },
+      { name: 'WAVE', meaning: 'one or more, behind the parts', many: true },
+    ],
+    options: ['airWavelength', 'temperature_K', 'catalog', 'json', 'csv', 'markdown'],
+    examples: [
+      {
+        line: 'compare zinc-selenide@3mm germanium@3mm kcl@3mm 10.6um',
+        meaning: 'windows: loss, hardness, hazards',
+      },
+      { line: 'compare n-bk7 fused-silica calcium-fluoride 400nm 1064nm', meaning: 'media at two waves' },
+    ],
+  },
 ] as const satisfies readonly CommandSpec[];

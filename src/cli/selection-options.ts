@@ -14,10 +14,12 @@ import {
 import { parseSortOrder } from '../selection/sort-order.ts';
 import { parseFraction } from '../units/parse-fraction.ts';
 import { parseLength } from '../units/parse-length.ts';
+import { parseNumber } from '../units/parse-number.ts';
+import { ABOVE_ZERO } from '../units/parse-quantity.ts';
 import { parseWave } from '../units/parse-wave.ts';
 import { isProblem, type Problem, problem } from '../units/problem.ts';
 import { quoteInput } from '../units/quote-input.ts';
-import { value } from './option-spec.ts';
+import { flag, value } from './option-spec.ts';
 
 export const SELECTION_OPTION_ROWS = {
   at: value({
@@ -118,6 +120,19 @@ export const SELECTION_OPTION_ROWS = {
     group: 'selection',
     parse: parseSortOrder,
   }),
+  within: value({
+    name: 'within',
+    placeholder: 'NUMBER',
+    meaning: 'list every medium whose index is no further off than this',
+    fallback: 'the twelve nearest',
+    group: 'selection',
+    parse: parsePositive,
+  }),
+  mix: flag({
+    name: 'mix',
+    meaning: 'mixtures of two liquids too, by the Lorentz-Lorenz rule: an estimate',
+    group: 'selection',
+  }),
 };
 
 function words(text: string, what: string): readonly string[] | Problem {
@@ -129,4 +144,10 @@ function words(text: string, what: string): readonly string[] | Problem {
         'write one or more, with commas between them',
       )
     : list;
+}
+
+function parsePositive(text: string): number | Problem {
+  const number = parseNumber(text);
+  if (isProblem(number) || ABOVE_ZERO.allows(number)) return number;
+  return problem('out-of-range', `${quoteInput(text)} is not above 0`, 'write for example 0.002');
 }

@@ -9,11 +9,11 @@ import { rangeWords, type ValueRange } from './value-range.ts';
 
 const style = ASCII;
 
-/** "633 nm in vacuum"; a named line is given by its name too. */
+/** "633 nm in vacuum"; a line, a frequency or an energy is given as typed too. */
 export function waveWords({ wavelength_m, inAir, text }: WaveSpec): string {
   const length = formatQuantity(Number(wavelength_m.toPrecision(9)), METRE, 'shortest', { style });
-  const line = /-line$/.test(text) ? `${text}, ` : '';
-  return `${line}${length} in ${inAir ? 'air' : 'vacuum'}`;
+  const otherwise = /-line$|Hz|eV|-1$|\//iu.test(text) ? `${text}, ` : '';
+  return `${otherwise}${length} in ${inAir ? 'air' : 'vacuum'}`;
 }
 
 const MEASURE_WORDS: Readonly<Record<RangeMeasure, string>> = {

@@ -11,7 +11,7 @@ import type { Axis } from '../catalog/types.ts';
 import { fresnel } from '../interface/fresnel.ts';
 import { returnLoss_dB } from '../interface/losses.ts';
 import { opticsFromIndex } from '../interface/optics.ts';
-import { isRefusal, type Refusal } from '../medium/refusal.ts';
+import { isRefusal, type Refusal, refuse } from '../medium/refusal.ts';
 import type { Candidate } from './candidate.ts';
 import type { Criteria } from './criteria.ts';
 import { type FindResult, findMaterials } from './find-materials.ts';
@@ -70,7 +70,7 @@ export function matchReport(survey: Survey, question: MatchQuestion): MatchRepor
   const at = bothReferences(spec);
   if (isRefusal(at)) return at;
   const side = mediumSide(target, at, {}, false, survey.sourceOf);
-  if (isRefusal(side)) return side;
+  if (isRefusal(side)) return refuse(side.code, side.exit, side.message, 'choose a wave inside');
   const result = findMaterials(survey, { ...question.criteria, wave: spec });
   if (isRefusal(result)) return result;
   const candidates = everyAxis(result).filter((c) => !isTarget(c, side));

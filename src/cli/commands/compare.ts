@@ -1,0 +1,32 @@
+/** `halfspace compare PART PART ... WAVE ...`: media, or plates of them, side by side. */
+import { isRefusal } from '../../medium/refusal.ts';
+import { compareReport, type Part } from '../../selection/compare-report.ts';
+import { makeSurvey } from '../../selection/survey.ts';
+import type { Command } from '../context.ts';
+import { readPart, splitWaves } from '../read-parts.ts';
+import { compareCsv, compareJson } from '../render/compare-data.ts';
+import { compareMarkdown, compareText } from '../render/compare-text.ts';
+import { reportRefusal } from '../report-refusal.ts';
+
+export const run: Command = async ({ operands, options }, context) => {
+  const json = options.json === true;
+  const catalogue = context.catalogue();
+  const split = splitWaves(operands, options);
+  if (isRefusal(split)) return reportRefusal(split, json, context);
+  const parts: Part[] = [];
+  for (const text of split.media) {
+    const part = await readPart(text, catalogue);
+    if (isRefusal(part)) return reportRefusal(part, json, context);
+    parts.push(part);
+  }
+  const { temperature_K } = options;
+  const report = compareReport(makeSurvey(catalogue), parts, split.waves, { temperature_K });
+  if (isRefusal(report)) return reportRefusal(report, json, context);
+  const ascii = options.ascii === true;
+  const style = { ascii: context.ascii };
+  if (json)
+    context.write(compareJson(report, { version: context.version, catalogue: catalogue.hash }, ascii));
+  else if (options.csv) context.write(compareCsv(report, ascii));
+  else context.write(options.markdown ? compareMarkdown(report, style) : compareText(report, style));
+  return 0;
+};
