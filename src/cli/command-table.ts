@@ -153,6 +153,27 @@ export const COMMANDS = [
     ],
   },
   {
+    name: 'equivalent',
+    summary: 'glasses that may stand in for one',
+    operands: [
+      {
+        name: 'GLASS',
+        meaning: 'a name, or a code of six digits: 517642 is n_d 1.517, V_d 64.2',
+        many: true,
+        completes: 'medium',
+      },
+    ],
+    options: ['maker', 'within', 'abbeRange', 'json', 'csv', 'catalog'],
+    examples: [
+      { line: 'equivalent n-bk7', meaning: 'the nearest glasses of other makers' },
+      { line: 'equivalent 517642', meaning: 'the glasses that bear the code, and their neighbours' },
+      {
+        line: 'equivalent n-sf11 --maker ohara --within 0.002',
+        meaning: 'all of one maker with n_d so near',
+      },
+    ],
+  },
+  {
     name: 'fit',
     summary: 'a dispersion formula fitted to measured indices',
     operands: [

@@ -16,6 +16,7 @@ const LOADERS: Readonly<Record<Invocation['command'], () => Promise<CommandModul
   match: () => import('./commands/match.ts'),
   compare: () => import('./commands/compare.ts'),
   fit: () => import('./commands/fit.ts'),
+  equivalent: () => import('./commands/equivalent.ts'),
   verify: () => import('./commands/verify.ts'),
 };
 

@@ -14,6 +14,7 @@ import { parseTolerances } from '../units/parse-tolerance.ts';
 import { type Problem, problem } from '../units/problem.ts';
 import { BEAM_OPTION_ROWS, PATH_OPTION_ROWS } from './beam-options.ts';
 import { FIT_OPTION_ROWS } from './fit-options.ts';
+import { GLASS_OPTION_ROWS } from './glass-options.ts';
 import { choice, flag, type OptionSpec, type ValueOf, value } from './option-spec.ts';
 import { SELECTION_OPTION_ROWS } from './selection-options.ts';
 
@@ -100,6 +101,7 @@ export const OPTIONS = {
   ...BEAM_OPTION_ROWS,
   ...SELECTION_OPTION_ROWS,
   ...FIT_OPTION_ROWS,
+  ...GLASS_OPTION_ROWS,
 
   json: flag({
     name: 'json',

@@ -67,10 +67,14 @@ export function glassPlace(survey: Survey, material: Material): GlassPlace | und
   return { n_d, Vd, further };
 }
 
-/** The n_d and V_d that a code of six digits stands for: 517642 is 1.517 and 64.2. */
+/** Codes give n_d - 1 in thousandths without the figure of 1: from here down it was left out, since no glass is so low. */
+const LOWEST_THOUSANDTHS = 300;
+
+/** The n_d and V_d that a code of six digits stands for: 517642 is 1.517 and 64.2, 001291 is 2.001 and 29.1. */
 export function placeOfCode(code: string): GlassPlace {
+  const thousandths = Number(code.slice(0, 3));
   return {
-    n_d: Number(`1.${code.slice(0, 3)}`),
+    n_d: (thousandths + (thousandths < LOWEST_THOUSANDTHS ? 2000 : 1000)) / 1000,
     Vd: Number(code.slice(3, 6)) / 10,
     further: FURTHER_LINES.map(() => null),
   };
