@@ -6,8 +6,10 @@
 import type { FitWave } from '../catalog/choose-fit.ts';
 import type { CautionNote } from '../medium/caution.ts';
 import { isRefusal, type Refusal, refuse } from '../medium/refusal.ts';
-import type { Answer, Caution } from './answer.ts';
-import { orderCautions, wordCaution } from './caution-text.ts';
+import type { Answer } from './answer.ts';
+import { collectCautions } from './collect-cautions.ts';
+import { crystalNotes } from './crystal-answer.ts';
+import { crystalPart } from './crystal-part.ts';
 import { type EnergyParts, energyParts } from './energy-answer.ts';
 import { indexUncertainty, type ThermalSide } from './input-uncertainty.ts';
 import { interfaceParts, LOSSY_INCIDENCE } from './interface-answer.ts';
@@ -48,6 +50,8 @@ export function answerQuestion(question: Question, sourceOf: SourceOf): Answer |
   const surface = parts ? pathSurface(first.answer, parts, polarization) : first.answer;
 
   const whole: Path = path ?? { from, layers: [], into };
+  const crystal = crystalPart(question, whole, wave, sourceOf);
+  if (isRefusal(crystal)) return crystal;
   const media = thermalSides(whole, question, wave, sourceOf);
   const power = parts ? pathPower(parts, vacuumWavelength_m) : surfacePower;
   const spread = powerSpread(question, wave, whole, media, surface, power);
@@ -83,21 +87,21 @@ export function answerQuestion(question: Question, sourceOf: SourceOf): Answer |
     stack: parts?.stack ?? null,
     window: parts?.window ?? null,
     pulse,
+    crystal,
     energy: energy?.answer ?? null,
-    cautions: collectCautions(
-      from,
-      into,
-      path,
-      [
+    cautions: collectCautions({
+      question,
+      media,
+      crystal,
+      interfaceNotes: [
         ...surfaceNotes(from, surface),
         ...(parts ? pathNotes(parts) : []),
         ...pulseNotes(pulse),
         ...spreadNotes(spread, surface),
+        ...(crystal ? crystalNotes(crystal) : []),
       ],
-      energy?.notes ?? [],
-      media,
-      question.tolerances.temperature_K !== undefined,
-    ),
+      beamNotes: energy?.notes ?? [],
+    }),
   };
 }
 
@@ -140,27 +144,3 @@ function surfaceNotes(
   if (surface.R >= 1) notes.push({ code: 'infinite-value', details: { quantity: 'the reflection loss' } });
   return notes;
 }
-
-function collectCautions(
-  from: MediumSide,
-  into: MediumSide,
-  path: Path | null,
-  surface: readonly CautionNote[],
-  beam: readonly CautionNote[],
-  media: readonly ThermalSide[],
-  temperatureTolerance: boolean,
-): readonly Caution[] {
-  const places = ['from', ...(path?.layers ?? []).map((_, i) => `layer ${i + 1}`), 'into'];
-  const about = (side: MediumSide, i: number): readonly Caution[] =>
-    [...side.notes, ...(temperatureTolerance && media[i]?.slope === null ? [THERMAL_GAP] : [])].map((n) =>
-      wordCaution(n, places[i] ?? '', side.name),
-    );
-  const sides = [from, ...(path?.layers ?? []).map((l) => l.side), into];
-  return orderCautions([
-    ...sides.flatMap(about),
-    ...surface.map((n) => wordCaution(n, 'interface', 'interface')),
-    ...beam.map((n) => wordCaution(n, 'beam', 'beam')),
-  ]);
-}
-
-const THERMAL_GAP: CautionNote = { code: 'tolerance-incomplete', details: {} };

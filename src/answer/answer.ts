@@ -6,6 +6,7 @@
 import type { CautionCode } from '../medium/caution.ts';
 import type { Complex } from '../num/complex.ts';
 import type { BeamAnswer } from './beam-answer.ts';
+import type { CrystalAnswer } from './crystal-shape.ts';
 import type { Polarization } from './question.ts';
 
 export interface Caution {
@@ -270,6 +271,8 @@ export interface Answer {
   readonly stack: StackAnswer | null;
   readonly window: WindowAnswer | null;
   readonly pulse: PulseAnswer | null;
+  /** With a stated cut. */
+  readonly crystal: CrystalAnswer | null;
   /** With a stated beam. */
   readonly energy: BeamAnswer | null;
   readonly cautions: readonly Caution[];

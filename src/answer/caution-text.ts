@@ -124,6 +124,11 @@ const WORDING: Readonly<Record<CautionCode, Wording>> = {
     'caution',
     (d, s) => `${s}: ${d['axis']} axis assumed (also: ${d['others']}); name it as KEY:AXIS`,
   ],
+  'crystal-cut': [
+    'note',
+    (d) =>
+      `${d['crystal']}: index, R, T and path above are those of the ordinary wave; the crystal part has both waves`,
+  ],
   'near-critical': [
     'note',
     () => 'close to the critical angle: a real beam spreads over it; shifts and R hold for a plane wave only',

@@ -29,7 +29,7 @@ export interface Spread {
 /** Where the parabola through -1, 0 and 1 standard uncertainties is tried; no multiples of one another. */
 const PROBES = [0.618, -0.382];
 /** Greatest misfit of the parabola, over the standard uncertainty it gives. */
-const MISFIT = 0.03;
+const MISFIT = 0.015;
 /** Below this a misfit is rounding. */
 const ROUNDING = 1e-11;
 const SAMPLES = 1024;

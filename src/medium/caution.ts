@@ -35,6 +35,7 @@ export type CautionCode =
   | 'pulse-train'
   | 'ideal-surface'
   | 'axis-assumed'
+  | 'crystal-cut'
   | 'near-critical'
   | 'tolerance-incomplete'
   | 'approximation'

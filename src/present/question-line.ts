@@ -13,7 +13,11 @@ export function mediumTitle(medium: MediumAnswer): string {
 
 /** "632.8 nm in vacuum". */
 export function wavelengthText(answer: Answer, style: PresentStyle): string {
-  const { vacuumWavelength_m, airWavelength_m, givenInAir } = answer.wave;
+  return wavelengthOf(answer.wave, style);
+}
+
+export function wavelengthOf(wave: Answer['wave'], style: PresentStyle): string {
+  const { vacuumWavelength_m, airWavelength_m, givenInAir } = wave;
   const value = givenInAir ? airWavelength_m : vacuumWavelength_m;
   return `${formatQuantity(Number(value.toPrecision(9)), METRE, 'shortest', { style })} in ${givenInAir ? 'air' : 'vacuum'}`;
 }

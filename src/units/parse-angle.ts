@@ -40,6 +40,16 @@ export function parseIncidence(text: string): number | Problem {
   );
 }
 
+/** An angle between two lines, 0 to 90 degrees, in radians: of a crystal's optic axis to the normal, for one. */
+export function parseLineAngle(text: string): number | Problem {
+  const angle_rad = parseAngle(text);
+  if (isProblem(angle_rad)) return angle_rad;
+  // 90 degrees by way of pi/180 may come out a rounding too large.
+  if (angle_rad >= 0 && angle_rad <= (Math.PI / 2) * (1 + 1e-15)) return Math.min(angle_rad, Math.PI / 2);
+  const message = `${quoteInput(text)} is out of range: an angle between two lines goes from 0 to 90 deg`;
+  return problem('out-of-range', message, 'write for example 45 or 0.78rad');
+}
+
 /** A standard uncertainty of an angle, in radians. */
 export function parseAngleTolerance(text: string): number | Problem {
   return parseValue(text, { ...SPEC, what: 'a tolerance of the angle', range: NOT_BELOW_ZERO });

@@ -1,0 +1,47 @@
+/** `halfspace crystal [FROM] CRYSTAL WAVE`: a birefringent crystal at one wave, at a cut where one is stated. */
+import { type CrystalReport, crystalReport } from '../../answer/crystal-report.ts';
+import { makeQuestion } from '../../answer/question.ts';
+import { isRefusal } from '../../medium/refusal.ts';
+import type { Command } from '../context.ts';
+import { CONVENTION_NOTES } from '../convention-notes.ts';
+import { findMedium, suggestMedia } from '../find-medium.ts';
+import { questionOptions, readWave } from '../read-question.ts';
+import { crystalText } from '../render/crystal-text.ts';
+import { jsonDocument } from '../render/json-document.ts';
+import { reportRefusal } from '../report-refusal.ts';
+
+const OUTSIDE = 'air';
+
+export const run: Command = async ({ operands, options }, context) => {
+  const catalogue = context.catalogue();
+  const json = options.json === true;
+  const [waveText = '', crystalName = '', outsideName = OUTSIDE] = operands.toReversed();
+  const wave = readWave(waveText, options);
+  if (isRefusal(wave)) return reportRefusal(wave, json, context);
+  const into = findMedium(crystalName, catalogue);
+  if (isRefusal(into)) {
+    return reportRefusal(await suggestMedia(into, crystalName, catalogue), json, context);
+  }
+  const from = findMedium(outsideName, catalogue);
+  if (isRefusal(from)) {
+    return reportRefusal(await suggestMedia(from, outsideName, catalogue), json, context);
+  }
+  const stated = questionOptions(options, wave);
+  if (isRefusal(stated)) return reportRefusal(stated, json, context);
+  const asked = {
+    question: makeQuestion(from, into, wave, stated),
+    thickness_m: options.thickness_m ?? null,
+    retardance_waves: options.retardance_waves ?? null,
+  };
+  const report = crystalReport(asked, (id) => catalogue.source(id));
+  if (isRefusal(report)) return reportRefusal(report, json, context);
+  const head = { version: context.version, catalogue: catalogue.hash };
+  context.write(
+    json
+      ? jsonDocument(head, withConventions(report), options.ascii === true)
+      : crystalText(report, { ascii: context.ascii }),
+  );
+  return options.strict && report.cautions.some((c) => c.level !== 'note') ? 1 : 0;
+};
+
+const withConventions = (report: CrystalReport): object => ({ convention: CONVENTION_NOTES, ...report });
