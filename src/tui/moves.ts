@@ -2,7 +2,7 @@
  * Moving the focus over the picture: arrows go to the nearest stop in that direction, Tab to the next value that can be
  * changed. Stops out of sight are reached as well; their block scrolls.
  */
-import { FIELDS } from './fields/all-fields.ts';
+import { FIELDS, fieldById } from './fields/all-fields.ts';
 import type { FieldId } from './fields/field.ts';
 import { ITEM_GAP, itemWidth } from './picture/flow.ts';
 import type { Row } from './picture/item.ts';
@@ -14,9 +14,21 @@ export type Direction = 'up' | 'down' | 'left' | 'right';
 
 /** Puts the focus on a stop; the place follows where the stop belongs to one. */
 export function focusOn(state: State, stop: StopId, world: World): State {
-  const moved = { ...state, focus: stop };
+  const cameFrom = isWordStop(state.focus) ? state.cameFrom : state.focus;
+  const moved = { ...state, focus: stop, cameFrom };
   const place = placeOf(stop, sceneOf(moved, world));
   return place ? { ...moved, place } : moved;
+}
+
+/** On such a field letters are text; commands come back when the focus leaves it. */
+export function isWordStop(stop: StopId): boolean {
+  const id = fieldOfStop(stop);
+  return id !== undefined && fieldById(id).takesWords === true;
+}
+
+/** Leaves a field that takes words for where the focus was before. */
+export function leaveWords(state: State, world: World): State {
+  return isWordStop(state.focus) ? focusOn(state, state.cameFrom, world) : state;
 }
 
 function placeOf(stop: StopId, scene: Scene): Place | undefined {

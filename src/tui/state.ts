@@ -71,6 +71,8 @@ export interface State {
   readonly past: readonly Question[];
   readonly future: readonly Question[];
   readonly focus: StopId;
+  /** Where the focus was before it stepped onto a field that takes words: it goes back there afterwards. */
+  readonly cameFrom: StopId;
   /** The part of the picture the focus was in last: the half a list opens in, the part a small screen shows. */
   readonly place: 'from' | 'interface' | 'into';
   readonly entry: Entry | null;
@@ -113,6 +115,7 @@ export function initialState(
     past: [],
     future: [],
     focus: FIRST_FOCUS,
+    cameFrom: FIRST_FOCUS,
     place: 'interface',
     entry: null,
     search: null,

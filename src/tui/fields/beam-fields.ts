@@ -124,4 +124,10 @@ export const PROFILE_FIELD: Field = {
           beam: { ...question.beam, profile: question.beam.profile === 'flat' ? 'gaussian' : 'flat' },
         }
       : undefined,
+  pick: (letter, { question }) => {
+    const profile = letter === 'g' ? 'gaussian' : letter === 'f' ? 'flat' : undefined;
+    return profile && question.beam?.kind === 'power'
+      ? { ...question, beam: { ...question.beam, profile } }
+      : undefined;
+  },
 };

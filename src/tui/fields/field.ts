@@ -44,6 +44,10 @@ export interface Field {
   readonly kind: 'text' | 'choice' | 'medium';
   /** One line: what it is and how it is written. */
   readonly hint: string;
+  /** True where a letter typed on the field begins a text; elsewhere digits do and letters are commands. */
+  readonly takesWords?: boolean;
+  /** Choices by their initials. */
+  readonly pick?: (letter: string, context: FieldContext) => Question | undefined;
   /** False where the field means nothing for the question. */
   readonly applies: (context: FieldContext) => boolean;
   readonly show: (context: FieldContext, style: NumberStyle) => string;

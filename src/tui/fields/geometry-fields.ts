@@ -20,7 +20,7 @@ export const ANGLE_FIELD: Field = {
   id: 'angle',
   label: 'angle',
   kind: 'text',
-  hint: 'from the surface normal: 45, 0.78rad, 30mrad',
+  hint: 'angle from the surface normal: 45, 0.78rad, 30mrad',
   applies: () => true,
   show: ({ question }, style) =>
     formatQuantity(degreesOf(question.incidenceAngle_rad), DEGREE, 'shortest', { style }),
@@ -43,7 +43,7 @@ export const POLARIZATION_FIELD: Field = {
   id: 'polarization',
   label: '',
   kind: 'choice',
-  hint: 's, p or unpolarized (the mean of both)',
+  hint: 'polarization: s, p, or unpolarized (the mean of both)',
   applies: () => true,
   show: ({ question: { polarization } }) =>
     polarization === 'unpolarized' ? 'unpolarized' : `${polarization} polarized`,
@@ -56,6 +56,10 @@ export const POLARIZATION_FIELD: Field = {
     const at = POLARIZATIONS.indexOf(question.polarization);
     const next = POLARIZATIONS.at((at + (count > 0 ? 1 : -1)) % POLARIZATIONS.length);
     return next && { ...question, polarization: next };
+  },
+  pick: (letter, { question }) => {
+    const polarization = POLARIZATIONS.find((word) => word.startsWith(letter));
+    return polarization && { ...question, polarization };
   },
 };
 
@@ -93,6 +97,7 @@ export const TOLERANCE_FIELD: Field = {
   id: 'tolerance',
   label: 'tolerance',
   kind: 'text',
+  takesWords: true,
   hint: 'uncertainties of what you state: wave=1nm,angle=0.5deg,n=1e-4',
   applies: () => true,
   show: ({ question }) => tolerancesText(question.tolerances) || 'none',

@@ -41,6 +41,7 @@ const mediumField = (side: Side): Field => ({
   id: side,
   label: LABELS[side],
   kind: 'medium',
+  takesWords: true,
   hint: `${WHERE[side]}: a name, a formula, or n=1.5+0.1i`,
   applies: () => true,
   show: ({ question }, style) => {
@@ -84,6 +85,12 @@ const axisField = (side: Side): Field => ({
     const axes = axesOf(medium.material);
     const at = axes.indexOf(axisOf(medium) ?? 'isotropic');
     const axis = axes.at((at + (count > 0 ? 1 : -1)) % axes.length);
+    return axis && setMedium(question, side, { ...medium, axis });
+  },
+  pick: (letter, { question }) => {
+    const medium = question[side];
+    if (medium.kind === 'literal') return undefined;
+    const axis = axesOf(medium.material).find((a) => a.startsWith(letter));
     return axis && setMedium(question, side, { ...medium, axis });
   },
 });

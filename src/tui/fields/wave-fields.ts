@@ -116,4 +116,9 @@ export const REFERENCE_FIELD: Field = {
     const next = setReference(!context.question.wave.inAir, context);
     return isProblem(next) ? undefined : next;
   },
+  pick: (letter, context) => {
+    if (letter !== 'a' && letter !== 'v') return undefined;
+    const next = setReference(letter === 'a', context);
+    return isProblem(next) ? undefined : next;
+  },
 };

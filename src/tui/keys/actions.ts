@@ -123,7 +123,7 @@ const PICTURE: readonly Row[] = [
   ['page-up', 'page-up ctrl+u alt+v', '10 more', 'ten steps up; a page up in a list'],
   ['page-down', 'page-down ctrl+d ctrl+v', '10 less', 'ten steps down; a page down in a list'],
   ['open', 'enter space', 'change', 'change the value you are on; its source if it is a result'],
-  ['back', 'escape', 'back', 'back to the last question that had an answer'],
+  ['back', 'escape', 'back', 'leave the field; back to the last question that had an answer'],
   ['help', '?', 'keys', 'these keys'],
   ['quit', 'q', 'quit', 'quit'],
 ];

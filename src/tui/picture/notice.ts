@@ -128,12 +128,12 @@ function focusPart(state: State, world: World): Part {
   const field = fieldOfStop(state.focus);
   if (field === undefined)
     return hint(`${item.describe}: ${key('copy')} copies it, ${key('sources')} shows its source`);
-  const kind = fieldById(field).kind;
+  const { kind, takesWords } = fieldById(field);
   const how =
     kind === 'choice'
-      ? `Space changes it`
-      : kind === 'medium'
-        ? 'Enter opens the list'
+      ? 'Space changes it'
+      : takesWords
+        ? 'type it'
         : `type it or step with ${key('step-up')} ${key('step-down')}`;
   return hint(`${item.describe}; ${how}`);
 }

@@ -32,7 +32,7 @@ const KEYS: Readonly<Record<string, ActionId>> = {
 };
 
 export function surfaceBlock({ answer }: FieldContext, bindings: Bindings, style: NumberStyle): Block {
-  if (!answer) return { top: [], body: [], bottom: [] };
+  if (!answer) return { top: [[textItem('no answer', 'caution')]], body: [], bottom: [] };
   const shown = interfaceRows(answer, style);
   const item = (id: string) => shown.filter((q) => q.id === id);
   const first = FIRST.flatMap(item).map((q) => [quantityItem(q, 'interface', '', 'result')]);

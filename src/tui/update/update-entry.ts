@@ -4,7 +4,7 @@ import { fieldById } from '../fields/all-fields.ts';
 import type { FieldId } from '../fields/field.ts';
 import type { ActionId } from '../keys/actions.ts';
 import { EMPTY_LINE, insertText, type Line, lineOf, pasteText } from '../line-edit.ts';
-import { focusOn, moveToField } from '../moves.ts';
+import { focusOn, leaveWords, moveToField } from '../moves.ts';
 import { answerOf, askAnew, type Entry, fieldStop, type State } from '../state.ts';
 import type { World } from '../world.ts';
 import { applyLineAction } from './line-actions.ts';
@@ -36,8 +36,11 @@ function withLine(state: State, change: (line: Line) => Line): State {
 export function actInEntry(state: State, action: ActionId, world: World): State {
   const { entry } = state;
   if (!entry) return state;
-  if (action === 'cancel') return { ...state, entry: null, message: null };
-  if (action === 'take') return take(state, entry, world);
+  if (action === 'cancel') return leaveWords({ ...state, entry: null, message: null }, world);
+  if (action === 'take') {
+    const taken = take(state, entry, world);
+    return taken.entry ? taken : leaveWords(taken, world);
+  }
   if (action === 'take-next' || action === 'take-previous') {
     const taken = take(state, entry, world);
     return taken.entry ? taken : moveToField(taken, action === 'take-next' ? 1 : -1, world);

@@ -5,7 +5,7 @@ import type { FieldId } from '../fields/field.ts';
 import type { Side } from '../fields/medium-fields.ts';
 import type { ActionId } from '../keys/actions.ts';
 import { insertText } from '../line-edit.ts';
-import { moveFocus, moveToEnd, moveToField } from '../moves.ts';
+import { leaveWords, moveFocus, moveToEnd, moveToField } from '../moves.ts';
 import { focusItem } from '../picture/notice.ts';
 import { recordText, resultText } from '../picture/record-text.ts';
 import { answerOf, askAnew, fieldOfStop, redo, refusalOf, type State, type Updated, undo } from '../state.ts';
@@ -61,7 +61,7 @@ const ACTS: Readonly<Partial<Record<ActionId, Act>>> = {
   cautions: (s) => openPage(s, 'cautions'),
   help: (s) => openPage(s, 'keys'),
   dots: nextGlyphs,
-  back: (s, w) => (refusalOf(s) ? askAnew(s, s.answered, w) : quiet(s)),
+  back: (s, w) => (refusalOf(s) ? askAnew(s, s.answered, w) : leaveWords(quiet(s), w)),
 };
 
 export function actInPicture(state: State, action: ActionId, world: World): Updated {
@@ -71,13 +71,28 @@ export function actInPicture(state: State, action: ActionId, world: World): Upda
   return { state: act ? act(state, world) : state, effects: [] };
 }
 
+/**
+ * A character that belongs to the field under the focus before it is a command: a letter on a field that takes words, the
+ * initial of a choice.
+ */
+export function typeOnField(state: State, character: string, world: World): State | undefined {
+  const id = fieldOfStop(state.focus);
+  if (id === undefined) return undefined;
+  const field = fieldById(id);
+  if (field.takesWords && /[\p{L}\p{N}]/u.test(character)) return beginTyping(state, id, character, world);
+  const picked = field.pick?.(character, { question: state.question, answer: answerOf(state) });
+  return picked && askAnew(quiet(state), picked, world);
+}
+
 /** A character that is no command starts typing where the focus takes text. */
 export function typeInPicture(state: State, character: string, world: World): State {
   const field = fieldOfStop(state.focus);
   if (field === undefined || (character !== '' && !/[\d.,]/.test(character))) return state;
-  const { kind } = fieldById(field);
-  if (kind === 'choice') return state;
-  if (kind === 'medium') {
+  return fieldById(field).kind === 'choice' ? state : beginTyping(state, field, character, world);
+}
+
+function beginTyping(state: State, field: FieldId, character: string, world: World): State {
+  if (fieldById(field).kind === 'medium') {
     const opened = openSearch(state, field as Side, world);
     const search = opened.search && { ...opened.search, line: insertText(opened.search.line, character) };
     return { ...opened, search };

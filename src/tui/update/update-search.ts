@@ -4,7 +4,7 @@ import { type Side, setMedium } from '../fields/medium-fields.ts';
 import { hitsFor, mediumOfHit, whyNoHit } from '../hits.ts';
 import type { ActionId } from '../keys/actions.ts';
 import { EMPTY_LINE, insertText, type Line, pasteText } from '../line-edit.ts';
-import { focusOn, moveToField } from '../moves.ts';
+import { focusOn, leaveWords, moveToField } from '../moves.ts';
 import { listRows } from '../picture/hit-list.ts';
 import { askAnew, fieldStop, type Search, type State } from '../state.ts';
 import type { World } from '../world.ts';
@@ -36,9 +36,11 @@ export function actInSearch(state: State, action: ActionId, world: World): State
   if (!search) return state;
   switch (action) {
     case 'cancel':
-      return { ...state, search: null, message: null };
-    case 'take':
-      return choose(state, search, world);
+      return leaveWords({ ...state, search: null, message: null }, world);
+    case 'take': {
+      const chosen = choose(state, search, world);
+      return chosen.search ? chosen : leaveWords(chosen, world);
+    }
     case 'take-next':
     case 'take-previous': {
       const chosen = choose(state, search, world);

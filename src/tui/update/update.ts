@@ -9,7 +9,7 @@ import type { World } from '../world.ts';
 import { contextOf } from './context.ts';
 import { actInEntry, pasteInEntry, typeInEntry } from './update-entry.ts';
 import { actOnPage, pasteInFilter, typeInFilter } from './update-page.ts';
-import { actInPicture, typeInPicture } from './update-picture.ts';
+import { actInPicture, typeInPicture, typeOnField } from './update-picture.ts';
 import { actInSearch, pasteInSearch, typeInSearch } from './update-search.ts';
 
 export type Event =
@@ -62,9 +62,12 @@ function updateKey(state: State, key: Key, world: World): Updated {
       return action === 'copy'
         ? actInPicture(state, action, world)
         : plain(action ? actOnPage(state, action, world) : state);
-    case 'picture':
+    case 'picture': {
+      const typed = isTextKey(key) ? typeOnField(state, key.char, world) : undefined;
+      if (typed) return plain(typed);
       if (action) return actInPicture(state, action, world);
       return plain(isTextKey(key) ? typeInPicture(state, key.char, world) : state);
+    }
   }
 }
 

@@ -1,6 +1,7 @@
 /** The last line: at most six keys of the moment, the one for all keys always among them. */
 import type { ActionId, Context } from '../keys/actions.ts';
 import { keyText } from '../keys/key-names.ts';
+import { isWordStop } from '../moves.ts';
 import type { State } from '../state.ts';
 import { contextOf } from '../update/context.ts';
 import type { World } from '../world.ts';
@@ -13,11 +14,18 @@ const FOOTERS: Readonly<Record<Context, readonly ActionId[]>> = {
   page: ['down', 'page-down', 'search', 'back'],
 };
 
+/** On a field that takes words, letters are no commands. */
+const WORD_FOOTER: readonly ActionId[] = ['open', 'next-field', 'back'];
+
+function footerOf(state: State, context: Context): readonly ActionId[] {
+  return context === 'picture' && isWordStop(state.focus) ? WORD_FOOTER : FOOTERS[context];
+}
+
 export function footerView(state: State, columns: number, pen: Pen, world: World): string {
   const context = contextOf(state);
   const ascii = state.preferences.glyphs === 'ascii';
   const gap = columns >= 60 ? '   ' : '  ';
-  const items = FOOTERS[context].map((id) => footerItem(id, context, ascii, world));
+  const items = footerOf(state, context).map((id) => footerItem(id, context, ascii, world));
   const help = helpItem(context, ascii, world);
   // The key for all keys always finds room; others give way from the right.
   while (items.length > 0 && footerWidth([...items, help], gap) > columns) items.pop();

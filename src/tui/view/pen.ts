@@ -120,7 +120,7 @@ function labelColumn(item: Item, labelWidth: number, columns: number): number {
 
 /** No number is cut: where a row is too long its label gives way. */
 function fitted(item: Item, columns: number, pen: Pen): Item {
-  if (item.stop === undefined || item.role === 'field') return item;
+  if (item.stop === undefined || item.role === 'field' || !/^[-(\d]/.test(item.text)) return item;
   const room = Math.max(1, columns - 2 - displayWidth(item.text));
   const label = cutToWidth(item.label, room, pen.glyphs.more);
   return label === item.label ? item : { ...item, label };

@@ -5,6 +5,6 @@ import { SMALLEST } from '../picture/plan.ts';
 import { wrapText } from '../picture/wrap.ts';
 
 export function tooSmallView({ columns, rows }: ScreenSize): readonly string[] {
-  const text = `halfspace needs ${SMALLEST.columns} x ${SMALLEST.rows}, this is ${columns} x ${rows}`;
+  const text = `halfspace needs ${SMALLEST.columns} x ${SMALLEST.rows} (now ${columns} x ${rows})`;
   return wrapText(text, columns).slice(0, Math.max(1, rows - 1));
 }
