@@ -4,7 +4,7 @@
  */
 import { type FitWave, reachOf } from '../catalog/choose-fit.ts';
 import type { Fit, Material } from '../catalog/types.ts';
-import { standardAirIndexJet } from '../dispersion/air-index.ts';
+import { SHORTEST_um, STANDARD_AIR } from '../dispersion/ciddor.ts';
 import { type BoundModel, type Conditions, JET_LENGTH, K, N } from '../dispersion/evaluator.ts';
 import { bindModel, honours } from '../dispersion/registry.ts';
 import { applyThermalForm, describesAbsoluteIndex } from '../dispersion/thermal.ts';
@@ -25,7 +25,7 @@ export interface BoundFit {
   readonly preference: number;
   readonly accuracy: number;
   readonly grade: number;
-  /** Writes n and k relative to vacuum. */
+  /** Writes n and k relative to vacuum into `out[at]` and `out[at + 1]`. */
   readonly evaluate: (vacuum_um: number, air_um: number, out: Float64Array, at: number) => void;
   readonly model: () => BoundModel;
 }
@@ -75,6 +75,10 @@ export function bindFit(fit: Fit, material: Material, conditions: Conditions): B
 const within = (from_um: number, to_um: number, vacuum_um: number, air_um: number): boolean =>
   (vacuum_um >= from_um && vacuum_um <= to_um) || (air_um >= from_um && air_um <= to_um);
 
+/** `inRange`, on the limits worked out. */
+export const reaches = (fit: BoundFit, vacuum_um: number, air_um: number): boolean =>
+  within(fit.shortest_um, fit.longest_um, vacuum_um, air_um);
+
 /** The order of `chooseFit`: preference, recommended, accuracy, grade; of equals the first. */
 export function bestFit(fits: readonly BoundFit[], vacuum_um: number, air_um: number): BoundFit | undefined {
   let best: BoundFit | undefined;
@@ -82,7 +86,7 @@ export function bestFit(fits: readonly BoundFit[], vacuum_um: number, air_um: nu
   let bestRecommended = false;
   for (let i = 0; i < fits.length; i++) {
     const fit = fits[i]!;
-    if (!within(fit.shortest_um, fit.longest_um, vacuum_um, air_um)) continue;
+    if (!reaches(fit, vacuum_um, air_um)) continue;
     const recommended = within(fit.recommendedFrom_um, fit.recommendedTo_um, vacuum_um, air_um);
     const absorbs = recommended && fits.length > 1 && givesAbsorption(fit, vacuum_um, air_um);
     const preference = absorbs ? fit.preference + 1 : fit.preference;
@@ -133,7 +137,7 @@ function evaluator(
     bound.evaluate(L_um, jet);
     if (warm && !warm.absolute) applyThermalForm(warm.form, warm.from_K, warm.to_K, L_um, jet);
     if (inAir) {
-      const air = standardAirIndexJet(vacuum_um)[0];
+      const air = airIndex(vacuum_um);
       jet[N] = jet[N]! * air;
       jet[K] = jet[K]! * air;
     }
@@ -142,6 +146,18 @@ function evaluator(
     out[at] = jet[N]!;
     out[at + 1] = jet[K]!;
   };
+}
+
+/** The first part of `standardAirIndexJet` and nothing else, worked out in its order. */
+function airIndex(vacuum_um: number): number {
+  const L = Math.max(vacuum_um, SHORTEST_um);
+  const x = L * L;
+  const { offset, poles } = STANDARD_AIR;
+  let refractivity = offset;
+  for (let i = 0; i < poles.length; i += 4) {
+    refractivity += (poles[i]! * x + poles[i + 1]!) * (1 / (x - poles[i + 2]!));
+  }
+  return 1 + refractivity;
 }
 
 interface Warming {

@@ -10,7 +10,7 @@ import type { Axis, Material } from '../catalog/types.ts';
 import type { Conditions } from '../dispersion/evaluator.ts';
 import { type Optics, opticsFromIndex } from '../interface/optics.ts';
 import { ONE } from '../num/complex.ts';
-import { type BoundFit, bestFit, bindFit } from './bound-fit.ts';
+import { type BoundFit, bestFit, bindFit, reaches } from './bound-fit.ts';
 import { fitPreference } from './fit-preference.ts';
 import { type LiteralMedium, literalOptics } from './literal.ts';
 import { mediumAtWave } from './optics-at.ts';
@@ -26,6 +26,8 @@ export type Reach = typeof REFUSED | typeof INSIDE | typeof EXTRAPOLATED;
 export interface BoundMedium {
   /** Writes n and k relative to vacuum into `out[at]` and `out[at + 1]`; nothing useful where it refuses. */
   readonly indexAt: (vacuum_um: number, air_um: number, out: Float64Array, at: number) => Reach;
+  /** What `indexAt` would find, but for a pole of the formula at the very wave. */
+  readonly reachAt: (vacuum_um: number, air_um: number) => Reach;
   /** All that the laws of an interface need; undefined where the question would be refused. */
   readonly opticsAt: (vacuum_um: number, air_um: number) => Optics | undefined;
   /** Why `indexAt` refused. */
@@ -36,6 +38,7 @@ export function bindLiteral(literal: LiteralMedium): BoundMedium {
   const opticsAt = (vacuum_um: number): Optics => literalOptics(literal, vacuum_um * 1e-6);
   return {
     opticsAt,
+    reachAt: () => INSIDE,
     indexAt(vacuum_um, _air_um, out, at) {
       const { n } = opticsAt(vacuum_um);
       out[at] = n.re;
@@ -84,6 +87,10 @@ export function bindMaterial(
       if (!used) return REFUSED;
       used.evaluate(vacuum_um, air_um, out, at);
       return !Number.isFinite(out[at]!) ? REFUSED : inside ? INSIDE : EXTRAPOLATED;
+    },
+    reachAt(vacuum_um, air_um) {
+      if (axes.some((fits) => fits.some((fit) => reaches(fit, vacuum_um, air_um)))) return INSIDE;
+      return extrapolate && axes.length > 0 ? EXTRAPOLATED : REFUSED;
     },
     opticsAt(vacuum_um, air_um) {
       const used = chosen(vacuum_um, air_um);
