@@ -219,6 +219,13 @@ export const COMMANDS = [
   },
   ...SELECTION_COMMANDS,
   {
+    name: 'config',
+    summary: 'each setting, its value and where that comes from',
+    operands: [],
+    options: ['json', 'catalog'],
+    examples: [{ line: 'config', meaning: 'settings in force, and where files are' }],
+  },
+  {
     name: 'help',
     summary: 'help for the program or for one command',
     operands: [{ name: 'COMMAND', meaning: 'the command to explain', optional: true, completes: 'command' }],

@@ -8,6 +8,7 @@ export const ENVIRONMENT: readonly (readonly [names: string, meaning: string])[]
   ['HALFSPACE_ACCESSIBLE, ACCESSIBLE', 'not empty, not 0 or false: as --linear'],
   ['INK_SCREEN_READER', 'true: as --linear'],
   ['XDG_CONFIG_HOME', 'settings, in the folder halfspace; else ~/.config'],
+  ['XDG_DATA_HOME', 'entries of your own, in halfspace/materials; else ~/.local/share'],
   ['XDG_STATE_HOME', 'the logbook, in the folder halfspace; else ~/.local/state'],
   ['XDG_CACHE_HOME', 'what can be made anew, in the folder halfspace; else ~/.cache'],
 ];

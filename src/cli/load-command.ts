@@ -17,6 +17,7 @@ const LOADERS: Readonly<Record<Invocation['command'], () => Promise<CommandModul
   compare: () => import('./commands/compare.ts'),
   fit: () => import('./commands/fit.ts'),
   equivalent: () => import('./commands/equivalent.ts'),
+  config: () => import('./commands/config.ts'),
   verify: () => import('./commands/verify.ts'),
 };
 

@@ -47,7 +47,7 @@ function shell(name: string, args: readonly string[]): string[] {
 type Row = [line: string, offered: readonly string[]];
 
 const ROWS: Row[] = [
-  ['halfspace s', ['sapphire', 'silicon']],
+  ['halfspace s', [...commandNames.filter((name) => name.startsWith('s')), 'sapphire', 'silicon']],
   ['halfspace he', ['help']],
   ['halfspace air fu', ['fused-silica']],
   ['halfspace air --angle 45 fu', ['fused-silica']],
