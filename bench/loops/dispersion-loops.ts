@@ -1,0 +1,90 @@
+/**
+ * Index and group index of a glass: the core's closures against the plainest loop that does the same arithmetic. Several kinds
+ * of model are used first, so that the compiler cannot take the only one it has seen for granted.
+ */
+
+import type { ModelParameters } from '../../src/dispersion/parameters.ts';
+import { bindModel } from '../../src/dispersion/registry.ts';
+import { race } from './race.ts';
+
+/** N-BK7, coefficients of its maker's data sheet. */
+const B1 = 1.03961212;
+const B2 = 0.231792344;
+const B3 = 1.01046945;
+const C1 = 0.00600069867;
+const C2 = 0.0200179144;
+const C3 = 103.560653;
+const BK7: ModelParameters = {
+  model: 'sellmeier',
+  offset: 1,
+  poles: [
+    { B: B1, C_um2: C1 },
+    { B: B2, C_um2: C2 },
+    { B: B3, C_um2: C3 },
+  ],
+} as ModelParameters;
+const OTHERS: readonly ModelParameters[] = [
+  { model: 'sellmeier', offset: 2.1, poles: [{ B: 0.9, C_um2: 0.012 }], terms: [{ c: -0.01, power: 2 }] },
+  { model: 'constant', n: 1.33, k: 0 },
+] as unknown as readonly ModelParameters[];
+
+const COUNT = 4096;
+const REPEATS = 100;
+const waves_um = Float64Array.from({ length: COUNT }, (_, i) => 0.4 + (1.2 * i) / COUNT);
+const results = new Float64Array(COUNT);
+
+const bound = bindModel(BK7, {});
+for (const other of OTHERS) {
+  const { evaluate, evaluateFirst = evaluate } = bindModel(other, {});
+  const jet = new Float64Array(8);
+  for (let i = 0; i < 20_000; i++) evaluateFirst(waves_um[i % COUNT]!, jet);
+}
+
+function handIndex(): void {
+  for (let i = 0; i < COUNT; i++) {
+    const L = waves_um[i]!;
+    const x = L * L;
+    results[i] = Math.sqrt(1 + (B1 * x) / (x - C1) + (B2 * x) / (x - C2) + (B3 * x) / (x - C3));
+  }
+}
+
+function coreIndex(): void {
+  const { index } = bound;
+  if (!index) throw new Error('this fit has no short way to n');
+  for (let i = 0; i < COUNT; i++) results[i] = index(waves_um[i]!);
+}
+
+function handGroupIndex(): void {
+  for (let i = 0; i < COUNT; i++) {
+    const L = waves_um[i]!;
+    const x = L * L;
+    const r1 = 1 / (x - C1);
+    const r2 = 1 / (x - C2);
+    const r3 = 1 / (x - C3);
+    const n = Math.sqrt(1 + B1 * x * r1 + B2 * x * r2 + B3 * x * r3);
+    const slope = (-L * (B1 * C1 * r1 * r1 + B2 * C2 * r2 * r2 + B3 * C3 * r3 * r3)) / n;
+    results[i] = n - L * slope;
+  }
+}
+
+const jet = new Float64Array(8);
+function coreGroupIndex(): void {
+  const { evaluateFirst } = bound;
+  if (!evaluateFirst) throw new Error('this fit has no short way to dn/dL');
+  for (let i = 0; i < COUNT; i++) {
+    const L = waves_um[i]!;
+    evaluateFirst(L, jet);
+    results[i] = jet[0]! - L * jet[1]!;
+  }
+}
+
+race({
+  index: { hand: handIndex, core: coreIndex, result: () => results, evaluations: COUNT, repeats: REPEATS },
+  groupIndex: {
+    hand: handGroupIndex,
+    core: coreGroupIndex,
+    result: () => results,
+    evaluations: COUNT,
+    repeats: REPEATS,
+  },
+});
