@@ -11,6 +11,7 @@ import { run as runAnswer } from './cli/commands/answer.ts';
 import type { Context } from './cli/context.ts';
 import { loadCommand } from './cli/load-command.ts';
 import type { OptionValues } from './cli/options.ts';
+import { readLayers } from './cli/read-path.ts';
 import { saveFile } from './cli/save-file.ts';
 import { usageErrorJson, usageErrorText } from './cli/usage-error.ts';
 import { writeOut } from './cli/write-out.ts';
@@ -27,15 +28,16 @@ const NOT_UNDERSTOOD = 2;
 class FileTrouble extends Error {}
 
 function makeContext(options: OptionValues): Context {
-  let loaded: IndexedCatalogue | undefined;
+  const known = new Map<string | undefined, IndexedCatalogue>();
   const quiet = options.quiet === true;
   const { env } = process;
-  const catalogue = (): IndexedCatalogue => {
+  const catalogue = (ownFolder = options.catalog): IndexedCatalogue => {
+    const loaded = known.get(ownFolder);
     if (loaded) return loaded;
     try {
-      const { catalogue: opened, problems } = loadCatalogue({ ownFolder: options.catalog, env });
+      const { catalogue: opened, problems } = loadCatalogue({ ownFolder, env });
       if (!quiet) for (const p of problems) writeOut(2, `halfspace: ${ownProblemText(p)}\n`);
-      loaded = opened;
+      known.set(ownFolder, opened);
       return opened;
     } catch (error) {
       if (error instanceof CatalogueFileError) throw new FileTrouble(`${error.message}; ${error.remedy}`);
@@ -44,7 +46,7 @@ function makeContext(options: OptionValues): Context {
   };
   return {
     write: (text) => writeResult(text, options.output),
-    print: (text) => void writeOut(1, text),
+    print: (text) => writeOut(1, text),
     warn: (text) => void writeOut(2, text),
     version: VERSION,
     env,
@@ -98,7 +100,7 @@ function openScreen(options: OptionValues, context: Context): number | Promise<n
     context.warn(`halfspace: ${decision.sentence}\nsee halfspace --help\n`);
     return NOT_UNDERSTOOD;
   }
-  return import('./tui/main.tsx').then(({ runTui }) => runTui(options, context));
+  return import('./tui/main.tsx').then(({ runTui }) => runTui(options, { ...context, readLayers }));
 }
 
 function dispatch(): number | Promise<number> {

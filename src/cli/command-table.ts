@@ -2,6 +2,7 @@
  * The one table of commands. To add one: add its row here, write `commands/<name>.ts` exporting `run`, and register it in
  * load-command.ts. Help, man page, completions and the argument parser follow by themselves.
  */
+import { LOG_COMMANDS } from './log-commands.ts';
 import { OPTION_KEYS, type OptionKey, optionSpec } from './options.ts';
 import { SELECTION_COMMANDS } from './selection-commands.ts';
 
@@ -80,6 +81,7 @@ export const SCREEN_OPTIONS = [
   'ascii',
   'linear',
   'catalog',
+  'logFile',
   'noInput',
 ] as const satisfies readonly OptionKey[];
 
@@ -104,7 +106,15 @@ export const COMMANDS = [
       { name: 'INTO', meaning: 'medium beyond', completes: 'medium' },
       { name: 'WAVE', meaning: '633nm, 10.6um, 474THz, 10GHz, 1.96eV, 15800cm-1, d-line' },
     ],
-    options: [...QUESTION_OPTIONS, ...PATH_OPTIONS, ...BEAM_OPTIONS, ...FORM_OPTIONS, 'log', 'strict'],
+    options: [
+      ...QUESTION_OPTIONS,
+      ...PATH_OPTIONS,
+      ...BEAM_OPTIONS,
+      ...FORM_OPTIONS,
+      'log',
+      'logFile',
+      'strict',
+    ],
     examples: [
       { line: 'air fused-silica 633nm', meaning: 'normal incidence, one answer as text' },
       { line: 'air sapphire:o 1064nm --angle 45 --pol p', meaning: 'ordinary ray, p polarization' },
@@ -218,6 +228,7 @@ export const COMMANDS = [
     ],
   },
   ...SELECTION_COMMANDS,
+  ...LOG_COMMANDS,
   {
     name: 'config',
     summary: 'each setting, its value and where that comes from',

@@ -12,12 +12,15 @@ export interface Context {
   readonly ascii: boolean;
   /** Result; goes to the file of `--output` where one is given. */
   readonly write: (text: string) => void;
-  /** To standard output, whatever `--output` says. */
-  readonly print: (text: string) => void;
+  /** To standard output, whatever `--output` says. False where the reader has gone. */
+  readonly print: (text: string) => boolean;
   /** Warnings and errors, to standard error. */
   readonly warn: (text: string) => void;
-  /** Opens the catalogue (once), with the user's own entries; reports what is wrong with those on standard error. */
-  readonly catalogue: () => IndexedCatalogue;
+  /**
+   * Opens the catalogue (once), with the user's own entries, those of another folder where one is named; reports what is wrong
+   * with those on standard error.
+   */
+  readonly catalogue: (ownFolder?: string) => IndexedCatalogue;
   readonly clock: () => Moment;
 }
 

@@ -18,6 +18,7 @@ const LOADERS: Readonly<Record<Invocation['command'], () => Promise<CommandModul
   fit: () => import('./commands/fit.ts'),
   equivalent: () => import('./commands/equivalent.ts'),
   config: () => import('./commands/config.ts'),
+  log: () => import('./commands/log.ts'),
   verify: () => import('./commands/verify.ts'),
 };
 

@@ -15,6 +15,7 @@ import { type Problem, problem } from '../units/problem.ts';
 import { BEAM_OPTION_ROWS, PATH_OPTION_ROWS } from './beam-options.ts';
 import { FIT_OPTION_ROWS } from './fit-options.ts';
 import { GLASS_OPTION_ROWS } from './glass-options.ts';
+import { LOG_OPTION_ROWS } from './log-options.ts';
 import { choice, flag, type OptionSpec, type ValueOf, value } from './option-spec.ts';
 import { SELECTION_OPTION_ROWS } from './selection-options.ts';
 
@@ -107,25 +108,25 @@ export const OPTIONS = {
     name: 'json',
     meaning: 'one JSON document, SI units, full precision',
     group: 'form',
-    excludes: ['csv', 'markdown', 'plain', 'text', 'bibtex', 'csl'],
+    excludes: ['csv', 'markdown', 'latex', 'plain', 'text', 'bibtex', 'csl'],
   }),
   csv: flag({
     name: 'csv',
     meaning: 'comma-separated values with a header line',
     group: 'form',
-    excludes: ['json', 'markdown', 'plain'],
+    excludes: ['json', 'markdown', 'latex', 'plain'],
   }),
   markdown: flag({
     name: 'markdown',
     meaning: 'a Markdown table',
     group: 'form',
-    excludes: ['json', 'csv', 'plain'],
+    excludes: ['json', 'csv', 'latex', 'plain'],
   }),
   plain: flag({
     name: 'plain',
     meaning: 'one quantity a line, never wrapped or cut',
     group: 'form',
-    excludes: ['json', 'csv', 'markdown', 'text', 'bibtex', 'csl'],
+    excludes: ['json', 'csv', 'markdown', 'latex', 'text', 'bibtex', 'csl'],
   }),
 
   text: flag({
@@ -148,7 +149,7 @@ export const OPTIONS = {
   }),
   full: flag({
     name: 'full',
-    meaning: 'everything: every check value, every coefficient, every row of absorption',
+    meaning: 'everything: every check value, every coefficient, every row of absorption, every number of a record',
     group: 'form',
   }),
 
@@ -162,7 +163,7 @@ export const OPTIONS = {
     completes: 'file',
     parse: parsePath,
   }),
-  log: flag({ name: 'log', meaning: 'add the answer to the logbook too', group: 'output' }),
+  ...LOG_OPTION_ROWS,
   quiet: flag({
     name: 'quiet',
     short: 'q',

@@ -2,7 +2,7 @@
  * An old record against the same question asked again: which values differ, by how much, and what may have caused it. Every value
  * of the old answer counts, to the last bit; keys that a later version has added do not.
  */
-import { isJsonObject, type JsonValue } from './plain-json.ts';
+import { isJsonObject, type JsonValue, valueAt } from './plain-json.ts';
 import { idOfRecord, type LogRecord } from './record.ts';
 
 export interface Difference {
@@ -16,11 +16,18 @@ export interface Difference {
 }
 
 /**
- * `record-altered`: the old record was changed after it was kept; `question`: it is not the same question; `version` and
- * `catalogue`: another program or other data; `rounding`: only last bits differ, as between two machines;
- * `unexplained`: nothing of all that, so the program or the machine is to be doubted.
+ * `record-altered`: the old record was changed after it was kept; `question`: it is not the same question; `own-entry`: an
+ * entry of one's own has other content; `version` and `catalogue`: another program or other data; `rounding`: only last bits
+ * differ, as between two machines; `unexplained`: nothing of all that, so the program or the machine is to be doubted.
  */
-export type CauseCode = 'record-altered' | 'question' | 'version' | 'catalogue' | 'rounding' | 'unexplained';
+export type CauseCode =
+  | 'record-altered'
+  | 'question'
+  | 'own-entry'
+  | 'version'
+  | 'catalogue'
+  | 'rounding'
+  | 'unexplained';
 
 export interface Cause {
   readonly code: CauseCode;
@@ -57,12 +64,17 @@ function statedCauses(before: LogRecord, now: LogRecord): readonly Cause[] {
   const causes: Cause[] = [];
   if (idOfRecord(before) !== before.id)
     causes.push({ code: 'record-altered', text: `record ${before.id} was changed after it was kept` });
-  const question = differencesOf(before.question, now.question, '');
+  const differing = differencesOf(before.question, now.question, '').map(({ path }) => path);
+  const question = differing.filter((path) => !isOwnHash(path));
   if (question.length > 0)
+    causes.push({ code: 'question', text: `the questions differ in ${question.join(', ')}` });
+  for (const path of differing.filter(isOwnHash)) {
+    const key = valueAt(before.question, ...path.split('.').slice(0, -1), 'key');
     causes.push({
-      code: 'question',
-      text: `the questions differ in ${question.map(({ path }) => path).join(', ')}`,
+      code: 'own-entry',
+      text: `your own entry ${String(key)} has other content now than then`,
     });
+  }
   if (before.program.version !== now.program.version)
     causes.push({
       code: 'version',
@@ -72,6 +84,8 @@ function statedCauses(before: LogRecord, now: LogRecord): readonly Cause[] {
     causes.push({ code: 'catalogue', text: `catalogue ${nameOf(before)} then, ${nameOf(now)} now` });
   return causes;
 }
+
+const isOwnHash = (path: string): boolean => path.endsWith('.ownHash');
 
 const nameOf = ({ catalogue }: LogRecord): string => `${catalogue.hash} of ${catalogue.date}`;
 

@@ -29,12 +29,13 @@ export function isJsonObject(value: unknown): value is JsonObject {
   return typeof value === 'object' && value !== null && !Array.isArray(value);
 }
 
-/** The value at a path of keys; undefined where the path leaves the data. */
+/** The value at a path of keys, of lists by their numbers; undefined where the path leaves the data. */
 export function valueAt(value: JsonValue | undefined, ...path: readonly string[]): JsonValue | undefined {
   let at: JsonValue | undefined = value;
   for (const key of path) {
-    if (!isJsonObject(at) || !Object.hasOwn(at, key)) return undefined;
-    at = at[key];
+    if (Array.isArray(at)) at = at[Number(key)] as JsonValue | undefined;
+    else if (isJsonObject(at) && Object.hasOwn(at, key)) at = at[key];
+    else return undefined;
   }
   return at;
 }

@@ -1,5 +1,10 @@
-/** The question as plain JSON, every default filled in; a medium is named by its key and axis, or by its numbers. */
+/**
+ * The question as plain JSON, every default filled in; a medium is named by its key and axis, or by its numbers. The hash of the
+ * catalogue does not cover a person's own entries: those carry the hash of their own content.
+ */
+import { createHash } from 'node:crypto';
 import type { Layer, MediumSpec, Question } from '../answer/question.ts';
+import type { Material } from '../catalog/types.ts';
 import { type JsonObject, toPlainObject } from './plain-json.ts';
 
 /** What stands for a part that was not stated. */
@@ -33,8 +38,15 @@ function mediumEcho(medium: MediumSpec): JsonObject {
         key: medium.material.key,
         axis: medium.axis ?? null,
         own: medium.material.own ?? false,
+        ...(medium.material.own ? { ownHash: contentHash(medium.material) } : {}),
       })
     : toPlainObject({ literal: medium.literal, text: medium.text });
+}
+
+const HASH_DIGITS = 12;
+
+function contentHash(material: Material): string {
+  return createHash('sha256').update(JSON.stringify(material)).digest('hex').slice(0, HASH_DIGITS);
 }
 
 function layerEcho({ medium, thickness, ...rest }: Layer): JsonObject {

@@ -3,8 +3,9 @@
  * Numbers are exact; a cell is empty where the answer has no such value. Columns are only ever added, at the end.
  */
 import type { JsonValue } from './plain-json.ts';
-import { isJsonObject, valueAt } from './plain-json.ts';
+import { valueAt } from './plain-json.ts';
 import type { LogRecord } from './record.ts';
+import { mediumName } from './record-title.ts';
 
 type Column = readonly [name: string, value: (record: LogRecord) => JsonValue | undefined];
 
@@ -23,9 +24,9 @@ const COLUMNS: readonly Column[] = [
   ['version', (record) => record.program.version],
   ['catalogue_date', (record) => record.catalogue.date],
   ['catalogue_hash', (record) => record.catalogue.hash],
-  ['from', (record) => mediumText(record.question['from'])],
+  ['from', (record) => mediumName(record.question['from'])],
   ['layers', (record) => layersText(record.question['layers'])],
-  ['into', (record) => mediumText(record.question['into'])],
+  ['into', (record) => mediumName(record.question['into'])],
   ['wave', inQuestion('wave', 'text')],
   ['vacuumWavelength_m', inAnswer('wave', 'vacuumWavelength_m')],
   ['incidenceAngle_rad', inAnswer('geometry', 'incidenceAngle_rad')],
@@ -75,14 +76,6 @@ function cell(value: JsonValue | undefined): string {
   return /[",\r\n]|^\s|\s$/.test(text) ? `"${text.replaceAll('"', '""')}"` : text;
 }
 
-/** "sapphire:ordinary", or a literal medium as typed. */
-function mediumText(medium: JsonValue | undefined): string {
-  if (!isJsonObject(medium)) return '';
-  const { key, axis, text } = medium;
-  if (typeof key !== 'string') return typeof text === 'string' ? text : '';
-  return typeof axis === 'string' && axis !== 'isotropic' ? `${key}:${axis}` : key;
-}
-
 /** "magnesium-fluoride 1.15e-7 m; n=2.1 0.25 waves". */
 function layersText(layers: JsonValue | undefined): string {
   if (!Array.isArray(layers)) return '';
@@ -92,7 +85,7 @@ function layersText(layers: JsonValue | undefined): string {
       const waves = valueAt(layer, 'thickness', 'waves');
       const size =
         typeof length_m === 'number' ? ` ${length_m} m` : typeof waves === 'number' ? ` ${waves} waves` : '';
-      return mediumText(valueAt(layer, 'medium')) + size;
+      return mediumName(valueAt(layer, 'medium')) + size;
     })
     .join('; ');
 }

@@ -4,7 +4,7 @@
  */
 import { latexText } from './latex-text.ts';
 import type { LogRecord, RecordRow } from './record.ts';
-import { byHeading, doiLink, harmless, harmlessWords, versionsText } from './record-parts.ts';
+import { byHeading, doiLink, harmless, harmlessWords, unlinked, versionsText } from './record-parts.ts';
 import { shellCommandLines } from './shell-quote.ts';
 
 const COMMAND_WIDTH = 68;
@@ -13,7 +13,7 @@ export function recordLatex(record: LogRecord): string {
   const text = (raw: string): string => latexText(harmless(raw));
   const notes = [
     ...record.cautions.map((caution) => `Caution: ${text(caution.text)}`),
-    ...record.sources.map((source) => `Source: ${text(source.text)}${doiText(source.doi)}`),
+    ...record.sources.map((source) => `Source: ${text(unlinked(source))}${doiText(source.doi)}`),
     ...record.conventions.map((convention) => text(convention)),
     `Made with ${text(versionsText(record))}.`,
   ];

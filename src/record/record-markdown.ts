@@ -7,6 +7,7 @@ import {
   type FormStyle,
   harmless,
   harmlessWords,
+  unlinked,
   versionsText,
 } from './record-parts.ts';
 import { shellCommand } from './shell-quote.ts';
@@ -32,7 +33,7 @@ export function recordMarkdown(record: LogRecord, style: FormStyle = {}): string
     list(
       'Sources',
       record.sources.map((source) =>
-        source.doi === null ? text(source.text) : `${text(source.text)} <${doiLink(source.doi)}>`,
+        source.doi === null ? text(source.text) : `${text(unlinked(source))} <${doiLink(source.doi)}>`,
       ),
     ),
     list('Conventions', record.conventions.map(text)),

@@ -44,8 +44,19 @@ export function doiLink(doi: string): string {
   return `https://doi.org/${doi.replace(/[^\w\-.~:/()+;,=@!*'[\]&]/gu, encodeURIComponent)}`;
 }
 
-export function sourceText({ text, doi }: SourceLine): string {
-  return doi === null ? text : `${text} ${doiLink(doi)}`;
+/** The source with its link at the end, once. */
+export function sourceText(source: SourceLine): string {
+  const { doi } = source;
+  return doi === null ? source.text : `${unlinked(source)} ${doiLink(doi)}`;
+}
+
+/** The words of a source without the link that some of them end with: each form writes the link in its own way. */
+export function unlinked({ text, doi }: SourceLine): string {
+  if (doi === null) return text;
+  const link = `https://doi.org/${doi}`;
+  return text.toLowerCase().endsWith(link.toLowerCase())
+    ? text.slice(0, -link.length).replace(/[\s,;:]+(?:doi:?\s*)?$/i, '')
+    : text;
 }
 
 export function versionsText({ program, catalogue }: LogRecord): string {

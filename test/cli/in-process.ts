@@ -29,7 +29,10 @@ export async function run(args: readonly string[], surroundings: Surroundings = 
   let err = '';
   const context: Context = {
     write: (text) => (out += text),
-    print: (text) => (out += text),
+    print: (text) => {
+      out += text;
+      return true;
+    },
     warn: (text) => (err += text),
     version: '0.1.0',
     env: surroundings.env ?? {},

@@ -13,7 +13,8 @@ import { renderText } from '../render/text.ts';
 import { reportRefusal } from '../report-refusal.ts';
 
 /** Only the search for close names is asynchronous: an answer costs no turn of the event loop. */
-export const run: Command = ({ operands, options }, context) => {
+export const run: Command = (invocation, context) => {
+  const { operands, options } = invocation;
   const catalogue = context.catalogue();
   const question = readQuestion(operands, options, catalogue);
   const json = options.json === true;
@@ -23,7 +24,11 @@ export const run: Command = ({ operands, options }, context) => {
   if (isRefusal(answer)) return reportRefusal(answer, json, context);
   context.write(renderAnswer(answer, options, context, catalogue.hash));
   // A caution changes the status only under --strict.
-  return options.strict && answer.cautions.some((c) => c.level !== 'note') ? 1 : 0;
+  const status = options.strict && answer.cautions.some((c) => c.level !== 'note') ? 1 : 0;
+  if (!options.log && options.logFile === undefined) return status;
+  return import('../logbook/keep-answer.ts').then(
+    ({ keepAnswer }) => keepAnswer(question, answer, invocation, context) || status,
+  );
 };
 
 export function renderAnswer(
@@ -33,8 +38,9 @@ export function renderAnswer(
   catalogueHash: string,
 ): string {
   const style = { ascii: context.ascii };
-  if (options.json) return renderJson(answer, context.version, catalogueHash);
-  if (options.csv) return renderCsv(answer);
+  const ascii = options.ascii === true;
+  if (options.json) return renderJson(answer, context.version, catalogueHash, ascii);
+  if (options.csv) return renderCsv(answer, ascii);
   if (options.markdown) return renderMarkdown(answer, style);
   if (options.plain) return renderPlain(answer, style);
   return renderText(answer, style);
