@@ -7,6 +7,8 @@ import { RowList } from './row-list.ts';
 import type { PresentStyle, Shown } from './shown.ts';
 
 const EXACT_DIGITS = 6;
+/** An uncertainty below this part of its value lies among the last bits of the sum that made the value. */
+const RESOLVED = 1e-13;
 const PER_RADIAN = 180 / Math.PI;
 
 /** Reflectance or transmittance in per cent: `3.4794(4) %`. */
@@ -19,7 +21,8 @@ export function powerText(
   // Exactly nothing (total reflection) has no digits to doubt.
   if (value === 0) return formatQuantity(0, PER_CENT, { significant: 1 }, { style });
   const otherwise = precisionFor(value, guide ?? 0, EXACT_DIGITS);
-  return formatUncertainQuantity(value, uncertainty, PER_CENT, otherwise, { style });
+  const meant = uncertainty !== null && uncertainty > RESOLVED * Math.abs(value ?? 0) ? uncertainty : null;
+  return formatUncertainQuantity(value, meant, PER_CENT, otherwise, { style });
 }
 
 export function degreesText(angle_rad: number | null, decimals: number, style: PresentStyle): string {

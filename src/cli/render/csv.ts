@@ -1,5 +1,6 @@
 /** The answer as one CSV record under a header line (RFC 4180, LF): the same keys as the JSON, joined by dots. */
 import type { Answer } from '../../answer/answer.ts';
+import { toAscii } from '../../units/to-ascii.ts';
 
 /** Leaves of the answer in order; lists of cautions are joined by their codes, ranges split in two. */
 export function flatAnswer(answer: Answer): readonly (readonly [string, string])[] {
@@ -14,12 +15,13 @@ export function flatAnswer(answer: Answer): readonly (readonly [string, string])
   const { cautions, energy, ...rest } = answer;
   walk(rest, '');
   if (energy) walk(energy, 'energy');
-  rows.push(['cautions', cautions.map((c) => `${c.about}:${c.code}`).join(' ')]);
+  rows.push(['cautions', cautions.map((c) => `${c.about}:${c.code}`).join(';')]);
   return rows;
 }
 
-export function renderCsv(answer: Answer): string {
-  const rows = flatAnswer(answer);
+export function renderCsv(answer: Answer, ascii = false): string {
+  const all = flatAnswer(answer);
+  const rows = ascii ? all.map(([key, value]) => [key, toAscii(value)] as const) : all;
   return `${rows.map(([key]) => field(key)).join(',')}\n${rows.map(([, value]) => field(value)).join(',')}\n`;
 }
 

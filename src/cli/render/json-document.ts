@@ -13,10 +13,14 @@ export function jsonDocument(head: DocumentHead, body: object, ascii = false): s
   return `${ascii ? escaped(text) : text}\n`;
 }
 
-/** A value that is not finite becomes null. */
+/** A value that is not finite becomes null, a complex one as a whole. */
 export function finite(_: string, value: unknown): unknown {
-  return typeof value === 'number' && !Number.isFinite(value) ? null : value;
+  if (typeof value === 'number') return Number.isFinite(value) ? value : null;
+  return isComplex(value) && !(Number.isFinite(value.re) && Number.isFinite(value.im)) ? null : value;
 }
+
+const isComplex = (value: unknown): value is { readonly re: number; readonly im: number } =>
+  typeof value === 'object' && value !== null && 're' in value && 'im' in value;
 
 /** The same document in the bytes 0x20 to 0x7E. */
 export function escaped(json: string): string {

@@ -25,7 +25,7 @@ export function renderText(answer: Answer, style: PresentStyle): string {
     '',
     ...layerSection(answer, style),
     answer.layers.length > 0 ? 'Path' : 'Interface',
-    ...[...interfaceRows(answer, style), ...stackRows(answer, style)].map(oneValue),
+    ...[...interfaceRows(answer, style), ...stackRows(answer, style)].flatMap(oneValue),
     ...section('Window', windowRows(answer, style)),
     ...section('Pulse', pulseRows(answer, style)),
     ...beamSection(answer, style),
@@ -81,14 +81,23 @@ function sideBySide(a: string, b: string, head: number, value: number): readonly
   );
 }
 
-const oneValue = (row: Shown): string => `${pad(`  ${row.symbol}`, 18)}${pad(row.text, 20)}${row.label}`;
+const LABEL_AT = 38;
+
+/** Symbol, value, label; a label that has no room beside a long value stands below it. */
+function oneValue({ symbol, text, label }: Shown): readonly string[] {
+  const head = pad(`  ${symbol}`, 17);
+  const value = `${head} ${text}`;
+  const beside = `${pad(value, LABEL_AT - 1)} ${label}`;
+  if (length(beside) <= WIDTH) return [beside];
+  return [value, ...wrap(label, WIDTH - LABEL_AT).map((line) => ' '.repeat(LABEL_AT) + line)];
+}
 
 function beamSection(answer: Answer, style: PresentStyle): readonly string[] {
   return section('Beam', beamRows(answer, style));
 }
 
 function section(title: string, rows: readonly Shown[]): readonly string[] {
-  return rows.length === 0 ? [] : ['', title, ...rows.map(oneValue)];
+  return rows.length === 0 ? [] : ['', title, ...rows.flatMap(oneValue)];
 }
 
 function layerSection(answer: Answer, style: PresentStyle): readonly string[] {
