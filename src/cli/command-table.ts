@@ -2,6 +2,8 @@
  * The one table of commands. To add one: add its row here, write `commands/<name>.ts` exporting `run`, and register it in
  * load-command.ts. Help, man page, completions and the argument parser follow by themselves.
  */
+
+import { DESIGN_COMMANDS } from './design-commands.ts';
 import { LOG_COMMANDS } from './log-commands.ts';
 import { OPTION_KEYS, type OptionKey, optionSpec } from './options.ts';
 import { SELECTION_COMMANDS } from './selection-commands.ts';
@@ -69,6 +71,9 @@ export const PATH_OPTIONS = [
   'coherenceLength_m',
   'linewidth',
   'fieldProfile',
+  'cutAngle_rad',
+  'cutAzimuth_rad',
+  'retardance_waves',
 ] as const satisfies readonly OptionKey[];
 
 export const FORM_OPTIONS = ['json', 'csv', 'markdown', 'plain'] as const satisfies readonly OptionKey[];
@@ -217,6 +222,40 @@ export const COMMANDS = [
     ],
   },
   {
+    name: 'stream',
+    summary: 'a question a row: CSV or JSON lines in, answers out',
+    operands: [
+      {
+        name: 'FILE',
+        meaning:
+          'CSV with a header that names the columns: from, into or path, wave_nm or wave, and any option of a question: angle_deg, pol, temperature_C, power_mW; - is standard input',
+        optional: true,
+        many: true,
+        completes: 'file',
+      },
+    ],
+    options: [
+      'fixedFrom',
+      'fixedInto',
+      'fixedPath',
+      'fixedWave',
+      'columns',
+      'digits',
+      ...QUESTION_OPTIONS,
+      ...PATH_OPTIONS,
+      ...BEAM_OPTIONS,
+      'json',
+      'csv',
+      'full',
+    ],
+    examples: [
+      { line: 'stream questions.csv > answers.csv', meaning: 'each row with its answers behind it' },
+      { line: 'stream --from air --into n-bk7 --columns n,R < waves.csv', meaning: 'only the wave varies' },
+      { line: 'stream --json < questions.jsonl', meaning: 'one JSON object a line, in and out' },
+      { line: 'stream --columns list', meaning: 'every column of answers with its meaning' },
+    ],
+  },
+  {
     name: 'verify',
     summary: 'every published value of the catalogue, recomputed',
     operands: [],
@@ -229,6 +268,7 @@ export const COMMANDS = [
   },
   ...SELECTION_COMMANDS,
   ...LOG_COMMANDS,
+  ...DESIGN_COMMANDS,
   {
     name: 'config',
     summary: 'each setting, its value and where that comes from',

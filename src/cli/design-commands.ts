@@ -14,6 +14,39 @@ const SETTING_OPTIONS = [
 
 export const DESIGN_COMMANDS = [
   {
+    name: 'coat',
+    summary: 'coatings for a surface: quarter-wave films, V-coats, high reflectors',
+    operands: [
+      { name: 'FROM', meaning: 'medium of incidence', completes: 'medium' },
+      { name: 'INTO', meaning: 'medium to be coated', completes: 'medium' },
+      { name: 'WAVE', meaning: '633nm, 10.6um, 282THz' },
+    ],
+    options: [
+      ...SETTING_OPTIONS,
+      'polarization',
+      'limit',
+      'films',
+      'highFilm',
+      'lowFilm',
+      'pairs',
+      'wantedReflectance',
+      'json',
+      'csv',
+      'markdown',
+    ],
+    examples: [
+      { line: 'coat air n-bk7 550nm', meaning: 'what every film of the catalogue would do' },
+      {
+        line: 'coat air germanium 10.6um --films zinc-sulfide,barium-fluoride,znse --limit 1%',
+        meaning: 'with materials of your choice',
+      },
+      {
+        line: 'coat air fused-silica 633nm --high tantalum-pentoxide-film --low silicon-dioxide-film --reflect 99.9%',
+        meaning: 'pairs for a mirror, with the spread of the process',
+      },
+    ],
+  },
+  {
     name: 'crystal',
     summary: 'a birefringent crystal: index against direction, walk-off, faces, waveplates',
     operands: [

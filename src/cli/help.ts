@@ -25,9 +25,12 @@ const COLUMN = 26;
 export const GROUP_TITLES: Readonly<Record<OptionGroup, string>> = {
   question: 'The question',
   path: 'Paths of layers',
+  crystal: 'Crystals',
+  coating: 'The coating',
   beam: 'The beam',
   selection: 'Choosing',
   fit: 'The fit',
+  batch: 'Many questions',
   form: 'Form of the answer',
   output: 'Output',
   general: 'General',

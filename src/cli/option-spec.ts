@@ -1,7 +1,18 @@
 /** What the table of options says about one option. Help, man page, completions and the parser read nothing else. */
 import type { Problem } from '../units/problem.ts';
 
-export type OptionGroup = 'question' | 'path' | 'beam' | 'selection' | 'fit' | 'form' | 'output' | 'general';
+export type OptionGroup =
+  | 'question'
+  | 'path'
+  | 'crystal'
+  | 'coating'
+  | 'beam'
+  | 'selection'
+  | 'fit'
+  | 'batch'
+  | 'form'
+  | 'output'
+  | 'general';
 
 interface AnyOption {
   /** Long name without dashes. */

@@ -12,7 +12,10 @@ import { parseSalinity } from '../units/parse-salinity.ts';
 import { parseTemperature } from '../units/parse-temperature.ts';
 import { parseTolerances } from '../units/parse-tolerance.ts';
 import { type Problem, problem } from '../units/problem.ts';
+import { BATCH_OPTION_ROWS } from './batch-options.ts';
 import { BEAM_OPTION_ROWS, PATH_OPTION_ROWS } from './beam-options.ts';
+import { COAT_OPTION_ROWS } from './coat-options.ts';
+import { CRYSTAL_OPTION_ROWS } from './crystal-options.ts';
 import { FIT_OPTION_ROWS } from './fit-options.ts';
 import { GLASS_OPTION_ROWS } from './glass-options.ts';
 import { LOG_OPTION_ROWS } from './log-options.ts';
@@ -99,9 +102,13 @@ export const OPTIONS = {
   }),
 
   ...PATH_OPTION_ROWS,
+  ...CRYSTAL_OPTION_ROWS,
+  ...COAT_OPTION_ROWS,
   ...BEAM_OPTION_ROWS,
   ...SELECTION_OPTION_ROWS,
   ...FIT_OPTION_ROWS,
+  ...GLASS_OPTION_ROWS,
+  ...BATCH_OPTION_ROWS,
   ...GLASS_OPTION_ROWS,
 
   json: flag({
@@ -149,7 +156,8 @@ export const OPTIONS = {
   }),
   full: flag({
     name: 'full',
-    meaning: 'everything: every check value, every coefficient, every row of absorption, every number of a record',
+    meaning:
+      'everything: every check value, every coefficient, every row of absorption, every number of a record',
     group: 'form',
   }),
 

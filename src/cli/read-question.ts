@@ -1,5 +1,5 @@
 /** From operands and options to the question, or to the refusal that says what is not understood. */
-import type { Layer, MediumSpec, Question, Tolerances, WaveSpec } from '../answer/question.ts';
+import type { CrystalCut, Layer, MediumSpec, Question, Tolerances, WaveSpec } from '../answer/question.ts';
 import { makeQuestion } from '../answer/question.ts';
 import type { IndexedCatalogue } from '../catalog/entries.ts';
 import { isRefusal, type Refusal, refuse } from '../medium/refusal.ts';
@@ -34,6 +34,14 @@ export function readQuestion(
   if (isRefusal(layers)) return layers;
   const stated = questionOptions(options, wave);
   if (isRefusal(stated)) return stated;
+  if (options.retardance_waves !== undefined && !stated.cut) {
+    return refuse(
+      'retardance-without-cut',
+      2,
+      '--retardance says nothing here without --cut-angle',
+      'give the cut too (--cut-angle 90 for an axis in the surface), or ask halfspace crystal',
+    );
+  }
   const { beam } = stated;
   if (options.nonlinearIndex && beam && 'profile' in beam && beam.diameter_m === undefined) {
     return refuse(
@@ -69,6 +77,17 @@ export function questionOptions(
       : options.coherenceLength_m,
     pulseDuration_s: options.pulseDuration_s,
     fieldProfile: options.fieldProfile,
+    cut: readCut(options),
+  };
+}
+
+function readCut(options: OptionValues): CrystalCut | undefined {
+  const { cutAngle_rad, cutAzimuth_rad, retardance_waves } = options;
+  if (cutAngle_rad === undefined) return undefined;
+  return {
+    angle_rad: cutAngle_rad,
+    azimuth_rad: cutAzimuth_rad ?? 0,
+    ...(retardance_waves === undefined ? {} : { retardance_waves }),
   };
 }
 

@@ -1,0 +1,88 @@
+/** Coatings as Markdown: a heading, one table for each kind of design, cautions as a list. */
+import type { CoatingReport } from '../../answer/coating-shape.ts';
+import { coatHeadline } from '../../present/coat-headline.ts';
+import {
+  bandCell,
+  DATA_END_NOTE,
+  hasOpenBand,
+  indexCell,
+  lengthCell,
+  lengthPrefix,
+  percentCell,
+  rangeCell,
+} from '../../present/coat-rows.ts';
+import type { PresentStyle } from '../../present/shown.ts';
+import { formatNumber } from '../../units/format-number.ts';
+import { toAscii } from '../../units/to-ascii.ts';
+
+export function coatMarkdown(report: CoatingReport, style: PresentStyle): string {
+  const prefix = lengthPrefix(report);
+  const unit = `${prefix.shown}m`;
+  const { bare, ideal, singleFilms, twoLayers, mirror, limit, cautions } = report;
+  const below = `R < ${percentCell(limit, style)} % (${unit})`;
+  const idealText =
+    ideal?.n != null && ideal.thickness_m !== null
+      ? [
+          `Ideal single film: n ${formatNumber(ideal.n, { decimals: 4 }, style)}, ${lengthCell(ideal.thickness_m, prefix, style)} ${unit}, R ${percentCell(ideal.R, style)} %`,
+          '',
+        ]
+      : [];
+  const lines = [
+    `### ${cell(coatHeadline(report, style))}`,
+    '',
+    `Bare surface: R ${percentCell(bare.R, style)} %`,
+    '',
+    ...idealText,
+    ...table(
+      ['film', 'n', `quarter wave (${unit})`, 'R (%)', 'R over the spread (%)', below],
+      singleFilms.map((f) => [
+        f.film.key,
+        indexCell(f, style),
+        lengthCell(f.thickness_m, prefix, style),
+        percentCell(f.R, style),
+        rangeCell(f, style),
+        bandCell(f.band, prefix, style),
+      ]),
+    ),
+    ...table(
+      ['outer', 'inner', `outer (${unit})`, `inner (${unit})`, 'R (%)', 'R over the spread (%)', below],
+      twoLayers.flatMap((d) =>
+        d.solutions.map((s) => [
+          d.outer.key,
+          d.inner.key,
+          lengthCell(s.outerThickness_m, prefix, style),
+          lengthCell(s.innerThickness_m, prefix, style),
+          percentCell(s.R, style),
+          rangeCell(s, style),
+          bandCell(s.band, prefix, style),
+        ]),
+      ),
+    ),
+    ...(mirror
+      ? [
+          `High reflector: H ${mirror.high.key} ${lengthCell(mirror.highThickness_m, prefix, style)} ${unit}, L ${mirror.low.key} ${lengthCell(mirror.lowThickness_m, prefix, style)} ${unit}`,
+          '',
+          ...table(
+            ['pairs', 'layers', 'R (%)', 'R over the spread (%)'],
+            mirror.rows.map((r) => [
+              String(r.pairs),
+              String(r.layers),
+              percentCell(r.R, style),
+              rangeCell(r, style),
+            ]),
+          ),
+        ]
+      : []),
+    ...(hasOpenBand(report) ? [DATA_END_NOTE.replace('*', '\\*'), ''] : []),
+    ...cautions.map((c) => `- **${c.level}** ${c.text}`),
+  ];
+  return `${(style.ascii ? lines.map(toAscii) : lines).join('\n').trimEnd()}\n`;
+}
+
+function table(heads: readonly string[], rows: readonly (readonly string[])[]): readonly string[] {
+  if (rows.length === 0) return [];
+  return [line(heads), line(heads.map(() => '---')), ...rows.map((r) => line(r.map(cell))), ''];
+}
+
+const line = (cells: readonly string[]): string => `| ${cells.join(' | ')} |`;
+const cell = (text: string): string => text.replaceAll('|', '\\|').replaceAll('*', '\\*');
