@@ -99,4 +99,43 @@ export const SELECTION_COMMANDS = [
       { line: 'compare n-bk7 fused-silica calcium-fluoride 400nm 1064nm', meaning: 'media at two waves' },
     ],
   },
+  {
+    name: 'order-check',
+    summary: 'what to settle before a part is ordered, on one page',
+    operands: [
+      { name: 'FROM', meaning: 'medium before the part, mostly air', completes: 'medium' },
+      {
+        name: 'LAYER',
+        meaning: 'the part and its films in order, MEDIUM@THICKNESS: zinc-selenide@3mm',
+        optional: true,
+        many: true,
+        completes: 'medium',
+      },
+      { name: 'INTO', meaning: 'medium behind it', completes: 'medium' },
+      { name: 'WAVE', meaning: 'one or more', many: true },
+    ],
+    options: [
+      'angle_rad',
+      'polarization',
+      'airWavelength',
+      'temperature_K',
+      'power_W',
+      'beamDiameter_m',
+      'profile',
+      'catalog',
+      'json',
+      'markdown',
+    ],
+    examples: [
+      { line: 'order-check air zinc-selenide@3mm air 10.6um', meaning: 'a bare window' },
+      {
+        line: 'order-check air zinc-selenide@3mm air 10.6um --power 30W --beam 6mm',
+        meaning: 'with its beam: stray powers, heat, aperture',
+      },
+      {
+        line: 'order-check air sapphire@2mm air 532nm 3um --markdown',
+        meaning: 'for a request, at two waves',
+      },
+    ],
+  },
 ] as const satisfies readonly CommandSpec[];

@@ -20,7 +20,7 @@ export function compareText(report: CompareReport, style: NumberStyle): string {
   return page(
     [
       ...waves.flatMap((wave) => [
-        `At ${waveWords(wave.spec)}`,
+        `At ${waveWords(wave.spec, style)}`,
         '',
         ...blocks(titles, waveRows(wave, style), style),
         ...gaps(report, wave).flatMap((line) => paragraph(line)),
@@ -99,7 +99,7 @@ export function compareMarkdown(report: CompareReport, style: NumberStyle): stri
   const cautions = cautionsOf(report);
   const lines = [
     ...waves.flatMap((wave) => [
-      `### At ${waveWords(wave.spec)}`,
+      `### At ${waveWords(wave.spec, style)}`,
       '',
       ...markdownTable(titles, waveRows(wave, style)),
       '',

@@ -28,8 +28,8 @@ const WIDEST = 80;
 
 export function findText(report: FindReport, order: SortOrder, style: NumberStyle): string {
   const { hits, examined, criteria, wave } = report;
-  const asked = conditionWords(criteria);
-  const heading = [...asked, ...(wave ? [`at ${waveWords(wave.spec)}`] : [])].join(', ');
+  const asked = conditionWords(criteria, style);
+  const heading = [...asked, ...(wave ? [`at ${waveWords(wave.spec, style)}`] : [])].join(', ');
   const shown = fitting(columnsFor(criteria, order, hits), hits, style);
   const marks = hits.flatMap((hit) => marksOf(hit.facts, hit.medium));
   const notes = shown.flatMap(({ note }) => (note === undefined ? [] : [note]));

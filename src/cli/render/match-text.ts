@@ -21,13 +21,13 @@ import { page, paragraph } from './page.ts';
 
 export function matchText(report: MatchReport, criteria: Criteria, style: NumberStyle): string {
   const { target, wave, matches, mixtures } = report;
-  const asked = conditionWords(criteria);
+  const asked = conditionWords(criteria, style);
   const known = howKnown(target.medium);
   const conditions = conditionsText(target.medium, style);
   const heading = [
     `Media beside ${mediumTitle(target.medium)}, n ${indexText(target.medium, known, style)}`,
     ...(conditions === '' ? [] : [conditions]),
-    `at ${waveWords(wave.spec)}`,
+    `at ${waveWords(wave.spec, style)}`,
     ...asked,
   ].join(', ');
   return page(
