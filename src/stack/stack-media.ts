@@ -87,9 +87,9 @@ export function setIncidence(stack: StackMedia, kappa2Re: number, kappa2Im: numb
       }
     }
     const real = wi === 0 && epsIm === 0 && muIm === 0;
-    // Below this |kappa|^2 the quotient sin/kappa would leave the range of doubles.
+    // Below this |kappa|^2 the quotient sin/kappa would leave the range of doubles. Only real media come here: passive
+    // complex eps and mu cannot have a real positive product.
     const critical = wr * wr + wi * wi < 1e-300;
-    if (critical && !real) kr = 1e-150;
     kind[m] = !real ? COMPLEX : critical ? CRITICAL : wr > 0 ? PROPAGATING : EVANESCENT;
     media[at + KAPPA2] = wr;
     media[at + KAPPA2 + 1] = wi;

@@ -60,7 +60,10 @@ describe('field inside', () => {
 
   it('absorbed power per length integrates to the absorptance of each layer', () => {
     fc.assert(
-      fc.property(path(5, 3e-7), wavelength_m, angle_rad, (stack, wave, angle) => {
+      fc.property(path(5, 3e-7), wavelength_m, angle_rad, (random, wave, angle) => {
+        // Thin enough for the steps below to follow the decay in a metal.
+        const layers = random.layers.map((x) => ({ ...x, thickness_m: Math.min(x.thickness_m, 2e-7) }));
+        const stack = { ...random, layers };
         const result = coherentStack(stack, wave, angle);
         for (const side of sides) {
           const field = solveField(stack, wave, angle, side);

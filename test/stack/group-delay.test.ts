@@ -76,6 +76,8 @@ describe('group delay', () => {
         logarithmic(3e-7, 3e-6),
         between(0, 1.3),
         (from, layers, exit, wave, angle) => {
+          // At the critical angle of the exit medium the derivative does not exist, and near it differences fail.
+          fc.pre(Math.abs((from.n.re * Math.sin(angle)) / exit.n.re - 1) > 0.05);
           const omega = (2 * Math.PI * c) / wave;
           const path: DispersivePath = {
             incidence: dispersive(from, omega),

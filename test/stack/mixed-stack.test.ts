@@ -52,6 +52,13 @@ describe('coherence', () => {
     expect(other.layers.map((x) => x.coherent)).toEqual([true, false, true]);
   });
 
+  it('is kept where the wave dies within a wavelength: there is no fringe', () => {
+    const metal = slab(layerFromIndex(1e-2, 0.5, 4));
+    expect(mixedStack({ incidence: air, layers: [metal], exit: air }, 5e-7, 0, 0).layers[0]?.coherent).toBe(
+      true,
+    );
+  });
+
   it('of infinite length gives the coherent stack', () => {
     fc.assert(
       fc.property(path(8, 1e-3), wavelength_m, angle_rad, (stack, wave, angle) => {
@@ -75,7 +82,7 @@ describe('energy', () => {
         fc.array(fc.oneof(layer(1e-6), layer(1e-7), thick), { maxLength: 14 }),
         substance,
         wavelength_m,
-        angle_rad,
+        between(0, 1.55),
         (incidence, layers, exit, wave, angle) => {
           const result = mixedStack({ incidence, layers, exit }, wave, angle, 1e-5);
           for (const side of sides) {

@@ -28,11 +28,12 @@ describe('windowFractions', () => {
         loss,
         wavelength_m,
         angle_rad,
-        (n0, n, k, nExit, kExit, wave, angle) => {
+        logarithmic(1.5, 300),
+        (n0, n, k, nExit, kExit, wave, angle, waves) => {
           const before = substanceFromIndex(n0);
           const plate = substanceFromIndex(n, k);
           const after = substanceFromIndex(nExit, kExit);
-          const thickness_m = 1e-3;
+          const thickness_m = waves * wave;
           const closed = windowFractions(before, plate, thickness_m, after, wave, angle);
           const mixed = mixedStack(
             { incidence: before, layers: [{ ...plate, thickness_m, coherent: false }], exit: after },
@@ -48,6 +49,30 @@ describe('windowFractions', () => {
             expect(closed[side].A).toBeCloseTo(mixed[side].A, 9);
             expect(closed[side].R + closed[side].T + closed[side].A).toBeCloseTo(1, 11);
           }
+        },
+      ),
+    );
+  });
+
+  it('adds up to one where a strong absorber lets forward and backward wave beat', () => {
+    fc.assert(
+      fc.property(
+        between(1.2, 4),
+        between(0.01, 0.3),
+        between(1, 4),
+        between(1, 4),
+        angle_rad,
+        (n, k, nExit, waves, angle) => {
+          const { s, p } = windowFractions(
+            air,
+            substanceFromIndex(n, k),
+            waves * 1e-6,
+            substanceFromIndex(nExit),
+            1e-6,
+            angle,
+          );
+          expect(s.R + s.T + s.A).toBeCloseTo(1, 12);
+          expect(p.R + p.T + p.A).toBeCloseTo(1, 12);
         },
       ),
     );
