@@ -37,7 +37,11 @@ export function Screen({ state, world }: ScreenProps) {
       ) : (
         <Picture state={state} world={world} />
       )}
-      <Lines text={noticeView(notice, plan.notice, columns, pen).join('\n')} />
+      {page ? (
+        <PageNotice state={state} page={page} world={world} />
+      ) : (
+        <Lines text={noticeView(notice, plan.notice, columns, pen).join('\n')} />
+      )}
       <Lines text={footerView(state, columns, pen, world)} />
     </Box>
   );
@@ -70,10 +74,19 @@ function Strip({ state, world }: ScreenProps) {
 
 function WholePage({ state, page, world }: ScreenProps & { readonly page: Page }) {
   const { plan } = sceneOf(state, world);
-  const pen = penOf(state);
-  const rows = pageRows(state, world);
   const lines = fullLines(state, page, world, plan.columns);
-  const drawn = pageView(lines, page.top, rows - 1, plan.columns, pen);
-  const status = lineOfSpans(pageStatus(page, pageLength(state, world), rows - 1), plan.columns, pen);
-  return <Lines text={[...drawn, status].join('\n')} />;
+  const drawn = pageView(lines, page.top, pageRows(state, world), plan.columns, penOf(state));
+  return <Lines text={drawn.join('\n')} />;
+}
+
+/** Below a page: what it is narrowed to and how much is out of sight, then what was done last. */
+function PageNotice({ state, page, world }: ScreenProps & { readonly page: Page }) {
+  const { plan, notice } = sceneOf(state, world);
+  const pen = penOf(state);
+  const status = pageStatus(page, pageLength(state, world), pageRows(state, world));
+  const lines = [
+    lineOfSpans(status, plan.columns, pen),
+    ...noticeView(notice, plan.notice - 1, plan.columns, pen),
+  ];
+  return <Lines text={lines.join('\n')} />;
 }

@@ -43,7 +43,7 @@ export const POLARIZATION_FIELD: Field = {
   id: 'polarization',
   label: '',
   kind: 'choice',
-  hint: 'polarization: s, p, or unpolarized (the mean of both)',
+  hint: 'polarization: s, p, or unpolarized (the mean; the strip shows s)',
   applies: () => true,
   show: ({ question: { polarization } }) =>
     polarization === 'unpolarized' ? 'unpolarized' : `${polarization} polarized`,

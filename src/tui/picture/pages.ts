@@ -42,7 +42,8 @@ export function pageLength(state: State, world: World): number {
 export function halfLines(state: State, side: Side, columns: number): readonly PageLine[] {
   const answer = answerOf(state);
   if (!answer) return [pageLine('no answer, hence no sources')];
-  return finish(sourceLines(answer[side], { ascii: isAscii(state) }), state, columns);
+  const lines = sourceLines(answer[side], { ascii: isAscii(state) });
+  return finish(state.page ? filtered(lines, state.page) : lines, state, columns);
 }
 
 /** All lines of a page that has the whole width. */

@@ -39,7 +39,7 @@ function makeScene(state: State, world: World): Scene {
   const notice = noticeLines(state, world, columns);
   const plan = planScreen(state.size, {
     head: wide.length,
-    notice: Math.max(2, notice.length),
+    notice: noticeNeeds(state, notice),
     body: longest(blocks),
   });
   const head = plan.kind === 'full' ? wide : flowItems(blocks.wave, columns);
@@ -49,6 +49,11 @@ function makeScene(state: State, world: World): Scene {
     blocks: arrangeAll(blocks, plan, state.focus),
     notice: notice.slice(0, plan.notice),
   };
+}
+
+/** A page has a line of its own below, whatever else is said. */
+function noticeNeeds(state: State, notice: readonly NoticeLine[]): number {
+  return Math.max(2, notice.length + (state.page ? 1 : 0));
 }
 
 function longest(blocks: Blocks): number {

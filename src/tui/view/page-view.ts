@@ -30,5 +30,5 @@ export function pageStatus(page: Page, length: number, rows: number): readonly S
     : [];
   const below = Math.max(0, length - page.top - rows);
   const more = below > 0 ? `${below} more lines below` : page.top > 0 ? 'end' : '';
-  return [...filter, span(more, 'aside')];
+  return [...(page.filter ? filter : [span('  ')]), span(more, 'aside')];
 }
