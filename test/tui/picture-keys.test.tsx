@@ -320,7 +320,8 @@ describe('moving about', () => {
     open({ question: makeQuestion(index(1), index(1.5), vacuumWave(633e-9)) }).type('<down><down>');
     press('<left>', () => stage.state.place === 'from');
     press('<right>', () => stage.state.place === 'interface');
-    press('<up>', () => stage.state.focus === 'interface:R');
+    stage.type('<home>');
+    press('<down>', () => stage.state.focus === 'interface:R');
     expect(await noticeOf()).toMatch(/reflectance: y copies it, s shows its source/);
   });
 });
