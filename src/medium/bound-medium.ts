@@ -14,6 +14,7 @@ import { type BoundFit, bestFit, bindFit, reaches } from './bound-fit.ts';
 import { fitPreference } from './fit-preference.ts';
 import { type LiteralMedium, literalOptics } from './literal.ts';
 import { mediumAtWave } from './optics-at.ts';
+import { isPassiveIndex } from './passive-index.ts';
 import { isRefusal, type Refusal } from './refusal.ts';
 
 /** What `indexAt` found. */
@@ -75,9 +76,6 @@ export function bindMaterial(
       first && chooseFit(material, first, wave, (fit) => fitPreference(fit, material, wave, conditions));
     return choice && all.find((c) => c.fit === choice.fit);
   };
-  const chosen = (vacuum_um: number, air_um: number): BoundFit | undefined =>
-    choose(vacuum_um, air_um) ?? (extrapolate ? nearest({ vacuum_um, air_um }) : undefined);
-
   const mu = new Float64Array(2);
   const index = new Float64Array(2);
   return {
@@ -86,17 +84,20 @@ export function bindMaterial(
       const used = inside ?? (extrapolate ? nearest({ vacuum_um, air_um }) : undefined);
       if (!used) return REFUSED;
       used.evaluate(vacuum_um, air_um, out, at);
-      return !Number.isFinite(out[at]!) ? REFUSED : inside ? INSIDE : EXTRAPOLATED;
+      if (!Number.isFinite(out[at]!)) return REFUSED;
+      if (inside) return INSIDE;
+      return isPassiveIndex(out[at]!, out[at + 1]!) ? EXTRAPOLATED : REFUSED;
     },
     reachAt(vacuum_um, air_um) {
       if (axes.some((fits) => fits.some((fit) => reaches(fit, vacuum_um, air_um)))) return INSIDE;
       return extrapolate && axes.length > 0 ? EXTRAPOLATED : REFUSED;
     },
     opticsAt(vacuum_um, air_um) {
-      const used = chosen(vacuum_um, air_um);
+      const inside = choose(vacuum_um, air_um);
+      const used = inside ?? (extrapolate ? nearest({ vacuum_um, air_um }) : undefined);
       if (!used) return undefined;
       used.evaluate(vacuum_um, air_um, index, 0);
-      if (!Number.isFinite(index[0]!)) return undefined;
+      if (!Number.isFinite(index[0]!) || !(inside || isPassiveIndex(index[0]!, index[1]!))) return undefined;
       const n = { re: index[0]!, im: index[1]! };
       const { permeability } = used.model();
       if (!permeability) return opticsFromIndex(n, ONE);

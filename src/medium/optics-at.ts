@@ -25,6 +25,7 @@ import { toAbsolute } from './air-reference.ts';
 import type { CautionNote } from './caution.ts';
 import { fitPreference } from './fit-preference.ts';
 import { hazardLevel } from './hazard-level.ts';
+import { isPassiveIndex } from './passive-index.ts';
 import { lengthText, rangeText } from './range-text.ts';
 import { type Refusal, refuse } from './refusal.ts';
 
@@ -89,6 +90,14 @@ export function mediumAtWave(
       'no-index-here',
       3,
       `the fit of ${material.name} gives no index at ${lengthText(wave.vacuum_um)}: it runs into a pole`,
+      `stay near its range, ${rangeText(fit.range_um)}`,
+    );
+  }
+  if (!choice.inRange && !isPassiveIndex(jet[N]!, jet[K]!)) {
+    return refuse(
+      'no-index-here',
+      3,
+      `the fit of ${material.name}, continued to ${lengthText(wave.vacuum_um)}, gives n = ${jet[N]!.toPrecision(3)}, k = ${jet[K]!.toPrecision(3)}, which no medium has`,
       `stay near its range, ${rangeText(fit.range_um)}`,
     );
   }
@@ -342,11 +351,14 @@ function outsideRange(material: Material, axis: Axis, wave: FitWave): Refusal {
     .map(rangeText)
     .join(' and ');
   const which = axis === 'isotropic' ? '' : `, ${axis} axis,`;
+  const measured = (material.reflectanceTables?.length ?? 0) > 0;
   return refuse(
     'outside-fit-range',
     3,
     `${material.name}${which} has no data at ${lengthText(wave.vacuum_um)}: its fits cover ${ranges}`,
-    'choose a wave inside, or add --extrapolate to insist',
+    measured
+      ? `choose a wave inside, add --extrapolate to insist, or read reflectance measured in air with halfspace material ${material.key}`
+      : 'choose a wave inside, or add --extrapolate to insist',
   );
 }
 

@@ -54,9 +54,33 @@ export function parseLiteralMedium(text: string): TypedMedium | Problem {
     if (values[key] !== undefined) return problem('not-a-medium', `${key} is given twice`, 'give it once');
     values[key] = value;
   }
-  if (values.no !== undefined || values.ne !== undefined) return fromPrincipalIndices(values);
-  return values.n === undefined && values.k === undefined ? fromPermittivity(values) : fromIndex(values);
+  const medium =
+    values.no !== undefined || values.ne !== undefined
+      ? fromPrincipalIndices(values)
+      : values.n === undefined && values.k === undefined
+        ? fromPermittivity(values)
+        : fromIndex(values);
+  return isProblem(medium) ? medium : (beyondReason(medium) ?? medium);
 }
+
+/** Far beyond any medium; numbers past these would overflow on their way to an answer. */
+const GREATEST = 1e20;
+const SMALLEST = 1e-20;
+
+function beyondReason(medium: TypedMedium): Problem | undefined {
+  for (const [key, value] of Object.entries(medium) as [string, Complex | number][]) {
+    const size = typeof value === 'number' ? value : Math.hypot(value.re, value.im);
+    if (size > GREATEST || (typeof value !== 'number' && size < SMALLEST))
+      return problem(
+        'out-of-range',
+        `${NAMES[key] ?? key} is ${size > GREATEST ? 'greater than 1e20' : 'smaller than 1e-20'}`,
+        'no medium is: check the exponent',
+      );
+  }
+  return undefined;
+}
+
+const NAMES: Readonly<Record<string, string>> = { lossTangent: 'tand', conductivity_S_per_m: 'sigma' };
 
 function keyOf(name: string): Key | undefined {
   const plain = name.trim().normalize('NFKC').toLowerCase();
