@@ -126,7 +126,7 @@ function axisLine(plot: Plot, width: number, columns: number, pen: Pen): string 
       cells[start + i] = c;
     });
   };
-  put(`${plot.ends[0]} `, 0);
+  put(` ${plot.ends[0]} `, 0);
   put(` ${plot.ends[1]}`, width);
   if (plot.present) {
     const { text, x } = plot.present;
