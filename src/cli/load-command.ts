@@ -15,6 +15,7 @@ const LOADERS: Readonly<Record<Invocation['command'], () => Promise<CommandModul
   find: () => import('./commands/find.ts'),
   match: () => import('./commands/match.ts'),
   compare: () => import('./commands/compare.ts'),
+  'order-check': () => import('./commands/order-check.ts'),
   fit: () => import('./commands/fit.ts'),
   coat: () => import('./commands/coat.ts'),
   crystal: () => import('./commands/crystal.ts'),
