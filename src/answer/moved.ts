@@ -57,11 +57,16 @@ export function moved({ from, layers, into, incidenceAngle_rad }: Unmoved, offse
   };
 }
 
+/** However far it is moved, this much of n is left. */
+const LEAST_SHARE = 1e-6;
+
 /** The medium with its index moved: by offsets of n and k, and along its dispersion by a shift of wavelength. */
 export function movedOptics(side: MediumSide, dn: number, dk: number, shift_um: number): Optics {
   if (dn === 0 && dk === 0 && shift_um === 0) return side.optics;
   const { optics, jet } = side;
-  const n = optics.n.re + jet[N + 1]! * shift_um + dn;
+  const moved = optics.n.re + jet[N + 1]! * shift_um + dn;
+  // The uncertainty of a metal may exceed its n; past zero the wave would run backwards and the metal amplify.
+  const n = optics.n.re > 0 ? Math.max(LEAST_SHARE * optics.n.re, moved) : moved;
   const k = Math.max(0, optics.n.im + jet[K + 1]! * shift_um + dk);
   return opticsFromIndex({ re: n, im: k }, optics.mu);
 }

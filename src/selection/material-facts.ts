@@ -9,6 +9,8 @@ export interface MaterialFacts {
   readonly formula: string | null;
   /** Where the bulk transmits usefully, vacuum wavelengths. */
   readonly transparency_m: readonly [number, number] | null;
+  /** What that range means, in words. */
+  readonly transparencyBasis: string;
   /** "no", "slightly" or "yes". */
   readonly hygroscopic: string | null;
   readonly hazardLevel: HazardLevel;
@@ -23,6 +25,8 @@ export interface MaterialFacts {
   readonly factsSource: string | null;
 }
 
+const USUAL_BASIS = 'about 10 % left at its limits over a few mm';
+
 export function materialFacts(material: Material): MaterialFacts {
   const { transparency_um, handling = {} } = material;
   return {
@@ -31,6 +35,7 @@ export function materialFacts(material: Material): MaterialFacts {
     class: material.class,
     formula: material.formula ?? null,
     transparency_m: transparency_um ? [fromMicro(transparency_um[0]), fromMicro(transparency_um[1])] : null,
+    transparencyBasis: material.transparencyBasis ?? USUAL_BASIS,
     hygroscopic: handling.hygroscopic ?? null,
     hazardLevel: hazardLevel(material),
     hazard: hazardLevel(material) === 'none-on-file' ? null : (handling.hazard ?? null),

@@ -18,5 +18,7 @@ export function mixtureIndex(n1: number, n2: number, share: number): number {
 export function shareFor(n1: number, n2: number, wanted: number): number | null {
   const [L1, L2, L] = [lorentzLorenz(n1), lorentzLorenz(n2), lorentzLorenz(wanted)];
   const share = (L - L2) / (L1 - L2);
-  return share >= 0 && share <= 1 ? share : null;
+  // A pure liquid is a mixture too: rounding must not put it outside.
+  const hair = 1e-12;
+  return share >= -hair && share <= 1 + hair ? Math.min(1, Math.max(0, share)) : null;
 }

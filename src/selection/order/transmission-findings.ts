@@ -1,4 +1,5 @@
 /** Does the part transmit there, through its thickness. */
+import { materialFacts } from '../material-facts.ts';
 import { nearestAbsorption } from './absorption-source.ts';
 import type { Finding } from './finding.ts';
 import { facts, labelOf } from './finding.ts';
@@ -30,7 +31,11 @@ export function transmissionFinding(subject: Subject, wavelength_m: number, powe
   }
   if (medium.absorptionCoefficient_per_m !== null)
     return knownAbsorption(base, subject, wavelength_m, power_W);
-  if (range) return { ...base, ...byRange(range, layer.answer.thickness_m, wavelength_m, power_W), source };
+  if (range && material) {
+    const basis = materialFacts(material).transparencyBasis;
+    const { thickness_m } = layer.answer;
+    return { ...base, ...byRange(range, basis, thickness_m, wavelength_m, power_W), source };
+  }
   return { ...base, level: 'look', text: `${NO_COEFFICIENT}, and ${NO_RANGE}`, source };
 }
 
@@ -60,6 +65,7 @@ function knownAbsorption(
 /** All there is where no coefficient reaches the wave. */
 function byRange(
   range: readonly [number, number],
+  basis: string,
   thickness_m: number,
   wavelength_m: number,
   power_W: number | null,
@@ -72,7 +78,7 @@ function byRange(
   const parts = [
     near
       ? `close to a limit of its range of transparency (${lengthRange(range)}): ask for a measured curve`
-      : `inside its range of transparency (${lengthRange(range)}, about 10 % left at its limits over a few mm)`,
+      : `inside its range of transparency (${lengthRange(range)}, ${basis})`,
     ...(thick ? [`${length(thickness_m)} is thicker than such ranges are meant for`] : []),
     NO_COEFFICIENT,
     ...(hot
