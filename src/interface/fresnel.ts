@@ -15,7 +15,7 @@
  * An absorbing medium of incidence has no power fractions (incident and reflected wave interfere in the energy flow):
  * R is then |r|^2 and T the formula above; the caller cautions.
  */
-import { abs2, add, type Complex, div, mul, neg, scale, sqrtDecaying, sub } from '../num/complex.ts';
+import { abs2, add, type Complex, div, mul, neg, scale, sqrt, sqrtDecaying, sub } from '../num/complex.ts';
 import { isLossless, type Optics } from './optics.ts';
 
 export interface FresnelResult {
@@ -37,9 +37,15 @@ export interface FresnelResult {
 /**
  * Normal component of the wave vector over k0 beyond the interface; backward in a doubly negative medium.
  * From kappa2^2 = n2^2 - n1^2 + kappa1^2 rather than n2^2 - q^2: exact for like media, no cancellation at grazing incidence.
+ *
+ * The root decays, with one exception. A wave that comes out of an absorbing medium at an angle fades along the surface, and
+ * the wave beyond fades with it: in a clear medium its planes of constant amplitude are tilted so that Im kappa2 is a little
+ * negative. It still goes forward; the decaying root would be the wave that comes back.
  */
 function normalComponent(from: Optics, into: Optics, kappa1: Complex): Complex {
-  const kappa = sqrtDecaying(add(sub(mul(into.n, into.n), mul(from.n, from.n)), mul(kappa1, kappa1)));
+  const square = add(sub(mul(into.n, into.n), mul(from.n, from.n)), mul(kappa1, kappa1));
+  if (into.n.re >= 0 && square.re >= 0) return sqrt(square);
+  const kappa = sqrtDecaying(square);
   return into.n.re < 0 && kappa.im === 0 ? neg(kappa) : kappa;
 }
 

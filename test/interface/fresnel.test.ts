@@ -51,6 +51,32 @@ describe('fresnel: conservation and symmetry', () => {
     );
   });
 
+  it('changes continuously when the medium of incidence begins to absorb, below and above the critical angle', () => {
+    const weak = fc.double({ min: 1e-12, max: 1e-7, noNaN: true });
+    fc.assert(
+      fc.property(losslessDielectric, losslessDielectric, weak, incidence, (a, b, k, angle) => {
+        const sin = a.n.re * Math.sin(angle);
+        fc.pre(Math.abs(sin - b.n.re) > 1e-3 && angle < 1.55);
+        const clear = fresnel(a, b, angle);
+        const absorbing = fresnel(opticsFromIndex({ re: a.n.re, im: k }, ONE), b, angle);
+        for (const part of ['rs', 'rp', 'ts', 'tp'] as const)
+          expect(distance(absorbing[part], clear[part])).toBeLessThan(1e5 * k);
+      }),
+      { numRuns: 2000 },
+    );
+  });
+
+  it('sends no more back than came in where glass with a trace of absorption meets air', () => {
+    const glass = opticsFromIndex({ re: 1.5155, im: 7.7e-9 }, ONE);
+    const clear = real(1.5155);
+    for (const degrees of [1, 10, 30, 33.4, 40, 41, 42, 60, 89]) {
+      const angle = (degrees * Math.PI) / 180;
+      const [with_, without] = [fresnel(glass, real(1), angle), fresnel(clear, real(1), angle)];
+      expect(Math.abs(with_.Rs - without.Rs)).toBeLessThan(1e-6);
+      expect(Math.abs(with_.Rp - without.Rp)).toBeLessThan(1e-6);
+    }
+  });
+
   it('is reciprocal: T12 = T21 at conjugate angles', () => {
     fc.assert(
       fc.property(losslessDielectric, losslessDielectric, incidence, (a, b, angle) => {
