@@ -1,5 +1,7 @@
 /** Amplitudes and powers of s and p at the surface of a metal, over angles and indices: the core against a loop by hand. */
+
 import { fresnel } from '../../src/interface/fresnel.ts';
+import { writeSurface } from '../../src/interface/fresnel-kernel.ts';
 import { opticsFromIndex } from '../../src/interface/optics.ts';
 import { ONE } from '../../src/num/complex.ts';
 import { race } from './race.ts';
@@ -71,6 +73,12 @@ function viaRecords(): void {
   }
 }
 
+function viaNumbers(): void {
+  for (let i = 0; i < COUNT; i++)
+    writeSurface(1, 0, n2[i]!, k2[i]!, Math.cos(angles_rad[i]!), out, i * STRIDE);
+}
+
 race({
-  records: { hand, core: viaRecords, result: () => out, evaluations: COUNT, repeats: 20 },
+  numbers: { hand, core: viaNumbers, result: () => out, evaluations: COUNT, repeats: 3 },
+  records: { hand, core: viaRecords, result: () => out, evaluations: COUNT, repeats: 1 },
 });

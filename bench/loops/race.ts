@@ -9,7 +9,7 @@ export interface Contest {
   readonly result: () => Float64Array;
   /** Of one call. */
   readonly evaluations: number;
-  /** Calls timed together. */
+  /** Calls timed together: half a millisecond or so. */
   readonly repeats: number;
 }
 
@@ -19,7 +19,12 @@ export interface Outcome {
   readonly millionsPerSecond: number;
 }
 
-const ROUNDS = 31;
+/**
+ * Many short rounds rather than a few long ones: on a busy machine a short one is seldom interrupted, and the median leaves
+ * out those that were.
+ */
+const ROUNDS = 601;
+const WARM_UP_ROUNDS = 60;
 const CLOSE_ENOUGH = 1e-11;
 
 export function race(contests: Readonly<Record<string, Contest>>): void {
@@ -43,7 +48,7 @@ function run(name: string, { hand, core, result, evaluations, repeats }: Contest
     for (let i = 0; i < repeats; i++) f();
     return Number(process.hrtime.bigint() - begin);
   };
-  for (let i = 0; i < 3; i++) {
+  for (let i = 0; i < WARM_UP_ROUNDS; i++) {
     time(hand);
     time(core);
   }
