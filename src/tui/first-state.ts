@@ -16,7 +16,9 @@ export function firstState(
   const usual = firstQuestion(materialOf);
   const { last, recent } = start.settings;
   const { question, problems } =
-    last === undefined ? { question: usual, problems: [] } : readQuestion(last, usual, materialOf);
+    last === undefined
+      ? { question: usual, problems: [] }
+      : readQuestion(last, usual, materialOf, (text) => world.readLayers(text));
   const begin = (q: typeof question): State => initialState(q, size, start.preferences, world, recent);
   const asked = begin(question);
   const state = refusalOf(asked) ? { ...asked, answered: usual } : asked;

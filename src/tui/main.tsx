@@ -18,6 +18,7 @@ import { TerminalGuard } from '../term/guard.ts';
 import { keyChord } from '../term/key.ts';
 import { KeyStream } from '../term/key-stream.ts';
 import { ASCII_GLYPHS, SCREEN_GLYPHS } from './glyphs.ts';
+import type { LayerReader } from './real-world.ts';
 import { readSettings, type Settings } from './settings/settings.ts';
 import { readSettingsFile, settingsFolder } from './settings/settings-file.ts';
 import { skeletonFrame } from './skeleton.ts';
@@ -35,6 +36,7 @@ export interface TuiOptions {
 export interface TuiHost {
   readonly env: Environment;
   readonly catalogue: () => IndexedCatalogue;
+  readonly readLayers: LayerReader;
   /** To standard error, before the screen is taken over. */
   readonly warn: (text: string) => void;
 }

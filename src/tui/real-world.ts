@@ -1,10 +1,21 @@
 /** The world of the running program: the catalogue on disk, the one answer function, tables made in the background. */
+import type { Answer } from '../answer/answer.ts';
 import { answerQuestion } from '../answer/answer-question.ts';
+import type { SourceOf } from '../answer/medium-side.ts';
+import type { Layer, Question } from '../answer/question.ts';
 import type { CatalogueEntry, IndexedCatalogue } from '../catalog/entries.ts';
 import { foldTight } from '../catalog/fold.ts';
+import { type Refusal, refuse } from '../medium/refusal.ts';
+import { problem } from '../units/problem.ts';
 import { IndexTables } from './index-tables.ts';
 import type { Bindings } from './keys/bindings.ts';
 import type { World } from './world.ts';
+
+/** How the program around reads layers; a refusal comes with the name it is about. */
+export type LayerReader = (
+  words: readonly string[],
+  catalogue: IndexedCatalogue,
+) => readonly Layer[] | { readonly refusal: Refusal; readonly name: string };
 
 type SearchEntries = (text: string) => readonly CatalogueEntry[];
 
@@ -17,13 +28,18 @@ export interface RealWorld extends World {
 /** Texts whose hits are kept: typing and deleting go over the same ones. */
 const MOST_TEXTS = 64;
 
-export function realWorld(catalogue: IndexedCatalogue, bindings: Bindings, onReady: () => void): RealWorld {
+export function realWorld(
+  catalogue: IndexedCatalogue,
+  bindings: Bindings,
+  readLayers: LayerReader,
+  onReady: () => void,
+): RealWorld {
   const tables = new IndexTables(onReady);
   const sourceOf = catalogue.source.bind(catalogue);
   let find: SearchEntries = (text) => plainSearch(catalogue.entries(), text);
   let found = new Map<string, readonly CatalogueEntry[]>();
   return {
-    answer: (question) => answerQuestion(question, sourceOf),
+    answer: (question) => answerOrReport(question, sourceOf),
     search: (text) => {
       const known = found.get(text);
       if (known) return known;
@@ -35,6 +51,14 @@ export function realWorld(catalogue: IndexedCatalogue, bindings: Bindings, onRea
     lookup: (name) => catalogue.lookup(name),
     material: (key) => catalogue.material(key),
     source: sourceOf,
+    readLayers: (text) => {
+      const words = text.trim().split(/\s+/);
+      const read = readLayers(words, catalogue);
+      if (!('refusal' in read)) return read;
+      const [name] = find(read.name);
+      const near = read.refusal.code === 'unknown-medium' && name ? `did you mean ${name.key}?` : undefined;
+      return problem('not-a-medium', read.refusal.message, near ?? read.refusal.remedy);
+    },
     opticsOver: (medium, conditions, range_m) => tables.get(medium, conditions, range_m),
     bindings,
     loadSearch: async () => {
@@ -45,6 +69,16 @@ export function realWorld(catalogue: IndexedCatalogue, bindings: Bindings, onRea
     },
     stop: () => tables.stop(),
   };
+}
+
+/** A fault of the program costs the answer to this question, not the session. */
+function answerOrReport(question: Question, sourceOf: SourceOf): Answer | Refusal {
+  try {
+    return answerQuestion(question, sourceOf);
+  } catch (error) {
+    const why = error instanceof Error ? error.message : String(error);
+    return refuse('internal-error', 2, `the program fails on this question (${why})`, 'please report it');
+  }
 }
 
 function plainSearch(entries: readonly CatalogueEntry[], text: string): readonly CatalogueEntry[] {

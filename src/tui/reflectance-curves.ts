@@ -5,6 +5,8 @@
 import type { Answer, MediumAnswer } from '../answer/answer.ts';
 import { fresnel } from '../interface/fresnel.ts';
 import type { Optics } from '../interface/optics.ts';
+import type { LayeredPath } from '../stack/layered-path.ts';
+import { mixedStack } from '../stack/mixed-stack.ts';
 
 export interface Curve {
   /** Name of the line: "s", "p". */
@@ -18,12 +20,34 @@ const RIGHT_ANGLE = Math.PI / 2;
 const NEARLY = 1 - 1e-6;
 
 export function angleCurves(answer: Answer): readonly Curve[] {
+  if (answer.layers.length > 0) return pathCurves(answer);
   const from = opticsOf(answer.from);
   const into = opticsOf(answer.into);
   const at = (x: number) => fresnel(from, into, Math.min(x, NEARLY) * RIGHT_ANGLE);
   return [
     { name: 's', valueAt: (x) => clamp(at(x).Rs) },
     { name: 'p', valueAt: (x) => clamp(at(x).Rp) },
+  ];
+}
+
+/** Of a path of layers, at the wave of the answer and with its coherence. */
+function pathCurves(answer: Answer): readonly Curve[] {
+  const substance = ({ relativePermittivity: eps, relativePermeability: mu }: MediumAnswer) => ({ eps, mu });
+  const { from, into, layers, stack, wave } = answer;
+  const path: LayeredPath = {
+    incidence: {
+      eps: { re: from.relativePermittivity.re, im: 0 },
+      mu: { re: from.relativePermeability.re, im: 0 },
+    },
+    layers: layers.map((l) => ({ ...substance(l.medium), thickness_m: l.thickness_m })),
+    exit: substance(into),
+  };
+  const coherence_m = stack?.coherenceLength_m ?? Number.POSITIVE_INFINITY;
+  const at = (x: number) =>
+    mixedStack(path, wave.vacuumWavelength_m, Math.min(x, NEARLY) * RIGHT_ANGLE, coherence_m);
+  return [
+    { name: 's', valueAt: (x) => clamp(at(x).s.R) },
+    { name: 'p', valueAt: (x) => clamp(at(x).p.R) },
   ];
 }
 

@@ -28,7 +28,9 @@ export async function showPicture(start: Start, terminal: Terminal): Promise<num
   const { guard, writer, keys, size } = terminal;
   const catalogue = start.host.catalogue();
   const { bindings, problems } = bindKeys(start.settings.keys);
-  const world = realWorld(catalogue, bindings, () => store.dispatch({ kind: 'ready' }));
+  const world = realWorld(catalogue, bindings, start.host.readLayers, () =>
+    store.dispatch({ kind: 'ready' }),
+  );
   const first = firstState(start, size(), world, problems);
   const kept = new KeptSettings(
     new SettingsFile(start.settingsFolder, start.canWriteSettings),

@@ -7,6 +7,7 @@ import type { Answer } from '../answer/answer.ts';
 import type { Question } from '../answer/question.ts';
 import { fresnel } from '../interface/fresnel.ts';
 import type { Optics } from '../interface/optics.ts';
+import { mixedStack } from '../stack/mixed-stack.ts';
 import { type Curve, clamp } from './reflectance-curves.ts';
 import type { World } from './world.ts';
 
@@ -28,8 +29,15 @@ export function waveCurve(question: Question, answer: Answer, world: World): Wav
   if (!range_m) return null;
   const from = world.opticsOver(question.from, question.conditions, range_m);
   const into = world.opticsOver(question.into, question.conditions, range_m);
-  if (!from || !into) return undefined;
-  const values = from.map((optics, i) => reflectance(optics, into[i] ?? null, question));
+  const tables = question.layers.map((l) => world.opticsOver(l.medium, question.conditions, range_m));
+  const layers = tables.filter((t) => t !== undefined);
+  if (!from || !into || layers.length < tables.length) return undefined;
+  const values = from.map((optics, i) => {
+    const beyond = into[i] ?? null;
+    if (layers.length === 0) return reflectance(optics, beyond, question);
+    const between = layers.map((t) => t[i] ?? null);
+    return pathReflectance(optics, between, beyond, answer, wavelengthAt(range_m, i / (from.length - 1)));
+  });
   return {
     curve: { name: '', valueAt: (x) => between(values, x) },
     range_m,
@@ -60,6 +68,27 @@ function reflectance(from: Optics | null, into: Optics | null, question: Questio
   const { Rs, Rp } = fresnel(from, into, question.incidenceAngle_rad);
   const { polarization } = question;
   return clamp(polarization === 's' ? Rs : polarization === 'p' ? Rp : (Rs + Rp) / 2);
+}
+
+/** Of the path of layers; null where any of its media has no data. */
+function pathReflectance(
+  from: Optics | null,
+  between: readonly (Optics | null)[],
+  into: Optics | null,
+  answer: Answer,
+  wavelength_m: number,
+): number | null {
+  const media = between.filter((m) => m !== null);
+  if (!from || !into || media.length < between.length || from.n.re <= 0) return null;
+  const path = {
+    incidence: { eps: { re: from.eps.re, im: 0 }, mu: { re: from.mu.re, im: 0 } },
+    layers: media.map(({ eps, mu }, i) => ({ eps, mu, thickness_m: answer.layers[i]?.thickness_m ?? 0 })),
+    exit: { eps: into.eps, mu: into.mu },
+  };
+  const { incidenceAngle_rad, polarization } = answer.geometry;
+  const coherence_m = answer.stack?.coherenceLength_m ?? Number.POSITIVE_INFINITY;
+  const { s, p } = mixedStack(path, wavelength_m, incidenceAngle_rad, coherence_m);
+  return clamp(polarization === 's' ? s.R : polarization === 'p' ? p.R : (s.R + p.R) / 2);
 }
 
 function between(values: readonly (number | null)[], x: number): number | null {

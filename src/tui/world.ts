@@ -3,13 +3,14 @@
  * result. The reducer and the views get it handed in, so they are pure and run in tests without files.
  */
 import type { Answer } from '../answer/answer.ts';
-import type { MediumSpec, Question } from '../answer/question.ts';
+import type { Layer, MediumSpec, Question } from '../answer/question.ts';
 import type { Lookup } from '../catalog/catalogue.ts';
 import type { CatalogueEntry } from '../catalog/entries.ts';
 import type { Material, Source } from '../catalog/types.ts';
 import type { Conditions } from '../dispersion/evaluator.ts';
 import type { Optics } from '../interface/optics.ts';
 import type { Refusal } from '../medium/refusal.ts';
+import type { Problem } from '../units/problem.ts';
 import type { Bindings } from './keys/bindings.ts';
 
 export interface World {
@@ -19,6 +20,8 @@ export interface World {
   lookup(name: string): Lookup;
   material(key: string): Material | undefined;
   source(id: string): Source | undefined;
+  /** Layers as typed, in the words of the command line. */
+  readLayers(text: string): readonly Layer[] | Problem;
   /** Optical constants at equal ratios over a range; undefined while they are being worked out. */
   opticsOver(
     medium: MediumSpec,

@@ -3,6 +3,7 @@ import { BEAM_FIELD, PROFILE_FIELD, WIDTH_FIELD } from './beam-fields.ts';
 import { CONDITION_FIELDS } from './condition-fields.ts';
 import type { Field, FieldId } from './field.ts';
 import { ANGLE_FIELD, EXTRAPOLATE_FIELD, POLARIZATION_FIELD, TOLERANCE_FIELD } from './geometry-fields.ts';
+import { LAYERS_FIELD } from './layer-field.ts';
 import { MEDIUM_FIELDS } from './medium-fields.ts';
 import { REFERENCE_FIELD, WAVE_FIELD } from './wave-fields.ts';
 
@@ -15,6 +16,7 @@ export const FIELDS: readonly Field[] = [
   TOLERANCE_FIELD,
   EXTRAPOLATE_FIELD,
   ...MEDIUM_FIELDS,
+  LAYERS_FIELD,
   BEAM_FIELD,
   WIDTH_FIELD,
   PROFILE_FIELD,

@@ -3,7 +3,7 @@
  * how it is shown, read and stepped; it knows nothing of keys, colours or positions.
  */
 import type { Answer } from '../../answer/answer.ts';
-import type { Question } from '../../answer/question.ts';
+import type { Layer, Question } from '../../answer/question.ts';
 import type { NumberStyle } from '../../units/number-style.ts';
 import type { Problem } from '../../units/problem.ts';
 
@@ -24,6 +24,7 @@ export const FIELD_IDS = [
   'from-axis',
   'into',
   'into-axis',
+  'layers',
   'beam',
   'width',
   'profile',
@@ -34,6 +35,8 @@ export interface FieldContext {
   readonly question: Question;
   /** The answer to the question, where it has one. */
   readonly answer: Answer | null;
+  /** Reads layers as typed; present where text is taken in. */
+  readonly readLayers?: (text: string) => readonly Layer[] | Problem;
 }
 
 export interface Field {

@@ -16,7 +16,12 @@ const INTERRUPTED = 130;
 const SIZE = { columns: 80, rows: 24 } as const;
 
 export async function runLinear(start: Start): Promise<number> {
-  const world = realWorld(start.host.catalogue(), bindKeys(start.settings.keys).bindings, () => {});
+  const world = realWorld(
+    start.host.catalogue(),
+    bindKeys(start.settings.keys).bindings,
+    start.host.readLayers,
+    () => {},
+  );
   await world.loadSearch();
   const first = firstState(start, SIZE, world, []);
   const write = (text: string): void => void process.stdout.write(text);

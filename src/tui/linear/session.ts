@@ -101,7 +101,8 @@ function askFor(state: State, field: Field, world: World): Reply {
 
 function takeValue(state: State, field: Field, text: string, world: World): Reply {
   if (text === '') return say(state, [`${spokenName(field)} kept`]);
-  const question = field.take(text, contextOf(state));
+  const { readLayers } = world;
+  const question = field.take(text, { ...contextOf(state), readLayers });
   if (isProblem(question)) {
     // A word instead of a value: the person has something else in mind.
     if (COMMANDS.some((c) => c.words.includes(text) && text.length > 1))

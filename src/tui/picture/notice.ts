@@ -72,7 +72,7 @@ function typingParts(state: State, world: World): readonly Part[] | undefined {
   if (entry) {
     const field = fieldById(entry.field);
     const problem = state.message?.tone === 'refused' ? state.message.text : undefined;
-    return [problem === undefined ? hint(reading(state)) : refused(problem), hint(field.hint)];
+    return [problem === undefined ? hint(reading(state, world)) : refused(problem), hint(field.hint)];
   }
   if (search) {
     const text = search.line.text;
@@ -86,11 +86,11 @@ function typingParts(state: State, world: World): readonly Part[] | undefined {
 }
 
 /** How what is typed so far will be understood. */
-function reading(state: State): string {
+function reading(state: State, { readLayers }: World): string {
   const { entry, question } = state;
   if (!entry || entry.isFresh || entry.line.text.trim() === '') return '';
   const field = fieldById(entry.field);
-  const taken = field.take(entry.line.text, { question, answer: answerOf(state) });
+  const taken = field.take(entry.line.text, { question, answer: answerOf(state), readLayers });
   if (isProblem(taken)) return '';
   const context = { question: taken, answer: null };
   return `reads: ${[field.label, field.show(context, { ascii: false })].filter((s) => s !== '').join(' ')}`;

@@ -1,13 +1,17 @@
 /** What belongs to the surface: the two angles, R and T first, losses, special angles, phases, powers. */
+import type { LayerAnswer } from '../../answer/answer.ts';
 import { beamRows } from '../../present/energy-rows.ts';
 import { degreesText, interfaceRows } from '../../present/interface-rows.ts';
 import type { Shown } from '../../present/shown.ts';
+import { layerText, layerTitle, pulseRows, stackRows, windowRows } from '../../present/stack-rows.ts';
+import { METRE } from '../../units/display-unit.ts';
+import { formatQuantity } from '../../units/format-quantity.ts';
 import type { NumberStyle } from '../../units/number-style.ts';
 import type { FieldContext } from '../fields/field.ts';
 import type { ActionId } from '../keys/actions.ts';
 import type { Bindings } from '../keys/bindings.ts';
 import { quantityItem } from './half-block.ts';
-import { BLANK_ROW, type Block, type Row, textItem } from './item.ts';
+import { BLANK_ROW, type Block, fieldItems, type Item, type Row, textItem } from './item.ts';
 
 const FIRST: readonly string[] = ['R', 'T'];
 /** Said by the line of the two angles. */
@@ -31,8 +35,15 @@ const KEYS: Readonly<Record<string, ActionId>> = {
   criticalAngle_rad: 'critical',
 };
 
-export function surfaceBlock({ answer }: FieldContext, bindings: Bindings, style: NumberStyle): Block {
-  if (!answer) return { top: [[textItem('no answer', 'caution')]], body: [], bottom: [] };
+export function surfaceBlock(context: FieldContext, bindings: Bindings, style: NumberStyle): Block {
+  const { answer } = context;
+  if (!answer) {
+    return {
+      top: [[textItem('no answer', 'caution')], fieldItems(['layers'], context, style)],
+      body: [],
+      bottom: [],
+    };
+  }
   const shown = interfaceRows(answer, style);
   const item = (id: string) => shown.filter((q) => q.id === id);
   const first = FIRST.flatMap(item).map((q) => [quantityItem(q, 'interface', '', 'result')]);
@@ -41,15 +52,33 @@ export function surfaceBlock({ answer }: FieldContext, bindings: Bindings, style
   const known = [...FIRST, ...IN_TITLE, ...ORDER, `R${polarization}`];
   const rest = [...ORDER.flatMap(item), ...shown.filter((q) => !known.includes(q.id))];
   const beam = beamRows(answer, style);
+  const path = [...stackRows(answer, style), ...windowRows(answer, style), ...pulseRows(answer, style)];
   const isMain = (q: Shown): boolean => MAIN_BEAM.includes(q.id);
   const beamItem = (q: Shown): Row => [quantityItem(q, 'interface', 'of the stated beam')];
   return {
-    top: [[textItem(anglesText(answer, style))], BLANK_ROW, ...first, BLANK_ROW],
+    top: [[textItem(anglesText(answer, style))], BLANK_ROW, ...first, fieldItems(['layers'], context, style)],
     body: [
+      ...answer.layers.slice(0, MOST_LAYERS_LISTED).map((layer, i) => [layerItem(layer, i, style)]),
       ...rest.map((q) => [quantityItem(q, 'interface', '', 'text', keyOf(q, bindings))]),
+      ...path.map((q) => [quantityItem(q, 'interface', 'of the whole path')]),
       ...beam.filter((q) => !isMain(q)).map(beamItem),
     ],
     bottom: beam.filter(isMain).map(beamItem),
+  };
+}
+
+/** A coating of many layers would push everything else out of sight. */
+const MOST_LAYERS_LISTED = 8;
+
+function layerItem(layer: LayerAnswer, index: number, style: NumberStyle): Item {
+  const thickness = formatQuantity(layer.thickness_m, METRE, { significant: 4 }, { style });
+  return {
+    stop: `interface:layer-${index + 1}`,
+    label: String(index + 1),
+    text: `${thickness} ${layer.medium.name}`,
+    role: 'text',
+    describe: `layer ${layerTitle(layer, index + 1)}: ${layerText(layer, style)}`,
+    copy: layerText(layer, style),
   };
 }
 

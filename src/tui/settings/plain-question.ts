@@ -5,6 +5,7 @@
  */
 import {
   type Beam,
+  type Layer,
   type MediumSpec,
   makeQuestion,
   type Question,
@@ -14,11 +15,13 @@ import { axesOf } from '../../catalog/choose-fit.ts';
 import type { Material } from '../../catalog/types.ts';
 import type { Conditions } from '../../dispersion/evaluator.ts';
 import { parseWave } from '../../units/parse-wave.ts';
-import { isProblem, problemText } from '../../units/problem.ts';
+import { isProblem, type Problem, problemText } from '../../units/problem.ts';
+import { layersText } from '../fields/layer-field.ts';
 import { readLiteral } from '../fields/medium-fields.ts';
 
 type Plain = Readonly<Record<string, unknown>>;
 type MaterialOf = (key: string) => Material | undefined;
+type ReadLayers = (text: string) => readonly Layer[] | Problem;
 
 export function plainQuestion(question: Question): Plain {
   const { wave, incidenceAngle_rad, polarization, conditions, tolerances, beam } = question;
@@ -31,6 +34,7 @@ export function plainQuestion(question: Question): Plain {
     conditions,
     tolerances,
     ...(beam ? { beam } : {}),
+    ...(question.layers.length > 0 ? { layers: layersText(question.layers) } : {}),
   };
 }
 
@@ -45,7 +49,12 @@ export interface ReadQuestion {
 }
 
 /** @param fallback gives every part that is missing or does not hold */
-export function readQuestion(value: unknown, fallback: Question, materialOf: MaterialOf): ReadQuestion {
+export function readQuestion(
+  value: unknown,
+  fallback: Question,
+  materialOf: MaterialOf,
+  readLayers?: ReadLayers,
+): ReadQuestion {
   const problems: string[] = [];
   if (!isRecord(value)) return { question: fallback, problems: ['last is no object'] };
   const part = <T>(name: string, read: (v: unknown) => T | undefined, otherwise: T): T => {
@@ -64,9 +73,16 @@ export function readQuestion(value: unknown, fallback: Question, materialOf: Mat
       conditions: part('conditions', (v) => readNumbers(v, CONDITION_NAMES) as Conditions | undefined, {}),
       tolerances: part('tolerances', (v) => readNumbers(v, TOLERANCE_NAMES) as Tolerances | undefined, {}),
       beam: part<Beam | undefined>('beam', readBeam, undefined),
+      layers: part('layers', (v) => readPath(v, readLayers), []),
     },
   );
   return { question, problems };
+}
+
+function readPath(value: unknown, readLayers: ReadLayers | undefined): readonly Layer[] | undefined {
+  if (typeof value !== 'string' || !readLayers) return undefined;
+  const layers = readLayers(value);
+  return isProblem(layers) ? undefined : layers;
 }
 
 export function isRecord(value: unknown): value is Plain {

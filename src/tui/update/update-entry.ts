@@ -58,7 +58,8 @@ export function actInEntry(state: State, action: ActionId, world: World): State 
 
 function take(state: State, entry: Entry, world: World): State {
   if (entry.isFresh) return { ...state, entry: null, message: null };
-  const context = { question: state.question, answer: answerOf(state) };
+  const { readLayers } = world;
+  const context = { question: state.question, answer: answerOf(state), readLayers };
   const question = fieldById(entry.field).take(entry.line.text, context);
   if (isProblem(question)) {
     return { ...state, message: { tone: 'refused', text: problemText(question) } };

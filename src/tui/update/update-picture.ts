@@ -47,6 +47,7 @@ const ACTS: Readonly<Partial<Record<ActionId, Act>>> = {
   'go-beam': (s, w) => openEntry(s, 'beam', w),
   'go-conditions': (s, w) => openEntry(s, 'temperature', w),
   'go-tolerance': (s, w) => openEntry(s, 'tolerance', w),
+  'go-layers': (s, w) => openEntry(s, 'layers', w),
   polarization: (s, w) => stepField(s, 'polarization', 1, w),
   reference: (s, w) =>
     fieldById('reference').applies({ question: s.question, answer: answerOf(s) })

@@ -8,6 +8,7 @@ import { answerQuestion } from '../../../src/answer/answer-question.ts';
 import { makeQuestion, type Question } from '../../../src/answer/question.ts';
 import { catalogueFromSources } from '../../../src/catalog/from-sources.ts';
 import { makeSearch } from '../../../src/catalog/search.ts';
+import { isUnread, readLayers } from '../../../src/cli/read-path.ts';
 import { charKey, type Key, type KeyName, namedKey } from '../../../src/term/key.ts';
 import { App } from '../../../src/tui/components/app.tsx';
 import { mediumName } from '../../../src/tui/fields/medium-fields.ts';
@@ -16,6 +17,7 @@ import { bindKeys } from '../../../src/tui/keys/bindings.ts';
 import { type Effect, initialState, type Preferences, type State } from '../../../src/tui/state.ts';
 import { Store } from '../../../src/tui/store.ts';
 import type { World } from '../../../src/tui/world.ts';
+import { problem } from '../../../src/units/problem.ts';
 import { named, vacuumWave } from '../../helpers/ask.ts';
 
 export interface StageOptions {
@@ -38,6 +40,10 @@ export function testWorld(): World {
     lookup: (name) => catalogue.lookup(name),
     material: (key) => catalogue.material(key),
     source: (id) => catalogue.source(id),
+    readLayers: (text) => {
+      const read = readLayers(text.trim().split(/\s+/), catalogue);
+      return isUnread(read) ? problem('not-a-medium', read.refusal.message, read.refusal.remedy) : read;
+    },
     opticsOver: (medium, conditions, range_m) => {
       const id = JSON.stringify([mediumName(medium), conditions, range_m]);
       const table = tables.get(id) ?? indexTable(medium, conditions, range_m);
