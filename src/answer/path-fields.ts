@@ -108,9 +108,12 @@ export function pathFields(
 function frontOf(path: Path, question: Question, vacuumWavelength_m: number): FrontField | null {
   const polarization = question.polarization === 'p' ? 'p' : 's';
   try {
-    return frontField(
-      solveField(layeredPath(path), vacuumWavelength_m, question.incidenceAngle_rad, polarization),
+    const { incidenceAngle_rad } = question;
+    const front = frontField(
+      solveField(layeredPath(path), vacuumWavelength_m, incidenceAngle_rad, polarization),
     );
+    // Indices at the end of the range of doubles overflow on the way.
+    return Number.isFinite(front.intensity) ? front : null;
   } catch (error) {
     if (error instanceof StackRefusal) return null;
     throw error;

@@ -106,7 +106,7 @@ function waveRows(
   const letter = name === 'ordinary' ? 'o' : 'e';
   const field = wave.polarization === null ? '' : `, ${wave.polarization}`;
   const towards =
-    wave.angleToAxis_rad === null ? '' : `, ${degreesText(wave.angleToAxis_rad, 2, style)} from the axis`;
+    wave.angleToAxis_rad === null ? '' : `, ${degreesText(wave.angleToAxis_rad, 2, style)} from axis`;
   rows.add(
     `n_${letter}`,
     name === 'ordinary' ? 'n_o' : 'n(θ)',
@@ -116,7 +116,7 @@ function waveRows(
   rows.add(
     `R_${letter}`,
     `R_${letter}`,
-    `reflectance at the face, ${name}`,
+    `reflectance, ${name}`,
     formatQuantity(wave.R, PER_CENT, FOUR, { style }),
   );
 }

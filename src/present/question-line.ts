@@ -1,9 +1,10 @@
 /** The question as understood, on one line: media, wave with its reference, angle, polarization. */
-import type { Answer, MediumAnswer } from '../answer/answer.ts';
+import type { Answer, LayerAnswer, MediumAnswer } from '../answer/answer.ts';
 import { ELECTRONVOLT, HERTZ, METRE } from '../units/display-unit.ts';
 import { formatQuantity } from '../units/format-quantity.ts';
 import { toAscii } from '../units/to-ascii.ts';
 import { degreesText } from './interface-rows.ts';
+import { layerRuns } from './layer-runs.ts';
 import type { PresentStyle } from './shown.ts';
 
 /** "Sapphire, ordinary". */
@@ -33,13 +34,17 @@ export function waveAliases(answer: Answer, style: PresentStyle): readonly strin
   ];
 }
 
-/** "Air → Magnesium fluoride film 99.6 nm → N-BK7". */
+/** "Air → Magnesium fluoride film 99.6 nm → N-BK7"; "8 × (H → L)" for a group that repeats. */
 export function pathText(answer: Answer, style: PresentStyle): string {
-  const layers = answer.layers.map(
-    (l) =>
-      `${mediumTitle(l.medium)} ${formatQuantity(Number(l.thickness_m.toPrecision(5)), METRE, 'shortest', { style })}`,
-  );
-  return [mediumTitle(answer.from), ...layers, mediumTitle(answer.into)].join(' → ');
+  const layer = (l: LayerAnswer): string => {
+    const d = formatQuantity(Number(l.thickness_m.toPrecision(5)), METRE, 'shortest', { style });
+    return `${mediumTitle(l.medium)} ${d}`;
+  };
+  const runs = layerRuns(answer.layers).map((run) => {
+    const group = run.layers.map(layer).join(' → ');
+    return run.times === 1 ? group : `${run.times} × (${group})`;
+  });
+  return [mediumTitle(answer.from), ...runs, mediumTitle(answer.into)].join(' → ');
 }
 
 export function questionLine(answer: Answer, style: PresentStyle): string {

@@ -1,9 +1,10 @@
 /** What belongs to a path of layers: each layer on a line, the whole, the window, the pulse. */
 import type { Answer, LayerAnswer, StackAnswer, WindowAnswer } from '../answer/answer.ts';
-import { DECIBEL, DEGREE, HERTZ, METRE, PER_CENT, SECOND, WATT } from '../units/display-unit.ts';
+import { DECIBEL, DEGREE, HERTZ, METRE, PER_CENT, SECOND } from '../units/display-unit.ts';
 import { formatNumber } from '../units/format-number.ts';
 import { formatQuantity } from '../units/format-quantity.ts';
 import { howKnown } from './known.ts';
+import type { LayerRun } from './layer-runs.ts';
 import { complexIndexText } from './medium-rows.ts';
 import { mediumTitle } from './question-line.ts';
 import { RowList } from './row-list.ts';
@@ -33,8 +34,13 @@ export function layerTitle(layer: LayerAnswer, number: number): string {
   return `${number} ${mediumTitle(layer.medium)}`;
 }
 
+/** "1 to 16: 8 times". */
+export function runTitle({ first, layers, times }: LayerRun): string {
+  return `${first} to ${first + layers.length * times - 1}: ${times} times`;
+}
+
 const percent = (x: number | null, style: PresentStyle): string =>
-  formatQuantity(x, PER_CENT, FOUR, { style });
+  formatQuantity(x, PER_CENT, x === 0 ? 'shortest' : FOUR, { style });
 
 export function stackRows(answer: Answer, style: PresentStyle): readonly Shown[] {
   const { stack } = answer;
@@ -52,13 +58,13 @@ export function stackRows(answer: Answer, style: PresentStyle): readonly Shown[]
   delayRows(rows, stack, answer.geometry.polarization === 'p', style);
   if (stack.fieldMaximum) {
     const { intensity, position_m, layer } = stack.fieldMaximum;
-    const place =
-      position_m === 0 ? 'at the first face' : `${formatQuantity(position_m, METRE, FOUR, { style })} deep`;
-    const where = layer > answer.layers.length ? 'at the last face' : `in layer ${layer}`;
+    const inside = `layer ${layer}, ${formatQuantity(position_m, METRE, FOUR, { style })} deep`;
+    const where =
+      position_m === 0 ? 'at the first face' : layer > answer.layers.length ? 'at the last face' : inside;
     rows.add(
       'fieldMaximum',
       '|E|²',
-      `highest, ${where}, ${place}`,
+      `highest, ${where}`,
       `${formatNumber(intensity, FOUR, style)} × incident`,
     );
   }
@@ -181,17 +187,5 @@ export function pulseRows(answer: Answer, style: PresentStyle): readonly Shown[]
     `${time(pulse.durationIn_s)} → ${time(pulse.durationOut_s)}`,
   );
   rows.add('pulseGdd_s2', 'GDD', 'of the whole path', formatQuantity(pulse.gdd_s2, FS2, THREE, { style }));
-  if (pulse.peakPower_W !== null)
-    rows.add('peakPower_W', 'peak', 'peak power', formatQuantity(pulse.peakPower_W, WATT, THREE, { style }));
-  if (pulse.peakFluence_J_per_m2 !== null) {
-    rows.add(
-      'peakFluence',
-      'fluence',
-      'peak fluence',
-      formatQuantity(pulse.peakFluence_J_per_m2, { symbol: 'J/cm²', power: 4, prefixes: 'um k' }, THREE, {
-        style,
-      }),
-    );
-  }
   return rows.list;
 }

@@ -1,5 +1,7 @@
 /** The answer as Markdown: a heading, one table for the media, one for the interface, cautions and sources as lists. */
 import type { Answer } from '../../answer/answer.ts';
+import { beamDetailRows, nonlinearRows, pulsedBeamRows } from '../../present/beam-rows.ts';
+import { crystalRows } from '../../present/crystal-rows.ts';
 import { beamRows, waveEnergyRows } from '../../present/energy-rows.ts';
 import { interfaceRows } from '../../present/interface-rows.ts';
 import { mediumRows } from '../../present/medium-rows.ts';
@@ -37,8 +39,12 @@ export function renderMarkdown(answer: Answer, style: PresentStyle): string {
       ...interfaceRows(answer, style),
       ...stackRows(answer, style),
       ...windowRows(answer, style),
+      ...crystalRows(answer.crystal, style),
       ...pulseRows(answer, style),
       ...beamRows(answer, style),
+      ...beamDetailRows(answer, style),
+      ...pulsedBeamRows(answer, style),
+      ...nonlinearRows(answer, style),
     ].map((r) => row([`${r.label} ${r.symbol}`, r.text].map(cell))),
     ...(answer.cautions.length > 0 ? ['', ...answer.cautions.map((c) => `- **${c.level}** ${c.text}`)] : []),
     '',

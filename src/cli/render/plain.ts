@@ -1,5 +1,7 @@
 /** One quantity a line, tab between name and value, never wrapped or cut: for grep and cut. */
 import type { Answer } from '../../answer/answer.ts';
+import { beamDetailRows, nonlinearRows, pulsedBeamRows } from '../../present/beam-rows.ts';
+import { crystalRows } from '../../present/crystal-rows.ts';
 import { beamRows, waveEnergyRows } from '../../present/energy-rows.ts';
 import { interfaceRows } from '../../present/interface-rows.ts';
 import { mediumRows } from '../../present/medium-rows.ts';
@@ -21,10 +23,12 @@ export function renderPlain(answer: Answer, style: PresentStyle): string {
     ...part('interface', interfaceRows(answer, style)),
     ...part('stack', stackRows(answer, style)),
     ...part('window', windowRows(answer, style)),
+    ...part('crystal', crystalRows(answer.crystal, style)),
     ...part('pulse', pulseRows(answer, style)),
     ...part('incident', waveEnergyRows(answer.energy?.incident ?? null, style)),
     ...part('transmitted', waveEnergyRows(answer.energy?.transmitted ?? null, style)),
-    ...part('beam', beamRows(answer, style)),
+    ...part('beam', [...beamRows(answer, style), ...beamDetailRows(answer, style)]),
+    ...part('peak', [...pulsedBeamRows(answer, style), ...nonlinearRows(answer, style)]),
     ...answer.cautions.map((c) => `caution.${c.code}\t${c.about}\t${c.text}`),
     ...[answer.from, ...answer.layers.map((l) => l.medium), answer.into].flatMap((m) =>
       fitLine(m, style).map((l) => `source\t${l.trim()}`),

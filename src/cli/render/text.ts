@@ -2,16 +2,28 @@
  * The answer as text for people, within 72 columns: the question as understood, the two media side by side, the interface,
  * the beam, cautions, sources. No escape codes.
  */
-import type { Answer, Caution, MediumAnswer } from '../../answer/answer.ts';
+import type { Answer, Caution, LayerAnswer, MediumAnswer } from '../../answer/answer.ts';
+import { beamDetailRows, nonlinearRows, pulsedBeamRows } from '../../present/beam-rows.ts';
+import { crystalRows } from '../../present/crystal-rows.ts';
 import { beamRows, waveEnergyRows } from '../../present/energy-rows.ts';
 import { interfaceRows } from '../../present/interface-rows.ts';
+import { type LayerRun, layerRuns } from '../../present/layer-runs.ts';
 import { mediumRows } from '../../present/medium-rows.ts';
 import { pairRows } from '../../present/pair-rows.ts';
 import { mediumTitle, questionLine, waveAliases } from '../../present/question-line.ts';
 import type { PresentStyle, Shown } from '../../present/shown.ts';
 import { conditionsText, fitLine, GRADE_WORDS } from '../../present/source-lines.ts';
-import { layerText, layerTitle, pulseRows, stackRows, windowRows } from '../../present/stack-rows.ts';
+import {
+  layerText,
+  layerTitle,
+  pulseRows,
+  runTitle,
+  stackRows,
+  windowRows,
+} from '../../present/stack-rows.ts';
 import { wrap } from '../../present/wrap.ts';
+import { PER_CENT } from '../../units/display-unit.ts';
+import { formatQuantity } from '../../units/format-quantity.ts';
 import { toAscii } from '../../units/to-ascii.ts';
 
 const WIDTH = 72;
@@ -27,8 +39,11 @@ export function renderText(answer: Answer, style: PresentStyle): string {
     answer.layers.length > 0 ? 'Path' : 'Interface',
     ...[...interfaceRows(answer, style), ...stackRows(answer, style)].flatMap(oneValue),
     ...section('Window', windowRows(answer, style)),
+    ...section('Crystal', crystalRows(answer.crystal, style)),
     ...section('Pulse', pulseRows(answer, style)),
-    ...beamSection(answer, style),
+    ...section('Beam', [...beamRows(answer, style), ...beamDetailRows(answer, style)]),
+    ...section('At the peak of the pulse', pulsedBeamRows(answer, style)),
+    ...section('Nonlinear phase', nonlinearRows(answer, style)),
     ...cautionSection(answer.cautions),
     ...sourceSection(answer, style),
   ];
@@ -92,21 +107,31 @@ function oneValue({ symbol, text, label }: Shown): readonly string[] {
   return [value, ...wrap(label, WIDTH - LABEL_AT).map((line) => ' '.repeat(LABEL_AT) + line)];
 }
 
-function beamSection(answer: Answer, style: PresentStyle): readonly string[] {
-  return section('Beam', beamRows(answer, style));
-}
-
 function section(title: string, rows: readonly Shown[]): readonly string[] {
   return rows.length === 0 ? [] : ['', title, ...rows.flatMap(oneValue)];
 }
 
 function layerSection(answer: Answer, style: PresentStyle): readonly string[] {
   if (answer.layers.length === 0) return [];
-  const lines = answer.layers.flatMap((layer, i) => [
-    ...wrap(layerTitle(layer, i + 1), WIDTH, '  '),
-    ...wrap(`  ${layerText(layer, style)}`.trim(), WIDTH - 2, '').map((l) => `  ${l}`),
-  ]);
+  const one = (layer: LayerAnswer, title: string, indent: number): readonly string[] =>
+    [
+      ...wrap(title, WIDTH - indent, '  '),
+      ...wrap(layerText(layer, style), WIDTH - 2 - indent).map((l) => `  ${l}`),
+    ].map((l) => ' '.repeat(indent) + l);
+  const lines = layerRuns(answer.layers).flatMap((run) =>
+    run.times === 1
+      ? run.layers.flatMap((layer, i) => one(layer, layerTitle(layer, run.first + i), 0))
+      : [
+          runTitle(run) + absorbedText(run, style),
+          ...run.layers.flatMap((layer) => one({ ...layer, absorptance: 0 }, mediumTitle(layer.medium), 2)),
+        ],
+  );
   return ['Layers', ...lines, ''];
+}
+
+function absorbedText({ absorptance }: LayerRun, style: PresentStyle): string {
+  if (!(absorptance > 0)) return '';
+  return `, absorb ${formatQuantity(absorptance, PER_CENT, { significant: 4 }, { style })} together`;
 }
 
 const MARK: Readonly<Record<Caution['level'], string>> = { hazard: '!! ', caution: '!  ', note: '-  ' };
