@@ -60,7 +60,7 @@ function blocks(
       { ascii: style.ascii, indent: 0 },
     );
   const whole = block(0, titles.length);
-  if (titles.length < 3 || whole.every((line) => [...line].length <= WIDEST)) return whole;
+  if (titles.length < 2 || whole.every((line) => [...line].length <= WIDEST)) return whole;
   const half = Math.ceil(titles.length / 2);
   return [...block(0, half), '', ...block(half, titles.length)];
 }

@@ -50,6 +50,9 @@ function nothing({ within }: MatchReport): string {
     : `No medium of the catalogue is within ${within} of it.`;
 }
 
+/** Columns of a terminal; a wider table moves closer together. */
+const WIDEST = 80;
+
 const COLUMNS: readonly Column[] = [
   { title: 'medium' },
   { title: 'n' },
@@ -71,13 +74,17 @@ function table(matches: readonly Match[], style: NumberStyle): readonly string[]
       .map((mark) => mark.letter)
       .join(''),
   ]);
-  return columns(COLUMNS, rows, { ascii: style.ascii, indent: 0 });
+  const lines = columns(COLUMNS, rows, { ascii: style.ascii, indent: 0 });
+  const fits = lines.every((line) => [...line].length <= WIDEST);
+  return fits ? lines : columns(COLUMNS, rows, { ascii: style.ascii, indent: 0, gap: 1 });
 }
 
 /** Powers of ten in ASCII: a raised figure may be two columns wide in some terminals, and more columns follow. */
 function differenceText({ difference, difference_uncertainty: u }: Match): string {
-  const sign = difference < 0 ? '-' : '+';
-  return sign + formatUncertain(Math.abs(difference), u, { significant: 3 }, ASCII);
+  const size = formatUncertain(Math.abs(difference), u, { significant: 3 }, ASCII);
+  // Rounded away, a difference has no sign.
+  const sign = /^[0.]+(\(|$)/.test(size) ? ' ' : difference < 0 ? '-' : '+';
+  return sign + size;
 }
 
 function reflectanceTexts({ R, R_upTo, resolved, returnLoss_dB }: Match): readonly [string, string] {
