@@ -32,11 +32,13 @@ const PROBES = [0.618, -0.382];
 const MISFIT = 0.015;
 /** Below this a misfit is rounding. */
 const ROUNDING = 1e-11;
-const SAMPLES = 1024;
+const SAMPLES = 512;
 /** Of one input alone, for its share. */
-const OWN_SAMPLES = 256;
+const OWN_SAMPLES = 128;
 /** An input that adds less than this share of the variance, and follows its parabola, is not sampled. */
 const NEGLIGIBLE = 1e-4;
+/** A standard uncertainty below this is not worth sampling for: powers are fractions of 1. */
+const WORTH_SAMPLING = 1e-5;
 /** More dimensions are not filled evenly by the samples. */
 const MOST_SAMPLED = 8;
 
@@ -63,12 +65,48 @@ export function propagateAll(
     const probed = PROBES.map((z) => alone(i, z * u));
     return values.map((value, k) => partOf(value, k, up, down, probed));
   });
+  const totals = values.map((_, k) => sum(parts.map((p) => (p[k] as Part).variance)));
+  const bending = values.map(
+    (_, k) =>
+      Math.sqrt(totals[k] as number) > WORTH_SAMPLING &&
+      parts.some((p) => bends(p[k] as Part, totals[k] as number)),
+  );
+  const mattering = mostMattering(parts, totals, bending);
+  const together = mattering.length > 0 ? sampleTogether(mattering, inputs, at) : [];
+  const apart = mattering.map((i) =>
+    parts[i]?.some((p, k) => bending[k] && p.bends)
+      ? sampleOne((inputs[i] as UncertainInput).standardUncertainty, (x) => alone(i, x))
+      : null,
+  );
   return values.map((_, k) => {
-    const own = parts.map((p) => p[k] as Part);
-    const total = sum(own.map((p) => p.variance));
-    const bends = own.some((p) => p.bends && p.variance > NEGLIGIBLE * total);
-    return bends ? sampled(k, inputs, own, total, at, alone) : expanded(inputs, own, total);
+    const own = parts.map((p) => (p[k] as Part).variance);
+    if (!bending[k]) return spreadOf(inputs, own, totals[k] as number, null);
+    const { mean, variance } = moments(together.map((r) => r[k] as number));
+    const rest = sum(own.map((v, i) => (mattering.includes(i) ? 0 : v)));
+    const shares = own.map((v, i) => {
+      const single = apart[mattering.indexOf(i)];
+      return single ? moments(single.map((r) => r[k] as number)).variance : v;
+    });
+    return spreadOf(inputs, shares, variance + rest, mean);
   });
+}
+
+const bends = (part: Part, total: number): boolean => part.bends && part.variance > NEGLIGIBLE * total;
+
+/** Inputs to be sampled together for the results that bend, most important first. */
+function mostMattering(
+  parts: readonly (readonly Part[])[],
+  totals: readonly number[],
+  bending: readonly boolean[],
+): readonly number[] {
+  const share = (p: readonly Part[]): number =>
+    Math.max(...p.map((part, k) => (bending[k] ? part.variance / (totals[k] as number) : 0)));
+  return parts
+    .map((p, i) => ({ i, share: share(p) }))
+    .filter((p) => p.share > NEGLIGIBLE)
+    .sort((a, b) => b.share - a.share)
+    .slice(0, MOST_SAMPLED)
+    .map((p) => p.i);
 }
 
 function partOf(
@@ -91,59 +129,40 @@ function partOf(
   return { variance: bends ? Math.max(variance, worst * worst) : variance, bends };
 }
 
-function expanded(inputs: readonly UncertainInput[], own: readonly Part[], total: number): Spread {
-  const dominant = dominantName(
-    inputs,
-    own.map((p) => p.variance),
-  );
-  return { standardUncertainty: Math.sqrt(total), dominant, method: 'expansion', mean: null };
-}
-
-function sampled(
-  k: number,
+function sampleTogether(
+  mattering: readonly number[],
   inputs: readonly UncertainInput[],
-  own: readonly Part[],
-  total: number,
   at: (shifts: readonly number[]) => readonly number[],
-  alone: (i: number, shift: number) => readonly number[],
-): Spread {
-  const mattering = own
-    .map((part, i) => ({ ...part, i }))
-    .filter((p) => p.variance > NEGLIGIBLE * total)
-    .sort((a, b) => b.variance - a.variance)
-    .slice(0, MOST_SAMPLED)
-    .map((p) => p.i);
+): readonly (readonly number[])[] {
   const point = spreadSequence(mattering.length);
-  const results = Array.from({ length: SAMPLES }, (_, n) => {
+  return Array.from({ length: SAMPLES }, (_, n) => {
     const place = point(n);
     const shifts = new Array<number>(inputs.length).fill(0);
     for (const [d, i] of mattering.entries()) {
       shifts[i] = normalQuantile(place[d] as number) * (inputs[i] as UncertainInput).standardUncertainty;
     }
-    return at(shifts)[k] as number;
+    return at(shifts);
   });
-  const { mean, variance } = moments(results);
-  const rest = sum(own.map((p, i) => (mattering.includes(i) ? 0 : p.variance)));
-  const shares = own.map((part, i) =>
-    part.bends && mattering.includes(i)
-      ? ownVariance(k, (inputs[i] as UncertainInput).standardUncertainty, (x) => alone(i, x))
-      : part.variance,
-  );
-  return {
-    standardUncertainty: Math.sqrt(variance + rest),
-    dominant: dominantName(inputs, shares),
-    method: 'sampled',
-    mean,
-  };
 }
 
-/** Variance by one input alone, at evenly spaced quantiles. */
-function ownVariance(k: number, u: number, at: (shift: number) => readonly number[]): number {
-  const results = Array.from(
-    { length: OWN_SAMPLES },
-    (_, n) => at(u * normalQuantile((n + 0.5) / OWN_SAMPLES))[k] as number,
-  );
-  return moments(results).variance;
+/** One input alone, at evenly spaced quantiles. */
+function sampleOne(u: number, at: (shift: number) => readonly number[]): readonly (readonly number[])[] {
+  return Array.from({ length: OWN_SAMPLES }, (_, n) => at(u * normalQuantile((n + 0.5) / OWN_SAMPLES)));
+}
+
+/** `mean`: null for an expansion. */
+function spreadOf(
+  inputs: readonly UncertainInput[],
+  variances: readonly number[],
+  total: number,
+  mean: number | null,
+): Spread {
+  return {
+    standardUncertainty: Math.sqrt(total),
+    dominant: dominantName(inputs, variances),
+    method: mean === null ? 'expansion' : 'sampled',
+    mean,
+  };
 }
 
 function moments(values: readonly number[]): { readonly mean: number; readonly variance: number } {

@@ -183,7 +183,7 @@ function waveplateTable(plate: PrincipalPlate, style: PresentStyle): readonly st
     return text.slice(0, text.lastIndexOf(' '));
   };
   const heads: readonly Column[] = [
-    { title: `thickness in ${prefix.shown}m, order` },
+    { title: `${prefix.shown}m, order` },
     { title: '0', right: true },
     ...first.orders.map((o): Column => ({ title: String(o.order), right: true })),
   ];
