@@ -32,6 +32,8 @@ export class Candidate {
   private readonly survey: Survey;
   private quick: QuickMedium | undefined | null = null;
   private matter: QuickOptics | undefined;
+  private spread: number | Undecided | undefined;
+  private dispersion: number | Undecided | undefined;
 
   constructor(survey: Survey, material: Material, axis: Axis, wave: FitWave | undefined) {
     this.survey = survey;
@@ -79,11 +81,17 @@ export class Candidate {
   }
 
   get abbe(): number | Undecided {
-    return abbeVd(this.survey, this.material, this.axis) ?? undecided('abbe-lines-not-reached');
+    this.dispersion ??= abbeVd(this.survey, this.material, this.axis) ?? undecided('abbe-lines-not-reached');
+    return this.dispersion;
   }
 
   /** n_e - n_o, or n_z - n_x; 0 for an isotropic medium. Needs every axis at the wave. */
   get birefringence(): number | Undecided {
+    this.spread ??= this.measureBirefringence();
+    return this.spread;
+  }
+
+  private measureBirefringence(): number | Undecided {
     const { wave, material } = this;
     if (!wave) return undecided('no-data-at-wave');
     const at = (axis: Axis): number | undefined => quickMedium(this.survey, material, axis, wave)?.n;

@@ -32,15 +32,25 @@ export interface FindResult {
   readonly undecided: ReadonlyMap<UndecidedReason, number>;
 }
 
-/** Refuses only a wave outside what the program covers. */
-export function findMaterials(survey: Survey, criteria: Criteria): FindResult | Refusal {
+/** How a material on an axis at the wave of the criteria is measured. */
+export type CandidateOf = (material: Material, axis: Axis, wave: FitWave | undefined) => Candidate;
+
+/**
+ * Refuses only a wave outside what the program covers.
+ * @param candidateOf hands out candidates measured before, where the same wave is searched again and again.
+ */
+export function findMaterials(
+  survey: Survey,
+  criteria: Criteria,
+  candidateOf: CandidateOf = (material, axis, wave) => new Candidate(survey, material, axis, wave),
+): FindResult | Refusal {
   const wave = criteria.wave && bothReferences(criteria.wave);
   if (isRefusal(wave)) return wave;
   const found: Found[] = [];
   const reasons = new Map<UndecidedReason, number>();
   for (const material of survey.materials) {
     if (!meetsFacts(material, criteria)) continue;
-    const verdict = judge(survey, material, criteria, wave);
+    const verdict = judge(material, criteria, wave, candidateOf);
     if (verdict === false) continue;
     if (isUndecided(verdict)) reasons.set(verdict.undecided, (reasons.get(verdict.undecided) ?? 0) + 1);
     else found.push(verdict);
@@ -97,16 +107,16 @@ export function matchesWords(material: Material, words: readonly string[]): bool
 }
 
 function judge(
-  survey: Survey,
   material: Material,
   criteria: Criteria,
   wave: FitWave | undefined,
+  candidateOf: CandidateOf,
 ): Found | false | Undecided {
   const fact = material.handling?.hygroscopic === undefined && excludesHygroscopic(criteria);
   const described = axesOf(material);
   // An entry of measured reflectances alone has no axis, and no data at any wave.
   const axes: readonly Axis[] = described.length > 0 ? described : ['isotropic'];
-  const candidates = axes.map((axis) => new Candidate(survey, material, axis, wave));
+  const candidates = axes.map((axis) => candidateOf(material, axis, wave));
   const verdicts = candidates.map((candidate) => judgeAxis(candidate, criteria));
   const fitting = candidates.filter((_, i) => verdicts[i] === true);
   const [first, ...others] = fitting;

@@ -2,13 +2,14 @@
 import type { Answer } from '../answer/answer.ts';
 import { answerQuestion } from '../answer/answer-question.ts';
 import type { SourceOf } from '../answer/medium-side.ts';
-import type { Layer, Question } from '../answer/question.ts';
+import type { Layer, Question, WaveSpec } from '../answer/question.ts';
 import type { CatalogueEntry, IndexedCatalogue } from '../catalog/entries.ts';
 import { foldTight } from '../catalog/fold.ts';
 import { type Refusal, refuse } from '../medium/refusal.ts';
 import { problem } from '../units/problem.ts';
 import { IndexTables } from './index-tables.ts';
 import type { Bindings } from './keys/bindings.ts';
+import { MediumFinder } from './medium-finder.ts';
 import type { World } from './world.ts';
 
 /** How the program around reads layers; a refusal comes with the name it is about. */
@@ -22,6 +23,8 @@ type SearchEntries = (text: string) => readonly CatalogueEntry[];
 export interface RealWorld extends World {
   /** Loads the forgiving search; until then names are found by their letters alone. */
   loadSearch(): Promise<void>;
+  /** Gets ready, a little at a time, for conditions at a wave: the list of media has been opened. */
+  prepareFind(wave: WaveSpec): void;
   stop(): void;
 }
 
@@ -35,6 +38,7 @@ export function realWorld(
   onReady: () => void,
 ): RealWorld {
   const tables = new IndexTables(onReady);
+  const finder = new MediumFinder(catalogue);
   const sourceOf = catalogue.source.bind(catalogue);
   let find: SearchEntries = (text) => plainSearch(catalogue.entries(), text);
   let found = new Map<string, readonly CatalogueEntry[]>();
@@ -48,6 +52,9 @@ export function realWorld(
       found.set(text, entries);
       return entries;
     },
+    find: (criteria, among) => finder.find(criteria, among),
+    survey: () => finder.survey(),
+    prepareFind: (wave) => finder.prepare(wave),
     lookup: (name) => catalogue.lookup(name),
     material: (key) => catalogue.material(key),
     source: sourceOf,
@@ -67,7 +74,10 @@ export function realWorld(
       find = (text) => search(text).map((hit) => hit.entry);
       found = new Map();
     },
-    stop: () => tables.stop(),
+    stop: () => {
+      tables.stop();
+      finder.stop();
+    },
   };
 }
 

@@ -88,6 +88,10 @@ export async function showPicture(start: Start, terminal: Terminal): Promise<num
   );
   guard.onExit(() => kept.saveIfOpen());
   store.subscribe(() => kept.follow(store.state()));
+  store.subscribe(() => {
+    const { search, question } = store.state();
+    if (search) world.prepareFind(question.wave);
+  });
   setTimeout(
     () => void world.loadSearch().then(() => store.dispatch({ kind: 'ready' })),
     AFTER_FIRST_FRAME_ms,

@@ -10,6 +10,9 @@ import type { Material, Source } from '../catalog/types.ts';
 import type { Conditions } from '../dispersion/evaluator.ts';
 import type { Optics } from '../interface/optics.ts';
 import type { Refusal } from '../medium/refusal.ts';
+import type { Criteria } from '../selection/criteria.ts';
+import type { FindResult } from '../selection/find-materials.ts';
+import type { Survey } from '../selection/survey.ts';
 import type { Problem } from '../units/problem.ts';
 import type { Bindings } from './keys/bindings.ts';
 
@@ -17,6 +20,10 @@ export interface World {
   answer(question: Question): Answer | Refusal;
   /** Best match first; everything for an empty text. */
   search(text: string): readonly CatalogueEntry[];
+  /** The media that meet criteria, among those with these keys or all; measured once at each wave. */
+  find(criteria: Criteria, among: readonly string[] | undefined): FindResult | Refusal;
+  /** The whole catalogue, for what compares media. */
+  survey(): Survey;
   lookup(name: string): Lookup;
   material(key: string): Material | undefined;
   source(id: string): Source | undefined;

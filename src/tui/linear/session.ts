@@ -133,9 +133,14 @@ function takeMedium(
 
 /** One exact name is taken at once; several are read out. */
 function lookForMedium(state: State, side: Side, text: string, world: World): Reply {
-  const hits = hitsFor(text, state.recent, world).slice(0, MOST_CHOICES);
+  const hits = hitsFor(text, state.recent, state.question, world).slice(0, MOST_CHOICES);
   const [first] = hits;
-  if (!first) return say(state, [problemText(whyNoHit(text))], { kind: 'medium', side, hits: [] });
+  if (!first)
+    return say(state, [problemText(whyNoHit(text, state.question, world))], {
+      kind: 'medium',
+      side,
+      hits: [],
+    });
   const isExact = first.kind === 'literal' || hits.length === 1 || world.lookup(text).kind === 'one';
   if (isExact) return choose(state, side, mediumOfHit(first, state.question, world), world);
   return say(state, [...hitLines(hits, state, world), 'type a number, or another name'], {

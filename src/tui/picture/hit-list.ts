@@ -35,7 +35,7 @@ export function listLines(state: State, search: Search, world: World, columns: n
   const { body } = sceneOf(state, world).plan;
   const width = Math.min(columns, BLOCK_WIDTH);
   const rows = listRows(state, world);
-  const hits = hitsFor(search.line.text, state.recent, world);
+  const hits = hitsFor(search.line.text, state.recent, state.question, world);
   const seen = hits.slice(search.top, search.top + rows);
   const facts = seen.map((hit) => hitFacts(hit, state.question, world, style));
   const lines: ListLine[] = facts.map((f, i) => ({

@@ -6,8 +6,9 @@ import type { Refusal } from '../../medium/refusal.ts';
 import { cutToWidth } from '../../term/fit-width.ts';
 import { isProblem, problemText } from '../../units/problem.ts';
 import { toAscii } from '../../units/to-ascii.ts';
+import { type ConditionedHits, faultOf, understoodText } from '../conditioned-hits.ts';
 import { fieldById } from '../fields/all-fields.ts';
-import { hitsFor, whyNoHit } from '../hits.ts';
+import { conditionsIn, hitsFor, whyNoHit } from '../hits.ts';
 import type { ActionId } from '../keys/actions.ts';
 import { keyText } from '../keys/key-names.ts';
 import { answerOf, fieldOfStop, refusalOf, type State } from '../state.ts';
@@ -76,13 +77,28 @@ function typingParts(state: State, world: World): readonly Part[] | undefined {
   }
   if (search) {
     const text = search.line.text;
-    const nothing = hitsFor(text, state.recent, world).length === 0;
+    const conditioned = conditionsIn(text, state.question, world);
+    if (conditioned) return conditionParts(conditioned);
+    const nothing = hitsFor(text, state.recent, state.question, world).length === 0;
     return [
-      nothing ? refused(problemText(whyNoHit(text))) : hint('n and transparency are those at the wave above'),
-      hint(fieldById(search.side).hint),
+      nothing
+        ? refused(problemText(whyNoHit(text, state.question, world)))
+        : hint('n and transparency are those at the wave above'),
+      hint(text === '' ? CONDITIONS_HINT : fieldById(search.side).hint),
     ];
   }
   return undefined;
+}
+
+const CONDITIONS_HINT = 'a name, n=1.5+0.1i, or conditions: n 1.5..1.6 clear 3um..5um class glass not toxic';
+
+/** How many media are left and what was understood; below it what is wrong or missing. */
+function conditionParts(hits: ConditionedHits): readonly Part[] {
+  const understood = understoodText(hits);
+  const fault = faultOf(hits);
+  const said = [hits.count, understood].filter((text) => text !== '').join('. ');
+  if (!fault) return [{ ...hint(said), isShort: false }];
+  return [hint(said), fault.isOpen ? hint(fault.text) : refused(fault.text)];
 }
 
 /** How what is typed so far will be understood. */

@@ -66,7 +66,7 @@ export function actInSearch(state: State, action: ActionId, world: World): State
 
 /** Moves the mark; the list scrolls only where the mark would leave it. */
 function select(state: State, search: Search, by: number, world: World): State {
-  const count = hitsFor(search.line.text, state.recent, world).length;
+  const count = hitsFor(search.line.text, state.recent, state.question, world).length;
   const selected = Math.max(0, Math.min(count - 1, search.selected + by));
   const rows = Math.max(1, listRows(state, world));
   const top = Math.max(selected - rows + 1, Math.min(search.top, selected));
@@ -74,10 +74,13 @@ function select(state: State, search: Search, by: number, world: World): State {
 }
 
 function choose(state: State, search: Search, world: World): State {
-  const hit = hitsFor(search.line.text, state.recent, world)[search.selected];
+  const hit = hitsFor(search.line.text, state.recent, state.question, world)[search.selected];
   const medium = hit && mediumOfHit(hit, state.question, world);
   if (!hit || !medium) {
-    return { ...state, message: { tone: 'refused', text: problemText(whyNoHit(search.line.text)) } };
+    return {
+      ...state,
+      message: { tone: 'refused', text: problemText(whyNoHit(search.line.text, state.question, world)) },
+    };
   }
   const recent =
     hit.kind === 'entry'

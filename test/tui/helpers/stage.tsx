@@ -14,6 +14,7 @@ import { App } from '../../../src/tui/components/app.tsx';
 import { mediumName } from '../../../src/tui/fields/medium-fields.ts';
 import { type IndexTable, indexTable } from '../../../src/tui/index-tables.ts';
 import { bindKeys } from '../../../src/tui/keys/bindings.ts';
+import { MediumFinder } from '../../../src/tui/medium-finder.ts';
 import { type Effect, initialState, type Preferences, type State } from '../../../src/tui/state.ts';
 import { Store } from '../../../src/tui/store.ts';
 import type { World } from '../../../src/tui/world.ts';
@@ -33,10 +34,13 @@ let search: ReturnType<typeof makeSearch> | undefined;
 export function testWorld(): World {
   const catalogue = catalogueFromSources();
   search ??= makeSearch(catalogue.entries());
+  const finder = new MediumFinder(catalogue);
   const find = search;
   return {
     answer: (question) => answerQuestion(question, (id) => catalogue.source(id)),
     search: (text) => find(text).map((hit) => hit.entry),
+    find: (criteria, among) => finder.find(criteria, among),
+    survey: () => finder.survey(),
     lookup: (name) => catalogue.lookup(name),
     material: (key) => catalogue.material(key),
     source: (id) => catalogue.source(id),

@@ -1,0 +1,97 @@
+/**
+ * Conditions typed beside the name of a medium, in the language of `halfspace find`: `glass n 1.5..1.53 not toxic`. What a
+ * condition lacks is said while the others hold. The wave is that of the question where none is typed. Words that match nothing
+ * as they stand are taken with slips.
+ */
+import type { WaveSpec } from '../answer/question.ts';
+import { isRefusal } from '../medium/refusal.ts';
+import { type FindResult, type Found, matchesWords } from '../selection/find-materials.ts';
+import { type ConditionReading, parseConditions } from '../selection/parse-conditions.ts';
+import { defaultOrder, sortFound } from '../selection/sort-found.ts';
+import { UNDECIDED_WORDS, type UndecidedReason } from '../selection/undecided.ts';
+import { METRE } from '../units/display-unit.ts';
+import { formatQuantity } from '../units/format-quantity.ts';
+import { ASCII } from '../units/number-style.ts';
+import type { World } from './world.ts';
+
+export interface ConditionedHits {
+  readonly reading: ConditionReading;
+  readonly found: readonly Found[];
+  /** "12 of 464; 3 left out: no data at 633 nm" */
+  readonly count: string;
+}
+
+const made = new WeakMap<World, WeakMap<WaveSpec, Map<string, ConditionedHits | undefined>>>();
+/** Texts kept: typing and deleting go over the same ones. */
+const MOST_TEXTS = 64;
+
+/** Undefined where the text holds nothing but words: then it is a name. */
+export function conditionedHits(text: string, wave: WaveSpec, world: World): ConditionedHits | undefined {
+  const waves = made.get(world) ?? new WeakMap<WaveSpec, Map<string, ConditionedHits | undefined>>();
+  made.set(world, waves);
+  const known = waves.get(wave) ?? new Map<string, ConditionedHits | undefined>();
+  waves.set(wave, known);
+  if (known.has(text)) return known.get(text);
+  const hits = findConditioned(text, wave, world);
+  if (known.size >= MOST_TEXTS) known.clear();
+  known.set(text, hits);
+  return hits;
+}
+
+function findConditioned(text: string, wave: WaveSpec, world: World): ConditionedHits | undefined {
+  const { materials } = world.survey();
+  const classes = [...new Set(materials.map((m) => m.class))];
+  const reading = parseConditions(text, { classes, wave });
+  if (reading.parts.every((part) => part.kind === 'word')) return undefined;
+  const { words } = reading.criteria;
+  const criteria = { ...reading.criteria, words: [] };
+  const result = world.find(criteria, words.length === 0 ? undefined : keysFor(words, world));
+  if (isRefusal(result)) return { reading, found: [], count: result.message };
+  const found = sortFound(result.found, defaultOrder(criteria), criteria);
+  return { reading, found, count: countText(result, materials.length, criteria.wave) };
+}
+
+/** Those that hold the words; where none does, those that come close. */
+function keysFor(words: readonly string[], world: World): readonly string[] {
+  const strict = world.survey().materials.filter((m) => matchesWords(m, words));
+  return (strict.length > 0 ? strict : world.search(words.join(' '))).map(({ key }) => key);
+}
+
+function countText({ found, undecided }: FindResult, total: number, wave: WaveSpec | undefined): string {
+  const left = [...undecided].sort((a, b) => b[1] - a[1]);
+  const open = left.reduce((sum, [, count]) => sum + count, 0);
+  const count = `${found.length} of ${total}`;
+  if (open === 0) return count;
+  const reasons = left.map(([reason]) => reasonText(reason, wave)).join(', ');
+  return `${count}; ${open} left out: ${reasons}`;
+}
+
+function reasonText(reason: UndecidedReason, wave: WaveSpec | undefined): string {
+  if (reason !== 'no-data-at-wave' || !wave) return UNDECIDED_WORDS[reason];
+  const length = formatQuantity(Number(wave.wavelength_m.toPrecision(6)), METRE, 'shortest', {
+    style: ASCII,
+  });
+  return `no data at ${length}`;
+}
+
+/** What was understood so far: "n 1.5 to 1.53, not toxic, at 633 nm; words: glass". */
+export function understoodText({ reading: { criteria, parts } }: ConditionedHits): string {
+  const said = parts.filter((part) => part.kind === 'condition').map((part) => part.text);
+  const words = criteria.words.length > 0 ? [`words: ${criteria.words.join(' ')}`] : [];
+  return [...(said.length > 0 ? [said.join(', ')] : []), ...words].join('; ');
+}
+
+export interface ReadingFault {
+  /** Not wrong yet: the last part is still being typed. */
+  readonly isOpen: boolean;
+  /** What is wrong and what would be right. */
+  readonly text: string;
+}
+
+/** The first mistake, or how what is being typed may go on. */
+export function faultOf({ reading: { parts } }: ConditionedHits): ReadingFault | undefined {
+  const part = parts.find((p) => p.kind === 'problem') ?? parts.findLast((p) => p.remedy !== undefined);
+  if (!part) return undefined;
+  const text = part.kind === 'word' ? (part.remedy ?? '') : `${part.text}; ${part.remedy ?? ''}`;
+  return { isOpen: part.kind !== 'problem', text };
+}
