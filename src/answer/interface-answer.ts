@@ -1,12 +1,8 @@
 /** The interface part of the answer: Fresnel, special angles, total reflection, losses; null wherever a value does not exist. */
 import { type FresnelResult, fresnel } from '../interface/fresnel.ts';
 import { reflectionLoss_dB, returnLoss_dB } from '../interface/losses.ts';
-import {
-  brewsterAngles,
-  criticalAngle,
-  pseudoBrewsterAngle,
-  WEAK_ABSORPTION,
-} from '../interface/special-angles.ts';
+import { pseudoBrewsterAngle } from '../interface/pseudo-brewster.ts';
+import { brewsterAngles, criticalAngle, WEAK_ABSORPTION } from '../interface/special-angles.ts';
 import { totalReflection } from '../interface/total-reflection.ts';
 import { abs2, arg, type Complex } from '../num/complex.ts';
 import type { InterfaceAnswer } from './answer.ts';

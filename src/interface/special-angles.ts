@@ -1,8 +1,7 @@
 /**
  * Angles of incidence at which something particular happens. All from the normal, in radians; null where there is none.
  */
-import { mul } from '../num/complex.ts';
-import { fresnel, fresnelAngleDerivative } from './fresnel.ts';
+import { fresnel } from './fresnel.ts';
 import type { Optics } from './optics.ts';
 
 /** R_p below this at the Brewster angle of the real parts counts as vanishing (absorption too weak to fill the zero). */
@@ -42,45 +41,4 @@ export function criticalAngle(from: Optics, into: Optics): number | null {
   if (from.n.im > WEAK_ABSORPTION * from.n.re || into.n.im > WEAK_ABSORPTION * into.n.re) return null;
   const ratio = into.n.re / from.n.re;
   return ratio < 1 ? Math.asin(ratio) : null;
-}
-
-/**
- * Angle of least R_p where the far side absorbs, so that R_p has a minimum but no zero. Found as the zero of dR_p/dtheta
- * after a scan for the lowest point. Null where R_p rises from normal incidence on (its minimum is then at 0 itself).
- */
-export function pseudoBrewsterAngle(from: Optics, into: Optics): number | null {
-  const slope = (a: number): number => {
-    const { rp } = fresnel(from, into, a);
-    const { drp } = fresnelAngleDerivative(from, into, a);
-    return 2 * mul({ re: rp.re, im: -rp.im }, drp).re;
-  };
-  const steps = 720;
-  const step = Math.PI / 2 / steps;
-  let lowest = 0;
-  let lowestR = fresnel(from, into, 0).Rp;
-  for (let i = 1; i < steps; i++) {
-    const R = fresnel(from, into, i * step).Rp;
-    if (R < lowestR) {
-      lowestR = R;
-      lowest = i;
-    }
-  }
-  if (lowest === 0) return null;
-  let lo = (lowest - 1) * step;
-  let hi = Math.min((lowest + 1) * step, Math.PI / 2 - 1e-12);
-  if (lowest === steps - 1) {
-    // The minimum of a very good conductor lies closer to grazing than one step: bracket it there.
-    lo = lowest * step - step;
-  }
-  let slopeLo = slope(lo === 0 ? 1e-9 : lo);
-  for (let i = 0; i < 200 && hi - lo > 1e-15; i++) {
-    const mid = (lo + hi) / 2;
-    const s = slope(mid);
-    if (s === 0) return mid;
-    if (s < 0 === slopeLo < 0) {
-      lo = mid;
-      slopeLo = s;
-    } else hi = mid;
-  }
-  return (lo + hi) / 2;
 }

@@ -2,7 +2,8 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { fresnel, fresnelAngleDerivative } from '../../src/interface/fresnel.ts';
 import { opticsFromIndex } from '../../src/interface/optics.ts';
-import { brewsterAngles, criticalAngle, pseudoBrewsterAngle } from '../../src/interface/special-angles.ts';
+import { pseudoBrewsterAngle } from '../../src/interface/pseudo-brewster.ts';
+import { brewsterAngles, criticalAngle } from '../../src/interface/special-angles.ts';
 import { abs, abs2, add, type Complex, mul, ONE, scale, sub } from '../../src/num/complex.ts';
 import {
   absorbing,
