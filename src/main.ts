@@ -13,7 +13,7 @@ import { loadCommand } from './cli/load-command.ts';
 import type { OptionValues } from './cli/options.ts';
 import { readLayers } from './cli/read-path.ts';
 import { saveFile } from './cli/save-file.ts';
-import { usageErrorJson, usageErrorText } from './cli/usage-error.ts';
+import { usageErrorText } from './cli/usage-error.ts';
 import { writeOut } from './cli/write-out.ts';
 import { decideFullScreen, decideGlyphs } from './term/ability.ts';
 
@@ -108,7 +108,7 @@ function dispatch(): number | Promise<number> {
   switch (parsed.kind) {
     case 'error': {
       const ascii = decideGlyphs(process.env) === 'ascii';
-      writeOut(2, parsed.json ? usageErrorJson(parsed.error) : usageErrorText(parsed.error, ascii));
+      writeOut(2, usageErrorText(parsed.error, ascii));
       return NOT_UNDERSTOOD;
     }
     case 'help':

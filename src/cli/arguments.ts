@@ -36,8 +36,7 @@ export type ParsedArguments =
   | { readonly kind: 'screen'; readonly options: OptionValues }
   | { readonly kind: 'help'; readonly topic?: CommandName }
   | { readonly kind: 'version' }
-  /** `json`: the error is to be told as JSON. */
-  | { readonly kind: 'error'; readonly error: UsageError; readonly json: boolean };
+  | { readonly kind: 'error'; readonly error: UsageError };
 
 export function parseArguments(argv: readonly string[]): ParsedArguments {
   const read = readOptions(argv);
@@ -47,7 +46,7 @@ export function parseArguments(argv: readonly string[]): ParsedArguments {
   if (has('help')) return { kind: 'help', ...(named && named !== 'help' && { topic: named }) };
   if (has('version')) return { kind: 'version' };
 
-  const failed = (error: UsageError): ParsedArguments => ({ kind: 'error', error, json: has('json') });
+  const failed = (error: UsageError): ParsedArguments => ({ kind: 'error', error });
   const command = named ?? UNNAMED_COMMAND;
   if (read.error) return failed({ ...read.error, ...(named && { command: named }) });
   const screen = read.operands.length === 0 && read.given.every(({ key }) => isScreenOption(key));
@@ -115,7 +114,7 @@ function parseValues(
   return { values: values as OptionValues };
 }
 
-function findClash(given: readonly GivenOption[], command: CommandName): UsageError | undefined {
+export function findClash(given: readonly GivenOption[], command: CommandName): UsageError | undefined {
   const isGiven = (name: string): boolean => given.some(({ key }) => key === optionKeyByName(name));
   for (const { key } of given) {
     const { name, excludes = [], needs, needsOneOf } = optionSpec(key);

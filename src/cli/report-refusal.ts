@@ -1,15 +1,10 @@
-/** A refusal in words on standard error (or as JSON there), standard output left empty; gives the exit status. */
+/** A refusal in words on standard error, standard output left empty; gives the exit status. The same under --json. */
 import type { Refusal } from '../medium/refusal.ts';
 import { toAscii } from '../units/to-ascii.ts';
 import type { Context, ExitStatus } from './context.ts';
 
-export function reportRefusal(refusal: Refusal, json: boolean, context: Context): ExitStatus {
-  const { code, message, remedy, candidates = [] } = refusal;
-  if (json) {
-    context.warn(`${JSON.stringify({ schema: 1, error: { code, message, remedy, candidates } })}\n`);
-    return refusal.exit;
-  }
-  const line = `halfspace: ${message}; ${remedy}\n`;
-  context.warn(context.ascii ? toAscii(line.trimEnd()) + '\n' : line);
-  return refusal.exit;
+export function reportRefusal({ message, remedy, exit }: Refusal, context: Context): ExitStatus {
+  const line = `halfspace: ${message}; ${remedy}`;
+  context.warn(`${context.ascii ? toAscii(line) : line}\n`);
+  return exit;
 }

@@ -34,9 +34,3 @@ export function usageErrorText(error: UsageError, ascii = false): string {
   const text = lines.map((line) => `${line}\n`).join('');
   return ascii ? toAscii(text) : text;
 }
-
-/** The same for programs: one JSON document in one line. */
-export function usageErrorJson(error: UsageError): string {
-  const { code, message, remedy, candidates } = error;
-  return `${JSON.stringify({ schema: 1, error: { code, message, remedy, candidates } })}\n`;
-}

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { parseArguments } from '../../src/cli/arguments.ts';
-import { type UsageError, usageErrorJson, usageErrorText } from '../../src/cli/usage-error.ts';
+import { type UsageError, usageErrorText } from '../../src/cli/usage-error.ts';
 
 function errorOf(...argv: string[]): UsageError {
   const parsed = parseArguments(argv);
@@ -22,19 +22,5 @@ describe('a usage error', () => {
     const error = errorOf('air', 'bk7', '633nm', '--angle', '45µm');
     expect(usageErrorText(error)).toContain('"45µm" is a length');
     expect(usageErrorText(error, true)).toContain('"45um" is a length');
-  });
-
-  it('is one JSON document for programs', () => {
-    const text = usageErrorJson(errorOf('air', 'bk7', '633nm', '--json', '--pol', 'unpolarised'));
-    expect(text.endsWith('\n')).toBe(true);
-    expect(JSON.parse(text)).toEqual({
-      schema: 1,
-      error: {
-        code: 'bad-value',
-        message: '--pol: "unpolarised" is not a polarization',
-        remedy: 'write s, p or unpolarized',
-        candidates: ['unpolarized'],
-      },
-    });
   });
 });

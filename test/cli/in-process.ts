@@ -4,7 +4,7 @@ import { parseArguments } from '../../src/cli/arguments.ts';
 import type { Context } from '../../src/cli/context.ts';
 import { helpText } from '../../src/cli/help.ts';
 import { loadCommand } from '../../src/cli/load-command.ts';
-import { usageErrorJson, usageErrorText } from '../../src/cli/usage-error.ts';
+import { usageErrorText } from '../../src/cli/usage-error.ts';
 
 export interface Outcome {
   readonly status: number;
@@ -20,7 +20,7 @@ export interface Surroundings {
 export async function run(args: readonly string[], surroundings: Surroundings = {}): Promise<Outcome> {
   const parsed = parseArguments(args);
   if (parsed.kind === 'error') {
-    const err = parsed.json ? usageErrorJson(parsed.error) : usageErrorText(parsed.error);
+    const err = usageErrorText(parsed.error);
     return { status: 2, out: '', err };
   }
   if (parsed.kind === 'help') return { status: 0, out: helpText(parsed.topic), err: '' };

@@ -19,8 +19,7 @@ export const run: Command = async ({ operands, options }, context) => {
   const cited: Cited[] = [];
   for (const text of operands) {
     const one = await findCited(text, catalogue);
-    const wantsJson = options.json === true || options.csl === true;
-    if (isRefusal(one)) return reportRefusal(one, wantsJson, context);
+    if (isRefusal(one)) return reportRefusal(one, context);
     cited.push(one);
   }
   const works = worksOf(cited, catalogue);

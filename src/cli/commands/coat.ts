@@ -20,7 +20,7 @@ const FILM_CLASS = 'thin film';
 export const run: Command = async ({ operands, options }, context) => {
   const catalogue = context.catalogue();
   const json = options.json === true;
-  const refused = (refusal: Refusal): number => reportRefusal(refusal, json, context);
+  const refused = (refusal: Refusal): number => reportRefusal(refusal, context);
   const [fromName = '', intoName = '', waveText = ''] = operands;
   const wave = readWave(waveText, options);
   if (isRefusal(wave)) return refused(wave);

@@ -12,16 +12,16 @@ export const run: Command = async ({ operands, options }, context) => {
   const json = options.json === true;
   const catalogue = context.catalogue();
   const split = splitWaves(operands, options);
-  if (isRefusal(split)) return reportRefusal(split, json, context);
+  if (isRefusal(split)) return reportRefusal(split, context);
   const parts: Part[] = [];
   for (const text of split.media) {
     const part = await readPart(text, catalogue);
-    if (isRefusal(part)) return reportRefusal(part, json, context);
+    if (isRefusal(part)) return reportRefusal(part, context);
     parts.push(part);
   }
   const { temperature_K } = options;
   const report = compareReport(makeSurvey(catalogue), parts, split.waves, { temperature_K });
-  if (isRefusal(report)) return reportRefusal(report, json, context);
+  if (isRefusal(report)) return reportRefusal(report, context);
   const ascii = options.ascii === true;
   const style = { ascii: context.ascii };
   if (json)

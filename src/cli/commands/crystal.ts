@@ -17,24 +17,24 @@ export const run: Command = async ({ operands, options }, context) => {
   const json = options.json === true;
   const [waveText = '', crystalName = '', outsideName = OUTSIDE] = operands.toReversed();
   const wave = readWave(waveText, options);
-  if (isRefusal(wave)) return reportRefusal(wave, json, context);
+  if (isRefusal(wave)) return reportRefusal(wave, context);
   const into = findMedium(crystalName, catalogue);
   if (isRefusal(into)) {
-    return reportRefusal(await suggestMedia(into, crystalName, catalogue), json, context);
+    return reportRefusal(await suggestMedia(into, crystalName, catalogue), context);
   }
   const from = findMedium(outsideName, catalogue);
   if (isRefusal(from)) {
-    return reportRefusal(await suggestMedia(from, outsideName, catalogue), json, context);
+    return reportRefusal(await suggestMedia(from, outsideName, catalogue), context);
   }
   const stated = questionOptions(options, wave);
-  if (isRefusal(stated)) return reportRefusal(stated, json, context);
+  if (isRefusal(stated)) return reportRefusal(stated, context);
   const asked = {
     question: makeQuestion(from, into, wave, stated),
     thickness_m: options.thickness_m ?? null,
     retardance_waves: options.retardance_waves ?? null,
   };
   const report = crystalReport(asked, (id) => catalogue.source(id));
-  if (isRefusal(report)) return reportRefusal(report, json, context);
+  if (isRefusal(report)) return reportRefusal(report, context);
   const head = { version: context.version, catalogue: catalogue.hash };
   context.write(
     json

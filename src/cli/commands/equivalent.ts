@@ -16,9 +16,9 @@ export const run: Command = async ({ operands, options }, context) => {
   const catalogue = context.catalogue();
   const survey = makeSurvey(catalogue);
   const sought = await findGlass(operands.join(' '), catalogue, survey);
-  if (isRefusal(sought)) return reportRefusal(sought, json, context);
+  if (isRefusal(sought)) return reportRefusal(sought, context);
   const makers = options.maker === undefined ? undefined : findMakers(options.maker, survey);
-  if (isRefusal(makers)) return reportRefusal(makers, json, context);
+  if (isRefusal(makers)) return reportRefusal(makers, context);
 
   const itself = sought.kind === 'glass' ? sought.material : undefined;
   const carriers = sought.kind === 'code' ? sought.carriers : [];

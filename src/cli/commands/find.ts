@@ -13,10 +13,10 @@ export const run: Command = ({ operands, options }, context) => {
   const json = options.json === true;
   const catalogue = context.catalogue();
   const criteria = readCriteria(operands, options, catalogue);
-  if (isRefusal(criteria)) return reportRefusal(criteria, json, context);
+  if (isRefusal(criteria)) return reportRefusal(criteria, context);
   const order = options.sort ?? defaultOrder(criteria);
   const report = findReport(makeSurvey(catalogue), criteria, order);
-  if (isRefusal(report)) return reportRefusal(report, json, context);
+  if (isRefusal(report)) return reportRefusal(report, context);
   const ascii = options.ascii === true;
   if (json) {
     context.write(findJson(report, order, { version: context.version, catalogue: catalogue.hash }, ascii));

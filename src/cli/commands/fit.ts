@@ -26,23 +26,23 @@ export const run: Command = ({ operands, options }, context) => {
   if (request.terms < fewest || request.terms > most) {
     const message = `--terms ${request.terms} is too ${request.terms < fewest ? 'few' : 'many'}`;
     const remedy = `a ${request.model} formula takes ${fewest} to ${most} terms here`;
-    return reportRefusal(refuse('bad-terms', 2, message, remedy), json, context);
+    return reportRefusal(refuse('bad-terms', 2, message, remedy), context);
   }
   const table = readTable(path);
-  if (isRefusal(table)) return reportRefusal(table, json, context);
+  if (isRefusal(table)) return reportRefusal(table, context);
   const fit = fitPoints(table.points, request);
-  if (isFitFault(fit)) return reportRefusal(refuse('no-fit', 3, fit.message, fit.remedy), json, context);
+  if (isFitFault(fit)) return reportRefusal(refuse('no-fit', 3, fit.message, fit.remedy), context);
   if (table.hasExtinction && !options.quiet)
     context.warn('halfspace: the column k is passed over: a fit describes n alone\n');
   const facts = factsOf(table, options);
   const file = options.output === '-' ? undefined : options.output;
   const entry =
     json || options.output !== undefined ? makeEntry(path, table, fit, facts, options, context) : null;
-  if (isRefusal(entry)) return reportRefusal(entry, json, context);
+  if (isRefusal(entry)) return reportRefusal(entry, context);
 
   if (entry && file !== undefined) {
     const trouble = saveFile(file, entryText(entry), { replace: options.force === true });
-    if (trouble) return reportRefusal(trouble, json, context);
+    if (trouble) return reportRefusal(trouble, context);
   }
   if (json) context.print(fitJson(fit, facts, entry, context.version, options.ascii === true));
   else if (entry && file === undefined) context.print(entryText(entry));

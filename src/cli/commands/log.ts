@@ -29,20 +29,19 @@ const FORMS: Readonly<Record<LogActionName, readonly Form[]>> = {
 
 export const run: Command = async (invocation, context) => {
   const { operands, options } = invocation;
-  const json = options.json === true;
   const action = readLogAction(operands);
-  if (isRefusal(action)) return reportRefusal(action, json, context);
+  if (isRefusal(action)) return reportRefusal(action, context);
   const form = formRefusal(action, options);
-  if (form) return reportRefusal(form, json, context);
+  if (form) return reportRefusal(form, context);
   const place = placeOfLogbook(context.env, options.logFile);
-  if (isRefusal(place)) return reportRefusal(place, json, context);
+  if (isRefusal(place)) return reportRefusal(place, context);
   const reading = new Reading(place.file);
   const outlet = new Outlet(context, options.output);
   const status = await act(action, reading, outlet, invocation, context);
-  if (isRefusal(status)) return reportRefusal(status, json, context);
+  if (isRefusal(status)) return reportRefusal(status, context);
   outlet.end();
   if (!options.quiet) for (const note of reading.notes(context.ascii)) say(note, context);
-  return reading.trouble ? reportRefusal(reading.trouble, json, context) : status;
+  return reading.trouble ? reportRefusal(reading.trouble, context) : status;
 };
 
 async function act(

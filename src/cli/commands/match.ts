@@ -14,21 +14,20 @@ export const run: Command = async ({ operands, options }, context) => {
   const catalogue = context.catalogue();
   const [name = '', ...conditions] = operands;
   const target = findMedium(name, catalogue);
-  if (isRefusal(target)) return reportRefusal(await suggestMedia(target, name, catalogue), json, context);
+  if (isRefusal(target)) return reportRefusal(await suggestMedia(target, name, catalogue), context);
   const criteria = readCriteria(conditions, options, catalogue);
-  if (isRefusal(criteria)) return reportRefusal(criteria, json, context);
+  if (isRefusal(criteria)) return reportRefusal(criteria, context);
   const { wave } = criteria;
   if (!wave) {
     const remedy = 'give it: --at 589nm, --at 10.6um or --at d-line';
     return reportRefusal(
       refuse('wave-missing', 2, 'media match at a wave, and none is given', remedy),
-      json,
       context,
     );
   }
   const { within, mix } = options;
   const report = matchReport(makeSurvey(catalogue), { target, wave, within, mix: mix === true, criteria });
-  if (isRefusal(report)) return reportRefusal(report, json, context);
+  if (isRefusal(report)) return reportRefusal(report, context);
   const ascii = options.ascii === true;
   if (json) {
     context.write(matchJson(report, { version: context.version, catalogue: catalogue.hash }, ascii));

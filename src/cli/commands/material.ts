@@ -16,10 +16,10 @@ export const run: Command = async ({ operands, options }, context) => {
   // A name of several words is written without quotation marks more often than with.
   const name = operands.join(' ');
   const medium = findMedium(name, catalogue);
-  if (isRefusal(medium)) return reportRefusal(await suggestMedia(medium, name, catalogue), json, context);
+  if (isRefusal(medium)) return reportRefusal(await suggestMedia(medium, name, catalogue), context);
   if (medium.kind === 'literal') {
     const message = `${quoteInput(name)} is a medium given by its numbers: the catalogue holds nothing of it`;
-    return reportRefusal(refuse('not-in-catalogue', 2, message, 'name a material'), json, context);
+    return reportRefusal(refuse('not-in-catalogue', 2, message, 'name a material'), context);
   }
   const { material, axis } = medium;
   const sourceOf = (id: string) => catalogue.source(id);

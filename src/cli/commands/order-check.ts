@@ -14,15 +14,15 @@ export const run: Command = async ({ operands, options }, context) => {
   const json = options.json === true;
   const catalogue = context.catalogue();
   const split = splitWaves(operands, options);
-  if (isRefusal(split)) return reportRefusal(split, json, context);
+  if (isRefusal(split)) return reportRefusal(split, context);
   const questions: Question[] = [];
   for (const wave of operands.slice(split.media.length)) {
     const question = await readQuestion([...split.media, wave], options, catalogue);
-    if (isRefusal(question)) return reportRefusal(question, json, context);
+    if (isRefusal(question)) return reportRefusal(question, context);
     questions.push(question);
   }
   const report = orderReport(makeSurvey(catalogue), questions);
-  if (isRefusal(report)) return reportRefusal(report, json, context);
+  if (isRefusal(report)) return reportRefusal(report, context);
   const style = { ascii: context.ascii };
   if (json) {
     const head = { version: context.version, catalogue: catalogue.hash };

@@ -14,7 +14,7 @@ import { ByteWriter } from '../../batch/byte-writer.ts';
 import { CsvBatch } from '../../batch/csv-batch.ts';
 import { JsonBatch } from '../../batch/json-batch.ts';
 import type { Asking } from '../../batch/question-column.ts';
-import type { FixedParts } from '../../batch/row-answers.ts';
+import type { FixedParts } from '../../batch/row-layout.ts';
 import { type BatchControl, type ByteSource, runBatch } from '../../batch/run-batch.ts';
 import { isRefusal, type Refusal, refuse } from '../../medium/refusal.ts';
 import { toAscii } from '../../units/to-ascii.ts';
@@ -29,7 +29,6 @@ import { reportRefusal } from '../report-refusal.ts';
 const ROWS_FAILED = 1;
 
 export const run: Command = async ({ operands, options }, context) => {
-  const json = options.json === true;
   const catalogue = context.catalogue();
   const asking = makeAsking(catalogue);
   if (options.columns === 'list') {
@@ -42,11 +41,11 @@ export const run: Command = async ({ operands, options }, context) => {
     asking.nearest,
   );
   if ('code' in columns)
-    return reportRefusal(refuse(columns.code, 2, columns.message, columns.remedy), json, context);
+    return reportRefusal(refuse(columns.code, 2, columns.message, columns.remedy), context);
   for (const text of [options.fixedFrom, options.fixedInto]) {
     const medium = text === undefined ? undefined : findMedium(text, catalogue);
     if (text !== undefined && isRefusal(medium)) {
-      return reportRefusal(await suggestMedia(medium, text, catalogue), json, context);
+      return reportRefusal(await suggestMedia(medium, text, catalogue), context);
     }
   }
   return answerFiles(operands.length === 0 ? ['-'] : operands, columns, asking, options, context);
@@ -59,9 +58,8 @@ async function answerFiles(
   options: OptionValues,
   context: Context,
 ): Promise<ExitStatus> {
-  const json = options.json === true;
   const output = await fileOf(options.output ?? '-', 'written', openOutput);
-  if (isRefusal(output)) return reportRefusal(output, json, context);
+  if (isRefusal(output)) return reportRefusal(output, context);
   const writer = new ByteWriter(options.digits);
   const setup: BatchSetup = {
     asking,
@@ -73,7 +71,7 @@ async function answerFiles(
     wording: context.ascii ? toAscii : (text) => text,
     passedOn: (names) => note(context, options, `columns passed on unread: ${names.join(', ')}`),
   };
-  const format: BatchFormat = json ? new JsonBatch(setup) : new CsvBatch(setup);
+  const format: BatchFormat = options.json === true ? new JsonBatch(setup) : new CsvBatch(setup);
   const interrupt = holdInterrupts();
   const progress = progressOn(context, options);
   const control: BatchControl = {
@@ -98,9 +96,9 @@ async function answerFiles(
   if (end === 'reader-gone') return 0;
   if (format.fatal) {
     const { code, message, remedy } = format.fatal;
-    return reportRefusal(refuse(code, 2, message, remedy), json, context);
+    return reportRefusal(refuse(code, 2, message, remedy), context);
   }
-  if (trouble) return reportRefusal(trouble, json, context);
+  if (trouble) return reportRefusal(trouble, context);
   if (format.failed === 0) return 0;
   note(context, options, `${format.failed} of ${format.rows} rows not answered; the column error says why`);
   return ROWS_FAILED;

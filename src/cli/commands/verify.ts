@@ -20,7 +20,7 @@ export const run: Command = ({ options }, context) => {
   } catch (error) {
     if (!(error instanceof CatalogueFileError)) throw error;
     const { message, remedy } = error;
-    return reportRefusal(refuse('no-check-values', 4, message, remedy), options.json === true, context);
+    return reportRefusal(refuse('no-check-values', 4, message, remedy), context);
   }
   const report = verifyMaterials(allMaterials(catalogue, checkLines));
   const head: VerifyHead = {

@@ -72,5 +72,5 @@ function showInstead(
   const forProgram = options.json === true || options.csv === true || options.plain === true;
   if (options.markdown) context.print(`\n${recordMarkdown(record, style)}`);
   else (forProgram ? context.warn : context.print)(`\n${recordText(record, style)}`);
-  return reportRefusal(trouble, options.json === true, context);
+  return reportRefusal(trouble, context);
 }

@@ -7,6 +7,7 @@ import { resolve } from 'node:path';
 import type { IndexedCatalogue } from '../../catalog/entries.ts';
 import { ownFolderPath } from '../../catalog/own-folder.ts';
 import { isRefusal } from '../../medium/refusal.ts';
+import { decideLinear } from '../../term/ability.ts';
 import type { Invocation } from '../arguments.ts';
 import { isCommandName } from '../command-table.ts';
 import type { Context } from '../context.ts';
@@ -37,12 +38,15 @@ export function recordedCommand(
   const words = operands.map((word, i) =>
     i === operands.length - 1 ? word : canonicalWord(word, catalogue),
   );
-  const kept = unrepeated(given).filter(({ key }) => !LEFT_OUT.includes(key));
+  const kept = unrepeated(given).filter(
+    ({ key, text }) => !LEFT_OUT.includes(key) && !(key === 'svg' && text !== '-'),
+  );
   const has = (key: OptionKey): boolean => kept.some((option) => option.key === key);
   const added: GivenOption[] = [];
   if (usesOwn) added.push({ key: 'catalog', text: resolve(options.catalog ?? ownFolderPath(context.env)) });
   // What the locale or a variable decided is said in so many words.
   if (context.ascii && !has('ascii')) added.push({ key: 'ascii' });
+  if (has('plot') && !has('linear') && decideLinear(context.env)) added.push({ key: 'linear' });
   const optionWords = [...kept, ...added].flatMap(wordsOf);
   const [first = ''] = words;
   const needsDashes = isCommandName(first) || words.some((word) => word.startsWith('-'));
