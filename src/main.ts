@@ -2,7 +2,7 @@
  * Entry of the program: picks the face from the arguments and the terminal. The only place, with src/term, that touches the
  * process, and the only one that sets the exit status. One question is answered without loading anything else.
  */
-import { isatty } from 'node:tty';
+import { createRequire } from 'node:module';
 import type { IndexedCatalogue } from './catalog/entries.ts';
 import { CatalogueFileError, loadCatalogue } from './catalog/load.ts';
 import { problemText as ownProblemText } from './catalog/own.ts';
@@ -27,6 +27,12 @@ const NOT_UNDERSTOOD = 2;
 /** The catalogue or a file cannot be read or written. */
 class FileTrouble extends Error {}
 
+const load = createRequire(import.meta.url);
+
+/** `node:tty` brings streams and sockets along, a tenth of a start; most answers never ask. */
+const isTerminal = (descriptor: number): boolean =>
+  (load('node:tty') as typeof import('node:tty')).isatty(descriptor);
+
 function makeContext(options: OptionValues): Context {
   const known = new Map<string | undefined, IndexedCatalogue>();
   const quiet = options.quiet === true;
@@ -50,9 +56,15 @@ function makeContext(options: OptionValues): Context {
     warn: (text) => void writeOut(2, text),
     version: VERSION,
     env,
-    stdinIsTTY: isatty(0),
-    stdoutIsTTY: isatty(1),
-    stderrIsTTY: isatty(2),
+    get stdinIsTTY() {
+      return isTerminal(0);
+    },
+    get stdoutIsTTY() {
+      return isTerminal(1);
+    },
+    get stderrIsTTY() {
+      return isTerminal(2);
+    },
     ascii: options.ascii === true || decideGlyphs(env) === 'ascii',
     catalogue,
     clock: () => {
