@@ -126,7 +126,10 @@ export async function buildAll(): Promise<void> {
     define: { ...define, fetch: 'undefined' },
     banner: { js: 'import{createRequire}from"node:module";const require=createRequire(import.meta.url);' },
     plugins: [withoutDevtools],
-    alias: { 'string-width': path.join(root, 'src/term/string-width-alias.ts') },
+    alias: {
+      'string-width': path.join(root, 'src/term/string-width-alias.ts'),
+      '@alcalzone/ansi-tokenize': path.join(root, 'src/term/styled-chars-alias.ts'),
+    },
   });
   writeFileSync(
     path.join(dist, 'inputs.json'),

@@ -15,7 +15,7 @@ const SETTING_OPTIONS = [
 export const DESIGN_COMMANDS = [
   {
     name: 'coat',
-    summary: 'coatings for a surface: quarter-wave films, V-coats, high reflectors',
+    summary: 'coatings: quarter-wave films, V-coats, reflectors',
     operands: [
       { name: 'FROM', meaning: 'medium of incidence', completes: 'medium' },
       { name: 'INTO', meaning: 'medium to be coated', completes: 'medium' },
@@ -37,7 +37,7 @@ export const DESIGN_COMMANDS = [
     examples: [
       { line: 'coat air n-bk7 550nm', meaning: 'what every film of the catalogue would do' },
       {
-        line: 'coat air germanium 10.6um --films zinc-sulfide,barium-fluoride,znse --limit 1%',
+        line: 'coat air ge 10.6um --films zns,znse --limit 1%',
         meaning: 'with materials of your choice',
       },
       {

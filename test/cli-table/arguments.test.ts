@@ -215,12 +215,6 @@ describe('what is not understood is refused with what would be right', () => {
       polarization: 's',
     });
   });
-
-  it('says whether to tell the error as JSON', () => {
-    expect(parse('air --json --frob')).toMatchObject({ kind: 'error', json: true });
-    expect(parse('air --frob')).toMatchObject({ kind: 'error', json: false });
-    expect(parse('--frob -- --json')).toMatchObject({ kind: 'error', json: false });
-  });
 });
 
 describe('no abbreviation of any option or command is accepted', () => {
