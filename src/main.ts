@@ -27,11 +27,9 @@ const NOT_UNDERSTOOD = 2;
 /** The catalogue or a file cannot be read or written. */
 class FileTrouble extends Error {}
 
-const load = createRequire(import.meta.url);
-
 /** `node:tty` brings streams and sockets along, a tenth of a start; most answers never ask. */
 const isTerminal = (descriptor: number): boolean =>
-  (load('node:tty') as typeof import('node:tty')).isatty(descriptor);
+  (createRequire(import.meta.url)('node:tty') as typeof import('node:tty')).isatty(descriptor);
 
 function makeContext(options: OptionValues): Context {
   const known = new Map<string | undefined, IndexedCatalogue>();
