@@ -1,13 +1,17 @@
 /** Media and parts side by side for people, as text or as Markdown; the best value of a row has a star. */
-import { isRefusal } from '../../medium/refusal.ts';
-import { fitLine } from '../../present/source-lines.ts';
-import type { ComparedPart, ComparedWave, CompareReport } from '../../selection/compare-report.ts';
+import {
+  COMPARE_LEGEND,
+  compareCautions,
+  compareGaps,
+  compareSources,
+  partTitle,
+} from '../../present/compare-page.ts';
+import { type CompareRow, factRows, waveRows } from '../../present/compare-rows.ts';
+import type { CompareReport } from '../../selection/compare-report.ts';
 import { waveWords } from '../../selection/condition-words.ts';
+import { columnBlocks } from '../../term/columns.ts';
 import type { NumberStyle } from '../../units/number-style.ts';
 import { toAscii } from '../../units/to-ascii.ts';
-import { columns } from './columns.ts';
-import { type CompareRow, factRows, waveRows } from './compare-rows.ts';
-import { mediumKey } from './medium-key.ts';
 import { page, paragraph } from './page.ts';
 import { cautionSection } from './text.ts';
 
@@ -23,87 +27,50 @@ export function compareText(report: CompareReport, style: NumberStyle): string {
         `At ${waveWords(wave.spec, style)}`,
         '',
         ...blocks(titles, waveRows(wave, style), style),
-        ...gaps(report, wave).flatMap((line) => paragraph(line)),
+        ...compareGaps(report, wave).flatMap((line) => paragraph(line)),
         '',
       ]),
       ...blocks(titles, factRows(report, style), style),
       '',
-      ...LEGEND.flatMap((line) => paragraph(line)),
-      ...cautionSection(cautionsOf(report)),
+      ...COMPARE_LEGEND.flatMap((line) => paragraph(line)),
+      ...cautionSection(compareCautions(report)),
       ...sources(report, style),
     ],
     style.ascii,
   );
 }
 
-const LEGEND: readonly string[] = [
-  '* best of the row. n is relative to vacuum; normal incidence, in air, uncoated. R: one surface; loss: both surfaces, all reflections, and the absorption between them; + means surfaces alone, the absorption at this wave not being on file.',
-];
-
-/** "zinc-selenide@3mm", "sapphire:o". */
-function partTitle({ part, axis, facts }: ComparedPart): string {
-  if (!facts) return part.text;
-  const size = part.text.split('@')[1];
-  return mediumKey(facts.key, axis) + (size === undefined ? '' : `@${size}`);
-}
-
-/** The table in one piece, or in halves where it is too wide. */
+/** The table in one piece, or in blocks where it is too wide. */
 function blocks(
   titles: readonly string[],
   rows: readonly CompareRow[],
   style: NumberStyle,
 ): readonly string[] {
-  const block = (from: number, to: number): readonly string[] =>
-    columns(
-      [{ title: '' }, { title: '' }, ...titles.slice(from, to).map((title) => ({ title }))],
-      rows.map(({ symbol, label, cells }) => [symbol, label, ...cells.slice(from, to)]),
-      { ascii: style.ascii, indent: 0 },
-    );
-  const whole = block(0, titles.length);
-  if (titles.length < 2 || whole.every((line) => [...line].length <= WIDEST)) return whole;
-  const half = Math.ceil(titles.length / 2);
-  return [...block(0, half), '', ...block(half, titles.length)];
-}
-
-/** Why a column is empty. */
-function gaps({ parts }: CompareReport, { columns: list }: ComparedWave): readonly string[] {
-  return list.flatMap((column, i) => {
-    const part = parts[i];
-    return isRefusal(column) && part ? [`${partTitle(part)}: ${column.message}`] : [];
-  });
-}
-
-function cautionsOf({ waves }: CompareReport): Parameters<typeof cautionSection>[0] {
-  const all = waves.flatMap(({ columns: list }) => list.flatMap((c) => (isRefusal(c) ? [] : c.cautions)));
-  const levels = ['hazard', 'caution', 'note'];
-  return all
-    .filter((c, i) => all.findIndex((other) => other.text === c.text) === i)
-    .sort((a, b) => levels.indexOf(a.level) - levels.indexOf(b.level));
-}
-
-function sourceTexts({ waves }: CompareReport, style: NumberStyle): readonly string[] {
-  const lines = waves.flatMap(({ columns: list }) =>
-    list.flatMap((c) => (isRefusal(c) ? [] : fitLine(c.medium, style).slice(0, 1))),
+  return columnBlocks(
+    [{ title: '' }, { title: '' }, ...titles.map((title) => ({ title }))],
+    rows.map(({ symbol, label, cells }) => [symbol, label, ...cells]),
+    2,
+    WIDEST,
+    { ascii: style.ascii, indent: 0 },
   );
-  return [...new Set(lines)];
 }
 
 function sources(report: CompareReport, style: NumberStyle): readonly string[] {
-  const texts = sourceTexts(report, style);
+  const texts = compareSources(report, style);
   return texts.length === 0 ? [] : ['', 'Sources', ...texts.flatMap((line) => paragraph(line))];
 }
 
 export function compareMarkdown(report: CompareReport, style: NumberStyle): string {
   const { parts, waves } = report;
   const titles = parts.map(partTitle);
-  const cautions = cautionsOf(report);
+  const cautions = compareCautions(report);
   const lines = [
     ...waves.flatMap((wave) => [
       `### At ${waveWords(wave.spec, style)}`,
       '',
       ...markdownTable(titles, waveRows(wave, style)),
       '',
-      ...gaps(report, wave).map((line) => `- ${line}`),
+      ...compareGaps(report, wave).map((line) => `- ${line}`),
       '',
     ]),
     '### Material',
@@ -111,10 +78,10 @@ export function compareMarkdown(report: CompareReport, style: NumberStyle): stri
     ...markdownTable(titles, factRows(report, style)),
     '',
     // A star of its own in a table, not the mark of a list.
-    ...LEGEND.map((line) => line.replace(/^\*/, '\\*')),
+    ...COMPARE_LEGEND.map((line) => line.replace(/^\*/, '\\*')),
     ...(cautions.length > 0 ? ['', ...cautions.map((c) => `- **${c.level}** ${c.text}`)] : []),
     '',
-    ...sourceTexts(report, style).map((line) => `- ${line}`),
+    ...compareSources(report, style).map((line) => `- ${line}`),
   ];
   const text = lines
     .join('\n')

@@ -1,9 +1,10 @@
 /** Settings in force and places of files, for people. */
+
+import { columns } from '../../term/columns.ts';
 import type { NumberStyle } from '../../units/number-style.ts';
 import type { Place } from '../places.ts';
 import type { SettingsContent } from '../read-settings.ts';
 import type { SettingInForce } from '../settings-in-force.ts';
-import { columns } from './columns.ts';
 import { labelled, page, paragraph } from './page.ts';
 
 export interface ConfigPage {

@@ -14,10 +14,10 @@ import { indexText } from '../../present/medium-rows.ts';
 import { wavelengthOf } from '../../present/question-line.ts';
 import type { PresentStyle, Shown } from '../../present/shown.ts';
 import { conditionsText, fitLine } from '../../present/source-lines.ts';
+import { type Column, columns } from '../../term/columns.ts';
 import { FS2_PER_MM, METRE, PER_CENT } from '../../units/display-unit.ts';
 import { formatNumber } from '../../units/format-number.ts';
 import { columnPrefix, formatQuantity } from '../../units/format-quantity.ts';
-import { type Column, columns } from './columns.ts';
 import { page, paragraph } from './page.ts';
 import { cautionSection } from './text.ts';
 

@@ -8,11 +8,11 @@ import {
   MELT_n_d,
   MELT_Vd,
 } from '../../selection/glass-equivalents.ts';
+import { type Column, columns } from '../../term/columns.ts';
 import { displayWidth } from '../../term/display-width.ts';
 import { formatNumber } from '../../units/format-number.ts';
 import { NO_VALUE, type NumberStyle } from '../../units/number-style.ts';
 import type { SoughtGlass } from '../find-glass.ts';
-import { type Column, columns } from './columns.ts';
 import { PAGE_WIDTH, page, paragraph } from './page.ts';
 
 export interface EquivalentPage {

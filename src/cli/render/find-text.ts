@@ -1,17 +1,18 @@
 /** The hits of a search as a table for people, with what was left out and why, within 80 columns where the names allow it. */
+
+import { abbeText } from '../../present/abbe-text.ts';
 import { howKnown, precisionFor } from '../../present/known.ts';
+import { mediumKey } from '../../present/medium-key.ts';
 import { indexText } from '../../present/medium-rows.ts';
 import { conditionWords, waveWords } from '../../selection/condition-words.ts';
 import type { Criteria } from '../../selection/criteria.ts';
 import type { FindReport, Hit } from '../../selection/find-report.ts';
 import type { SortOrder } from '../../selection/sort-order.ts';
 import { UNDECIDED_WORDS } from '../../selection/undecided.ts';
+import { type Column, columns } from '../../term/columns.ts';
 import { formatNumber } from '../../units/format-number.ts';
 import { NO_VALUE, type NumberStyle } from '../../units/number-style.ts';
-import { abbeText } from './abbe-text.ts';
-import { type Column, columns } from './columns.ts';
 import { legendOf, marksOf } from './material-marks.ts';
-import { mediumKey } from './medium-key.ts';
 import { page, paragraph } from './page.ts';
 
 interface HitColumn extends Column {

@@ -1,8 +1,8 @@
 /** The index of a material at reference lines as a table an axis, with what the columns mean. */
 import type { ReferenceLine } from '../../answer/reference-lines.ts';
 import { type LineRow, lineRow } from '../../present/line-rows.ts';
+import { columns } from '../../term/columns.ts';
 import type { NumberStyle } from '../../units/number-style.ts';
-import { columns } from './columns.ts';
 import { paragraph } from './page.ts';
 
 export function indexTable(lines: readonly ReferenceLine[], style: NumberStyle): readonly string[] {

@@ -1,6 +1,7 @@
 /** Media ranked by how little they reflect beside a target, and mixtures that would match it, for people. */
 import type { Axis } from '../../catalog/types.ts';
 import { howKnown } from '../../present/known.ts';
+import { mediumKey } from '../../present/medium-key.ts';
 import { indexText } from '../../present/medium-rows.ts';
 import { mediumTitle } from '../../present/question-line.ts';
 import { conditionsText } from '../../present/source-lines.ts';
@@ -9,14 +10,13 @@ import type { Criteria } from '../../selection/criteria.ts';
 import type { Match, MatchReport } from '../../selection/match-report.ts';
 import type { MixtureReport } from '../../selection/mixture-report.ts';
 import { UNDECIDED_WORDS } from '../../selection/undecided.ts';
+import { type Column, columns } from '../../term/columns.ts';
 import { CELSIUS } from '../../units/display-unit.ts';
 import { formatNumber } from '../../units/format-number.ts';
 import { withUnit } from '../../units/format-quantity.ts';
 import { formatUncertain } from '../../units/format-uncertain.ts';
 import { ASCII, NO_VALUE, type NumberStyle } from '../../units/number-style.ts';
-import { type Column, columns } from './columns.ts';
 import { legendOf, marksOf } from './material-marks.ts';
-import { mediumKey } from './medium-key.ts';
 import { page, paragraph } from './page.ts';
 
 export function matchText(report: MatchReport, criteria: Criteria, style: NumberStyle): string {

@@ -3,9 +3,9 @@ import type { ReflectanceTable } from '../../catalog/cited-sources.ts';
 import type { Source } from '../../catalog/types.ts';
 import { sourceText } from '../../cite/source-text.ts';
 import { lengthColumn } from '../../present/length-text.ts';
+import { columns } from '../../term/columns.ts';
 import { formatNumber } from '../../units/format-number.ts';
 import type { NumberStyle } from '../../units/number-style.ts';
-import { columns } from './columns.ts';
 import { labelled, paragraph } from './page.ts';
 
 const SIDE_BY_SIDE = 3;

@@ -4,10 +4,10 @@ import type { Grade } from '../../catalog/types.ts';
 import { toleranceUsed, type VerifyReport } from '../../catalog/verify.ts';
 import { lengthAt, lengthColumn } from '../../present/length-text.ts';
 import { GRADE_WORDS } from '../../present/source-lines.ts';
+import { type Column, columns } from '../../term/columns.ts';
 import { formatNumber } from '../../units/format-number.ts';
 import { ASCII, type NumberStyle } from '../../units/number-style.ts';
 import { checkedTexts } from './checked-number.ts';
-import { type Column, columns } from './columns.ts';
 import { page, paragraph } from './page.ts';
 import { quantitySymbol } from './quantity-symbol.ts';
 

@@ -1,5 +1,5 @@
 /** A medium as it can be typed again: "zinc-selenide", "sapphire:o". */
-import type { Axis } from '../../catalog/types.ts';
+import type { Axis } from '../catalog/types.ts';
 
 const LETTERS: Readonly<Record<Axis, string>> = {
   isotropic: '',

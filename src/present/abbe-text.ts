@@ -1,7 +1,7 @@
 /** An Abbe number to the decimals that hold, at most the two that makers print, filled up so that points stand under points. */
-import { lastPlace } from '../../units/digits.ts';
-import { formatNumber } from '../../units/format-number.ts';
-import { NO_VALUE, type NumberStyle } from '../../units/number-style.ts';
+import { lastPlace } from '../units/digits.ts';
+import { formatNumber } from '../units/format-number.ts';
+import { NO_VALUE, type NumberStyle } from '../units/number-style.ts';
 
 const MOST_DECIMALS = 2;
 

@@ -1,20 +1,15 @@
 /** The comparison as rows of shown texts, one cell a part, the best value of a row marked with a star. */
-import type { MediumAnswer } from '../../answer/answer.ts';
-import { isRefusal } from '../../medium/refusal.ts';
-import { howKnown, precisionFor } from '../../present/known.ts';
-import { indexText } from '../../present/medium-rows.ts';
-import { bestOf, type Direction } from '../../selection/best-values.ts';
-import type {
-  ComparedPart,
-  ComparedWave,
-  CompareReport,
-  PartAtWave,
-} from '../../selection/compare-report.ts';
-import { DEGREE, METRE, PER_CENT } from '../../units/display-unit.ts';
-import { formatNumber } from '../../units/format-number.ts';
-import { formatQuantity } from '../../units/format-quantity.ts';
-import { ASCII, NO_VALUE, type NumberStyle } from '../../units/number-style.ts';
+import type { MediumAnswer } from '../answer/answer.ts';
+import { isRefusal } from '../medium/refusal.ts';
+import { bestOf, type Direction } from '../selection/best-values.ts';
+import type { ComparedPart, ComparedWave, CompareReport, PartAtWave } from '../selection/compare-report.ts';
+import { DEGREE, METRE, PER_CENT } from '../units/display-unit.ts';
+import { formatNumber } from '../units/format-number.ts';
+import { formatQuantity } from '../units/format-quantity.ts';
+import { ASCII, NO_VALUE, type NumberStyle } from '../units/number-style.ts';
 import { abbeText } from './abbe-text.ts';
+import { howKnown, precisionFor } from './known.ts';
+import { indexText } from './medium-rows.ts';
 
 export interface CompareRow {
   readonly symbol: string;
