@@ -41,14 +41,14 @@ export const DESIGN_COMMANDS = [
         meaning: 'with materials of your choice',
       },
       {
-        line: 'coat air fused-silica 633nm --high tantalum-pentoxide-film --low silicon-dioxide-film --reflect 99.9%',
+        line: 'coat air fused-silica 633nm --reflect 99.9%',
         meaning: 'pairs for a mirror, with the spread of the process',
       },
     ],
   },
   {
     name: 'crystal',
-    summary: 'a birefringent crystal: index against direction, walk-off, faces, waveplates',
+    summary: 'a birefringent crystal: walk-off, faces, waveplates',
     operands: [
       { name: 'FROM', meaning: 'medium in front of it (default: air)', optional: true, completes: 'medium' },
       {
