@@ -2,7 +2,9 @@
  * Extinction coefficient from measured absorption rows that stand beside a real fit.
  *
  * alpha = 4 pi k/lambda = -ln(tau)/d; ln(alpha) is interpolated linearly in wavelength between neighbouring rows, alpha
- * itself where one of the two is zero. Outside the rows nothing is known. Source of the relations: Born & Wolf 14.1.
+ * itself where one of the two is zero. Outside the rows nothing is known, nor between two rows that lie apart by more than a
+ * thousandfold of alpha: an absorption edge stands between them, and no line through it means anything. A row of such a gap
+ * still holds for its own wave and its neighbourhood of one per cent. Source of the relations: Born & Wolf 14.1.
  */
 import type { AbsorptionRow } from '../catalog/types.ts';
 import { type IndexJet, K } from '../dispersion/evaluator.ts';
@@ -53,6 +55,11 @@ export function bindAbsorption(rows: readonly AbsorptionRow[] | undefined): Abso
     if (L < a.wavelength_um * (1 - 1e-9) || L > b.wavelength_um * (1 + 1e-9)) return false;
     const t = (L - a.wavelength_um) / (b.wavelength_um - a.wavelength_um);
     const span = b.wavelength_um - a.wavelength_um;
+    if (isGap(a, b)) {
+      const near = [a, b].find((row) => Math.abs(L / row.wavelength_um - 1) <= NEIGHBOURHOOD);
+      if (near) write(out, L, near.alpha_per_um, 0, 0);
+      return near !== undefined;
+    }
     let alpha: number;
     let slope: number;
     let curvature: number;
@@ -66,10 +73,27 @@ export function bindAbsorption(rows: readonly AbsorptionRow[] | undefined): Abso
       slope = (b.alpha_per_um - a.alpha_per_um) / span;
       curvature = 0;
     }
-    out[K] = (alpha * L) / (4 * Math.PI);
-    out[K + 1] = (alpha + slope * L) / (4 * Math.PI);
-    out[K + 2] = (2 * slope + curvature * L) / (4 * Math.PI);
-    out[K + 3] = 0;
+    write(out, L, alpha, slope, curvature);
     return true;
   };
+}
+
+/** Neighbouring rows further apart than this are the two sides of an edge. */
+const EDGE = 1000;
+/** Laser lines of one name differ by less: 10.59 um is 10.6 um. */
+const NEIGHBOURHOOD = 0.01;
+
+/** A row of no absorption is a short way from one of little. */
+function isGap(a: AlphaPoint, b: AlphaPoint): boolean {
+  if (a.alpha_per_um === 0 || b.alpha_per_um === 0) return false;
+  const ratio = b.alpha_per_um / a.alpha_per_um;
+  return ratio > EDGE || ratio < 1 / EDGE;
+}
+
+/** k = alpha L/(4 pi) and its derivatives by wavelength, of alpha and its slope and curvature. */
+function write(out: IndexJet, L: number, alpha_per_um: number, slope: number, curvature: number): void {
+  out[K] = (alpha_per_um * L) / (4 * Math.PI);
+  out[K + 1] = (alpha_per_um + slope * L) / (4 * Math.PI);
+  out[K + 2] = (2 * slope + curvature * L) / (4 * Math.PI);
+  out[K + 3] = 0;
 }
