@@ -13,6 +13,7 @@ import path from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { type BuildOptions, build, type Metafile, type Plugin } from 'esbuild';
 import { makeCodeCache } from './code-cache.ts';
+import { writeNotices } from './licences.ts';
 import { writePackedCatalogue } from './pack-catalog.ts';
 
 const root = path.dirname(path.dirname(fileURLToPath(import.meta.url)));
@@ -131,6 +132,8 @@ export async function buildAll(): Promise<void> {
       '@alcalzone/ansi-tokenize': path.join(root, 'src/term/styled-chars-alias.ts'),
     },
   });
+  const inputs = [entry, rest].flatMap(({ metafile }) => Object.keys(metafile!.inputs));
+  writeNotices(root, dist, inputs);
   writeFileSync(
     path.join(dist, 'inputs.json'),
     JSON.stringify({ entry: Object.keys(entry.metafile!.inputs), parts: Object.keys(rest.metafile!.inputs) }),
