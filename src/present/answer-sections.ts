@@ -1,13 +1,15 @@
 /** Everything an answer shows, part by part under its heading: what a record keeps of it. */
 import type { Answer, MediumAnswer } from '../answer/answer.ts';
+import { beamDetailRows, nonlinearRows, pulsedBeamRows } from './beam-rows.ts';
 import { crystalRows } from './crystal-rows.ts';
 import { beamRows, waveEnergyRows } from './energy-rows.ts';
 import { interfaceRows } from './interface-rows.ts';
+import { type LayerRun, layerRuns } from './layer-runs.ts';
 import { mediumRows } from './medium-rows.ts';
 import { mediumTitle } from './question-line.ts';
 import type { PresentStyle, Shown } from './shown.ts';
 import { conditionsText } from './source-lines.ts';
-import { layerText, layerTitle, pulseRows, stackRows, windowRows } from './stack-rows.ts';
+import { layerText, layerTitle, pulseRows, runTitle, stackRows, windowRows } from './stack-rows.ts';
 
 export interface AnswerSection {
   readonly title: string;
@@ -31,11 +33,13 @@ export function answerSections(answer: Answer, style: PresentStyle): readonly An
       title: `Medium beyond: ${titled(into, style)}`,
       rows: [...medium(into), ...waveEnergyRows(energy?.transmitted ?? null, style)],
     },
-    { title: 'Layers', rows: layers.map((_, i) => layerRow(answer, i, style)) },
+    { title: 'Layers', rows: layerRuns(layers).flatMap((run) => layerRows(run, style)) },
     { title: 'Crystal', rows: crystalRows(answer.crystal, style) },
     { title: 'Window', rows: windowRows(answer, style) },
     { title: 'Pulse', rows: pulseRows(answer, style) },
-    { title: 'Beam', rows: beamRows(answer, style) },
+    { title: 'Beam', rows: [...beamRows(answer, style), ...beamDetailRows(answer, style)] },
+    { title: 'At the peak of the pulse', rows: pulsedBeamRows(answer, style) },
+    { title: 'Nonlinear phase', rows: nonlinearRows(answer, style) },
   ];
   return sections.filter(({ rows }) => rows.length > 0);
 }
@@ -45,7 +49,17 @@ function titled(medium: MediumAnswer, style: PresentStyle): string {
   return conditions === '' ? mediumTitle(medium) : `${mediumTitle(medium)} (${conditions})`;
 }
 
-function layerRow({ layers }: Answer, i: number, style: PresentStyle): Shown {
-  const layer = layers[i] as Answer['layers'][number];
-  return { id: `layer_${i + 1}`, symbol: '', label: layerTitle(layer, i + 1), text: layerText(layer, style) };
+/** A group that repeats is told once, its title in front. */
+function layerRows(run: LayerRun, style: PresentStyle): readonly Shown[] {
+  if (run.times > 1) {
+    const inside = run.layers.map((layer) => layerText({ ...layer, absorptance: 0 }, style));
+    const names = run.layers.map(({ medium }, i) => `${mediumTitle(medium)} ${inside[i] ?? ''}`);
+    return [{ id: `layer_${run.first}`, symbol: '', label: runTitle(run), text: names.join('; ') }];
+  }
+  return run.layers.map((layer, i) => ({
+    id: `layer_${run.first + i}`,
+    symbol: '',
+    label: layerTitle(layer, run.first + i),
+    text: layerText(layer, style),
+  }));
 }

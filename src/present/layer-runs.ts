@@ -16,19 +16,27 @@ const LONGEST_GROUP = 12;
 const FEWEST_TIMES = 3;
 
 export function layerRuns(layers: readonly LayerAnswer[]): readonly LayerRun[] {
-  const ids = layers.map(identity);
-  const runs: LayerRun[] = [];
-  let i = 0;
-  while (i < layers.length) {
-    const { period, times } = longestRepeat(ids, i);
-    const all = layers.slice(i, i + period * times);
-    runs.push({
-      first: i + 1,
-      layers: all.slice(0, period),
-      times,
-      absorptance: all.reduce((sum, l) => sum + l.absorptance, 0),
-    });
-    i += all.length;
+  return repeatedRuns(layers.map(identity)).map(({ start, period, times }) => {
+    const all = layers.slice(start, start + period * times);
+    const absorptance = all.reduce((sum, l) => sum + l.absorptance, 0);
+    return { first: start + 1, layers: all.slice(0, period), times, absorptance };
+  });
+}
+
+export interface RepeatedRun {
+  /** Counted from 0. */
+  readonly start: number;
+  readonly period: number;
+  readonly times: number;
+}
+
+/** The same for anything that is known by a text. */
+export function repeatedRuns(ids: readonly string[]): readonly RepeatedRun[] {
+  const runs: RepeatedRun[] = [];
+  for (let start = 0; start < ids.length; ) {
+    const { period, times } = longestRepeat(ids, start);
+    runs.push({ start, period, times });
+    start += period * times;
   }
   return runs;
 }

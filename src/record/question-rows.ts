@@ -9,6 +9,7 @@ import type {
   WaveSpec,
 } from '../answer/question.ts';
 import type { Conditions } from '../dispersion/evaluator.ts';
+import { repeatedRuns } from '../present/layer-runs.ts';
 import {
   CELSIUS,
   DEGREE,
@@ -34,7 +35,7 @@ const SQUARE_METRE_PER_WATT: DisplayUnit = { symbol: 'm²/W', power: 0 };
 /** One entry for every part of a question, in the order of the rows: a part added to questions asks for its row here. */
 const ROWS: { readonly [Part in keyof Required<Question>]: (question: Question) => readonly RecordRow[] } = {
   from: ({ from }) => [row('medium of incidence', mediumText(from))],
-  layers: ({ layers }) => layers.map((layer, i) => row(`layer ${i + 1}`, layerText(layer))),
+  layers: ({ layers }) => layerRows(layers),
   into: ({ into }) => [row('medium beyond', mediumText(into))],
   wave: ({ wave }) => [row('wave', waveText(wave))],
   incidenceAngle_rad: (question) => [row('angle of incidence', angleText(question.incidenceAngle_rad))],
@@ -82,6 +83,17 @@ function mediumText(medium: MediumSpec): string {
   const { key, name, own } = medium.material;
   const axis = medium.axis === undefined || medium.axis === 'isotropic' ? '' : `, ${medium.axis}`;
   return `${name} (${key})${axis}${own ? ', from the own folder' : ''}`;
+}
+
+/** A group that repeats is told once. */
+function layerRows(layers: readonly Layer[]): readonly RecordRow[] {
+  const texts = layers.map(layerText);
+  return repeatedRuns(texts).map(({ start, period, times }) => {
+    const group = texts.slice(start, start + period);
+    return times === 1
+      ? row(`layer ${start + 1}`, group.join('; '))
+      : row(`layers ${start + 1} to ${start + period * times}`, `${times} times: ${group.join('; ')}`);
+  });
 }
 
 function layerText({ medium, thickness, nonlinearIndex_m2_per_W }: Layer): string {

@@ -57,9 +57,9 @@ function tabbedLine({ record, altered }: RecordEntry, ascii: boolean): string {
   return [
     record.time,
     record.id,
+    altered ? 'altered' : 'as kept',
     clean(recordResult(record)),
     clean(recordTitle(record)),
-    altered ? 'altered' : '',
   ].join('\t');
 }
 
