@@ -34,6 +34,8 @@ export interface StackField {
   readonly q2: number;
   /** See `fieldScales`. */
   readonly scales: readonly Complex[];
+  /** Position of the upper face of every layer, and last that of the exit medium. */
+  readonly faces_m: Float64Array;
 }
 
 /** -1 in front of the stack, 0 .. N-1 the layers, N the exit medium. */
@@ -74,6 +76,7 @@ export function solveField(
     incidenceAngle_rad,
     q2: n2 * Math.sin(incidenceAngle_rad) ** 2,
     scales: fieldScales(kernel, polarization),
+    faces_m: facesOf(kernel),
   };
 }
 
@@ -92,7 +95,7 @@ export function fieldAt(field: StackField, region: Region, depth_m: number): Fie
   const lossE = kernel.media[m + (s ? Y_S : Y_P) + 1] as number;
   const lossH = kernel.media[m + (s ? Z_S : Z_P) + 1] as number;
   return {
-    position_m: faceOf(kernel, region) + depth_m,
+    position_m: (field.faces_m[region] as number) + depth_m,
     region,
     intensity: unit * (s ? abs2(E) : abs2(E) + (q2 * abs2(H)) / eps2),
     absorbed_per_m: (k0_rad_per_m * (lossE * abs2(E) + lossH * abs2(H))) / incidentFlux(kernel, polarization),
@@ -153,9 +156,9 @@ export function layerMaximum(field: StackField, layer: number): FieldPoint {
   const m = (kernel.layerMedium[layer] as number) * MEDIUM_STRIDE;
   const thickness = kernel.thickness_m[layer] as number;
   const period = Math.PI / (k0_rad_per_m * Math.abs(kernel.media[m + KAPPA] as number));
-  if (!(thickness > 3 * period)) return highest(field, layer, 0, thickness);
-  const first = highest(field, layer, 0, period);
-  const last = highest(field, layer, thickness - period, thickness);
+  if (!(thickness > 3 * period)) return highest(field, layer, 0, thickness, period);
+  const first = highest(field, layer, 0, period, period);
+  const last = highest(field, layer, thickness - period, thickness, period);
   return first.intensity >= last.intensity ? first : last;
 }
 
@@ -169,12 +172,21 @@ export function stackMaximum(field: StackField): FieldPoint {
   return best;
 }
 
-const SAMPLES = 144;
+const SAMPLES_PER_FRINGE = 48;
+const FEWEST_SAMPLES = 16;
 
 /** Greatest |E|^2 in an interval of at most three fringes: every crest the samples show is narrowed down. */
-function highest(field: StackField, region: Region, from_m: number, to_m: number): FieldPoint {
-  const depths = Array.from({ length: SAMPLES + 1 }, (_, i) =>
-    i === SAMPLES ? to_m : from_m + ((to_m - from_m) * i) / SAMPLES,
+function highest(
+  field: StackField,
+  region: Region,
+  from_m: number,
+  to_m: number,
+  period_m: number,
+): FieldPoint {
+  // Evanescent layers have an endless period.
+  const samples = Math.max(FEWEST_SAMPLES, Math.ceil((SAMPLES_PER_FRINGE * (to_m - from_m)) / period_m) || 0);
+  const depths = Array.from({ length: samples + 1 }, (_, i) =>
+    i === samples ? to_m : from_m + ((to_m - from_m) * i) / samples,
   );
   const points = depths.map((depth) => fieldAt(field, region, depth));
   let best = points.reduce((a, b) => (b.intensity > a.intensity ? b : a));
@@ -216,10 +228,12 @@ function narrowed(
   return best;
 }
 
-function faceOf(kernel: StackKernel, region: Region): number {
-  let top = 0;
-  for (let j = 0; j < region; j++) top += kernel.thickness_m[j] as number;
-  return top;
+function facesOf({ thickness_m, layerCount }: StackKernel): Float64Array {
+  const faces_m = new Float64Array(layerCount + 1);
+  for (let j = 0; j < layerCount; j++) {
+    faces_m[j + 1] = (faces_m[j] as number) + (thickness_m[j] as number);
+  }
+  return faces_m;
 }
 
 function frontIntensity(field: StackField, distance_m: number): number {
