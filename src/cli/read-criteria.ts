@@ -5,6 +5,7 @@ import { type Criteria, NO_CRITERIA } from '../selection/criteria.ts';
 import { parseConditions } from '../selection/parse-conditions.ts';
 import { parseClass, parseExclusion } from '../selection/parse-exclusion.ts';
 import { isProblem, type Problem } from '../units/problem.ts';
+import { quoteInput } from '../units/quote-input.ts';
 import type { OptionValues } from './options.ts';
 import { readWave } from './read-question.ts';
 
@@ -47,7 +48,8 @@ function readOperands(text: string, classes: readonly string[]): Criteria | Refu
   const { criteria, parts } = parseConditions(text, { classes });
   const open = parts.find((part) => part.kind !== 'condition' && (part.kind !== 'word' || part.remedy));
   if (!open) return criteria;
-  const message = open.kind === 'word' ? `${open.text} needs a value` : open.text;
+  const lone = /\d/.test(open.text) ? 'stands without a keyword' : 'needs a value';
+  const message = open.kind === 'word' ? `${quoteInput(open.text)} ${lone}` : open.text;
   return refuse('bad-condition', 2, message, open.remedy ?? 'see halfspace find --help');
 }
 

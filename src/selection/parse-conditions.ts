@@ -9,6 +9,7 @@
  * no problem yet; a lone keyword there is also a word, since it may be the beginning of a name.
  */
 import type { WaveSpec } from '../answer/question.ts';
+import { parseWave } from '../units/parse-wave.ts';
 import { isProblem, type Problem, problem } from '../units/problem.ts';
 import { waveWords } from './condition-words.ts';
 import { CONDITIONS, type ConditionKind, conditionNamed } from './conditions.ts';
@@ -60,7 +61,9 @@ export function parseConditions(text: string, context: ReadingContext): Conditio
       criteria = read.criteria;
       i = read.next;
     } else {
-      parts.push({ kind: 'word', from: token.from, to: token.to, text: token.text });
+      const remedy = keywordFor(token.text);
+      const { from, to } = token;
+      parts.push({ kind: 'word', from, to, text: token.text, ...(remedy && { remedy }) });
       criteria = { ...criteria, words: [...criteria.words, token.text] };
       i++;
     }
@@ -71,6 +74,13 @@ export function parseConditions(text: string, context: ReadingContext): Conditio
     parts,
     assumedWave,
   };
+}
+
+/** What a wave or a range that stands alone was probably meant for; it is looked for as a word all the same. */
+function keywordFor(text: string): string | undefined {
+  if (!/\d/.test(text)) return undefined;
+  if (!isProblem(parseWave(text))) return `write at ${text} or clear ${text}`;
+  return /^[\d.]+\.\.[\d.]*$/.test(text) ? `write what it is a range of: n ${text}` : undefined;
 }
 
 function tokensOf(text: string): readonly Token[] {

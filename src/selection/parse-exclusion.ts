@@ -23,7 +23,7 @@ export function parseClass(text: string, classes: readonly string[]): string | P
   return problem(
     'not-a-choice',
     typed === '' ? 'a class is missing' : `there is no class ${quoteInput(text)}`,
-    `name one by a word of it: ${commonWords(classes).join(', ')}`,
+    `name one by a word of it: ${commonWords(classes).join(', ')}; words of names stand by themselves`,
   );
 }
 

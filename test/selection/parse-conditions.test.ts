@@ -87,6 +87,18 @@ describe('conditions mixed with free text', () => {
     expect(kinds('n-bk7')).toEqual(['word n-bk7']);
   });
 
+  it('takes a lone wave or range for a word, and says which keyword it may have lost', () => {
+    expect(read('window 266nm').parts[1]).toMatchObject({
+      kind: 'word',
+      remedy: 'write at 266nm or clear 266nm',
+    });
+    expect(read('1.3..1.4').parts[0]).toMatchObject({
+      kind: 'word',
+      remedy: 'write what it is a range of: n 1.3..1.4',
+    });
+    expect(read('517642').parts[0]).toEqual({ kind: 'word', from: 0, to: 6, text: '517642' });
+  });
+
   it('reports a mistake in the middle and goes on', () => {
     expect(kinds('n 1.37 gly')).toEqual(['problem n 1.37', 'word gly']);
     expect(kinds('at class liquid')).toEqual(['problem at', 'condition class liquid']);

@@ -45,11 +45,15 @@ export function findText(report: FindReport, order: SortOrder, style: NumberStyl
     ...(hits.length === 0 ? ['Nothing in the catalogue is known to meet this.'] : table),
     '',
     ...paragraph(`${hits.length} of ${examined} media. ${leftOut(report)}`.trim()),
+    ...(hits.length === 0 && criteria.words.length > 0 ? paragraph(WORDS_NOTE) : []),
     ...(hits.length === 0 || notes.length === 0 ? [] : paragraph(`${notes.join('; ')}.`)),
     ...(hits.length === 0 ? [] : paragraph(`Marks: ${legendOf(marks)}.`)),
   ];
   return page(lines, style.ascii);
 }
+
+const WORDS_NOTE =
+  'Words are looked for in keys, names, aliases, formulas and classes; conditions have keywords, such as n 1.4..1.5 at 633nm or dn 0.1.. (see halfspace find --help).';
 
 function leftOut({ undecided }: FindReport): string {
   if (undecided.length === 0) return '';

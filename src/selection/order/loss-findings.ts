@@ -85,7 +85,8 @@ function suggestion(choice: CoatingChoice, bare: readonly Face[], subject: Subje
   const [best, second] = films;
   const ideal = `ideal single layer at normal incidence: index ${number(idealIndex, 4)}, ${length(idealThickness_m)} thick`;
   const source = computed('quarter-wave film, coherent sum; film indices depend on the process');
-  const ask = 'ask the coater for what can be had at this wave and angle';
+  const ask =
+    'ask the coater for what can be had at this wave and angle (halfspace coat tries films you name)';
   if (!best)
     return {
       ...base,
@@ -108,7 +109,7 @@ function suggestion(choice: CoatingChoice, bare: readonly Face[], subject: Subje
   return {
     ...base,
     level: saved > WORTH ? 'look' : 'fine',
-    text: `best on file ${filmText(best)}: ${faces} it saves ${percent(saved)} of the beam${also}; ${ideal}`,
+    text: `best on file ${filmText(best)}: ${faces} it saves ${percent(saved)} of the beam${also}; ${ideal}; two layers and more: halfspace coat`,
     source,
   };
 }

@@ -32,7 +32,11 @@ export const hertz = (value_Hz: number): string => formatQuantity(value_Hz, HERT
 export const degrees = (angle_rad: number, decimals = 2): string =>
   formatQuantity((angle_rad * 180) / Math.PI, DEGREE, { decimals });
 
-export const number = (value: number, digits = 3): string => formatNumber(value, { significant: digits });
+/** Whole numbers of three digits and more stay whole: 1464, not 1.46e3. */
+export const number = (value: number, digits = 3): string =>
+  Math.abs(value) >= 100 && Math.abs(value) < 1e5
+    ? formatNumber(value, { decimals: 0 })
+    : formatNumber(value, { significant: digits });
 
 export const signed = (value: number, digits = 3): string =>
   `${value > 0 ? '+' : ''}${number(value, digits)}`;
