@@ -7,6 +7,7 @@ import type { CatalogueEntry, IndexedCatalogue } from '../catalog/entries.ts';
 import { foldTight } from '../catalog/fold.ts';
 import { type Refusal, refuse } from '../medium/refusal.ts';
 import { problem } from '../units/problem.ts';
+import { CoatingDesigns } from './coating-designs.ts';
 import { IndexTables } from './index-tables.ts';
 import type { Bindings } from './keys/bindings.ts';
 import { MediumFinder } from './medium-finder.ts';
@@ -39,6 +40,7 @@ export function realWorld(
 ): RealWorld {
   const tables = new IndexTables(onReady);
   const finder = new MediumFinder(catalogue);
+  const designs = new CoatingDesigns(catalogue, onReady);
   const sourceOf = catalogue.source.bind(catalogue);
   let find: SearchEntries = (text) => plainSearch(catalogue.entries(), text);
   let found = new Map<string, readonly CatalogueEntry[]>();
@@ -53,6 +55,7 @@ export function realWorld(
       return entries;
     },
     find: (criteria, among) => finder.find(criteria, among),
+    coatings: (question) => designs.get(question),
     survey: () => finder.survey(),
     prepareFind: (wave) => finder.prepare(wave),
     lookup: (name) => catalogue.lookup(name),
@@ -77,6 +80,7 @@ export function realWorld(
     stop: () => {
       tables.stop();
       finder.stop();
+      designs.stop();
     },
   };
 }

@@ -41,7 +41,7 @@ export interface Search {
   readonly top: number;
 }
 
-export type PageName = 'sources' | 'cautions' | 'keys' | 'copied';
+export type PageName = 'sources' | 'cautions' | 'keys' | 'copied' | 'coatings' | 'order' | 'compare';
 
 export interface Page {
   readonly name: PageName;
@@ -49,6 +49,8 @@ export interface Page {
   /** What the keys page is narrowed to; null where nothing is being typed. */
   readonly filter: Line | null;
   readonly isFiltering: boolean;
+  /** The line marked on a page that offers some; null before the mark was moved. */
+  readonly selected: number | null;
 }
 
 export interface Message {

@@ -3,6 +3,7 @@
  * result. The reducer and the views get it handed in, so they are pure and run in tests without files.
  */
 import type { Answer } from '../answer/answer.ts';
+import type { CoatingReport } from '../answer/coating-shape.ts';
 import type { Layer, MediumSpec, Question } from '../answer/question.ts';
 import type { Lookup } from '../catalog/catalogue.ts';
 import type { CatalogueEntry } from '../catalog/entries.ts';
@@ -22,6 +23,8 @@ export interface World {
   search(text: string): readonly CatalogueEntry[];
   /** The media that meet criteria, among those with these keys or all; measured once at each wave. */
   find(criteria: Criteria, among: readonly string[] | undefined): FindResult | Refusal;
+  /** Coatings for the two media of a question; undefined while they are being designed. */
+  coatings(question: Question): CoatingReport | Refusal | undefined;
   /** The whole catalogue, for what compares media. */
   survey(): Survey;
   lookup(name: string): Lookup;

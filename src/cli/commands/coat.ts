@@ -1,10 +1,9 @@
 /** `halfspace coat FROM INTO WAVE`: antireflection films, V-coats and high reflectors for one pair of media. */
+import { BAND_LIMIT, FILM_CLASS, WANTED_REFLECTANCE } from '../../answer/coating-defaults.ts';
 import { coatingReport } from '../../answer/coating-report.ts';
 import { type MediumSpec, makeQuestion } from '../../answer/question.ts';
 import type { IndexedCatalogue } from '../../catalog/entries.ts';
-import type { Material } from '../../catalog/types.ts';
-import { isRefusal, type Refusal, refuse } from '../../medium/refusal.ts';
-import { quoteInput } from '../../units/quote-input.ts';
+import { isRefusal, type Refusal } from '../../medium/refusal.ts';
 import type { Command } from '../context.ts';
 import { findMedium, suggestMedia } from '../find-medium.ts';
 import { questionOptions, readWave } from '../read-question.ts';
@@ -12,10 +11,6 @@ import { coatCsv, coatJson } from '../render/coat-data.ts';
 import { coatMarkdown } from '../render/coat-markdown.ts';
 import { coatText } from '../render/coat-text.ts';
 import { reportRefusal } from '../report-refusal.ts';
-
-const LIMIT = 0.005;
-const WANTED = 0.995;
-const FILM_CLASS = 'thin film';
 
 export const run: Command = async ({ operands, options }, context) => {
   const catalogue = context.catalogue();
@@ -30,9 +25,9 @@ export const run: Command = async ({ operands, options }, context) => {
   if (isRefusal(into)) return refused(into);
   const films = await filmsOf(options.films, catalogue);
   if (isRefusal(films)) return refused(films);
-  const high = await materialOf(options.highFilm, catalogue);
+  const high = await optionalFilm(options.highFilm, catalogue);
   if (isRefusal(high)) return refused(high);
-  const low = await materialOf(options.lowFilm, catalogue);
+  const low = await optionalFilm(options.lowFilm, catalogue);
   if (isRefusal(low)) return refused(low);
   const stated = questionOptions(options, wave);
   if (isRefusal(stated)) return refused(stated);
@@ -40,8 +35,13 @@ export const run: Command = async ({ operands, options }, context) => {
   const asked = {
     question: makeQuestion(from, into, wave, stated),
     films,
-    limit: options.limit ?? LIMIT,
-    mirror: { wanted: options.wantedReflectance ?? WANTED, pairs: options.pairs ?? null, high, low },
+    limit: options.limit ?? BAND_LIMIT,
+    mirror: {
+      wanted: options.wantedReflectance ?? WANTED_REFLECTANCE,
+      pairs: options.pairs ?? null,
+      high,
+      low,
+    },
   };
   const report = coatingReport(asked, (id) => catalogue.source(id));
   if (isRefusal(report)) return refused(report);
@@ -59,40 +59,30 @@ async function mediumOf(name: string, catalogue: IndexedCatalogue): Promise<Medi
   return isRefusal(medium) ? suggestMedia(medium, name, catalogue) : medium;
 }
 
-async function materialOf(
+async function optionalFilm(
   name: string | undefined,
   catalogue: IndexedCatalogue,
-): Promise<Material | undefined | Refusal> {
-  if (name === undefined) return undefined;
-  const medium = await mediumOf(name, catalogue);
-  if (isRefusal(medium)) return medium;
-  return medium.kind === 'catalogue'
-    ? medium.material
-    : refuse(
-        'film-by-numbers',
-        2,
-        `${quoteInput(name)} is no material of the catalogue`,
-        'design with catalogue films; a stack of any indices is a path: air n=2.3@qw n=1.46@qw n-bk7 633nm',
-      );
+): Promise<MediumSpec | undefined | Refusal> {
+  return name === undefined ? undefined : mediumOf(name, catalogue);
 }
 
 /** Those named, or every film of the catalogue and of the person's own folder. */
 async function filmsOf(
   names: readonly string[] | undefined,
   catalogue: IndexedCatalogue,
-): Promise<readonly Material[] | Refusal> {
-  const found: Material[] = [];
+): Promise<readonly MediumSpec[] | Refusal> {
+  const found: MediumSpec[] = [];
   if (names === undefined) {
     for (const { key, class: kind } of catalogue.entries()) {
       const material = kind === FILM_CLASS ? catalogue.material(key) : undefined;
-      if (material) found.push(material);
+      if (material) found.push({ kind: 'catalogue', material });
     }
     return found;
   }
   for (const name of names) {
-    const material = await materialOf(name, catalogue);
-    if (isRefusal(material)) return material;
-    if (material && !found.includes(material)) found.push(material);
+    const film = await mediumOf(name, catalogue);
+    if (isRefusal(film)) return film;
+    found.push(film);
   }
   return found;
 }

@@ -1,7 +1,7 @@
 /** The whole screen of a state: the picture, a page over it, or one line where there is no room for either. */
 import { Box } from 'ink';
 import { useMemo } from 'react';
-import { fullLines, isSplitPage, pageLength, pageRows } from '../picture/pages.ts';
+import { fullLines, isSplitPage, markedLine, pageLength, pageRows } from '../picture/pages.ts';
 import { sceneOf } from '../picture/scene.ts';
 import { answerOf, type Page, type State } from '../state.ts';
 import { footerView } from '../view/footer-view.ts';
@@ -75,7 +75,9 @@ function Strip({ state, world }: ScreenProps) {
 function WholePage({ state, page, world }: ScreenProps & { readonly page: Page }) {
   const { plan } = sceneOf(state, world);
   const lines = fullLines(state, page, world, plan.columns);
-  const drawn = pageView(lines, page.top, pageRows(state, world), plan.columns, penOf(state));
+  const rows = pageRows(state, world);
+  const marked = markedLine(page, lines, rows);
+  const drawn = pageView(lines, page.top, rows, plan.columns, penOf(state), marked);
   return <Lines text={drawn.join('\n')} />;
 }
 

@@ -1,15 +1,21 @@
-/** Reading a page: sources, cautions, keys, what was copied. */
+/** Reading a page, and taking what its lines offer. */
 import type { ActionId } from '../keys/actions.ts';
 import { EMPTY_LINE, insertText, type Line, pasteText } from '../line-edit.ts';
-import { pageLength, pageRows } from '../picture/pages.ts';
-import type { Page, PageName, State } from '../state.ts';
+import type { PageLine } from '../picture/page-line.ts';
+import { fullLines, markedLine, nextMark, pageLength, pageRows } from '../picture/pages.ts';
+import { sceneOf } from '../picture/scene.ts';
+import { askAnew, type Page, type PageName, refusalOf, type State } from '../state.ts';
 import type { World } from '../world.ts';
 import { applyLineAction } from './line-actions.ts';
 
 /** Opens a page; the key that opened it closes it again. */
 export function openPage(state: State, name: PageName): State {
   if (state.page?.name === name) return closePage(state);
-  return { ...state, page: { name, top: 0, filter: null, isFiltering: false }, message: null };
+  return {
+    ...state,
+    page: { name, top: 0, filter: null, isFiltering: false, selected: null },
+    message: null,
+  };
 }
 
 function closePage(state: State): State {
@@ -31,10 +37,17 @@ export function actOnPage(state: State, action: ActionId, world: World): State {
       return openPage(state, 'keys');
     case 'search':
       return withPage(state, { ...page, filter: EMPTY_LINE, isFiltering: true, top: 0 });
+    case 'coatings':
+    case 'compare':
+      return openPage(state, action);
+    case 'order-check':
+      return openPage(state, 'order');
+    case 'open':
+      return takeLayers(state, page, world);
     case 'up':
-      return scroll(state, page, page.top - 1, world);
+      return moveMark(state, page, -1, world);
     case 'down':
-      return scroll(state, page, page.top + 1, world);
+      return moveMark(state, page, 1, world);
     case 'page-up':
       return scroll(state, page, page.top - rows, world);
     case 'page-down':
@@ -54,6 +67,33 @@ function scroll(state: State, page: Page, top: number, world: World): State {
   const last = Math.max(0, pageLength(state, world) - pageRows(state, world));
   return withPage(state, { ...page, top: Math.max(0, Math.min(last, top)) });
 }
+
+/** To the next line in view that offers something; where there is none the page scrolls. */
+function moveMark(state: State, page: Page, by: 1 | -1, world: World): State {
+  const selected = nextMark(page, linesOf(state, page, world), pageRows(state, world), by);
+  return selected === undefined
+    ? scroll(state, page, page.top + by, world)
+    : withPage(state, { ...page, selected });
+}
+
+function linesOf(state: State, page: Page, world: World): readonly PageLine[] {
+  return fullLines(state, page, world, sceneOf(state, world).plan.columns);
+}
+
+/** Puts the marked design between the two media. */
+function takeLayers(state: State, page: Page, world: World): State {
+  const lines = linesOf(state, page, world);
+  const marked = markedLine(page, lines, pageRows(state, world));
+  const layers = marked === undefined ? undefined : lines[marked]?.layers;
+  if (!layers || layers.length === 0) return state;
+  const before = state.question.layers.length;
+  const asked = askAnew(closePage(state), { ...state.question, layers }, world);
+  if (refusalOf(asked)) return asked;
+  const text = `between the media now: ${layerCount(layers.length)}${before > 0 ? `, in place of ${layerCount(before)}` : ''}`;
+  return { ...asked, message: { tone: 'said', text } };
+}
+
+const layerCount = (count: number): string => (count === 1 ? '1 layer' : `${count} layers`);
 
 /** Enter keeps the filter, Esc clears it. */
 function actInFilter(state: State, page: Page, action: ActionId): State {

@@ -7,8 +7,19 @@ import type { ActionId } from '../keys/actions.ts';
 import { insertText } from '../line-edit.ts';
 import { leaveWords, moveFocus, moveToEnd, moveToField } from '../moves.ts';
 import { focusItem } from '../picture/notice.ts';
+import { pageText } from '../picture/pages.ts';
 import { recordText, resultText } from '../picture/record-text.ts';
-import { answerOf, askAnew, fieldOfStop, redo, refusalOf, type State, type Updated, undo } from '../state.ts';
+import {
+  answerOf,
+  askAnew,
+  fieldOfStop,
+  type PageName,
+  redo,
+  refusalOf,
+  type State,
+  type Updated,
+  undo,
+} from '../state.ts';
 import type { World } from '../world.ts';
 import { setAngle, swapMedia } from './question-changes.ts';
 import { openEntry, typeInEntry } from './update-entry.ts';
@@ -60,6 +71,9 @@ const ACTS: Readonly<Partial<Record<ActionId, Act>>> = {
   extrapolate: (s, w) => askAnew(s, { ...s.question, extrapolate: !s.question.extrapolate }, w),
   sources: (s) => openPage(s, 'sources'),
   cautions: (s) => openPage(s, 'cautions'),
+  coatings: (s) => openPage(s, 'coatings'),
+  'order-check': (s) => openPage(s, 'order'),
+  compare: (s) => openPage(s, 'compare'),
   help: (s) => openPage(s, 'keys'),
   dots: nextGlyphs,
   back: (s, w) => (refusalOf(s) ? askAnew(s, s.answered, w) : leaveWords(quiet(s), w)),
@@ -172,6 +186,9 @@ function nextGlyphs(state: State): State {
   };
 }
 
+/** Pages that are copied as they stand. */
+const REPORTS: readonly PageName[] = ['coatings', 'order', 'compare'];
+
 /** The value under the focus, or R and T where that is no result; the whole answer on demand. */
 function copy(state: State, action: 'copy' | 'copy-record', world: World): Updated {
   const answer = answerOf(state);
@@ -180,7 +197,14 @@ function copy(state: State, action: 'copy' | 'copy-record', world: World): Updat
   const isResult = fieldOfStop(state.focus) === undefined;
   const item = isResult && !state.page ? focusItem(state, world) : undefined;
   const isWhole = action === 'copy-record' || state.page !== null;
-  const text = isWhole ? recordText(answer, style) : item ? item.copy : resultText(answer, style);
+  const page = state.page && REPORTS.includes(state.page.name) ? state.page : undefined;
+  const text = page
+    ? pageText(state, page, world)
+    : isWhole
+      ? recordText(answer, style)
+      : item
+        ? item.copy
+        : resultText(answer, style);
   const shown = isWhole ? openPage({ ...state, copied: text }, 'copied') : state;
   return {
     state: {

@@ -17,7 +17,11 @@ const FOOTERS: Readonly<Record<Context, readonly ActionId[]>> = {
 /** On a field that takes words, letters are no commands. */
 const WORD_FOOTER: readonly ActionId[] = ['open', 'next-field', 'back'];
 
+/** Lines of this page can be taken. */
+const COATING_FOOTER: readonly ActionId[] = ['down', 'open', 'page-down', 'back'];
+
 function footerOf(state: State, context: Context): readonly ActionId[] {
+  if (context === 'page' && state.page?.name === 'coatings') return COATING_FOOTER;
   return context === 'picture' && isWordStop(state.focus) ? WORD_FOOTER : FOOTERS[context];
 }
 

@@ -9,10 +9,13 @@ export function pageView(
   rows: number,
   columns: number,
   pen: Pen,
+  marked?: number,
 ): readonly string[] {
   return Array.from({ length: rows }, (_, i) => {
     const line = lines[top + i];
     if (!line) return BLANK_LINE;
+    if (top + i === marked)
+      return lineOfSpans([span(` ${pen.glyphs.focus}`, 'marker'), span(line.text, 'focus')], columns, pen);
     const isMarked = line.mark !== '';
     const mark = span(` ${line.mark}`.padEnd(2) + (isMarked ? ' ' : ''), isMarked ? line.role : 'text');
     return lineOfSpans([mark, span(line.text, isMarked ? 'text' : line.role)], columns, pen);

@@ -10,6 +10,7 @@ import { catalogueFromSources } from '../../../src/catalog/from-sources.ts';
 import { makeSearch } from '../../../src/catalog/search.ts';
 import { isUnread, readLayers } from '../../../src/cli/read-path.ts';
 import { charKey, type Key, type KeyName, namedKey } from '../../../src/term/key.ts';
+import { designCoatings } from '../../../src/tui/coating-designs.ts';
 import { App } from '../../../src/tui/components/app.tsx';
 import { mediumName } from '../../../src/tui/fields/medium-fields.ts';
 import { type IndexTable, indexTable } from '../../../src/tui/index-tables.ts';
@@ -34,12 +35,18 @@ let search: ReturnType<typeof makeSearch> | undefined;
 export function testWorld(): World {
   const catalogue = catalogueFromSources();
   search ??= makeSearch(catalogue.entries());
+  const designs = new WeakMap<Question, ReturnType<typeof designCoatings>>();
   const finder = new MediumFinder(catalogue);
   const find = search;
   return {
     answer: (question) => answerQuestion(question, (id) => catalogue.source(id)),
     search: (text) => find(text).map((hit) => hit.entry),
     find: (criteria, among) => finder.find(criteria, among),
+    coatings: (question) => {
+      const report = designs.get(question) ?? designCoatings(question, catalogue);
+      designs.set(question, report);
+      return report;
+    },
     survey: () => finder.survey(),
     lookup: (name) => catalogue.lookup(name),
     material: (key) => catalogue.material(key),
