@@ -116,6 +116,9 @@ export const COMMANDS = [
       ...PATH_OPTIONS,
       ...BEAM_OPTIONS,
       ...FORM_OPTIONS,
+      'plot',
+      'span',
+      'svg',
       'log',
       'logFile',
       'strict',
@@ -129,6 +132,7 @@ export const COMMANDS = [
       { line: 'air magnesium-fluoride-film@qw n-bk7 550nm', meaning: 'a quarter-wave film' },
       { line: 'air fused-silica@5mm air 800nm --pulse 30fs', meaning: 'a window, and what a pulse suffers' },
       { line: 'air 8x: n=2.3@qw n=1.46@qw : n-bk7 633nm', meaning: 'a mirror of eight pairs' },
+      { line: 'n-bk7 air 633nm --plot angle', meaning: 'a chart: R_s and R_p over the angle' },
     ],
   },
   {

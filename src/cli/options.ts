@@ -20,6 +20,7 @@ import { FIT_OPTION_ROWS } from './fit-options.ts';
 import { GLASS_OPTION_ROWS } from './glass-options.ts';
 import { LOG_OPTION_ROWS } from './log-options.ts';
 import { choice, flag, type OptionSpec, type ValueOf, value } from './option-spec.ts';
+import { PLOT_OPTION_ROWS } from './plot-options.ts';
 import { SELECTION_OPTION_ROWS } from './selection-options.ts';
 
 const POLARIZATIONS = ['s', 'p', 'unpolarized'] as const;
@@ -172,6 +173,7 @@ export const OPTIONS = {
     parse: parsePath,
   }),
   ...LOG_OPTION_ROWS,
+  ...PLOT_OPTION_ROWS,
   quiet: flag({
     name: 'quiet',
     short: 'q',

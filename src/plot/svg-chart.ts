@@ -25,6 +25,18 @@ export interface SvgOptions {
 const EDGE_px = 20;
 
 export function svgChart(chart: Chart, options: SvgOptions = {}): string {
+  return `${svgPanel(chart, options).markup}\n`;
+}
+
+export interface SvgPanel {
+  readonly width: number;
+  readonly height: number;
+  /** A whole svg element, which may stand in another one. */
+  readonly markup: string;
+}
+
+/** @param top where the panel stands in a picture of several */
+export function svgPanel(chart: Chart, options: SvgOptions, top = 0): SvgPanel {
   const id = (options.id ?? 'chart').replace(/[^A-Za-z0-9-]/g, '') || 'chart';
   const width = Math.max(200, Math.round(options.width_px ?? 800));
   const legend = legendRows(chart, width - 2 * EDGE_px);
@@ -33,7 +45,7 @@ export function svgChart(chart: Chart, options: SvgOptions = {}): string {
   const captionTop = frame.top + frame.height + 48;
   const height = captionTop + (caption.length === 0 ? 0 : caption.length * LINE_px + 12);
   const parts = [
-    `<svg xmlns="http://www.w3.org/2000/svg" width="${width}" height="${height}" viewBox="0 0 ${width} ${height}" role="img" font-family="sans-serif" font-size="${FONT_px}" fill="#000000">`,
+    `<svg xmlns="http://www.w3.org/2000/svg"${top === 0 ? '' : ` y="${top}"`} width="${width}" height="${height}" viewBox="0 0 ${width} ${height}" role="img" font-family="sans-serif" font-size="${FONT_px}" fill="#000000">`,
     `<title>${escapeXml(chart.title)}</title>`,
     `<desc>${escapeXml(chartSentence(chart))}</desc>`,
     ...definitions(frame, id),
@@ -55,7 +67,7 @@ export function svgChart(chart: Chart, options: SvgOptions = {}): string {
     ),
     '</svg>',
   ];
-  return `${parts.join('\n')}\n`;
+  return { width, height, markup: parts.join('\n') };
 }
 
 function definitions({ left, top, width, height }: SvgFrame, id: string): readonly string[] {
