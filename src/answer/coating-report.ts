@@ -1,32 +1,31 @@
 /** Coatings for one pair of media: the question of `coat`, answered. Pure; the films at hand come with the question. */
-import type { Material } from '../catalog/types.ts';
 import { fresnel } from '../interface/fresnel.ts';
 import type { CautionNote } from '../medium/caution.ts';
 import { isRefusal, type Refusal, refuse } from '../medium/refusal.ts';
 import { orderCautions, wordCaution } from './caution-text.ts';
 import { mirrorDesign } from './coating-mirror.ts';
 import { twoLayerDesigns } from './coating-pairs.ts';
-import { type CoatScene, type Film, filmsAt, substanceAt } from './coating-scene.ts';
+import { type CoatScene, type Film, filmKey, filmsAt, substanceAt } from './coating-scene.ts';
 import type { CoatingReport, MirrorDesign, SkippedFilm } from './coating-shape.ts';
 import { idealFilm, singleFilmCoatings } from './coating-single.ts';
 import { LOSSY_INCIDENCE, powerOf } from './interface-answer.ts';
 import { type MediumSide, mediumSide, type SourceOf } from './medium-side.ts';
-import type { Question } from './question.ts';
+import type { MediumSpec, Question } from './question.ts';
 import { bothReferences, waveAnswer } from './wave.ts';
 
 export interface CoatAsked {
   /** Its media, wave, geometry and conditions; layers are not looked at. */
   readonly question: Question;
   /** Films to design with. */
-  readonly films: readonly Material[];
+  readonly films: readonly MediumSpec[];
   /** Limit of R for bands. */
   readonly limit: number;
   readonly mirror: {
     readonly wanted: number;
     readonly pairs: number | null;
     /** The film of greatest and of least index where absent. */
-    readonly high?: Material | undefined;
-    readonly low?: Material | undefined;
+    readonly high?: MediumSpec | undefined;
+    readonly low?: MediumSpec | undefined;
   };
 }
 
@@ -56,16 +55,16 @@ export function coatingReport(asked: CoatAsked, sourceOf: SourceOf): CoatingRepo
     tangentialIndex: from.optics.n.re * Math.sin(incidenceAngle_rad),
   };
   const { high, low } = asked.mirror;
-  const materials = [...new Set([...asked.films, ...(high ? [high] : []), ...(low ? [low] : [])])];
+  const specs = [...asked.films, ...(high ? [high] : []), ...(low ? [low] : [])];
   const { films, skipped } = filmsAt(
-    materials,
+    specs.filter((spec, i) => specs.findIndex((other) => filmKey(other) === filmKey(spec)) === i),
     wave,
     conditions,
     extrapolate,
     scene.tangentialIndex,
     sourceOf,
   );
-  const designed = films.filter((f) => asked.films.some((m) => m.key === f.key));
+  const designed = films.filter((f) => asked.films.some((spec) => filmKey(spec) === f.key));
   const mirror = mirrorPart(scene, films, designed, skipped, asked);
   if (isRefusal(mirror)) return mirror;
   const bare = fresnel(from.optics, into.optics, incidenceAngle_rad);
@@ -118,9 +117,9 @@ function mirrorPart(
       )
     );
   };
-  const H = pick(high?.key, byIndex.at(-1));
+  const H = pick(high && filmKey(high), byIndex.at(-1));
   if (isRefusal(H)) return H;
-  const L = pick(low?.key, byIndex[0]);
+  const L = pick(low && filmKey(low), byIndex[0]);
   if (isRefusal(L)) return L;
   if (!H || !L) return null;
   if (!(H.side.optics.n.re > L.side.optics.n.re)) {

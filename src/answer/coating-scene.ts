@@ -3,7 +3,6 @@
  * asked for again at every other wave, so that bands carry the dispersion of all media; where one has no data, R is NaN.
  */
 import type { FitWave } from '../catalog/choose-fit.ts';
-import type { Material } from '../catalog/types.ts';
 import { vacuumToAir_um } from '../dispersion/air-index.ts';
 import type { Conditions } from '../dispersion/evaluator.ts';
 import { isRefusal } from '../medium/refusal.ts';
@@ -79,7 +78,7 @@ export function substanceAt(
 
 /** The films that reach the wave and do not absorb, and why the others are left out. */
 export function filmsAt(
-  materials: readonly Material[],
+  specs: readonly MediumSpec[],
   wave: FitWave,
   conditions: Conditions,
   extrapolate: boolean,
@@ -88,9 +87,9 @@ export function filmsAt(
 ): { readonly films: readonly Film[]; readonly skipped: readonly SkippedFilm[] } {
   const films: Film[] = [];
   const skipped: SkippedFilm[] = [];
-  for (const material of materials) {
-    const { key, name } = material;
-    const spec: MediumSpec = { kind: 'catalogue', material };
+  for (const spec of specs) {
+    const key = filmKey(spec);
+    const name = spec.kind === 'literal' ? spec.text : spec.material.name;
     const side = mediumSide(spec, wave, conditions, extrapolate, sourceOf);
     if (isRefusal(side)) {
       skipped.push({ key, name, reason: side.message });
@@ -113,6 +112,12 @@ export function filmsAt(
     }
   }
   return { films, skipped };
+}
+
+/** The key of the catalogue, with the axis where one was named; else the numbers as typed. */
+export function filmKey(spec: MediumSpec): string {
+  if (spec.kind === 'literal') return spec.text;
+  return spec.axis === undefined ? spec.material.key : `${spec.material.key}:${spec.axis}`;
 }
 
 const short = (x: number): string => String(Number(x.toPrecision(3)));

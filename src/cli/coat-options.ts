@@ -19,7 +19,7 @@ export const COAT_OPTION_ROWS = {
   films: value({
     name: 'films',
     placeholder: 'KEY,...',
-    meaning: 'materials to design with, films or not',
+    meaning: 'what to design with: materials, films or not, or numbers (n=1.38)',
     fallback: 'every film of the catalogue',
     group: 'coating',
     parse: (text: string) => nameList(text),

@@ -109,7 +109,7 @@ describe('halfspace coat', () => {
     ['air n-bk7 550nm --high magnesium-fluoride-film --low zinc-sulfide-film', 2, 'is not above that of'],
     ['air n-bk7 550nm --high gold', 3, 'it absorbs'],
     ['air n-bk7 550nm --films no-such-film', 2, 'there is no medium'],
-    ['air n-bk7 550nm --films n=1.38', 2, 'is no material of the catalogue'],
+    ['air n-bk7 550nm --films n=glass', 2, 'is not a real or complex number'],
     ['air n-bk7 550nm --films a,,b', 2, 'has an empty name'],
     ['air n-bk7 550nm --reflect 100%', 2, 'no number of pairs reaches 1'],
     ['air n-bk7 550nm --pairs 0', 2, 'write a whole number from 1 to 200'],
