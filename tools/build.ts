@@ -12,7 +12,7 @@ import { chmodSync, copyFileSync, mkdirSync, readFileSync, rmSync, writeFileSync
 import path from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { type BuildOptions, build, type Metafile, type Plugin } from 'esbuild';
-import { makeCodeCache } from './code-cache.ts';
+import { makeCodeCache, makePartCache } from './code-cache.ts';
 import { writeNotices } from './licences.ts';
 import { writePackedCatalogue } from './pack-catalog.ts';
 
@@ -58,6 +58,14 @@ function lazyParts(parts: Map<string, string>): Plugin {
   };
 }
 
+/**
+ * Parts that scripts start often: a script each with a code cache of its own, since dozens of modules take longer to load
+ * than to run. With the command line that fills the cache.
+ */
+const ALONE: ReadonlyMap<string, readonly string[]> = new Map([
+  ['cli-commands-stream', ['stream', '--from', 'air', '--into', 'n-bk7', '-o', '/dev/null', '{rows}']],
+]);
+
 /** Ink asks for the developer tools only in development; the package is not installed. */
 const withoutDevtools: Plugin = {
   name: 'without-devtools',
@@ -78,15 +86,15 @@ function refuseHeavyEntry(meta: Metafile): void {
 }
 
 /** Code compiled from a cache has no loader for `import()`: the entry's own is handed to it. */
-function importThroughEntry(core: string): void {
-  const text = readFileSync(core, 'utf8');
+function importThroughEntry(script: string): void {
+  const text = readFileSync(script, 'utf8');
   const imports = text.match(/\bimport\("\.\//g)?.length ?? 0;
-  if (imports === 0 || imports !== (text.match(/\bimport\(/g)?.length ?? 0)) {
-    throw new Error('the one-shot bundle loads parts in a way the build does not know');
+  if (imports !== (text.match(/\bimport\(/g)?.length ?? 0)) {
+    throw new Error(`${script} loads parts in a way the build does not know`);
   }
   // Pure ASCII, so that it can be read without decoding; the bundler leaves other characters in regular expressions.
   const ascii = text.replace(/[^\x00-\x7f]/g, (c) => `\\u${c.charCodeAt(0).toString(16).padStart(4, '0')}`);
-  writeFileSync(core, ascii.replace(/\bimport\("\.\//g, 'importPart("./'));
+  writeFileSync(script, ascii.replace(/\bimport\("\.\//g, 'importPart("./'));
 }
 
 export async function buildAll(): Promise<void> {
@@ -97,27 +105,30 @@ export async function buildAll(): Promise<void> {
   writeFileSync(path.join(dist, 'package.json'), '{"type":"commonjs"}\n');
 
   const parts = new Map<string, string>();
-  const entry = await build({
+  const script: BuildOptions = {
     ...common,
-    entryPoints: { core: path.join(root, 'src/main.ts') },
     outdir: dist,
     format: 'cjs',
     define: { ...define, 'import.meta.url': 'moduleUrl' },
     banner: {
-      js: '(function(require,__filename,importPart){const moduleUrl=require("node:url").pathToFileURL(__filename).href;',
+      js: '(function(require,__filename,importPart,module){const moduleUrl=require("node:url").pathToFileURL(__filename).href;',
     },
     footer: { js: '})' },
     plugins: [lazyParts(parts)],
-  });
+  };
+  const entry = await build({ ...script, entryPoints: { core: path.join(root, 'src/main.ts') } });
   refuseHeavyEntry(entry.metafile!);
   importThroughEntry(path.join(dist, 'core.js'));
   copyFileSync(path.join(root, 'tools/entry.cjs'), path.join(dist, 'halfspace.js'));
   chmodSync(path.join(dist, 'halfspace.js'), 0o755);
   makeCodeCache(dist);
 
+  const chosen = (alone: boolean): Record<string, string> =>
+    Object.fromEntries([...parts].filter(([name]) => ALONE.has(name) === alone));
+  const alone = await build({ ...script, entryPoints: chosen(true) });
   const rest = await build({
     ...common,
-    entryPoints: Object.fromEntries(parts),
+    entryPoints: chosen(false),
     outdir: dist,
     outExtension: { '.js': '.mjs' },
     chunkNames: 'part-[hash]',
@@ -126,17 +137,24 @@ export async function buildAll(): Promise<void> {
     // Reading `fetch` loads the whole HTTP client of Node (50 ms); the layout engine asks for it without needing it.
     define: { ...define, fetch: 'undefined' },
     banner: { js: 'import{createRequire}from"node:module";const require=createRequire(import.meta.url);' },
-    plugins: [withoutDevtools],
     alias: {
       'string-width': path.join(root, 'src/term/string-width-alias.ts'),
       '@alcalzone/ansi-tokenize': path.join(root, 'src/term/styled-chars-alias.ts'),
     },
+    plugins: [withoutDevtools],
   });
+  for (const [name, line] of ALONE) {
+    importThroughEntry(path.join(dist, `${name}.js`));
+    makePartCache(dist, name, line);
+  }
+  const inputsOf = (...metas: (Metafile | undefined)[]): string[] => [
+    ...new Set(metas.flatMap((meta) => Object.keys(meta?.inputs ?? {}))),
+  ];
   const inputs = [entry, rest].flatMap(({ metafile }) => Object.keys(metafile!.inputs));
   writeNotices(root, dist, inputs);
   writeFileSync(
     path.join(dist, 'inputs.json'),
-    JSON.stringify({ entry: Object.keys(entry.metafile!.inputs), parts: Object.keys(rest.metafile!.inputs) }),
+    JSON.stringify({ entry: inputsOf(entry.metafile), parts: inputsOf(alone.metafile, rest.metafile) }),
   );
 }
 

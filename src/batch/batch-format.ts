@@ -2,7 +2,7 @@
 import type { AnswerColumn } from './answer-columns.ts';
 import type { ByteWriter } from './byte-writer.ts';
 import type { Asking, Trouble } from './question-column.ts';
-import type { FixedParts } from './row-answers.ts';
+import type { FixedParts } from './row-layout.ts';
 
 export interface BatchSetup {
   readonly asking: Asking;
@@ -13,6 +13,8 @@ export interface BatchSetup {
   readonly marksOutside: boolean;
   /** Adds the whole answer to each row, where the form can hold it. */
   readonly whole: boolean;
+  /** False answers row by row even what could go in bulk, for comparison. */
+  readonly bulk?: boolean;
   /** The bytes a message may have. */
   readonly wording: (text: string) => string;
   /** Names of columns that are passed on unread, once they are known. */

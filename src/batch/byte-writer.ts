@@ -8,13 +8,15 @@ import { LONGEST_ROUNDED, writeRounded } from './write-rounded.ts';
 const FIRST_SIZE = 1 << 17;
 
 export class ByteWriter {
-  private bytes = Buffer.allocUnsafe(FIRST_SIZE);
+  /** For writers of whole rows: `room` first, then bytes from `length` on, then `extend`. */
+  bytes = Buffer.allocUnsafe(FIRST_SIZE);
   private other = Buffer.allocUnsafe(FIRST_SIZE);
   private used = 0;
-  private readonly digits: number | undefined;
+  /** 0 for the shortest text. */
+  readonly digits: number;
 
   /** Numbers in the shortest text that reads back as the same double, or to `digits` significant ones. */
-  constructor(digits?: number) {
+  constructor(digits = 0) {
     this.digits = digits;
   }
 
@@ -32,14 +34,27 @@ export class ByteWriter {
     return taken.subarray(0, length);
   }
 
+  /** Makes sure that so many bytes more fit into `bytes`. */
+  room(count: number): void {
+    if (this.used + count <= this.bytes.length) return;
+    const larger = Buffer.allocUnsafe(2 * this.bytes.length + count);
+    this.bytes.copy(larger, 0, 0, this.used);
+    this.bytes = larger;
+  }
+
+  /** Bytes written by the caller up to here count. */
+  extend(length: number): void {
+    this.used = length;
+  }
+
   byte(value: number): void {
-    this.reserve(1);
+    this.room(1);
     this.bytes[this.used++] = value;
   }
 
   /** A copy of bytes of another buffer. */
   copy(source: Uint8Array, from: number, to: number): void {
-    this.reserve(to - from);
+    this.room(to - from);
     const { bytes } = this;
     let at = this.used;
     if (to - from > LONG) bytes.set(source.subarray(from, to), at);
@@ -48,24 +63,17 @@ export class ByteWriter {
   }
 
   text(text: string): void {
-    this.reserve(3 * text.length);
+    this.room(3 * text.length);
     this.used += this.bytes.write(text, this.used, 'utf8');
   }
 
   /** A finite number. */
   number(value: number): void {
-    this.reserve(LONGEST_ROUNDED);
+    this.room(LONGEST_ROUNDED);
     this.used =
-      this.digits === undefined
+      this.digits === 0
         ? writeShortest(value, this.bytes, this.used)
         : writeRounded(value, this.digits, this.bytes, this.used);
-  }
-
-  private reserve(room: number): void {
-    if (this.used + room <= this.bytes.length) return;
-    const larger = Buffer.allocUnsafe(2 * this.bytes.length + room);
-    this.bytes.copy(larger, 0, 0, this.used);
-    this.bytes = larger;
   }
 }
 

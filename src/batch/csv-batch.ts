@@ -6,8 +6,10 @@ import type { BatchFormat, BatchSetup, Step } from './batch-format.ts';
 import { rowMessage } from './batch-format.ts';
 import { scanDecimal } from './decimal-bytes.ts';
 import { type Header, readHeader } from './header.ts';
+import { PlainRows } from './plain-rows.ts';
 import { type Trouble, trouble } from './question-column.ts';
-import { type Cells, RowAnswers } from './row-answers.ts';
+import { RowAnswers } from './row-answers.ts';
+import type { Cells } from './row-layout.ts';
 import { LONGEST_ROW, quotedField, RowReader, type RowTrouble } from './row-reader.ts';
 
 const LF = 10;
@@ -29,6 +31,8 @@ export class CsvBatch implements BatchFormat {
   private answers: RowAnswers | undefined;
   private separator = 44;
   private cells: Cells | undefined;
+  private plain: PlainRows | undefined;
+  private plainTried = false;
   private ended = false;
 
   constructor(setup: BatchSetup) {
@@ -58,6 +62,15 @@ export class CsvBatch implements BatchFormat {
     for (let left = limit; left > 0; left--) {
       const { reader } = this;
       if (!reader || this.fatal) return 'hungry';
+      if (this.plain && !this.headerDue) {
+        const rows = this.plain.run(reader, this.setup.writer);
+        if (rows > 0) {
+          this.rows += rows;
+          // A block for a row: the same stride for blocks would keep signals waiting.
+          left -= rows - 1;
+          continue;
+        }
+      }
       if (!reader.next()) {
         if (this.ended) this.close();
         return 'hungry';
@@ -136,7 +149,7 @@ export class CsvBatch implements BatchFormat {
       return;
     }
     const answers = new RowAnswers(setup.asking, header.columns, setup.fixed, setup.columns);
-    this.fatal = answers.missing();
+    this.fatal = answers.fault();
     if (this.fatal) return;
     if (header.passedOn.length > 0) setup.passedOn(header.passedOn);
     this.header = header;
@@ -166,7 +179,17 @@ export class CsvBatch implements BatchFormat {
         : answers.evaluate(cells);
     if (bad instanceof Promise) return bad.then((result) => this.write(reader, result));
     this.write(reader, bad);
+    // From the first row answered on it is known which media are meant.
+    if (!bad && !this.plainTried) this.plain = this.makePlain(answers, header);
     return undefined;
+  }
+
+  private makePlain({ lean }: RowAnswers, header: Header): PlainRows | undefined {
+    this.plainTried = true;
+    const columns = this.setup.marksOutside || this.setup.bulk === false ? undefined : lean?.reader.plain();
+    if (!lean || !columns || (!lean.reader.surface.into && !lean.reader.surface.from)) return undefined;
+    const { answers, reader } = lean;
+    return new PlainRows(answers, reader, columns, header.names.length, this.setup.columns, this.separator);
   }
 
   private write(reader: RowReader, bad: Trouble | undefined): void {
@@ -182,12 +205,9 @@ export class CsvBatch implements BatchFormat {
       const answers = this.answers!;
       for (let i = 0; i < columns.length; i++) {
         writer.byte(separator);
-        const number = answers.number(i);
-        if (Number.isFinite(number)) writer.number(number);
-        else {
-          const value = answers.value(i);
-          if (value !== null) writer.text(this.field(String(value)));
-        }
+        const value = answers.value(i);
+        if (typeof value === 'number') writer.number(value);
+        else if (value !== null) writer.text(this.field(String(value)));
       }
       if (setup.marksOutside) {
         writer.byte(separator);

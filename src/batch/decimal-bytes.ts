@@ -8,7 +8,8 @@
 export const MANTISSA = 0;
 export const EXPONENT = 1;
 
-const MOST_DIGITS = 15;
+/** More digits than this may not fit into a double's whole numbers. */
+export const MOST_DIGITS = 15;
 
 /** False where the bytes from `from` to `to` are not such a number; `out` then holds nothing. */
 export function scanDecimal(bytes: Uint8Array, from: number, to: number, out: Float64Array): boolean {

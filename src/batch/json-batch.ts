@@ -7,7 +7,8 @@ import { ERROR_COLUMN, OUTSIDE_COLUMN } from './csv-batch.ts';
 import { readHeader } from './header.ts';
 import { LineReader } from './line-reader.ts';
 import { type Trouble, trouble } from './question-column.ts';
-import { type Cells, RowAnswers } from './row-answers.ts';
+import { RowAnswers } from './row-answers.ts';
+import type { Cells } from './row-layout.ts';
 
 const LF = 10;
 export const ANSWER_KEY = 'answer';
@@ -78,7 +79,7 @@ export class JsonBatch implements BatchFormat {
       return undefined;
     }
     const cells = jsonCells(row.object, names);
-    const nested = names.find((name, i) => isNested(row.object[name]) && answers.reads(i));
+    const nested = names.find((name, i) => isNested(row.object[name]) && answers.layout.reads(i));
     const bad = nested !== undefined ? notScalar(nested) : answers.evaluate(cells);
     if (bad instanceof Promise) return bad.then((result) => this.write(text, answers, result, line));
     this.write(text, answers, bad, line);
@@ -107,7 +108,7 @@ export class JsonBatch implements BatchFormat {
     for (const name of news) this.told.add(name);
     if (news.length > 0) passedOn(news);
     const answers = new RowAnswers(asking, header.columns, fixed, columns, this.setup.whole);
-    return answers.missing() ?? answers;
+    return answers.fault() ?? answers;
   }
 
   private write(
@@ -129,9 +130,9 @@ export class JsonBatch implements BatchFormat {
     };
     for (const [i, { name }] of columns.entries()) {
       key(name);
-      const number = bad || !answers ? Number.NaN : answers.number(i);
-      if (Number.isFinite(number)) writer.number(number);
-      else writer.text(JSON.stringify(bad || !answers ? null : answers.value(i)));
+      const value = bad || !answers ? null : answers.value(i);
+      if (typeof value === 'number') writer.number(value);
+      else writer.text(JSON.stringify(value));
     }
     if (marksOutside) {
       key(OUTSIDE_COLUMN);

@@ -5,6 +5,7 @@
  */
 import { type SurfacePowers, surfacePowers } from '../answer/powers.ts';
 import type { Polarization } from '../answer/question.ts';
+import type { Waves } from '../medium/bound-fit.ts';
 import { type BoundMedium, EXTRAPOLATED, REFUSED } from '../medium/bound-medium.ts';
 import { frequencyFromWavelength, photonEnergyFromWavelength } from '../units/wave.ts';
 import type { AnswerColumn } from './answer-columns.ts';
@@ -47,27 +48,43 @@ const SLOT_OF: Readonly<Record<string, number>> = {
 
 export const LEAN_KEYS: readonly string[] = Object.keys(SLOT_OF);
 
-/** One surface at one wave, as the laws take it; angle from the normal. */
-export interface LeanQuestion {
+/** The surface that rows ask about. */
+export interface LeanSurface {
   /** Undefined where it was left out and no column asks for it. */
   from: BoundMedium | undefined;
   into: BoundMedium | undefined;
   fromIsLiteral: boolean;
-  vacuum_um: number;
-  air_um: number;
-  angle_rad: number;
   polarization: Polarization;
+}
+
+/** Several rows of numbers: waves and angles in, the values behind the answer columns out. */
+export interface LeanRows extends Waves {
+  readonly angle_rad: Float64Array;
+  /** One array a slot. */
+  readonly values: readonly Float64Array[];
+}
+
+export function makeRows(count: number): LeanRows {
+  const numbers = (): Float64Array => new Float64Array(count);
+  return {
+    vacuum_um: numbers(),
+    air_um: numbers(),
+    angle_rad: numbers(),
+    values: Array.from({ length: SLOTS }, numbers),
+  };
 }
 
 export interface LeanAnswers {
   readonly needsFrom: boolean;
   readonly needsInto: boolean;
-  /** False where the question is not answered in this way. */
-  readonly evaluate: (question: LeanQuestion) => boolean;
-  /** Value of column `i` of the question last evaluated; NaN where there is none. */
-  readonly value: (i: number) => number;
-  /** The sides that were answered outside the range of their fits: "", "from", "into", "from into". */
-  readonly outside: (question: LeanQuestion) => string;
+  /** Answers row `i`; false where the question is not answered in this way. */
+  readonly evaluate: (surface: LeanSurface, rows: LeanRows, i: number) => boolean;
+  /** Answers the first rows, up to `count` or the first that is not answered in this way; how many. */
+  readonly evaluateBlock: (surface: LeanSurface, rows: LeanRows, count: number) => number;
+  /** Values of a column by row, once evaluated, to be multiplied with the column's factor; NaN where there is none. */
+  readonly valuesOf: (rows: LeanRows, column: number) => Float64Array;
+  /** The sides that row `i` answered outside the range of their fits: "", "from", "into", "from into". */
+  readonly outside: (surface: LeanSurface, rows: LeanRows, i: number) => string;
 }
 
 /** Undefined where a column asks for more than this. */
@@ -84,64 +101,79 @@ export function leanAnswers(columns: readonly AnswerColumn[]): LeanAnswers | und
   const wave = needs(WAVE, WAVENUMBER);
   const index1 = needs(N1, N1 + 1);
   const index2 = needs(N2, N2 + 1);
-  const slots = new Float64Array(SLOTS);
-  const order = Uint8Array.from(slotOf);
-  const factors = Float64Array.from(columns, ({ factor }) => factor);
+  const onlyN2 = slotOf.every((slot) => slot === N2);
+  const pair = new Float64Array(2);
+  /** n and k of a side into its slots. */
+  const put = (side: BoundMedium, rows: LeanRows, i: number, slot: number): boolean => {
+    if (side.indexAt(rows, i, pair, 0) === REFUSED) return false;
+    rows.values[slot]![i] = pair[0]!;
+    rows.values[slot + 1]![i] = pair[1]!;
+    return true;
+  };
+  const before = ({ from, fromIsLiteral }: LeanSurface, rows: LeanRows, i: number): boolean => {
+    if (from === undefined) return true;
+    if (!index1 && !fromIsLiteral) return from.reachAt(rows, i) !== REFUSED;
+    return put(from, rows, i, N1) && rows.values[N1]![i] !== 0;
+  };
+  const beyond = ({ into }: LeanSurface, rows: LeanRows, i: number): boolean => {
+    if (into === undefined) return true;
+    return index2 ? put(into, rows, i, N2) : into.reachAt(rows, i) !== REFUSED;
+  };
+  const evaluate = (surface: LeanSurface, rows: LeanRows, i: number): boolean => {
+    if (wave) putMeasures(rows, i);
+    if (!powers) return before(surface, rows, i) && beyond(surface, rows, i);
+    const from = surface.from?.opticsAt(rows, i);
+    const into = surface.into?.opticsAt(rows, i);
+    if (!from || !into || from.n.re === 0) return false;
+    const { values } = rows;
+    values[N1]![i] = from.n.re;
+    values[N1 + 1]![i] = from.n.im;
+    values[N2]![i] = into.n.re;
+    values[N2 + 1]![i] = into.n.im;
+    putPowers(surfacePowers(from, into, rows.angle_rad[i]!, surface.polarization), values, i);
+    return true;
+  };
 
   return {
     needsFrom: powers || index1,
     needsInto: powers || index2,
-    value: (i) => slots[order[i]!]! * factors[i]!,
-    outside({ from, into, vacuum_um, air_um }) {
+    valuesOf: ({ values }, column) => values[slotOf[column]!]!,
+    outside({ from, into }, rows, i) {
       const sides = [
-        from?.reachAt(vacuum_um, air_um) === EXTRAPOLATED ? ['from'] : [],
-        into?.reachAt(vacuum_um, air_um) === EXTRAPOLATED ? ['into'] : [],
+        from?.reachAt(rows, i) === EXTRAPOLATED ? ['from'] : [],
+        into?.reachAt(rows, i) === EXTRAPOLATED ? ['into'] : [],
       ];
       return sides.flat().join(' ');
     },
-    evaluate(question) {
-      const { from, into, vacuum_um, air_um } = question;
-      if (wave) writeWave(vacuum_um, air_um, slots);
-      if (!powers) {
-        return (
-          (from === undefined ||
-            (index1 || question.fromIsLiteral
-              ? from.indexAt(vacuum_um, air_um, slots, N1) !== REFUSED && slots[N1] !== 0
-              : from.reachAt(vacuum_um, air_um) !== REFUSED)) &&
-          (into === undefined ||
-            (index2
-              ? into.indexAt(vacuum_um, air_um, slots, N2) !== REFUSED
-              : into.reachAt(vacuum_um, air_um) !== REFUSED))
-        );
+    evaluate,
+    evaluateBlock(surface, rows, count) {
+      let answered = 0;
+      if (onlyN2 && surface.into && !surface.fromIsLiteral) {
+        // Only the index beyond is asked: the medium takes the block as a whole.
+        while (answered < count && before(surface, rows, answered)) answered++;
+        return surface.into.indexBlock(rows, answered, rows.values[N2]!);
       }
-      const before = from?.opticsAt(vacuum_um, air_um);
-      const beyond = into?.opticsAt(vacuum_um, air_um);
-      if (!before || !beyond || before.n.re === 0) return false;
-      slots[N1] = before.n.re;
-      slots[N1 + 1] = before.n.im;
-      slots[N2] = beyond.n.re;
-      slots[N2 + 1] = beyond.n.im;
-      writePowers(surfacePowers(before, beyond, question.angle_rad, question.polarization), slots);
-      return true;
+      while (answered < count && evaluate(surface, rows, answered)) answered++;
+      return answered;
     },
   };
 }
 
-function writeWave(vacuum_um: number, air_um: number, slots: Float64Array): void {
-  const wavelength_m = vacuum_um * 1e-6;
-  slots[WAVE] = wavelength_m;
-  slots[AIR_WAVE] = air_um * 1e-6;
-  slots[FREQUENCY] = frequencyFromWavelength(wavelength_m);
-  slots[ENERGY] = photonEnergyFromWavelength(wavelength_m);
-  slots[WAVENUMBER] = 1 / wavelength_m;
+function putMeasures({ vacuum_um, air_um, values }: LeanRows, i: number): void {
+  const wavelength_m = vacuum_um[i]! * 1e-6;
+  values[WAVE]![i] = wavelength_m;
+  values[AIR_WAVE]![i] = air_um[i]! * 1e-6;
+  values[FREQUENCY]![i] = frequencyFromWavelength(wavelength_m);
+  values[ENERGY]![i] = photonEnergyFromWavelength(wavelength_m);
+  values[WAVENUMBER]![i] = 1 / wavelength_m;
 }
 
-function writePowers(p: SurfacePowers, slots: Float64Array): void {
-  slots[RS] = p.Rs;
-  slots[RP] = p.Rp;
-  slots[R] = p.R;
-  slots[TS] = p.Ts ?? Number.NaN;
-  slots[TP] = p.Tp ?? Number.NaN;
-  slots[T] = p.T ?? Number.NaN;
-  slots[REFRACTION] = p.refractionAngle_rad ?? Number.NaN;
+function putPowers(p: SurfacePowers, values: readonly Float64Array[], i: number): void {
+  values[RS]![i] = p.Rs;
+  values[RP]![i] = p.Rp;
+  values[R]![i] = p.R;
+  values[TS]![i] = p.Ts ?? Number.NaN;
+  values[TP]![i] = p.Tp ?? Number.NaN;
+  values[T]![i] = p.T ?? Number.NaN;
+  values[REFRACTION]![i] = p.refractionAngle_rad ?? Number.NaN;
 }

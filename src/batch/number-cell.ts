@@ -14,42 +14,51 @@ import {
 } from '../units/wave.ts';
 import { decimalValue } from './decimal-bytes.ts';
 
-/** SI value of mantissa x 10^exponent in the unit of the column; NaN where it is to be read as a text. */
-export type NumberCell = (mantissa: number, exponent: number) => number;
+/** A column of bare numbers in a known unit. */
+export interface NumberUnit {
+  /** The unit is the SI unit of its kind times this power of ten. */
+  readonly power: number;
+  /** From the number in that SI unit to what is meant; NaN for what the parser would refuse. */
+  readonly value: (number_SI: number) => number;
+}
 
-/** Vacuum (or air) wavelength in metres; undefined for a unit that is no plain power of ten. */
-export function waveCell(unit: string): NumberCell | undefined {
+/** The value of the digits that `scanDecimal` found; NaN where they are to be read as a text. */
+export const numberValue = ({ power, value }: NumberUnit, mantissa: number, exponent: number): number =>
+  value(decimalValue(mantissa, exponent + power));
+
+/** To a vacuum (or air) wavelength in metres; undefined for a unit that is no plain power of ten. */
+export function waveUnit(unit: string): NumberUnit | undefined {
   const lookup = findUnit(unit, WAVE_KINDS);
   const power = lookup.found === 'one' ? powerOf(lookup.unit) : undefined;
-  if (lookup.found !== 'one' || power === undefined) return undefined;
-  const wavelength_m = WAVELENGTH_OF[lookup.unit.kind];
-  return (mantissa, exponent) => {
-    const value = decimalValue(mantissa, exponent + power);
-    const length_m = value > 0 ? wavelength_m(value) : Number.NaN;
-    return length_m >= SHORTEST_WAVE_m && length_m <= LONGEST_WAVE_m ? length_m : Number.NaN;
-  };
+  return lookup.found === 'one' && power !== undefined
+    ? { power, value: WAVELENGTH_OF[lookup.unit.kind] }
+    : undefined;
 }
+
+const covered = (length_m: number): number =>
+  length_m >= SHORTEST_WAVE_m && length_m <= LONGEST_WAVE_m ? length_m : Number.NaN;
 
 const WAVELENGTH_OF = {
-  length: (value: number): number => value,
-  frequency: wavelengthFromFrequency,
-  'photon-energy': wavelengthFromPhotonEnergy,
-  wavenumber: wavelengthFromWavenumber,
+  length: covered,
+  frequency: (value: number): number => (value > 0 ? covered(wavelengthFromFrequency(value)) : Number.NaN),
+  'photon-energy': (value: number): number =>
+    value > 0 ? covered(wavelengthFromPhotonEnergy(value)) : Number.NaN,
+  wavenumber: (value: number): number => (value > 0 ? covered(wavelengthFromWavenumber(value)) : Number.NaN),
 } as const;
 
-/** Angle of incidence in radians; a column without a unit is in degrees. */
-export function angleCell(unit: string): NumberCell | undefined {
+/** To an angle of incidence in radians; a column without a unit is in degrees. */
+export function angleUnit(unit: string): NumberUnit | undefined {
   const lookup = findUnit(unit === '' ? 'deg' : unit, ['angle']);
   if (lookup.found !== 'one') return undefined;
+  if (lookup.unit.name === 'degree') {
+    return { power: 0, value: (degrees) => incidence((degrees * Math.PI) / 180) };
+  }
   const power = powerOf(lookup.unit);
-  const degrees = lookup.unit.name === 'degree';
-  if (power === undefined && !degrees) return undefined;
-  return (mantissa, exponent) => {
-    const value = decimalValue(mantissa, exponent + (power ?? 0));
-    const angle_rad = degrees ? (value * Math.PI) / 180 : value;
-    return angle_rad >= 0 && angle_rad < Math.PI / 2 ? angle_rad : Number.NaN;
-  };
+  return power === undefined ? undefined : { power, value: incidence };
 }
+
+const incidence = (angle_rad: number): number =>
+  angle_rad >= 0 && angle_rad < Math.PI / 2 ? angle_rad : Number.NaN;
 
 const SEVEN: Decimal = { negative: false, digits: '7', exponent: 0 };
 

@@ -51,6 +51,18 @@ export class RowReader {
     }
   }
 
+  /** Where the next row, or a blank line before it, begins in `bytes`; beyond their end where nothing is left. */
+  get position(): number {
+    return this.skipping ? this.bytes.length : this.at;
+  }
+
+  /** Passes over rows that somebody else has read: up to `position`, so many lines. */
+  advance(position: number, lines: number): void {
+    this.at = position;
+    this.lines += lines;
+    this.fresh = false;
+  }
+
   /** No more bytes will come. */
   end(): void {
     this.ended = true;

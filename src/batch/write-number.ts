@@ -70,9 +70,12 @@ export function writeShortest(x: number, out: Uint8Array, at: number): number {
     const digits = Math.min(left, 7);
     left -= digits;
     const power = POWERS_OF_TEN[digits]!;
-    c *= power;
-    let carry = Math.floor(c * PER_LIMB);
-    c -= carry * LIMB;
+    let carry = 0;
+    if (c !== 0) {
+      c *= power;
+      carry = Math.floor(c * PER_LIMB);
+      c -= carry * LIMB;
+    }
     b = b * power + carry;
     carry = Math.floor(b * PER_LIMB);
     b -= carry * LIMB;
@@ -139,14 +142,24 @@ function writeWhole(whole: number, out: Uint8Array, at: number): number {
   return writeDigits(whole, digits, out, at);
 }
 
-/** `digits` digits with leading zeros. */
+/** The two digits of every number below 100. */
+const PAIRS = Uint8Array.from(
+  { length: 200 },
+  (_, i) => 48 + (i % 2 === 0 ? Math.floor(i / 20) : (i >> 1) % 10),
+);
+
+/** `digits` digits with leading zeros, of a whole number below 2^31. */
 function writeDigits(value: number, digits: number, out: Uint8Array, at: number): number {
-  let rest = value;
-  for (let i = at + digits - 1; i >= at; i--) {
-    const tenth = (rest / 10) | 0;
-    out[i] = 48 + rest - tenth * 10;
-    rest = tenth;
+  let rest = value | 0;
+  let i = at + digits - 1;
+  for (; i > at; i -= 2) {
+    const hundredth = (rest / 100) | 0;
+    const pair = (rest - hundredth * 100) << 1;
+    out[i] = PAIRS[pair + 1]!;
+    out[i - 1] = PAIRS[pair]!;
+    rest = hundredth;
   }
+  if (i === at) out[i] = 48 + rest;
   return at + digits;
 }
 

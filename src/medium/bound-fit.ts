@@ -13,6 +13,12 @@ import { bindAbsorption } from './absorption.ts';
 import { ABSORBING, fitPreference } from './fit-preference.ts';
 import { thermalForm } from './optics-at.ts';
 
+/** Many waves, each in both references; numbers in typed arrays stay numbers from one function to the next. */
+export interface Waves {
+  readonly vacuum_um: Float64Array;
+  readonly air_um: Float64Array;
+}
+
 export interface BoundFit {
   readonly fit: Fit;
   readonly inAir: boolean;
@@ -25,8 +31,10 @@ export interface BoundFit {
   readonly preference: number;
   readonly accuracy: number;
   readonly grade: number;
-  /** Writes n and k relative to vacuum into `out[at]` and `out[at + 1]`. */
-  readonly evaluate: (vacuum_um: number, air_um: number, out: Float64Array, at: number) => void;
+  /** Writes n and k of wave `i`, relative to vacuum, into `out[at]` and `out[at + 1]`. */
+  readonly evaluate: (waves: Waves, i: number, out: Float64Array, at: number) => void;
+  /** n alone of the first waves. */
+  readonly indexBlock: (waves: Waves, count: number, n: Float64Array) => void;
   readonly model: () => BoundModel;
 }
 
@@ -47,7 +55,11 @@ export function bindFit(fit: Fit, material: Material, conditions: Conditions): B
     bound ??= bindModel(fit.parameters, conditions);
     return bound;
   };
-  let evaluate: BoundFit['evaluate'] | undefined;
+  let made: Evaluator | undefined;
+  const evaluator = (): Evaluator => {
+    made ??= makeEvaluator(fit, material, conditions, model());
+    return made;
+  };
   const [shortest_um, longest_um] = reachOf(fit.range_um);
   const [recommendedFrom_um, recommendedTo_um] = fit.recommendedRange_um
     ? reachOf(fit.recommendedRange_um)
@@ -64,10 +76,8 @@ export function bindFit(fit: Fit, material: Material, conditions: Conditions): B
     preference: fitPreference(fit, material, ANY_WAVE, conditions, () => SILENT),
     accuracy: -(fit.accuracy_n ?? Number.POSITIVE_INFINITY),
     grade: fit.grade === 'A' ? 2 : fit.grade === 'B' ? 1 : 0,
-    evaluate(vacuum_um, air_um, out, at) {
-      evaluate ??= evaluator(fit, material, conditions, model());
-      evaluate(vacuum_um, air_um, out, at);
-    },
+    evaluate: (waves, i, out, at) => evaluator().evaluate(waves, i, out, at),
+    indexBlock: (waves, count, n) => evaluator().indexBlock(waves, count, n),
     model,
   };
 }
@@ -76,19 +86,24 @@ const within = (from_um: number, to_um: number, vacuum_um: number, air_um: numbe
   (vacuum_um >= from_um && vacuum_um <= to_um) || (air_um >= from_um && air_um <= to_um);
 
 /** `inRange`, on the limits worked out. */
-export const reaches = (fit: BoundFit, vacuum_um: number, air_um: number): boolean =>
-  within(fit.shortest_um, fit.longest_um, vacuum_um, air_um);
+export const reaches = (fit: BoundFit, waves: Waves, i: number): boolean =>
+  within(fit.shortest_um, fit.longest_um, waves.vacuum_um[i]!, waves.air_um[i]!);
 
 /** The order of `chooseFit`: preference, recommended, accuracy, grade; of equals the first. */
-export function bestFit(fits: readonly BoundFit[], vacuum_um: number, air_um: number): BoundFit | undefined {
+export function bestFit(fits: readonly BoundFit[], waves: Waves, i: number): BoundFit | undefined {
   let best: BoundFit | undefined;
   let bestPreference = 0;
   let bestRecommended = false;
-  for (let i = 0; i < fits.length; i++) {
-    const fit = fits[i]!;
-    if (!reaches(fit, vacuum_um, air_um)) continue;
-    const recommended = within(fit.recommendedFrom_um, fit.recommendedTo_um, vacuum_um, air_um);
-    const absorbs = recommended && fits.length > 1 && givesAbsorption(fit, vacuum_um, air_um);
+  for (const fit of fits) {
+    if (!reaches(fit, waves, i)) continue;
+    if (fits.length === 1) return fit;
+    const recommended = within(
+      fit.recommendedFrom_um,
+      fit.recommendedTo_um,
+      waves.vacuum_um[i]!,
+      waves.air_um[i]!,
+    );
+    const absorbs = recommended && givesAbsorption(fit, waves, i);
     const preference = absorbs ? fit.preference + 1 : fit.preference;
     if (best === undefined || outranks(fit, preference, recommended, best, bestPreference, bestRecommended)) {
       best = fit;
@@ -114,37 +129,48 @@ function outranks(
 
 const scratch = new Float64Array(JET_LENGTH);
 
-function givesAbsorption({ model, inAir }: BoundFit, vacuum_um: number, air_um: number): boolean {
+function givesAbsorption({ model, inAir }: BoundFit, { vacuum_um, air_um }: Waves, i: number): boolean {
   const bound = model();
   if (!bound.complex) return false;
-  bound.evaluate(inAir ? air_um : vacuum_um, scratch);
+  bound.evaluate(inAir ? air_um[i]! : vacuum_um[i]!, scratch);
   return scratch[K]! > ABSORBING * scratch[N]!;
 }
 
+type Evaluator = Pick<BoundFit, 'evaluate' | 'indexBlock'>;
+
 /** n and k of one fit, combined in the order of `optics-at.ts`, so that they are its numbers to the last bit. */
-function evaluator(
-  fit: Fit,
-  material: Material,
-  conditions: Conditions,
-  bound: BoundModel,
-): BoundFit['evaluate'] {
+function makeEvaluator(fit: Fit, material: Material, conditions: Conditions, bound: BoundModel): Evaluator {
   const jet = new Float64Array(JET_LENGTH);
   const absorption = bound.complex ? undefined : bindAbsorption(material.absorption);
   const warm = warming(fit, material, conditions);
   const inAir = fit.reference === 'air';
-  return (vacuum_um, air_um, out, at) => {
-    const L_um = inAir ? air_um : vacuum_um;
-    bound.evaluate(L_um, jet);
+  // Both write the same n and k.
+  const write = bound.evaluateFirst ?? bound.evaluate;
+  /** All but the absorption beside the fit. */
+  const evaluate = ({ vacuum_um, air_um }: Waves, i: number): void => {
+    const L_um = inAir ? air_um[i]! : vacuum_um[i]!;
+    write(L_um, jet);
     if (warm && !warm.absolute) applyThermalForm(warm.form, warm.from_K, warm.to_K, L_um, jet);
     if (inAir) {
-      const air = airIndex(vacuum_um);
+      const air = airIndex(vacuum_um[i]!);
       jet[N] = jet[N]! * air;
       jet[K] = jet[K]! * air;
     }
-    if (warm?.absolute) applyThermalForm(warm.form, warm.from_K, warm.to_K, vacuum_um, jet);
-    if (absorption && jet[N]! > 0) absorption(vacuum_um, jet);
-    out[at] = jet[N]!;
-    out[at + 1] = jet[K]!;
+    if (warm?.absolute) applyThermalForm(warm.form, warm.from_K, warm.to_K, vacuum_um[i]!, jet);
+  };
+  return {
+    evaluate(waves, i, out, at) {
+      evaluate(waves, i);
+      if (absorption && jet[N]! > 0) absorption(waves.vacuum_um[i]!, jet);
+      out[at] = jet[N]!;
+      out[at + 1] = jet[K]!;
+    },
+    indexBlock(waves, count, n) {
+      for (let i = 0; i < count; i++) {
+        evaluate(waves, i);
+        n[i] = jet[N]!;
+      }
+    },
   };
 }
 

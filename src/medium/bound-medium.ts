@@ -10,7 +10,7 @@ import type { Axis, Material } from '../catalog/types.ts';
 import type { Conditions } from '../dispersion/evaluator.ts';
 import { type Optics, opticsFromIndex } from '../interface/optics.ts';
 import { ONE } from '../num/complex.ts';
-import { type BoundFit, bestFit, bindFit, reaches } from './bound-fit.ts';
+import { type BoundFit, bestFit, bindFit, reaches, type Waves } from './bound-fit.ts';
 import { fitPreference } from './fit-preference.ts';
 import { type LiteralMedium, literalOptics } from './literal.ts';
 import { mediumAtWave } from './optics-at.ts';
@@ -25,27 +25,34 @@ export const EXTRAPOLATED = 2;
 export type Reach = typeof REFUSED | typeof INSIDE | typeof EXTRAPOLATED;
 
 export interface BoundMedium {
-  /** Writes n and k relative to vacuum into `out[at]` and `out[at + 1]`; nothing useful where it refuses. */
-  readonly indexAt: (vacuum_um: number, air_um: number, out: Float64Array, at: number) => Reach;
+  /** Writes n and k of wave `i`, relative to vacuum, into `out[at]` and `out[at + 1]`; nothing useful where it refuses. */
+  readonly indexAt: (waves: Waves, i: number, out: Float64Array, at: number) => Reach;
+  /** n alone of the first waves, up to `count` or the first it refuses; how many. */
+  readonly indexBlock: (waves: Waves, count: number, n: Float64Array) => number;
   /** What `indexAt` would find, but for a pole of the formula at the very wave. */
-  readonly reachAt: (vacuum_um: number, air_um: number) => Reach;
+  readonly reachAt: (waves: Waves, i: number) => Reach;
   /** All that the laws of an interface need; undefined where the question would be refused. */
-  readonly opticsAt: (vacuum_um: number, air_um: number) => Optics | undefined;
+  readonly opticsAt: (waves: Waves, i: number) => Optics | undefined;
   /** Why `indexAt` refused. */
   readonly refusalAt: (wave: FitWave) => Refusal | undefined;
 }
 
 export function bindLiteral(literal: LiteralMedium): BoundMedium {
-  const opticsAt = (vacuum_um: number): Optics => literalOptics(literal, vacuum_um * 1e-6);
+  const opticsAt = ({ vacuum_um }: Waves, i: number): Optics => literalOptics(literal, vacuum_um[i]! * 1e-6);
+  const indexAt: BoundMedium['indexAt'] = (waves, i, out, at) => {
+    const { n } = opticsAt(waves, i);
+    out[at] = n.re;
+    out[at + 1] = n.im;
+    return INSIDE;
+  };
   return {
     opticsAt,
-    reachAt: () => INSIDE,
-    indexAt(vacuum_um, _air_um, out, at) {
-      const { n } = opticsAt(vacuum_um);
-      out[at] = n.re;
-      out[at + 1] = n.im;
-      return INSIDE;
+    indexAt,
+    indexBlock(waves, count, n) {
+      for (let i = 0; i < count; i++) n[i] = opticsAt(waves, i).n.re;
+      return count;
     },
+    reachAt: () => INSIDE,
     refusalAt: () => undefined,
   };
 }
@@ -63,45 +70,63 @@ export function bindMaterial(
   const all = axes.flat();
 
   /** The axis that is meant when none is named is the first that has a fit at the wave. */
-  const choose = (vacuum_um: number, air_um: number): BoundFit | undefined => {
-    for (const fits of axes) {
-      const best = bestFit(fits, vacuum_um, air_um);
+  const inside = (waves: Waves, i: number): BoundFit | undefined => {
+    for (let a = 0; a < axes.length; a++) {
+      const best = bestFit(axes[a]!, waves, i);
       if (best) return best;
     }
     return undefined;
   };
-  const nearest = (wave: FitWave): BoundFit | undefined => {
+  const nearest = ({ vacuum_um, air_um }: Waves, i: number): BoundFit | undefined => {
     const first = axes[0]?.[0]?.fit.axis;
+    const wave: FitWave = { vacuum_um: vacuum_um[i]!, air_um: air_um[i]! };
     const choice =
       first && chooseFit(material, first, wave, (fit) => fitPreference(fit, material, wave, conditions));
     return choice && all.find((c) => c.fit === choice.fit);
   };
+
   const mu = new Float64Array(2);
   const index = new Float64Array(2);
+  const indexAt: BoundMedium['indexAt'] = (waves, i, out, at) => {
+    const within = inside(waves, i);
+    const used = within ?? (extrapolate ? nearest(waves, i) : undefined);
+    if (!used) return REFUSED;
+    used.evaluate(waves, i, out, at);
+    if (!Number.isFinite(out[at]!)) return REFUSED;
+    if (within) return INSIDE;
+    return isPassiveIndex(out[at]!, out[at + 1]!) ? EXTRAPOLATED : REFUSED;
+  };
+  const [only] = all;
   return {
-    indexAt(vacuum_um, air_um, out, at) {
-      const inside = choose(vacuum_um, air_um);
-      const used = inside ?? (extrapolate ? nearest({ vacuum_um, air_um }) : undefined);
-      if (!used) return REFUSED;
-      used.evaluate(vacuum_um, air_um, out, at);
-      if (!Number.isFinite(out[at]!)) return REFUSED;
-      if (inside) return INSIDE;
-      return isPassiveIndex(out[at]!, out[at + 1]!) ? EXTRAPOLATED : REFUSED;
+    indexAt,
+    indexBlock(waves, count, n) {
+      let answered = 0;
+      if (only && all.length === 1) {
+        while (answered < count && reaches(only, waves, answered)) answered++;
+        only.indexBlock(waves, answered, n);
+        for (let i = 0; i < answered; i++) if (!Number.isFinite(n[i]!)) return i;
+        if (answered > 0 || !extrapolate) return answered;
+      }
+      for (; answered < count; answered++) {
+        if (indexAt(waves, answered, index, 0) === REFUSED) break;
+        n[answered] = index[0]!;
+      }
+      return answered;
     },
-    reachAt(vacuum_um, air_um) {
-      if (axes.some((fits) => fits.some((fit) => reaches(fit, vacuum_um, air_um)))) return INSIDE;
+    reachAt(waves, i) {
+      for (let f = 0; f < all.length; f++) if (reaches(all[f]!, waves, i)) return INSIDE;
       return extrapolate && axes.length > 0 ? EXTRAPOLATED : REFUSED;
     },
-    opticsAt(vacuum_um, air_um) {
-      const inside = choose(vacuum_um, air_um);
-      const used = inside ?? (extrapolate ? nearest({ vacuum_um, air_um }) : undefined);
+    opticsAt(waves, i) {
+      const within = inside(waves, i);
+      const used = within ?? (extrapolate ? nearest(waves, i) : undefined);
       if (!used) return undefined;
-      used.evaluate(vacuum_um, air_um, index, 0);
-      if (!Number.isFinite(index[0]!) || !(inside || isPassiveIndex(index[0]!, index[1]!))) return undefined;
+      used.evaluate(waves, i, index, 0);
+      if (!Number.isFinite(index[0]!) || !(within || isPassiveIndex(index[0]!, index[1]!))) return undefined;
       const n = { re: index[0]!, im: index[1]! };
       const { permeability } = used.model();
       if (!permeability) return opticsFromIndex(n, ONE);
-      permeability(used.inAir ? air_um : vacuum_um, mu);
+      permeability(used.inAir ? waves.air_um[i]! : waves.vacuum_um[i]!, mu);
       return opticsFromIndex(n, { re: mu[0]!, im: mu[1]! });
     },
     refusalAt(wave) {
