@@ -1,0 +1,183 @@
+/** Multilayers: published values by the command line. Each row carries its source; see `one-shot-rows.ts`. */
+import { checkOneShot, number } from './one-shot-rows.ts';
+
+checkOneShot('Multilayers', [
+  {
+    id: 'hr-dbr-bw',
+    quantity: 'stop band of 2.5/1.5 quarter-wave stack at 630 nm',
+    unit: 'nm',
+    wanted: 200,
+    tolerance: 5,
+    toleranceBasis: 'widened: source says about',
+    source: 'encyclopaedia article on distributed Bragg reflectors (about 200 nm)',
+    kind: 'published',
+    fromMemory: false,
+    note: 'the figure is the relative width in frequency times the wavelength; the edges in wavelength lie 208 nm apart',
+    got: async ({ coat }) =>
+      630 *
+      number(
+        (await coat('vacuum n=1.5 630nm --films n=1.5 --high n=2.5 --low n=1.5')).mirror?.stopBand
+          ?.relativeWidth,
+      ),
+  },
+  {
+    id: 'hr-zns-cryolite-0',
+    quantity: 'air|(HL)^0 H|glass, H=2.3 L=1.35 glass 1.52, normal',
+    unit: '%',
+    wanted: 30.6,
+    tolerance: 0.06,
+    toleranceBasis: 'numerical or printed digits',
+    source: 'formula of Born & Wolf 1.6.5 / Macleod; indices of the classic ZnS/cryolite stack',
+    kind: 'exact',
+    fromMemory: true,
+    got: async ({ answer }) => 100 * (await answer('vacuum n=2.3@qw n=1.52 1um')).interface.R,
+  },
+  {
+    id: 'hr-zns-cryolite-2',
+    quantity: 'air|(HL)^2 H|glass, H=2.3 L=1.35 glass 1.52, normal',
+    unit: '%',
+    wanted: 87.2,
+    tolerance: 0.06,
+    toleranceBasis: 'numerical or printed digits',
+    source: 'formula of Born & Wolf 1.6.5 / Macleod; indices of the classic ZnS/cryolite stack',
+    kind: 'exact',
+    fromMemory: true,
+    got: async ({ answer }) =>
+      100 * (await answer('vacuum 2x: n=2.3@qw n=1.35@qw : n=2.3@qw n=1.52 1um')).interface.R,
+  },
+  {
+    id: 'hr-zns-cryolite-4',
+    quantity: 'air|(HL)^4 H|glass, H=2.3 L=1.35 glass 1.52, normal',
+    unit: '%',
+    wanted: 98.4,
+    tolerance: 0.06,
+    toleranceBasis: 'numerical or printed digits',
+    source: 'formula of Born & Wolf 1.6.5 / Macleod; indices of the classic ZnS/cryolite stack',
+    kind: 'exact',
+    fromMemory: true,
+    got: async ({ answer }) =>
+      100 * (await answer('vacuum 4x: n=2.3@qw n=1.35@qw : n=2.3@qw n=1.52 1um')).interface.R,
+  },
+  {
+    id: 'hr-pedrotti',
+    quantity: 'six double layers SiO2 1.46 / ZnS 2.35 on 1.48',
+    unit: '%',
+    wanted: 99.1,
+    tolerance: 0.05,
+    toleranceBasis: 'half a unit of the last printed digit',
+    source: 'Pedrotti, Introduction to Optics, multilayer chapter example (99.1 %)',
+    kind: 'published',
+    fromMemory: true,
+    got: async ({ answer }) =>
+      100 * (await answer('vacuum 6x: n=2.35@qw n=1.46@qw : n=1.48 1um')).interface.R,
+  },
+  {
+    id: 'ml-al-2',
+    quantity: 'aluminium 0.82+5.99i with one quarter-wave pair: air|2.35|1.38|Al',
+    unit: '%',
+    wanted: 96.9,
+    tolerance: 0.07,
+    toleranceBasis: 'widened: printed digits plus rounding of n, k',
+    source: 'Macleod, Thin-Film Optical Filters, enhanced metal mirrors (96.9 %)',
+    kind: 'published',
+    fromMemory: true,
+    got: async ({ answer }) =>
+      100 * (await answer('vacuum 1x: n=2.35@qw n=1.38@qw : n=0.82+5.99i 550nm')).interface.R,
+  },
+  {
+    id: 'ml-al-4',
+    quantity: 'same with two pairs',
+    unit: '%',
+    wanted: 99,
+    tolerance: 0.5,
+    toleranceBasis: 'half a unit of the last printed digit',
+    source: 'Macleod (99 %)',
+    kind: 'published',
+    fromMemory: true,
+    got: async ({ answer }) =>
+      100 * (await answer('vacuum 2x: n=2.35@qw n=1.38@qw : n=0.82+5.99i 550nm')).interface.R,
+  },
+  {
+    id: 'ml-wolt-R',
+    quantity: 'reflectance of a free-standing film with sheet resistance Z0/2 (thin, long wavelength)',
+    unit: '%',
+    wanted: 25.0,
+    tolerance: 0.001,
+    toleranceBasis: 'half a unit of the last printed digit',
+    source: 'Woltersdorff, Z. Phys. 91, 230 (1934); Am. J. Phys. 60, 257 (1992)',
+    kind: 'published',
+    fromMemory: false,
+    note: 'a film of 1 nm and 5.308841e6 S/m has 188.365 ohm per square',
+    got: async ({ answer }) => 100 * (await answer('vacuum eps=1,sigma=5308841@1nm vacuum 1GHz')).interface.R,
+  },
+  {
+    id: 'ml-wolt-A',
+    quantity: 'absorptance of that film',
+    unit: '%',
+    wanted: 50.0,
+    tolerance: 0.001,
+    toleranceBasis: 'half a unit of the last printed digit',
+    source: 'Woltersdorff 1934',
+    kind: 'published',
+    fromMemory: false,
+    got: async ({ answer }) =>
+      100 * number((await answer('vacuum eps=1,sigma=5308841@1nm vacuum 1GHz')).stack?.A),
+  },
+  {
+    id: 'ml-salisbury',
+    quantity: 'Salisbury screen: Z0 sheet, quarter-wave spacer, perfect mirror: reflectance',
+    unit: '1',
+    wanted: 0.0,
+    tolerance: 1e-6,
+    toleranceBasis: 'numerical or printed digits',
+    source: 'Salisbury 1952',
+    kind: 'exact',
+    fromMemory: true,
+    note: 'a film of 1 nm and 2.654421e6 S/m has 376.73 ohm per square; 1e18 S/m stands for the perfect mirror',
+    got: async ({ answer }) =>
+      (await answer('vacuum eps=1,sigma=2654421@1nm n=1@qw eps=1,sigma=1e18 1GHz')).interface.R,
+  },
+  {
+    id: 'ml-halfwave',
+    quantity: 'half-wave film of any index is absent',
+    unit: '%',
+    wanted: 4.258,
+    tolerance: 0.0005,
+    toleranceBasis: 'numerical or printed digits',
+    source: 'Hecht 9.7',
+    kind: 'exact',
+    fromMemory: true,
+    got: async ({ answer }) => 100 * (await answer('vacuum n=2.1@hw n=1.52 1um')).interface.R,
+  },
+  {
+    id: 'ml-stand',
+    quantity: '|E|^2/|E_in|^2 at the surface of a quarter-wave HR stack (H outermost)',
+    unit: '1',
+    wanted: 0.0,
+    tolerance: 1e-6,
+    toleranceBasis: 'numerical or printed digits',
+    source: 'node at the surface because r = -1',
+    kind: 'exact',
+    fromMemory: true,
+    got: async ({ answer }) =>
+      number(
+        (
+          await answer('vacuum 20x: n=2.25@qw n=1.45@qw : n=1.5 1um --field-profile')
+        ).stack?.fieldProfile?.findLast((p) => p.layer === 0)?.intensity,
+      ),
+  },
+  {
+    id: 'ml-reverse',
+    quantity: 'T of an absorbing stack from both sides is equal (difference)',
+    unit: '1',
+    wanted: 0.0,
+    tolerance: 1e-12,
+    toleranceBasis: 'numerical or printed digits',
+    source: 'reciprocity',
+    kind: 'exact',
+    fromMemory: true,
+    got: async ({ answer }) =>
+      number((await answer('vacuum n=2@70nm n=1.5+0.3i@50nm n=1.5 600nm')).stack?.T) -
+      number((await answer('n=1.5 n=1.5+0.3i@50nm n=2@70nm vacuum 600nm')).stack?.T),
+  },
+]);
