@@ -16,8 +16,12 @@ export function readCriteria(
   catalogue: IndexedCatalogue,
 ): Criteria | Refusal {
   const classes = classesOf(catalogue);
-  const typed = readOperands(operands.join(' '), classes);
-  if (isRefusal(typed)) return typed;
+  const read = readOperands(operands.join(' '), classes);
+  if (isRefusal(read)) return read;
+  // A wavelength among the conditions is one in air too where the option says so.
+  const wave = read.wave && readWave(read.wave.text, options);
+  if (isRefusal(wave)) return wave;
+  const typed: Criteria = wave ? { ...read, wave } : read;
   const stated = readOptions(options, classes);
   if (isRefusal(stated)) return stated;
   const twice = givenTwice(typed, stated);

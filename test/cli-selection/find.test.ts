@@ -51,6 +51,13 @@ describe('halfspace find', () => {
     expect(twice.hits).toEqual(once.hits);
   });
 
+  it('takes a wave among the conditions for one in air where told to, like that of --at', async () => {
+    const nOf = async (command: string) => JSON.parse((await run(line(command))).out).hits[0].n;
+    const inAir = await nOf('find n-bk7 at 400nm --air-wavelength --json');
+    expect(inAir).toBe(await nOf('find n-bk7 --at 400nm --air-wavelength --json'));
+    expect(inAir).not.toBe(await nOf('find n-bk7 at 400nm --json'));
+  });
+
   it('says what was left out for want of data', async () => {
     const { out } = await run(line('find --at 10.6um --n 1.2..1.6'));
     expect(out.replace(/\s+/g, ' ')).toMatch(
