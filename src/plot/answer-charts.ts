@@ -6,7 +6,7 @@ import type { IndexCurve } from '../answer/index-curve.ts';
 import type { WaveCurve } from '../answer/wave-curve.ts';
 import { degreesText } from '../present/interface-rows.ts';
 import { mediumTitle } from '../present/question-line.ts';
-import { METRE, prefixedSymbol } from '../units/display-unit.ts';
+import { DEGREE, METRE, prefixedSymbol } from '../units/display-unit.ts';
 import { columnPrefix, formatQuantity } from '../units/format-quantity.ts';
 import { SCREEN } from '../units/number-style.ts';
 import type { Chart, ChartMark, ChartSeries } from './chart.ts';
@@ -34,6 +34,13 @@ const waveText = (answer: Answer): string =>
   formatQuantity(Number(answer.wave.vacuumWavelength_m.toPrecision(6)), METRE, 'shortest');
 
 const degrees = (angle_rad: number): string => degreesText(Number(angle_rad.toPrecision(12)), 2, SCREEN);
+
+/** As it was given. */
+const givenDegrees = (angle_rad: number): string =>
+  formatQuantity(Number((angle_rad * PER_RADIAN).toPrecision(9)), DEGREE, 'shortest');
+
+const incidenceText = ({ geometry: { incidenceAngle_rad } }: Answer): string =>
+  incidenceAngle_rad === 0 ? 'normal incidence' : givenDegrees(incidenceAngle_rad);
 
 export function angleChart(answer: Answer, curve: AngleCurve): Chart {
   const x = curve.angle_rad.map((a) => a * PER_RADIAN);
@@ -64,7 +71,7 @@ function angleMarks({ interface: surface, geometry }: Answer): readonly ChartMar
     ...mark(brewster, 'Brewster'),
     ...(brewster === null ? mark(pseudo, 'pseudo-Brewster') : []),
     ...mark(critical, 'critical'),
-    ...(here > 0 ? mark(here, 'here') : []),
+    ...(here > 0 ? [{ x: here * PER_RADIAN, label: `here ${givenDegrees(here)}` }] : []),
   ];
 }
 
@@ -83,7 +90,7 @@ export function powerChart(answer: Answer, curve: WaveCurve, quantity: WaveQuant
   const isPath = answer.layers.length > 0;
   const absorbs = isPath && A.some((value) => value > LEAST_ABSORPTANCE);
   return {
-    title: `${isPath ? 'Powers' : 'Reflectance'} of ${shortPath(answer)} at ${degrees(answer.geometry.incidenceAngle_rad)}`,
+    title: `${isPath ? 'Powers' : 'Reflectance'} of ${shortPath(answer)} at ${incidenceText(answer)}`,
     x: axis.chart,
     y: { label: isPath ? 'share of the incident power' : 'reflectance', unit: '%', scale: 'linear' },
     series: [one('R', curve.R), ...(isPath ? [one('T', curve.T)] : []), ...(absorbs ? [one('A', A)] : [])],
@@ -141,10 +148,11 @@ export function fieldChart(answer: Answer, curve: FieldCurve): Chart {
           { position_m: faces[last]?.position_m ?? 0, name: 'last face' },
         ];
   const series: ChartSeries[] = [];
-  if (curve.s) series.push({ label: 's', x, y: curve.s });
-  if (curve.p) series.push({ label: 'p', x, y: curve.p });
+  const isOne = curve.s !== null && answer.geometry.incidenceAngle_rad === 0;
+  if (curve.s) series.push({ label: isOne ? 's, p' : 's', x, y: curve.s });
+  if (curve.p && !isOne) series.push({ label: 'p', x, y: curve.p });
   return {
-    title: `Field through ${shortPath(answer)} at ${waveText(answer)}, ${degrees(answer.geometry.incidenceAngle_rad)}`,
+    title: `Field through ${shortPath(answer)} at ${waveText(answer)}, ${incidenceText(answer)}`,
     x: { label: 'depth behind the first face', unit: prefixedSymbol(METRE, prefix), scale: 'linear' },
     y: { label: '|E|² over that of the incident wave', unit: '', scale: 'linear' },
     series,
