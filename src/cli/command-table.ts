@@ -91,7 +91,7 @@ export const SCREEN_OPTIONS = [
 ] as const satisfies readonly OptionKey[];
 
 const MEDIUM =
-  'a key, name, alias, formula or glass code, any case; KEY:AXIS for a crystal axis; or numbers: n=1.5, n=1.5+0.02i, eps=9.8, eps=2.1,tand=0.0003, eps=4,sigma=0.01';
+  'a key, name, alias, formula or glass code, any case; KEY:AXIS for a crystal axis; or numbers: n=1.5, n=1.5+0.02i, no=1.658,ne=1.486, eps=9.8, eps=2.1,tand=0.0003, eps=4,sigma=0.01';
 
 export const COMMANDS = [
   {

@@ -3,12 +3,14 @@ import type { Answer } from '../../answer/answer.ts';
 import { beamDetailRows, nonlinearRows, pulsedBeamRows } from '../../present/beam-rows.ts';
 import { crystalRows } from '../../present/crystal-rows.ts';
 import { beamRows, waveEnergyRows } from '../../present/energy-rows.ts';
+import { fieldRows } from '../../present/field-rows.ts';
 import { interfaceRows } from '../../present/interface-rows.ts';
 import { mediumRows } from '../../present/medium-rows.ts';
 import { pairRows } from '../../present/pair-rows.ts';
 import { mediumTitle, questionLine, waveAliases } from '../../present/question-line.ts';
 import type { PresentStyle } from '../../present/shown.ts';
 import { conditionsText, fitLine } from '../../present/source-lines.ts';
+import { spreadRows } from '../../present/spread-rows.ts';
 import { layerText, layerTitle, pulseRows, stackRows, windowRows } from '../../present/stack-rows.ts';
 import { toAscii } from '../../units/to-ascii.ts';
 
@@ -37,7 +39,9 @@ export function renderMarkdown(answer: Answer, style: PresentStyle): string {
     ...layers.map((l, i) => row([`layer ${layerTitle(l, i + 1)}`, layerText(l, style)].map(cell))),
     ...[
       ...interfaceRows(answer, style),
+      ...spreadRows(answer, style),
       ...stackRows(answer, style),
+      ...fieldRows(answer, style),
       ...windowRows(answer, style),
       ...crystalRows(answer.crystal, style),
       ...pulseRows(answer, style),

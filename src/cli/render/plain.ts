@@ -3,11 +3,13 @@ import type { Answer } from '../../answer/answer.ts';
 import { beamDetailRows, nonlinearRows, pulsedBeamRows } from '../../present/beam-rows.ts';
 import { crystalRows } from '../../present/crystal-rows.ts';
 import { beamRows, waveEnergyRows } from '../../present/energy-rows.ts';
+import { fieldRows } from '../../present/field-rows.ts';
 import { interfaceRows } from '../../present/interface-rows.ts';
 import { mediumRows } from '../../present/medium-rows.ts';
 import { mediumTitle, questionLine } from '../../present/question-line.ts';
 import type { PresentStyle, Shown } from '../../present/shown.ts';
 import { fitLine } from '../../present/source-lines.ts';
+import { spreadRows } from '../../present/spread-rows.ts';
 import { layerText, pulseRows, stackRows, windowRows } from '../../present/stack-rows.ts';
 import { toAscii } from '../../units/to-ascii.ts';
 
@@ -21,7 +23,9 @@ export function renderPlain(answer: Answer, style: PresentStyle): string {
     ...part('into', mediumRows(answer.into, lambda, style)),
     ...answer.layers.map((l, i) => `layer.${i + 1}\t${layerText(l, style)}\t${mediumTitle(l.medium)}`),
     ...part('interface', interfaceRows(answer, style)),
+    ...part('spread', spreadRows(answer, style)),
     ...part('stack', stackRows(answer, style)),
+    ...part('field', fieldRows(answer, style)),
     ...part('window', windowRows(answer, style)),
     ...part('crystal', crystalRows(answer.crystal, style)),
     ...part('pulse', pulseRows(answer, style)),

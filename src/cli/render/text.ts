@@ -6,6 +6,7 @@ import type { Answer, Caution, LayerAnswer, MediumAnswer } from '../../answer/an
 import { beamDetailRows, nonlinearRows, pulsedBeamRows } from '../../present/beam-rows.ts';
 import { crystalRows } from '../../present/crystal-rows.ts';
 import { beamRows, waveEnergyRows } from '../../present/energy-rows.ts';
+import { fieldRows } from '../../present/field-rows.ts';
 import { interfaceRows } from '../../present/interface-rows.ts';
 import { type LayerRun, layerRuns } from '../../present/layer-runs.ts';
 import { mediumRows } from '../../present/medium-rows.ts';
@@ -13,6 +14,7 @@ import { pairRows } from '../../present/pair-rows.ts';
 import { mediumTitle, questionLine, waveAliases } from '../../present/question-line.ts';
 import type { PresentStyle, Shown } from '../../present/shown.ts';
 import { conditionsText, fitLine, GRADE_WORDS } from '../../present/source-lines.ts';
+import { spreadRows } from '../../present/spread-rows.ts';
 import {
   layerText,
   layerTitle,
@@ -37,7 +39,10 @@ export function renderText(answer: Answer, style: PresentStyle): string {
     '',
     ...layerSection(answer, style),
     answer.layers.length > 0 ? 'Path' : 'Interface',
-    ...[...interfaceRows(answer, style), ...stackRows(answer, style)].flatMap(oneValue),
+    ...[...interfaceRows(answer, style), ...spreadRows(answer, style), ...stackRows(answer, style)].flatMap(
+      oneValue,
+    ),
+    ...section('Field through the path', fieldRows(answer, style)),
     ...section('Window', windowRows(answer, style)),
     ...section('Crystal', crystalRows(answer.crystal, style)),
     ...section('Pulse', pulseRows(answer, style)),
