@@ -17,7 +17,7 @@ const MAY_IMPORT: Readonly<Record<string, readonly string[]>> = {
   stack: ['interface', 'units', 'num'],
   answer: ['cite', 'medium', 'stack', 'interface', 'catalog', 'dispersion', 'units', 'num'],
   selection: ['answer', 'cite', 'medium', 'stack', 'interface', 'catalog', 'dispersion', 'units', 'num'],
-  present: ['selection', 'answer', 'medium', 'catalog', 'units', 'num'],
+  present: ['selection', 'answer', 'cite', 'medium', 'stack', 'catalog', 'dispersion', 'units', 'num'],
   batch: ['present', 'answer', 'medium', 'interface', 'catalog', 'dispersion', 'units', 'num'],
   plot: ['present', 'answer', 'units', 'num'],
   record: ['present', 'answer', 'cite', 'medium', 'catalog', 'dispersion', 'units', 'num'],

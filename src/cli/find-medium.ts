@@ -19,6 +19,7 @@ export function findMedium(text: string, catalogue: IndexedCatalogue): MediumSpe
       ? refuse('bad-literal-medium', 2, literal.message, literal.remedy)
       : { kind: 'literal', literal, text: text.trim() };
   }
+  if (text.trim() === '') return refuse('empty-medium', 2, 'a medium is empty', NO_MATCH);
   const lookup = catalogue.lookup(text);
   switch (lookup.kind) {
     case 'one':

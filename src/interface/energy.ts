@@ -8,11 +8,7 @@
  * (Jackson 6.8). Sources: Jackson 6.7-6.8, 7.1-7.3; Born & Wolf 1.4.
  */
 import { abs, abs2, type Complex, div } from '../num/complex.ts';
-import {
-  SPEED_OF_LIGHT_m_per_s as c,
-  PLANCK_J_s,
-  VACUUM_IMPEDANCE_ohm as Z0,
-} from '../units/constants.ts';
+import { SPEED_OF_LIGHT_m_per_s as c, PLANCK_J_s, VACUUM_IMPEDANCE_ohm as Z0 } from '../units/constants.ts';
 import type { FresnelResult } from './fresnel.ts';
 import type { Optics } from './optics.ts';
 

@@ -164,7 +164,15 @@ function optionText(r: Random, key: OptionKey): readonly string[] {
 }
 
 /** These touch files, the clock or the terminal: other targets and tests look after them. */
-const OUTSIDE: ReadonlySet<string> = new Set(['catalog', 'output', 'log', 'log-file', 'svg', 'help', 'version']);
+const OUTSIDE: ReadonlySet<string> = new Set([
+  'catalog',
+  'output',
+  'log',
+  'log-file',
+  'svg',
+  'help',
+  'version',
+]);
 const COMMANDS_INSIDE = COMMANDS.filter(({ name }) =>
   [
     'answer',
