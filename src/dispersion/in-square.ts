@@ -19,7 +19,13 @@ export interface SquareForm {
   readonly falling: Float64Array;
 }
 
-/** Splits power terms in L into an offset, rising and falling powers of L^2; undefined where a power is odd or fractional. */
+/** No published formula goes beyond 12; a list as long as any power typed would have no end. */
+const HIGHEST_POWER = 40;
+
+/**
+ * Splits power terms in L into an offset, rising and falling powers of L^2; undefined where a power is odd, fractional or so
+ * high that it is no polynomial of use.
+ */
 export function splitEven(
   terms: readonly PowerTerm[],
 ): Pick<SquareForm, 'offset' | 'rising' | 'falling'> | undefined {
@@ -27,7 +33,7 @@ export function splitEven(
   const rising: number[] = [];
   const falling: number[] = [];
   for (const { c, power } of terms) {
-    if (power % 2 !== 0) return undefined;
+    if (power % 2 !== 0 || Math.abs(power) > HIGHEST_POWER) return undefined;
     if (power === 0) offset += c;
     else {
       const list = power > 0 ? rising : falling;
