@@ -43,6 +43,13 @@ function mediumEcho(medium: MediumSpec): JsonObject {
     : toPlainObject({ literal: medium.literal, text: medium.text });
 }
 
+/** True where a medium of the question is an entry of the person's own. */
+export function usesOwnEntries({ from, layers, into }: Question): boolean {
+  return [from, ...layers.map(({ medium }) => medium), into].some(
+    (medium) => medium.kind === 'catalogue' && medium.material.own === true,
+  );
+}
+
 const HASH_DIGITS = 12;
 
 function contentHash(material: Material): string {

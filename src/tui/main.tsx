@@ -30,6 +30,8 @@ export interface TuiOptions {
   readonly linear?: boolean | undefined;
   readonly color?: ColorChoice | undefined;
   readonly noColor?: boolean | undefined;
+  readonly catalog?: string | undefined;
+  readonly logFile?: string | undefined;
 }
 
 /** What the program around it provides. */
@@ -37,6 +39,9 @@ export interface TuiHost {
   readonly env: Environment;
   readonly catalogue: () => IndexedCatalogue;
   readonly readLayers: LayerReader;
+  readonly version: string;
+  /** The time, with the offset of local time in minutes east of UTC. */
+  readonly clock: () => { readonly now_ms: number; readonly offset_min: number };
   /** To standard error, before the screen is taken over. */
   readonly warn: (text: string) => void;
 }
@@ -50,6 +55,9 @@ export interface Start {
   /** What was wrong with the settings; one line each. */
   readonly problems: readonly string[];
   readonly preferences: Preferences;
+  /** Folder of own entries and logbook, where they were named. */
+  readonly catalogFolder: string | undefined;
+  readonly logFile: string | undefined;
 }
 
 const INTERRUPTED = 130;
@@ -78,6 +86,8 @@ function readStart(options: TuiOptions, host: TuiHost): Start {
     settingsFolder: folder,
     canWriteSettings: file.problem === undefined,
     problems: all,
+    catalogFolder: options.catalog,
+    logFile: options.logFile,
     preferences: {
       glyphs: decideGlyphs(host.env, asked),
       colour: decideColor({

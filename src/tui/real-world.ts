@@ -36,6 +36,7 @@ export function realWorld(
   catalogue: IndexedCatalogue,
   bindings: Bindings,
   readLayers: LayerReader,
+  record: World['record'],
   onReady: () => void,
 ): RealWorld {
   const tables = new IndexTables(onReady);
@@ -61,6 +62,7 @@ export function realWorld(
     lookup: (name) => catalogue.lookup(name),
     material: (key) => catalogue.material(key),
     source: sourceOf,
+    record,
     readLayers: (text) => {
       const words = text.trim().split(/\s+/);
       const read = readLayers(words, catalogue);

@@ -1,5 +1,7 @@
 /** Puts the picture on the terminal: state, keys, effects, settings, tied to Ink. */
 import { render } from 'ink';
+import { isRefusal } from '../medium/refusal.ts';
+import type { LogRecord } from '../record/record.ts';
 import type { CellWriter, ScreenSize } from '../term/cell-writer.ts';
 import { copyText } from '../term/clipboard.ts';
 import type { TerminalGuard } from '../term/guard.ts';
@@ -7,6 +9,7 @@ import type { KeyStream } from '../term/key-stream.ts';
 import { App } from './components/app.tsx';
 import { firstState } from './first-state.ts';
 import { bindKeys } from './keys/bindings.ts';
+import { keptText, Logbook } from './logbook.ts';
 import type { Start } from './main.tsx';
 import { realWorld } from './real-world.ts';
 import { KeptSettings } from './settings/kept-settings.ts';
@@ -28,8 +31,13 @@ export async function showPicture(start: Start, terminal: Terminal): Promise<num
   const { guard, writer, keys, size } = terminal;
   const catalogue = start.host.catalogue();
   const { bindings, problems } = bindKeys(start.settings.keys);
-  const world = realWorld(catalogue, bindings, start.host.readLayers, () =>
-    store.dispatch({ kind: 'ready' }),
+  const logbook = new Logbook(start);
+  const world = realWorld(
+    catalogue,
+    bindings,
+    start.host.readLayers,
+    (question, answer) => logbook.record(question, answer),
+    () => store.dispatch({ kind: 'ready' }),
   );
   const first = firstState(start, size(), world, problems);
   const kept = new KeptSettings(
@@ -43,6 +51,9 @@ export async function showPicture(start: Start, terminal: Terminal): Promise<num
     switch (effect.kind) {
       case 'copy':
         void copy(effect.text);
+        return;
+      case 'keep':
+        keep(effect.record);
         return;
       case 'suspend':
         guard.suspend();
@@ -59,6 +70,12 @@ export async function showPicture(start: Start, terminal: Terminal): Promise<num
     const { message } = await copyText(text, { env: start.host.env, write });
     const shown = text.includes('\n') ? '' : `${text}.  `;
     store.dispatch({ kind: 'message', message: { tone: 'said', text: `${shown}${message}` } });
+  };
+  const keep = (record: LogRecord): void => {
+    const outcome = logbook.keep(record);
+    const text = keptText(record, outcome);
+    if (isRefusal(outcome)) store.dispatch({ kind: 'unkept', record, text });
+    else store.dispatch({ kind: 'message', message: { tone: 'said', text } });
   };
   const quit = async (status: number): Promise<void> => {
     world.stop();

@@ -5,6 +5,7 @@
 import type { Answer } from '../answer/answer.ts';
 import type { Question } from '../answer/question.ts';
 import { isRefusal, type Refusal } from '../medium/refusal.ts';
+import type { LogRecord } from '../record/record.ts';
 import type { GlyphLevel } from '../term/ability.ts';
 import type { ScreenSize } from '../term/cell-writer.ts';
 import type { FieldId } from './fields/field.ts';
@@ -91,6 +92,8 @@ export interface State {
 /** What the outside world has to do after an update. */
 export type Effect =
   | { readonly kind: 'copy'; readonly text: string }
+  /** Put it into the logbook and say what came of that. */
+  | { readonly kind: 'keep'; readonly record: LogRecord }
   | { readonly kind: 'quit'; readonly status: number }
   | { readonly kind: 'suspend' }
   | { readonly kind: 'redraw' };

@@ -11,6 +11,7 @@ import type { Material, Source } from '../catalog/types.ts';
 import type { Conditions } from '../dispersion/evaluator.ts';
 import type { Optics } from '../interface/optics.ts';
 import type { Refusal } from '../medium/refusal.ts';
+import type { LogRecord } from '../record/record.ts';
 import type { Criteria } from '../selection/criteria.ts';
 import type { FindResult } from '../selection/find-materials.ts';
 import type { Survey } from '../selection/survey.ts';
@@ -30,6 +31,8 @@ export interface World {
   lookup(name: string): Lookup;
   material(key: string): Material | undefined;
   source(id: string): Source | undefined;
+  /** The answer as the logbook would keep it at this moment. */
+  record(question: Question, answer: Answer): LogRecord;
   /** Layers as typed, in the words of the command line. */
   readLayers(text: string): readonly Layer[] | Problem;
   /** Optical constants at equal ratios over a range; undefined while they are being worked out. */

@@ -20,6 +20,8 @@ afterEach(() => log.remove());
 const SAY_NOTHING_OF_THE_ANSWER: readonly OptionKey[] = [
   ...(['log', 'logFile', 'output', 'quiet', 'color', 'noColor', 'noInput', 'catalog', 'svg'] as const),
   ...(['help', 'version'] as const),
+  // Of many questions at once, which are not logged.
+  ...(['sweeps', 'columns', 'digits'] as const),
 ];
 
 /** Between them every option of a question. */

@@ -19,7 +19,7 @@ function checkFrame(lines: readonly string[], columns: number, rows: number): vo
 }
 
 function checkText(lines: readonly string[]): void {
-  expect(lines.join('\n')).not.toMatch(/NaN|undefined|Infinity|\[object|-0(?![.\d])/);
+  expect(lines.join('\n')).not.toMatch(/NaN|undefined|Infinity|\[object|(?<!\d)-0(?![.\d])/);
 }
 
 const SIZES = [

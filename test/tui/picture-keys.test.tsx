@@ -394,9 +394,10 @@ describe('copying', () => {
     open().type('Y');
     const [effect] = stage.effects;
     const text = effect?.kind === 'copy' ? effect.text : '';
-    expect(text).toContain('Air → Fused silica');
+    expect(text).toMatch(/^halfspace record [0-9a-f]{12}, /);
     expect(text).toContain('Malitson');
-    expect(await stage.text()).toContain('reflectance: R = ');
+    expect(text).toContain('halfspace air fused-silica 632.8nm');
+    expect(await stage.text()).toContain('halfspace record ');
   });
 });
 

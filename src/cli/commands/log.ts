@@ -1,6 +1,7 @@
 /** `halfspace log`: the logbook. One action a file in ../logbook; here it is decided which, and what is said of the file. */
 import { isRefusal, type Refusal, refuse } from '../../medium/refusal.ts';
 import { findRecord, type RecordEntry } from '../../record/logbook.ts';
+import { placeOfLogbook } from '../../record/logbook-place.ts';
 import { harmless } from '../../record/record-parts.ts';
 import { toAscii } from '../../units/to-ascii.ts';
 import type { Invocation } from '../arguments.ts';
@@ -8,7 +9,6 @@ import type { Command, Context, ExitStatus } from '../context.ts';
 import { listRecords } from '../logbook/list-records.ts';
 import { type LogAction, type LogActionName, readLogAction } from '../logbook/log-action.ts';
 import { Outlet } from '../logbook/outlet.ts';
-import { placeOfLogbook } from '../logbook/place.ts';
 import { emptyLogbook, Reading } from '../logbook/reading.ts';
 import { oneRecord, recordForm } from '../logbook/record-forms.ts';
 import { rerunRecords } from '../logbook/rerun-records.ts';

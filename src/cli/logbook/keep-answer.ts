@@ -3,10 +3,12 @@
  * record is shown, so that nothing is lost.
  */
 import type { Answer } from '../../answer/answer.ts';
-import type { MediumSpec, Question } from '../../answer/question.ts';
+import type { Question } from '../../answer/question.ts';
 import { isRefusal, type Refusal } from '../../medium/refusal.ts';
 import { answerRecord } from '../../record/answer-record.ts';
 import { keepRecord } from '../../record/logbook.ts';
+import { placeOfLogbook } from '../../record/logbook-place.ts';
+import { usesOwnEntries } from '../../record/question-echo.ts';
 import type { LogRecord } from '../../record/record.ts';
 import { recordMarkdown } from '../../record/record-markdown.ts';
 import { harmless } from '../../record/record-parts.ts';
@@ -15,7 +17,6 @@ import { timeStamp } from '../../record/time-stamp.ts';
 import type { Invocation } from '../arguments.ts';
 import type { Context, ExitStatus } from '../context.ts';
 import { reportRefusal } from '../report-refusal.ts';
-import { placeOfLogbook } from './place.ts';
 import { recordedCommand } from './recorded-command.ts';
 
 /** 0 where the record is kept, else the status of the trouble. The answer itself is written already. */
@@ -49,13 +50,8 @@ export function recordOf(
     time: timeStamp({ sinceEpoch_ms: now_ms, utcOffset_min: offset_min }),
     version: context.version,
     catalogue: { hash: catalogue.hash, date: catalogue.date },
-    commandWords: recordedCommand(invocation, context, catalogue, usesOwn(question)),
+    commandWords: recordedCommand(invocation, context, catalogue, usesOwnEntries(question)),
   });
-}
-
-function usesOwn({ from, layers, into }: Question): boolean {
-  const isOwn = (medium: MediumSpec): boolean => medium.kind === 'catalogue' && medium.material.own === true;
-  return isOwn(from) || isOwn(into) || layers.some((layer) => isOwn(layer.medium));
 }
 
 /**

@@ -1,4 +1,5 @@
 /** The words of the linear layout. */
+import type { LogRecord } from '../../record/record.ts';
 import { answerOf, askAnew, redo, refusalOf, type State, undo } from '../state.ts';
 import { setAngle, swapMedia } from '../update/question-changes.ts';
 import type { World } from '../world.ts';
@@ -14,7 +15,15 @@ import {
 export interface Command {
   readonly words: readonly string[];
   readonly help: string;
-  readonly run: (state: State, world: World) => { readonly state: State; readonly lines: readonly string[] };
+  readonly run: (
+    state: State,
+    world: World,
+  ) => {
+    readonly state: State;
+    readonly lines: readonly string[];
+    /** To be put into the logbook. */
+    readonly keep?: LogRecord;
+  };
 }
 
 const read = (
@@ -56,6 +65,16 @@ export const COMMANDS: readonly Command[] = [
   read(['second', 'm2'], 'all results of the second medium', (s) => mediumLines(s, 'into')),
   read(['sources', 's'], 'where the numbers come from', sourcesSpoken),
   read(['cautions', '!'], 'all cautions', cautionsSpoken),
+  {
+    words: ['log'],
+    help: 'keep the answer in the logbook; halfspace log shows what is there',
+    run: (state, world) => {
+      const answer = answerOf(state);
+      return answer
+        ? { state, lines: [], keep: world.record(state.question, answer) }
+        : { state, lines: ['there is no answer to keep yet'] };
+    },
+  },
   change(['swap', 'x'], 'swap the two media', (s, w) => askAnew(s, swapMedia(s.question), w)),
   change(['brewster', 'B'], 'go to the Brewster angle', (s, w) => {
     const surface = answerOf(s)?.interface;

@@ -3,8 +3,13 @@
  * placed and no mode is switched, so a screen reader reads everything once and in order.
  */
 import { createInterface } from 'node:readline';
+import { isRefusal, type Refusal } from '../../medium/refusal.ts';
+import type { Confirmed } from '../../record/logbook-file.ts';
+import type { LogRecord } from '../../record/record.ts';
+import { recordText } from '../../record/record-text.ts';
 import { firstState } from '../first-state.ts';
 import { bindKeys } from '../keys/bindings.ts';
+import { keptText, Logbook } from '../logbook.ts';
 import type { Start } from '../main.tsx';
 import { realWorld } from '../real-world.ts';
 import { KeptSettings } from '../settings/kept-settings.ts';
@@ -16,10 +21,12 @@ const INTERRUPTED = 130;
 const SIZE = { columns: 80, rows: 24 } as const;
 
 export async function runLinear(start: Start): Promise<number> {
+  const logbook = new Logbook(start);
   const world = realWorld(
     start.host.catalogue(),
     bindKeys(start.settings.keys).bindings,
     start.host.readLayers,
+    (question, answer) => logbook.record(question, answer),
     () => {},
   );
   await world.loadSearch();
@@ -46,8 +53,9 @@ export async function runLinear(start: Start): Promise<number> {
       write('\n');
       end(INTERRUPTED);
     };
-    const tell = ({ session, lines: said, isOver }: Reply): void => {
+    const tell = ({ session, lines: said, keep, isOver }: Reply): void => {
       write(said.map((line) => `${line}\n`).join(''));
+      if (keep) write(keptLines(keep, logbook.keep(keep)));
       current = session;
       kept.follow(session.state);
       if (isOver) end(0);
@@ -60,4 +68,10 @@ export async function runLinear(start: Start): Promise<number> {
     lines.on('close', () => end(0));
     tell(begin);
   });
+}
+
+/** A record that could not be kept is read out, so that nothing is lost. */
+function keptLines(record: LogRecord, outcome: Confirmed | Refusal): string {
+  const said = `${keptText(record, outcome)}\n`;
+  return isRefusal(outcome) ? recordText(record) + said : said;
 }

@@ -3,6 +3,7 @@
  * At every point a number picks from what was read out last, a word is a command or a value, an empty line keeps what is.
  */
 import type { MediumSpec } from '../../answer/question.ts';
+import type { LogRecord } from '../../record/record.ts';
 import { isProblem, problemText } from '../../units/problem.ts';
 import type { Field } from '../fields/field.ts';
 import { type Side, setMedium } from '../fields/medium-fields.ts';
@@ -25,6 +26,8 @@ export interface Session {
 export interface Reply {
   readonly session: Session;
   readonly lines: readonly string[];
+  /** To be put into the logbook. */
+  readonly keep?: LogRecord;
   /** The conversation is over. */
   readonly isOver?: boolean;
 }
@@ -74,7 +77,7 @@ function takeCommand(state: State, text: string, world: World): Reply {
   if (command) {
     if (command.words.includes('quit')) return { ...say(state, ['bye']), isOver: true };
     const done = command.run(state, world);
-    return say(done.state, done.lines);
+    return { ...say(done.state, done.lines), ...(done.keep && { keep: done.keep }) };
   }
   const named = fields.find((f) => f.id === word || f.label === word);
   if (named) {

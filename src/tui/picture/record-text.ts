@@ -1,15 +1,10 @@
-/**
- * The answer as plain lines of text, "label = value" (for the clipboard, and read aloud in the linear layout). Every number
- * is the one on screen.
- */
+/** The parts of an answer as plain lines of text, "label = value" (for the clipboard, and read aloud in the linear layout). */
 import type { Answer, MediumAnswer } from '../../answer/answer.ts';
 import { beamRows, waveEnergyRows } from '../../present/energy-rows.ts';
 import { interfaceRows } from '../../present/interface-rows.ts';
 import { mediumRows } from '../../present/medium-rows.ts';
-import { mediumTitle, questionLine } from '../../present/question-line.ts';
 import type { Shown } from '../../present/shown.ts';
 import type { NumberStyle } from '../../units/number-style.ts';
-import { toAscii } from '../../units/to-ascii.ts';
 
 const line = (q: Shown): string => `${q.symbol} = ${q.text}`;
 
@@ -35,21 +30,4 @@ export function mediumLines(medium: MediumAnswer, answer: Answer, style: NumberS
 
 export function sourceLine(medium: MediumAnswer): string {
   return medium.fit ? medium.fit.source.text : 'given by its numbers';
-}
-
-/** The whole answer, a section a part, with cautions and sources. */
-export function recordText(answer: Answer, style: NumberStyle): string {
-  const indent = (lines: readonly string[]): readonly string[] => lines.map((l) => `  ${l}`);
-  const lines = [
-    questionLine(answer, style),
-    'surface',
-    ...indent(surfaceLines(answer, style)),
-    ...(['from', 'into'] as const).flatMap((side) => [
-      `${side} ${mediumTitle(answer[side])}`,
-      ...indent(mediumLines(answer[side], answer, style)),
-      ...indent([`data: ${sourceLine(answer[side])}`]),
-    ]),
-    ...(answer.cautions.length === 0 ? [] : ['cautions', ...indent(answer.cautions.map((c) => c.text))]),
-  ];
-  return lines.map((l) => (style.ascii ? toAscii(l) : l)).join('\n');
 }

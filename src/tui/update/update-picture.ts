@@ -1,5 +1,6 @@
 /** What keys do while nothing is being typed: moving about, stepping values, asking another question. */
 import { axesOf } from '../../catalog/choose-fit.ts';
+import { recordText } from '../../record/record-text.ts';
 import { fieldById } from '../fields/all-fields.ts';
 import type { FieldId } from '../fields/field.ts';
 import type { Side } from '../fields/medium-fields.ts';
@@ -8,7 +9,7 @@ import { insertText } from '../line-edit.ts';
 import { leaveWords, moveFocus, moveToEnd, moveToField } from '../moves.ts';
 import { focusItem } from '../picture/notice.ts';
 import { pageText } from '../picture/pages.ts';
-import { recordText, resultText } from '../picture/record-text.ts';
+import { resultText } from '../picture/record-text.ts';
 import {
   answerOf,
   askAnew,
@@ -82,6 +83,7 @@ const ACTS: Readonly<Partial<Record<ActionId, Act>>> = {
 export function actInPicture(state: State, action: ActionId, world: World): Updated {
   if (action === 'quit') return { state, effects: [{ kind: 'quit', status: 0 }] };
   if (action === 'copy' || action === 'copy-record') return copy(state, action, world);
+  if (action === 'log') return keep(state, world);
   const act = ACTS[action];
   return { state: act ? act(state, world) : state, effects: [] };
 }
@@ -186,6 +188,16 @@ function nextGlyphs(state: State): State {
   };
 }
 
+/** What came of it is said by the one who keeps it. */
+function keep(state: State, world: World): Updated {
+  const answer = answerOf(state);
+  if (!answer) return { state: refuse(state, 'there is no answer to keep yet'), effects: [] };
+  return {
+    state: quiet(state),
+    effects: [{ kind: 'keep', record: world.record(state.question, answer) }],
+  };
+}
+
 /** Pages that are copied as they stand. */
 const REPORTS: readonly PageName[] = ['coatings', 'order', 'compare'];
 
@@ -201,7 +213,7 @@ function copy(state: State, action: 'copy' | 'copy-record', world: World): Updat
   const text = page
     ? pageText(state, page, world)
     : isWhole
-      ? recordText(answer, style)
+      ? recordText(world.record(state.question, answer), style).trimEnd()
       : item
         ? item.copy
         : resultText(answer, style);

@@ -2,13 +2,15 @@
  * The reducer: a state and an event in, the next state and what the outside has to do out. Pure; everything it needs to
  * know of the rest of the program comes with the world.
  */
+import type { LogRecord } from '../../record/record.ts';
+import { recordText } from '../../record/record-text.ts';
 import type { ScreenSize } from '../../term/cell-writer.ts';
 import { isTextKey, type Key, keyChord } from '../../term/key.ts';
 import type { Message, State, Updated } from '../state.ts';
 import type { World } from '../world.ts';
 import { contextOf } from './context.ts';
 import { actInEntry, pasteInEntry, typeInEntry } from './update-entry.ts';
-import { actOnPage, pasteInFilter, typeInFilter } from './update-page.ts';
+import { actOnPage, openPage, pasteInFilter, typeInFilter } from './update-page.ts';
 import { actInPicture, typeInPicture, typeOnField } from './update-picture.ts';
 import { actInSearch, pasteInSearch, typeInSearch } from './update-search.ts';
 
@@ -17,6 +19,8 @@ export type Event =
   | { readonly kind: 'paste'; readonly text: string }
   | { readonly kind: 'resize'; readonly size: ScreenSize }
   | { readonly kind: 'message'; readonly message: Message }
+  /** A record could not be kept: it is shown, so that it can be taken by hand. */
+  | { readonly kind: 'unkept'; readonly record: LogRecord; readonly text: string }
   /** Something the picture waits for has been worked out. */
   | { readonly kind: 'ready' };
 
@@ -30,6 +34,8 @@ export function update(state: State, event: Event, world: World): Updated {
       return plain(sameSize(state.size, event.size) ? state : { ...state, size: event.size });
     case 'message':
       return plain({ ...state, message: event.message });
+    case 'unkept':
+      return plain(showUnkept(state, event.record, event.text));
     case 'ready':
       return plain({ ...state });
   }
@@ -37,6 +43,12 @@ export function update(state: State, event: Event, world: World): Updated {
 
 export function plain(state: State): Updated {
   return { state, effects: [] };
+}
+
+function showUnkept(state: State, record: LogRecord, text: string): State {
+  const copied = recordText(record, { ascii: state.preferences.glyphs === 'ascii' }).trimEnd();
+  const shown = state.page?.name === 'copied' ? state : openPage(state, 'copied');
+  return { ...shown, copied, message: { tone: 'refused', text: `${text}; the record is above` } };
 }
 
 const sameSize = (a: ScreenSize, b: ScreenSize): boolean => a.columns === b.columns && a.rows === b.rows;

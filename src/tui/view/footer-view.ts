@@ -8,7 +8,7 @@ import type { World } from '../world.ts';
 import { lineOfSpans, type Pen, type Span, span, spansWidth } from './pen.ts';
 
 const FOOTERS: Readonly<Record<Context, readonly ActionId[]>> = {
-  picture: ['go-from', 'go-into', 'go-wave', 'go-angle', 'polarization'],
+  picture: ['go-from', 'go-into', 'go-wave', 'go-angle', 'log'],
   entry: ['take', 'take-next', 'cancel', 'kill-to-start'],
   search: ['down', 'take', 'cancel', 'kill-to-start'],
   page: ['down', 'page-down', 'search', 'back'],

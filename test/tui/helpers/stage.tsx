@@ -9,6 +9,8 @@ import { makeQuestion, type Question } from '../../../src/answer/question.ts';
 import { catalogueFromSources } from '../../../src/catalog/from-sources.ts';
 import { makeSearch } from '../../../src/catalog/search.ts';
 import { isUnread, readLayers } from '../../../src/cli/read-path.ts';
+import { answerRecord } from '../../../src/record/answer-record.ts';
+import { questionWords } from '../../../src/record/question-words.ts';
 import { charKey, type Key, type KeyName, namedKey } from '../../../src/term/key.ts';
 import { designCoatings } from '../../../src/tui/coating-designs.ts';
 import { App } from '../../../src/tui/components/app.tsx';
@@ -51,6 +53,13 @@ export function testWorld(): World {
     lookup: (name) => catalogue.lookup(name),
     material: (key) => catalogue.material(key),
     source: (id) => catalogue.source(id),
+    record: (question, answer) =>
+      answerRecord(question, answer, {
+        time: '2026-03-14T09:26:53+01:00',
+        version: '0.1.0',
+        catalogue: { hash: catalogue.hash, date: catalogue.date },
+        commandWords: questionWords(question),
+      }),
     readLayers: (text) => {
       const read = readLayers(text.trim().split(/\s+/), catalogue);
       return isUnread(read) ? problem('not-a-medium', read.refusal.message, read.refusal.remedy) : read;

@@ -1,7 +1,7 @@
 /** Where the logbook of this run is: the file named, else the one of the person. */
 import { homedir } from 'node:os';
-import type { Refusal } from '../../medium/refusal.ts';
-import { type LogbookPlace, logbookPlace } from '../../record/logbook-path.ts';
+import type { Refusal } from '../medium/refusal.ts';
+import { type LogbookPlace, logbookPlace } from './logbook-path.ts';
 
 export function placeOfLogbook(
   env: Readonly<Record<string, string | undefined>>,
