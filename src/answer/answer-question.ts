@@ -75,7 +75,7 @@ export function answerQuestion(question: Question, sourceOf: SourceOf): Answer |
     indexUncertainty(media[i] as ThermalSide, question, stated);
 
   return {
-    wave: waveAnswer(wave, question.wave.inAir),
+    wave: waveAnswer(wave, question.wave),
     geometry: { incidenceAngle_rad, polarization },
     from: { ...from.answer, n_uncertainty: nUncertainty(0, question.tolerances.indexFrom) },
     into: { ...into.answer, n_uncertainty: nUncertainty(media.length - 1, question.tolerances.index) },

@@ -69,7 +69,7 @@ export function coatingReport(asked: CoatAsked, sourceOf: SourceOf): CoatingRepo
   if (isRefusal(mirror)) return mirror;
   const bare = fresnel(from.optics, into.optics, incidenceAngle_rad);
   return {
-    wave: waveAnswer(wave, question.wave.inAir),
+    wave: waveAnswer(wave, question.wave),
     geometry: { incidenceAngle_rad, polarization },
     from: from.answer,
     into: into.answer,

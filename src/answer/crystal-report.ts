@@ -187,7 +187,7 @@ function commonPart(
       .map((n) => wordCaution(n, side === from ? 'from' : 'crystal', side.name)),
   );
   return {
-    wave: waveAnswer(wave, question.wave.inAir),
+    wave: waveAnswer(wave, question.wave),
     incidenceAngle_rad: question.incidenceAngle_rad,
     from: from.answer,
     key: first?.answer.key ?? null,

@@ -24,6 +24,11 @@ export function bothReferences(spec: WaveSpec): FitWave | Refusal {
     : { vacuum_um: um, air_um: vacuumToAir_um(um) };
 }
 
-export function waveAnswer(wave: FitWave, givenInAir: boolean): Answer['wave'] {
-  return { ...waveMeasures(wave.vacuum_um * 1e-6), airWavelength_m: wave.air_um * 1e-6, givenInAir };
+/** The wavelength given comes back to the last bit; the other one is exact up to rounding. */
+export function waveAnswer(wave: FitWave, { wavelength_m, inAir }: WaveSpec): Answer['wave'] {
+  return {
+    ...waveMeasures(inAir ? wave.vacuum_um / 1e6 : wavelength_m),
+    airWavelength_m: inAir ? wavelength_m : wave.air_um / 1e6,
+    givenInAir: inAir,
+  };
 }
