@@ -63,6 +63,7 @@ function lazyParts(parts: Map<string, string>): Plugin {
  * than to run. With the command line that fills the cache.
  */
 const ALONE: ReadonlyMap<string, readonly string[]> = new Map([
+  ['cli-commands-sweep', ['air', 'n-bk7', '--sweep', 'wave=400nm..700nm:1nm', '-o', '/dev/null']],
   ['cli-commands-stream', ['stream', '--from', 'air', '--into', 'n-bk7', '-o', '/dev/null', '{rows}']],
 ]);
 

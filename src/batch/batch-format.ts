@@ -21,6 +21,11 @@ export interface BatchSetup {
   readonly passedOn: (names: readonly string[]) => void;
 }
 
+/** Names of what is added behind the answers. */
+export const OUTSIDE_COLUMN = 'outside';
+export const ERROR_COLUMN = 'error';
+export const ANSWER_KEY = 'answer';
+
 /** More rows may be at hand; or more bytes are needed. */
 export type Step = 'more' | 'hungry';
 

@@ -3,7 +3,7 @@
  * which is empty where the row was answered. The separator is that of the header: comma, tab or semicolon.
  */
 import type { BatchFormat, BatchSetup, Step } from './batch-format.ts';
-import { rowMessage } from './batch-format.ts';
+import { ERROR_COLUMN, OUTSIDE_COLUMN, rowMessage } from './batch-format.ts';
 import { scanDecimal } from './decimal-bytes.ts';
 import { type Header, readHeader } from './header.ts';
 import { PlainRows } from './plain-rows.ts';
@@ -14,9 +14,6 @@ import { LONGEST_ROW, quotedField, RowReader, type RowTrouble } from './row-read
 
 const LF = 10;
 const QUOTE = 34;
-
-export const OUTSIDE_COLUMN = 'outside';
-export const ERROR_COLUMN = 'error';
 
 export class CsvBatch implements BatchFormat {
   rows = 0;

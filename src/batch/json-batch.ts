@@ -2,16 +2,23 @@
  * Batches as JSON lines: one object a row, its keys named as the columns of a header are. Each comes back as it was, with the
  * answers behind its own keys and `error`, which is null where the row was answered. Objects need not have the same keys.
  */
-import { type BatchFormat, type BatchSetup, rowMessage, type Step } from './batch-format.ts';
-import { ERROR_COLUMN, OUTSIDE_COLUMN } from './csv-batch.ts';
+import {
+  ANSWER_KEY,
+  type BatchFormat,
+  type BatchSetup,
+  ERROR_COLUMN,
+  OUTSIDE_COLUMN,
+  rowMessage,
+  type Step,
+} from './batch-format.ts';
 import { readHeader } from './header.ts';
 import { LineReader } from './line-reader.ts';
 import { type Trouble, trouble } from './question-column.ts';
 import { RowAnswers } from './row-answers.ts';
+import { finite } from './row-form.ts';
 import type { Cells } from './row-layout.ts';
 
 const LF = 10;
-export const ANSWER_KEY = 'answer';
 /** Sets of keys whose meaning is kept. */
 const MOST_SHAPES = 64;
 
@@ -152,9 +159,6 @@ export class JsonBatch implements BatchFormat {
     writer.byte(LF);
   }
 }
-
-const finite = (_: string, value: unknown): unknown =>
-  typeof value === 'number' && !Number.isFinite(value) ? null : value;
 
 function parseRow(text: string): { readonly object: Row } | { readonly trouble: Trouble } {
   try {

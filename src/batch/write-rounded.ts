@@ -61,7 +61,8 @@ function allZero(out: Uint8Array, start: number, end: number): boolean {
   return true;
 }
 
-function roundedText(x: number, digits: number): string {
+/** The same as a string. */
+export function roundedText(x: number, digits: number): string {
   const d = roundToDigits(decimalOf(x), digits);
   const place = x === 0 ? 0 : leadingPlace(d);
   if (x === 0) return digits === 1 ? '0' : `0.${'0'.repeat(digits - 1)}`;

@@ -62,10 +62,20 @@ export function parseArguments(argv: readonly string[]): ParsedArguments {
 
   const operands = named === undefined ? read.operands : read.operands.slice(1);
   if (command === 'help') return helpTopic(operands, failed);
-  const arity = checkOperands(operands, command, named);
+  const swept = options.values.sweeps?.some(({ name }) => SWEPT_WAVE.includes(name.toLowerCase())) === true;
+  const arity = checkOperands(operands, command, named, swept);
   if (arity) return failed(arity);
   return { kind: 'run', invocation: { command, operands, options: options.values, given: read.given } };
 }
+
+/** What a sweep of the wave may be called. */
+export const SWEPT_WAVE: readonly string[] = [
+  'wave',
+  'wavelength',
+  'frequency',
+  'wavenumber',
+  'photon-energy',
+];
 
 function isScreenOption(key: OptionKey): boolean {
   return SCREEN_OPTIONS.some((k) => k === key);
@@ -152,8 +162,9 @@ function checkOperands(
   operands: readonly string[],
   command: CommandName,
   named: CommandName | undefined,
+  waveIsSwept: boolean,
 ): UsageError | undefined {
-  const specs = commandSpec(command).operands;
+  const specs = commandSpec(command).operands.filter((spec) => !(spec.unlessSwept && waveIsSwept));
   const required = specs.filter((spec) => !spec.optional);
   const most = specs.some((spec) => spec.many) ? Infinity : specs.length;
   if (operands.length >= required.length && operands.length <= most) return undefined;

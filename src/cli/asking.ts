@@ -4,38 +4,38 @@
  */
 import type { Answer } from '../answer/answer.ts';
 import { answerQuestion } from '../answer/answer-question.ts';
+import type { MediumSpec } from '../answer/question.ts';
+import { type AnswerColumn, answerColumns, DEFAULT_COLUMNS, keysOf } from '../batch/answer-columns.ts';
 import type { Asking, QuestionColumn, RowOptions } from '../batch/question-column.ts';
+import { axesOf } from '../catalog/choose-fit.ts';
 import type { IndexedCatalogue } from '../catalog/entries.ts';
 import { isRefusal, type Refusal, refuse } from '../medium/refusal.ts';
 import { choiceParser } from '../units/parse-choice.ts';
 import { parseWave } from '../units/parse-wave.ts';
 import { isProblem, type Problem } from '../units/problem.ts';
-import { findClash } from './arguments.ts';
-import { optionsOf, UNNAMED_COMMAND } from './command-table.ts';
+import { findClash, SWEPT_WAVE } from './arguments.ts';
+import { BEAM_OPTIONS, PATH_OPTIONS, QUESTION_OPTIONS, UNNAMED_COMMAND } from './command-table.ts';
 import { findMedium } from './find-medium.ts';
 import { nearest } from './nearest.ts';
-import type { OptionGroup, OptionSpec } from './option-spec.ts';
+import type { OptionSpec } from './option-spec.ts';
 import { type OptionKey, type OptionValues, optionSpec } from './options.ts';
 import { readQuestion } from './read-question.ts';
 
 /** Options of a question that mean nothing row by row. */
 const NOT_BY_ROW: readonly OptionKey[] = ['catalog', 'fieldProfile'];
 
-const OTHER_GROUPS: readonly OptionGroup[] = ['form', 'output', 'batch', 'general'];
-
 const ALIASES: Readonly<Record<string, readonly string[]>> = {
-  wave: ['wavelength', 'frequency', 'wavenumber', 'photon-energy'],
+  wave: SWEPT_WAVE.slice(1),
   polarization: ['polarization', 'polarisation'],
   angle_rad: ['angle-of-incidence', 'incidence'],
 };
 
-/** Options of a question, and so columns: all that do not say in which form the answer comes. */
-export function rowOptionKeys(): readonly OptionKey[] {
-  return optionsOf(UNNAMED_COMMAND).filter((key) => {
-    const { group, everywhere } = optionSpec(key);
-    return !everywhere && !OTHER_GROUPS.includes(group) && !NOT_BY_ROW.includes(key);
-  });
-}
+/** Options of a question, and so columns. */
+export const ROW_OPTION_KEYS: readonly OptionKey[] = [
+  ...QUESTION_OPTIONS,
+  ...PATH_OPTIONS,
+  ...BEAM_OPTIONS,
+].filter((key) => !NOT_BY_ROW.some((other) => other === key));
 
 export function questionColumns(): readonly QuestionColumn[] {
   const text = (key: string): QuestionColumn => ({
@@ -46,8 +46,8 @@ export function questionColumns(): readonly QuestionColumn[] {
     unitNames: '',
     parse: (cell) => cell,
   });
-  const wave: QuestionColumn = { ...text('wave'), ...units((cell) => parseWave(cell)) };
-  return [text('from'), text('into'), text('path'), wave, ...rowOptionKeys().map(optionColumn)];
+  const wave: QuestionColumn = { ...text('wave'), ...units(readWave), parse: readWave };
+  return [text('from'), text('into'), text('path'), wave, ...ROW_OPTION_KEYS.map(optionColumn)];
 }
 
 function optionColumn(key: OptionKey): QuestionColumn {
@@ -55,6 +55,8 @@ function optionColumn(key: OptionKey): QuestionColumn {
   const parse = spec.kind === 'flag' ? parseTruth : spec.parse;
   return { key, name: spec.name, aliases: ALIASES[key] ?? [], ...units(parse), parse };
 }
+
+const readWave = (cell: string): unknown => parseWave(cell);
 
 /** A unit is one that the parser takes behind a number. */
 function units(parse: (cell: string) => unknown): Pick<QuestionColumn, 'unit' | 'unitNames'> {
@@ -80,7 +82,20 @@ function parseTruth(cell: string): true | undefined | Problem {
   return word === 'true' || word === 'yes' || word === '1' ? true : undefined;
 }
 
-export function makeAsking(catalogue: IndexedCatalogue): Asking {
+/** `assumed` is told once of each medium whose axis the rows leave open. */
+export function makeAsking(
+  catalogue: IndexedCatalogue,
+  assumed: (sentence: string) => void = () => undefined,
+): Asking {
+  const told = new Set<string>();
+  const tellAxis = (medium: MediumSpec): void => {
+    if (medium.kind !== 'catalogue' || medium.axis !== undefined) return;
+    const { key } = medium.material;
+    const [first = '', ...others] = axesOf(medium.material);
+    if (others.length === 0 || told.has(key)) return;
+    told.add(key);
+    assumed(`${key} names no axis: ${first} is taken (also: ${others.join(', ')}); write ${key}:${first}`);
+  };
   // The search for names close to an unknown one takes longer than an answer, and such a name comes again.
   const unknown = new Map<string, Refusal>();
   return {
@@ -88,7 +103,9 @@ export function makeAsking(catalogue: IndexedCatalogue): Asking {
     nearest,
     medium(text) {
       const medium = findMedium(text, catalogue);
-      return isRefusal(medium) ? undefined : medium;
+      if (isRefusal(medium)) return undefined;
+      tellAxis(medium);
+      return medium;
     },
     answer(operands, options) {
       const path = operands.slice(0, -1).join('\n');
@@ -105,7 +122,10 @@ export function makeAsking(catalogue: IndexedCatalogue): Asking {
           return refusal;
         });
       }
-      return isRefusal(question) ? question : answerQuestion(question, (id) => catalogue.source(id));
+      if (isRefusal(question)) return question;
+      for (const medium of [question.from, ...question.layers.map((l) => l.medium), question.into])
+        tellAxis(medium);
+      return answerQuestion(question, (id) => catalogue.source(id));
     },
   };
 }
@@ -132,4 +152,21 @@ export function sampleAnswers(asking: Asking): readonly Answer[] {
     const answer = asking.answer(operands, options);
     return answer instanceof Promise || isRefusal(answer) ? [] : [answer];
   });
+}
+
+/** The answer columns that `--columns` names. */
+export function columnsAsked(typed: string | undefined, asking: Asking): readonly AnswerColumn[] | Refusal {
+  const columns = answerColumns(
+    typed ?? DEFAULT_COLUMNS.join(','),
+    () => keysOf(sampleAnswers(asking)),
+    asking.nearest,
+  );
+  return 'code' in columns ? refuse(columns.code, 2, columns.message, columns.remedy) : columns;
+}
+
+/** Options of the command line that hold for every row. */
+export function fixedOptions(options: OptionValues): RowOptions {
+  return Object.fromEntries(
+    ROW_OPTION_KEYS.flatMap((key) => (options[key] === undefined ? [] : [[key, options[key]]])),
+  );
 }

@@ -1,5 +1,6 @@
 /** Rows of the table of options for many questions at once: the batch stream, and sweeps of one question. */
 import { DEFAULT_COLUMNS, SHORT_NAMES } from '../batch/answer-columns.ts';
+import { parseSweep, type SweepRange } from '../batch/sweep-range.ts';
 import { MOST_SIGNIFICANT } from '../batch/write-rounded.ts';
 import { parseWave } from '../units/parse-wave.ts';
 import { isProblem, type Problem, problem } from '../units/problem.ts';
@@ -39,6 +40,18 @@ export const BATCH_OPTION_ROWS = {
     parse: (text: string): string | Problem => {
       const wave = parseWave(text);
       return isProblem(wave) ? wave : text;
+    },
+  }),
+  sweeps: value({
+    name: 'sweep',
+    placeholder: 'NAME=A..B:STEP',
+    meaning:
+      'the question at every point of a range: angle=0..89:1, wave=400nm..700nm:5nm (in place of WAVE), temperature=20C..80C:5C, thickness1=50nm..200nm:1nm; twice for a grid; as CSV unless --json, --markdown or --plain is given',
+    group: 'batch',
+    repeatable: true,
+    parse(text: string): readonly SweepRange[] | Problem {
+      const sweep = parseSweep(text);
+      return isProblem(sweep) ? sweep : [sweep];
     },
   }),
   columns: value({

@@ -2,7 +2,7 @@
  * Files and pipes as chunks of bytes, for batches: read ahead and written behind in the background, in order, whole. A pipe
  * that is full or empty for a moment is asked again; a reader that has gone is told, not thrown.
  */
-import { close, fstatSync, open, read, write } from 'node:fs';
+import { close, constants, fstatSync, ftruncateSync, open, read, statSync, write } from 'node:fs';
 import { promisify } from 'node:util';
 import type { ByteSink, ByteSource } from '../batch/run-batch.ts';
 
@@ -23,20 +23,24 @@ export async function openInput(path: string): Promise<OpenFile> {
   return opened(await openFile(path, 'r'));
 }
 
-/** `-` is standard output, which stays open. Throws the error of the system. */
+/** `-` is standard output, which stays open. A file keeps what it holds until `emptyFile`. Throws the error of the system. */
 export async function openOutput(path: string): Promise<OpenFile> {
   if (path === '-') return { descriptor: 1, close: () => Promise.resolve() };
-  return opened(await openFile(path, 'w'));
+  return opened(await openFile(path, constants.O_WRONLY | constants.O_CREAT, 0o666));
 }
 
 const opened = (descriptor: number): OpenFile => ({ descriptor, close: () => closeFile(descriptor) });
 
-/** What two names have in common where they name one file. */
-export function fileIdentity(descriptor: number): string | undefined {
-  const { dev, ino, isFile } = ((s) => ({ dev: s.dev, ino: s.ino, isFile: s.isFile() }))(
-    fstatSync(descriptor),
-  );
-  return isFile ? `${dev}:${ino}` : undefined;
+/** Takes out what the file holds; a pipe or a device has nothing to take. */
+export function emptyFile(descriptor: number): void {
+  if (fstatSync(descriptor).isFile()) ftruncateSync(descriptor, 0);
+}
+
+/** True where the input is the very file that is open for writing; a path that names no file is none. */
+export function isSameFile(path: string, descriptor: number): boolean {
+  const input = path === '-' ? fstatSync(0) : statSync(path, { throwIfNoEntry: false });
+  const output = fstatSync(descriptor);
+  return input?.isFile() === true && output.isFile() && input.dev === output.dev && input.ino === output.ino;
 }
 
 export function byteSource(descriptor: number): ByteSource {

@@ -16,6 +16,8 @@ export interface OperandSpec {
   readonly optional?: true;
   /** May be repeated. */
   readonly many?: true;
+  /** The wave, which is left out where it is swept. */
+  readonly unlessSwept?: true;
   readonly completes?: 'medium' | 'command' | 'file' | readonly string[];
 }
 
@@ -109,13 +111,20 @@ export const COMMANDS = [
         completes: 'medium',
       },
       { name: 'INTO', meaning: 'medium beyond', completes: 'medium' },
-      { name: 'WAVE', meaning: '633nm, 10.6um, 474THz, 10GHz, 1.96eV, 15800cm-1, d-line' },
+      {
+        name: 'WAVE',
+        meaning: '633nm, 10.6um, 474THz, 10GHz, 1.96eV, 15800cm-1, d-line',
+        unlessSwept: true,
+      },
     ],
     options: [
       ...QUESTION_OPTIONS,
       ...PATH_OPTIONS,
       ...BEAM_OPTIONS,
       ...FORM_OPTIONS,
+      'sweeps',
+      'columns',
+      'digits',
       'plot',
       'span',
       'svg',
@@ -132,6 +141,7 @@ export const COMMANDS = [
       { line: 'air magnesium-fluoride-film@qw n-bk7 550nm', meaning: 'a quarter-wave film' },
       { line: 'air fused-silica@5mm air 800nm --pulse 30fs', meaning: 'a window, and what a pulse suffers' },
       { line: 'air 8x: n=2.3@qw n=1.46@qw : n-bk7 633nm', meaning: 'a mirror of eight pairs' },
+      { line: 'air n-bk7 --sweep wave=400nm..700nm:5nm', meaning: 'a table over the wave, as CSV' },
       { line: 'n-bk7 air 633nm --plot angle', meaning: 'a chart: R_s and R_p over the angle' },
     ],
   },

@@ -18,6 +18,9 @@ import { reportRefusal } from '../report-refusal.ts';
 /** Only the search for close names is asynchronous: an answer costs no turn of the event loop. */
 export const run: Command = (invocation, context) => {
   const { operands, options } = invocation;
+  if (options.sweeps || options.columns !== undefined || options.digits !== undefined) {
+    return import('./sweep.ts').then((sweep) => sweep.run(invocation, context));
+  }
   const catalogue = context.catalogue();
   const question = readQuestion(operands, options, catalogue);
   if (question instanceof Promise) return question.then((refusal) => reportRefusal(refusal, context));
