@@ -1,7 +1,7 @@
 /** Powers over the angle of incidence, from the normal to grazing or over a part of that. */
 import type { Answer } from './answer.ts';
 import type { CurvePath } from './curve-path.ts';
-import { pointCount, spacedPoints, withPoints } from './curve-points.ts';
+import { MOST_POINTS, type PointLimits, pointCount, spacedPoints, withPoints } from './curve-points.ts';
 
 export interface AngleCurve {
   readonly kind: 'angle';
@@ -16,7 +16,7 @@ export interface AngleCurve {
 
 const RIGHT_ANGLE_rad = Math.PI / 2;
 /** Quarters of a degree. */
-const LEAST_POINTS = 361;
+const LIMITS: PointLimits = { least: 361, most: MOST_POINTS };
 /** R meets 1 at the critical angle with an upright tangent: points crowd there. */
 const BESIDE_rad = [1e-7, 1e-6, 1e-5, 1e-4, 3e-4, 1e-3, 2e-3];
 
@@ -24,10 +24,11 @@ export function angleCurve(
   path: CurvePath,
   answer: Answer,
   [low_rad, high_rad]: readonly [number, number] = [0, RIGHT_ANGLE_rad],
+  limits = LIMITS,
 ): AngleCurve {
   const { brewsterAngle_rad, pseudoBrewsterAngle_rad, criticalAngle_rad } = answer.interface;
   const orders = (2 * path.coherentLength_m) / path.wavelength_m;
-  const { count, isTooFine } = pointCount(orders * fringesAcross(low_rad, high_rad), LEAST_POINTS);
+  const { count, isTooFine } = pointCount(orders * fringesAcross(low_rad, high_rad), limits);
   const beside =
     criticalAngle_rad === null
       ? []

@@ -2,7 +2,13 @@
 
 /** Points a fringe needs to look like one. */
 const POINTS_PER_FRINGE = 24;
-const MOST_POINTS = 6000;
+export const MOST_POINTS = 6000;
+
+/** How many points a picture is worth. */
+export interface PointLimits {
+  readonly least: number;
+  readonly most: number;
+}
 
 export interface PointCount {
   readonly count: number;
@@ -11,9 +17,9 @@ export interface PointCount {
 }
 
 /** @param fringes how many of them the span holds */
-export function pointCount(fringes: number, least: number): PointCount {
+export function pointCount(fringes: number, { least, most }: PointLimits): PointCount {
   const wanted = Math.ceil(POINTS_PER_FRINGE * fringes) + 1;
-  return { count: Math.max(least, Math.min(MOST_POINTS, wanted)), isTooFine: wanted > 4 * MOST_POINTS };
+  return { count: Math.max(least, Math.min(most, wanted)), isTooFine: wanted > 4 * most };
 }
 
 /** Evenly spaced, both ends exact; by equal ratios where asked. */

@@ -4,7 +4,7 @@
  */
 import { INSIDE } from '../medium/bound-medium.ts';
 import { type CurveMedium, type CurvePath, isCovered } from './curve-path.ts';
-import { pointCount, spacedPoints, withPoints } from './curve-points.ts';
+import { MOST_POINTS, type PointLimits, pointCount, spacedPoints, withPoints } from './curve-points.ts';
 import { powerOf } from './interface-answer.ts';
 
 export type Span_m = readonly [number, number];
@@ -29,7 +29,7 @@ export interface WaveCurve {
   readonly isTooFine: boolean;
 }
 
-const LEAST_POINTS = 481;
+const LIMITS: PointLimits = { least: 481, most: MOST_POINTS };
 /** Two octaves to either side of the octave that the wave is in: the span stays while the wave is stepped. */
 const OCTAVES = 2;
 /** Wider spans are shown by equal ratios. */
@@ -37,12 +37,12 @@ const LINEAR_UP_TO = 4;
 const REACH_POINTS = 400;
 const HALVINGS = 60;
 
-export function waveCurve(path: CurvePath, span_m: Span_m = usualSpan(path)): WaveCurve {
+export function waveCurve(path: CurvePath, span_m: Span_m = usualSpan(path), limits = LIMITS): WaveCurve {
   const [low, high] = span_m;
   const { polarization, incidenceAngle_rad } = path.question;
   const byRatio = high / low > LINEAR_UP_TO;
   const fringes = 2 * path.coherentLength_m * (1 / low - 1 / high);
-  const { count, isTooFine } = pointCount(fringes, LEAST_POINTS);
+  const { count, isTooFine } = pointCount(fringes, limits);
   const outside = path.media.flatMap((medium) => outsideRanges(medium, span_m));
   const ends = outside.flatMap(({ from_m, to_m }) => [from_m, to_m]);
   const wavelength_m = withPoints(spacedPoints(low, high, count, byRatio), [path.wavelength_m, ...ends]);

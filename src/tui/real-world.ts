@@ -7,6 +7,7 @@ import type { CatalogueEntry, IndexedCatalogue } from '../catalog/entries.ts';
 import { foldTight } from '../catalog/fold.ts';
 import { type Refusal, refuse } from '../medium/refusal.ts';
 import { problem } from '../units/problem.ts';
+import { Charts } from './charts.ts';
 import { CoatingDesigns } from './coating-designs.ts';
 import { IndexTables } from './index-tables.ts';
 import type { Bindings } from './keys/bindings.ts';
@@ -43,6 +44,7 @@ export function realWorld(
   const finder = new MediumFinder(catalogue);
   const designs = new CoatingDesigns(catalogue, onReady);
   const sourceOf = catalogue.source.bind(catalogue);
+  const charts = new Charts(sourceOf);
   let find: SearchEntries = (text) => plainSearch(catalogue.entries(), text);
   let found = new Map<string, readonly CatalogueEntry[]>();
   return {
@@ -63,6 +65,7 @@ export function realWorld(
     material: (key) => catalogue.material(key),
     source: sourceOf,
     record,
+    chart: (kind, question, answer) => charts.get(kind, question, answer),
     readLayers: (text) => {
       const words = text.trim().split(/\s+/);
       const read = readLayers(words, catalogue);

@@ -8,6 +8,7 @@ import { isRefusal, type Refusal } from '../medium/refusal.ts';
 import type { LogRecord } from '../record/record.ts';
 import type { GlyphLevel } from '../term/ability.ts';
 import type { ScreenSize } from '../term/cell-writer.ts';
+import type { CurveKind } from './charts.ts';
 import type { FieldId } from './fields/field.ts';
 import type { Side } from './fields/medium-fields.ts';
 import type { Line } from './line-edit.ts';
@@ -81,6 +82,8 @@ export interface State {
   readonly entry: Entry | null;
   readonly search: Search | null;
   readonly page: Page | null;
+  /** The curve that is open, and the value of x its cursor stands at; null: where the question stands. */
+  readonly curve: { readonly kind: CurveKind; readonly cursor: number | null } | null;
   readonly message: Message | null;
   /** Text sent to the clipboard last, so that it can be seen and taken by hand. */
   readonly copied: string | null;
@@ -125,6 +128,7 @@ export function initialState(
     entry: null,
     search: null,
     page: null,
+    curve: null,
     message: null,
     copied: null,
     recent,

@@ -11,11 +11,13 @@ import type { Material, Source } from '../catalog/types.ts';
 import type { Conditions } from '../dispersion/evaluator.ts';
 import type { Optics } from '../interface/optics.ts';
 import type { Refusal } from '../medium/refusal.ts';
+import type { Chart } from '../plot/chart.ts';
 import type { LogRecord } from '../record/record.ts';
 import type { Criteria } from '../selection/criteria.ts';
 import type { FindResult } from '../selection/find-materials.ts';
 import type { Survey } from '../selection/survey.ts';
 import type { Problem } from '../units/problem.ts';
+import type { CurveKind } from './charts.ts';
 import type { Bindings } from './keys/bindings.ts';
 
 export interface World {
@@ -31,6 +33,8 @@ export interface World {
   lookup(name: string): Lookup;
   material(key: string): Material | undefined;
   source(id: string): Source | undefined;
+  /** A curve of the answer; each is worked out once. */
+  chart(kind: CurveKind, question: Question, answer: Answer): Chart | Refusal;
   /** The answer as the logbook would keep it at this moment. */
   record(question: Question, answer: Answer): LogRecord;
   /** Layers as typed, in the words of the command line. */

@@ -12,6 +12,7 @@ import { lineOfSpans, penOf } from '../view/pen.ts';
 import { openingView, stripView } from '../view/strip-view.ts';
 import { tooSmallView } from '../view/too-small-view.ts';
 import type { World } from '../world.ts';
+import { CurveChart } from './curve-chart.tsx';
 import { Curves } from './curves.tsx';
 import { Halves } from './halves.tsx';
 import { Lines } from './lines.tsx';
@@ -49,13 +50,18 @@ export function Screen({ state, world }: ScreenProps) {
 
 function Picture({ state, world }: ScreenProps) {
   const { plan } = sceneOf(state, world);
+  if (state.curve && plan.curve === 0) return <CurveChart state={state} world={world} />;
   return (
     <>
       <Strip state={state} world={world} />
       {plan.kind === 'full' ? <Halves state={state} world={world} /> : <Part state={state} world={world} />}
-      {plan.curve > 0 ? <Curves state={state} world={world} /> : null}
+      {plan.curve > 0 ? <LowerPart state={state} world={world} /> : null}
     </>
   );
+}
+
+function LowerPart({ state, world }: ScreenProps) {
+  return state.curve ? <CurveChart state={state} world={world} /> : <Curves state={state} world={world} />;
 }
 
 /** Drawn anew only where the answer, the room or the signs change. */

@@ -2,8 +2,8 @@
  * Every action a key can cause, in one table: footer, help, remapping and the check for clashes are made from it.
  * A chord is written as the key stream names it: 'q', 'G', 'space', 'ctrl+c', 'shift+tab', 'page-down'.
  */
-export const CONTEXTS = ['picture', 'entry', 'search', 'page'] as const;
-/** `picture`: moving about; `entry`: typing a value; `search`: choosing a medium; `page`: reading. */
+export const CONTEXTS = ['picture', 'entry', 'search', 'page', 'curve'] as const;
+/** `picture`: moving about; `entry`: typing a value; `search`: choosing a medium; `page`: reading; `curve`: reading off. */
 export type Context = (typeof CONTEXTS)[number];
 
 export interface Action {
@@ -54,6 +54,7 @@ export const ACTION_IDS = [
   'copy',
   'copy-record',
   'log',
+  'curves',
   'sources',
   'cautions',
   'coatings',
@@ -116,6 +117,12 @@ const PICTURE: readonly Row[] = [
   ['copy', 'y', 'copy', 'copy the value you are on; R and T elsewhere'],
   ['copy-record', 'Y', 'copy all', 'copy the whole answer as a record'],
   ['log', 'l', 'log', 'keep the answer in the logbook; halfspace log shows what is there'],
+  [
+    'curves',
+    'r',
+    'curves',
+    'curves over the angle and the wave, of the indices and the field, with a cursor',
+  ],
   ['sources', 's', 'sources', 'where the numbers come from'],
   ['cautions', '!', 'cautions', 'all cautions in full'],
   ['coatings', 'F', 'coatings', 'films and mirrors for these two media; Enter puts one between them'],
@@ -184,6 +191,21 @@ const PAGE: readonly Row[] = [
   ['back', 'escape q left h backspace', 'back', 'back to the numbers'],
 ];
 
+const CURVE: readonly Row[] = [
+  ['left', 'left', 'left', 'one column to the left'],
+  ['right', 'right', 'right', 'one column to the right'],
+  ['page-up', 'page-up ctrl+u alt+v', '10 left', 'ten columns to the left'],
+  ['page-down', 'page-down ctrl+d ctrl+v', '10 right', 'ten columns to the right'],
+  ['first', 'home g', 'start', 'start of the axis'],
+  ['last', 'end G', 'end', 'end of the axis'],
+  ['curves', 'r tab space', 'next curve', 'over the angle, over the wave, indices, field'],
+  ['open', 'enter', 'ask there', 'ask at the angle or the wave under the cursor'],
+  ['copy', 'y', 'copy', 'copy what the cursor reads off'],
+  ['log', 'l', 'log', 'keep the answer in the logbook'],
+  ['help', '?', 'keys', 'these keys'],
+  ['back', 'escape q backspace', 'back', 'back to the numbers'],
+];
+
 const ALWAYS: readonly Row[] = [
   ['interrupt', 'ctrl+c', 'quit', 'quit at once, from anywhere'],
   ['suspend', 'ctrl+z', 'suspend', 'to the shell; fg comes back'],
@@ -198,5 +220,6 @@ export const ACTIONS: readonly Action[] = [
   ...rows(LINE, 'entry', 'search'),
   ...rows(LIST, 'search'),
   ...rows(PAGE, 'page'),
+  ...rows(CURVE, 'curve'),
   ...rows(ALWAYS, ...CONTEXTS),
 ];

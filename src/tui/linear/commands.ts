@@ -5,6 +5,7 @@ import { setAngle, swapMedia } from '../update/question-changes.ts';
 import type { World } from '../world.ts';
 import {
   cautionsSpoken,
+  curvesSpoken,
   fieldLines,
   mediumLines,
   sourcesSpoken,
@@ -65,6 +66,11 @@ export const COMMANDS: readonly Command[] = [
   read(['second', 'm2'], 'all results of the second medium', (s) => mediumLines(s, 'into')),
   read(['sources', 's'], 'where the numbers come from', sourcesSpoken),
   read(['cautions', '!'], 'all cautions', cautionsSpoken),
+  {
+    words: ['curves'],
+    help: 'reflectance over the angle and over the wave, as sentences and tables',
+    run: (state, world) => ({ state, lines: curvesSpoken(state, world) }),
+  },
   {
     words: ['log'],
     help: 'keep the answer in the logbook; halfspace log shows what is there',

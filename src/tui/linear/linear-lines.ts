@@ -3,6 +3,8 @@
  * alone. Numbers are those of every other face.
  */
 import type { Answer } from '../../answer/answer.ts';
+import { isRefusal } from '../../medium/refusal.ts';
+import { chartSentence, chartTableLines } from '../../plot/chart-sentence.ts';
 import { beamRows, waveEnergyRows } from '../../present/energy-rows.ts';
 import { interfaceRows } from '../../present/interface-rows.ts';
 import { mediumRows } from '../../present/medium-rows.ts';
@@ -98,6 +100,18 @@ export function sourcesSpoken(state: State): readonly string[] {
 export function cautionsSpoken(state: State): readonly string[] {
   return withAnswer(state, (answer) =>
     answer.cautions.length === 0 ? ['no cautions'] : answer.cautions.map((c) => `${c.level}: ${c.text}`),
+  );
+}
+
+/** The curves over the angle and over the wave, each as a sentence and a table; why not, where there is none. */
+export function curvesSpoken(state: State, world: World): readonly string[] {
+  return withAnswer(state, (answer, { ascii }) =>
+    (['angle', 'wave'] as const).flatMap((kind) => {
+      const chart = world.chart(kind, state.question, answer);
+      return isRefusal(chart)
+        ? [`${chart.message}; ${chart.remedy}`]
+        : [chartSentence(chart, ascii), ...chartTableLines(chart, ascii)];
+    }),
   );
 }
 

@@ -12,6 +12,7 @@ const SECTIONS: readonly (readonly [Context, string])[] = [
   ['entry', 'while typing'],
   ['search', 'in the list of media'],
   ['page', 'on a page like this'],
+  ['curve', 'on a curve'],
 ];
 const KEYS_WIDTH = 22;
 const GAP = 2;
@@ -21,7 +22,10 @@ export function keyLines(state: State, filter: string, world: World): readonly P
   const ascii = state.preferences.glyphs === 'ascii';
   const word = filter.trim().toLowerCase();
   const shown = new Set<Action>();
-  const lines = SECTIONS.flatMap(([context, title]) => {
+  // The keys of what is open come first.
+  const first = state.curve ? 'curve' : 'picture';
+  const sections = [...SECTIONS].sort(([a], [b]) => Number(b === first) - Number(a === first));
+  const lines = sections.flatMap(([context, title]) => {
     const actions = world.bindings.actions.filter((a) => a.contexts.includes(context) && !shown.has(a));
     for (const action of actions) shown.add(action);
     const rows = actions

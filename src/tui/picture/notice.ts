@@ -15,6 +15,7 @@ import { answerOf, fieldOfStop, refusalOf, type State } from '../state.ts';
 import type { Role } from '../theme.ts';
 import type { World } from '../world.ts';
 import { blocksOf } from './blocks.ts';
+import { readingText } from './curve-reading.ts';
 import type { Item } from './item.ts';
 import { wrapText } from './wrap.ts';
 
@@ -58,9 +59,9 @@ function noticeParts(state: State, world: World): readonly Part[] {
   if (refusal) parts.push(refused(refusalText(refusal, world)));
   if (state.message?.tone === 'refused') parts.push(refused(state.message.text));
   else if (state.message) parts.push(said(state.message.text));
-  else if (!refusal && !state.page) parts.push(cautionPart(state, world));
-  // On a page the keys act on the page.
-  if (!state.page) parts.push(focusPart(state, world));
+  else if (!refusal && !state.page && !state.curve) parts.push(cautionPart(state, world));
+  // On a page the keys act on the page, on a curve on the cursor.
+  if (!state.page) parts.push(state.curve ? said(readingText(state, world)) : focusPart(state, world));
   return parts;
 }
 

@@ -6,5 +6,5 @@ export function contextOf(state: State): Context {
   if (state.entry) return 'entry';
   if (state.search) return 'search';
   if (state.page) return state.page.isFiltering ? 'entry' : 'page';
-  return 'picture';
+  return state.curve ? 'curve' : 'picture';
 }

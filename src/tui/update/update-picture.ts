@@ -23,6 +23,7 @@ import {
 } from '../state.ts';
 import type { World } from '../world.ts';
 import { setAngle, swapMedia } from './question-changes.ts';
+import { openCurve } from './update-curve.ts';
 import { openEntry, typeInEntry } from './update-entry.ts';
 import { openPage } from './update-page.ts';
 import { openSearch } from './update-search.ts';
@@ -77,6 +78,7 @@ const ACTS: Readonly<Partial<Record<ActionId, Act>>> = {
   compare: (s) => openPage(s, 'compare'),
   help: (s) => openPage(s, 'keys'),
   dots: nextGlyphs,
+  curves: openCurve,
   back: (s, w) => (refusalOf(s) ? askAnew(s, s.answered, w) : leaveWords(quiet(s), w)),
 };
 

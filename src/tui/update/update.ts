@@ -9,6 +9,7 @@ import { isTextKey, type Key, keyChord } from '../../term/key.ts';
 import type { Message, State, Updated } from '../state.ts';
 import type { World } from '../world.ts';
 import { contextOf } from './context.ts';
+import { actOnCurve } from './update-curve.ts';
 import { actInEntry, pasteInEntry, typeInEntry } from './update-entry.ts';
 import { actOnPage, openPage, pasteInFilter, typeInFilter } from './update-page.ts';
 import { actInPicture, typeInPicture, typeOnField } from './update-picture.ts';
@@ -74,6 +75,9 @@ function updateKey(state: State, key: Key, world: World): Updated {
       return action === 'copy'
         ? actInPicture(state, action, world)
         : plain(action ? actOnPage(state, action, world) : state);
+    case 'curve':
+      if (action === 'log') return actInPicture(state, action, world);
+      return action ? actOnCurve(state, action, world) : plain(state);
     case 'picture': {
       const typed = isTextKey(key) ? typeOnField(state, key.char, world) : undefined;
       if (typed) return plain(typed);
@@ -88,6 +92,7 @@ function paste(state: State, text: string, world: World): State {
   if (state.entry) return pasteInEntry(state, text);
   if (state.search) return pasteInSearch(state, text);
   if (state.page) return state.page.isFiltering ? pasteInFilter(state, text) : state;
+  if (state.curve) return state;
   const opened = typeInPicture(state, '', world);
   if (opened.entry) return pasteInEntry(opened, text);
   return opened.search ? pasteInSearch(opened, text) : opened;

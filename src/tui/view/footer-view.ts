@@ -12,6 +12,7 @@ const FOOTERS: Readonly<Record<Context, readonly ActionId[]>> = {
   entry: ['take', 'take-next', 'cancel', 'kill-to-start'],
   search: ['down', 'take', 'cancel', 'kill-to-start'],
   page: ['down', 'page-down', 'search', 'back'],
+  curve: ['right', 'curves', 'open', 'copy', 'back'],
 };
 
 /** On a field that takes words, letters are no commands. */

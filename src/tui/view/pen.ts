@@ -33,7 +33,7 @@ export function penOf(state: State): Pen {
   return {
     theme: preferences.colour ? COLOUR_THEME : PLAIN_THEME,
     glyphs: preferences.glyphs === 'ascii' ? ASCII_GLYPHS : SCREEN_GLYPHS,
-    focus: state.search || state.page ? null : state.focus,
+    focus: state.search || state.page || state.curve ? null : state.focus,
     entry: entry && { stop: fieldStop(entry.field), line: entry.line, isFresh: entry.isFresh },
   };
 }

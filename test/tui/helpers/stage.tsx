@@ -12,6 +12,7 @@ import { isUnread, readLayers } from '../../../src/cli/read-path.ts';
 import { answerRecord } from '../../../src/record/answer-record.ts';
 import { questionWords } from '../../../src/record/question-words.ts';
 import { charKey, type Key, type KeyName, namedKey } from '../../../src/term/key.ts';
+import { Charts } from '../../../src/tui/charts.ts';
 import { designCoatings } from '../../../src/tui/coating-designs.ts';
 import { App } from '../../../src/tui/components/app.tsx';
 import { mediumName } from '../../../src/tui/fields/medium-fields.ts';
@@ -39,6 +40,7 @@ export function testWorld(): World {
   search ??= makeSearch(catalogue.entries());
   const designs = new WeakMap<Question, ReturnType<typeof designCoatings>>();
   const finder = new MediumFinder(catalogue);
+  const charts = new Charts((id) => catalogue.source(id));
   const find = search;
   return {
     answer: (question) => answerQuestion(question, (id) => catalogue.source(id)),
@@ -53,6 +55,7 @@ export function testWorld(): World {
     lookup: (name) => catalogue.lookup(name),
     material: (key) => catalogue.material(key),
     source: (id) => catalogue.source(id),
+    chart: (kind, question, answer) => charts.get(kind, question, answer),
     record: (question, answer) =>
       answerRecord(question, answer, {
         time: '2026-03-14T09:26:53+01:00',
