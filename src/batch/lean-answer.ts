@@ -55,11 +55,15 @@ export interface LeanSurface {
   into: BoundMedium | undefined;
   fromIsLiteral: boolean;
   polarization: Polarization;
+  /** The wavelengths given are those in standard air. */
+  inAir: boolean;
 }
 
 /** Several rows of numbers: waves and angles in, the values behind the answer columns out. */
 export interface LeanRows extends Waves {
   readonly angle_rad: Float64Array;
+  /** The wavelengths as given, in metres. */
+  readonly given_m: Float64Array;
   /** One array a slot. */
   readonly values: readonly Float64Array[];
 }
@@ -70,6 +74,7 @@ export function makeRows(count: number): LeanRows {
     vacuum_um: numbers(),
     air_um: numbers(),
     angle_rad: numbers(),
+    given_m: numbers(),
     values: Array.from({ length: SLOTS }, numbers),
   };
 }
@@ -120,7 +125,7 @@ export function leanAnswers(columns: readonly AnswerColumn[]): LeanAnswers | und
     return index2 ? put(into, rows, i, N2) : into.reachAt(rows, i) !== REFUSED;
   };
   const evaluate = (surface: LeanSurface, rows: LeanRows, i: number): boolean => {
-    if (wave) putMeasures(rows, i);
+    if (wave) putMeasures(rows, i, surface.inAir);
     if (!powers) return before(surface, rows, i) && beyond(surface, rows, i);
     const from = surface.from?.opticsAt(rows, i);
     const into = surface.into?.opticsAt(rows, i);
@@ -159,10 +164,11 @@ export function leanAnswers(columns: readonly AnswerColumn[]): LeanAnswers | und
   };
 }
 
-function putMeasures({ vacuum_um, air_um, values }: LeanRows, i: number): void {
-  const wavelength_m = vacuum_um[i]! * 1e-6;
+/** As `waveAnswer`: the wavelength given comes back to the last bit. */
+function putMeasures({ vacuum_um, air_um, given_m, values }: LeanRows, i: number, inAir: boolean): void {
+  const wavelength_m = inAir ? vacuum_um[i]! / 1e6 : given_m[i]!;
   values[WAVE]![i] = wavelength_m;
-  values[AIR_WAVE]![i] = air_um[i]! * 1e-6;
+  values[AIR_WAVE]![i] = inAir ? given_m[i]! : air_um[i]! / 1e6;
   values[FREQUENCY]![i] = frequencyFromWavelength(wavelength_m);
   values[ENERGY]![i] = photonEnergyFromWavelength(wavelength_m);
   values[WAVENUMBER]![i] = 1 / wavelength_m;

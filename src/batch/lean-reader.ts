@@ -54,6 +54,7 @@ export class LeanReader {
     into: undefined,
     fromIsLiteral: false,
     polarization: 'unpolarized',
+    inAir: false,
   };
 
   private readonly asking: Asking;
@@ -109,8 +110,10 @@ export class LeanReader {
       if (read) this.apply(this.options.values());
       rows.angle_rad[i] = plainAngle ? angle_rad : this.statedAngle_rad;
     } else rows.angle_rad[i] = this.statedAngle_rad;
-    const um = this.readWave(cells) * 1e6;
+    const given_m = this.readWave(cells);
+    const um = given_m * 1e6;
     if (!(um > 0)) return false;
+    rows.given_m[i] = given_m;
     rows.vacuum_um[i] = this.inAir ? airToVacuum_um(um) : um;
     rows.air_um[i] = this.inAir ? um : vacuumToAir_um(um);
     return this.readMedia(cells);
@@ -136,6 +139,7 @@ export class LeanReader {
     this.surface.polarization = (options['polarization'] as Polarization | undefined) ?? 'unpolarized';
     this.statedAngle_rad = (options['angle_rad'] as number | undefined) ?? 0;
     this.inAir = options['airWavelength'] === true;
+    this.surface.inAir = this.inAir;
     this.extrapolate = options['extrapolate'] === true;
     const stated = CONDITIONS.filter((key) => options[key] !== undefined);
     this.conditions = Object.fromEntries(stated.map((key) => [key, options[key]]));
@@ -212,10 +216,10 @@ interface End {
 }
 
 /** Both references of the first wavelengths in metres, as the answer makes them. */
-export function putWaves(rows: LeanRows, wavelengths_m: Float64Array, count: number, inAir: boolean): void {
-  const { vacuum_um, air_um } = rows;
+export function putWaves(rows: LeanRows, count: number, inAir: boolean): void {
+  const { vacuum_um, air_um, given_m } = rows;
   for (let i = 0; i < count; i++) {
-    const um = wavelengths_m[i]! * 1e6;
+    const um = given_m[i]! * 1e6;
     vacuum_um[i] = inAir ? airToVacuum_um(um) : um;
     air_um[i] = inAir ? um : vacuumToAir_um(um);
   }

@@ -37,7 +37,6 @@ export class PlainRows {
   /** Place behind each row, and the lines that are over by then. */
   private readonly behind = new Int32Array(MOST_ROWS);
   private readonly lines = new Int32Array(MOST_ROWS);
-  private readonly wavelengths_m = new Float64Array(MOST_ROWS);
   private block = MOST_ROWS;
 
   constructor(
@@ -60,7 +59,7 @@ export class PlainRows {
   /** Answers the plain rows that come next, at most one block of them; how many. */
   run(reader: RowReader, writer: ByteWriter): number {
     const scanned = this.scan(reader.bytes, reader.position);
-    putWaves(this.rows, this.wavelengths_m, scanned, this.columns.inAir);
+    putWaves(this.rows, scanned, this.columns.inAir);
     const answered = this.answers.evaluateBlock(this.reader.surface, this.rows, scanned);
     this.block = answered < this.block ? FEW_ROWS : Math.min(2 * this.block, MOST_ROWS);
     if (answered === 0) return 0;
@@ -71,9 +70,9 @@ export class PlainRows {
 
   /** Finds rows and reads their numbers, up to the first that is not plain or not whole; how many. */
   private scan(bytes: Uint8Array, position: number): number {
-    const { separator, fields, block, from, to, behind, lines, wavelengths_m } = this;
+    const { separator, fields, block, from, to, behind, lines } = this;
     const { waveField, angleField, wave, angle } = this.columns;
-    const { angle_rad } = this.rows;
+    const { angle_rad, given_m } = this.rows;
     const size = bytes.length;
     let i = position;
     let line = 0;
@@ -102,7 +101,7 @@ export class PlainRows {
           if (digits === 0 && field === 0 && byte === LF) break;
           if (digits === 0 || digits > MOST_DIGITS || (byte !== separator && byte !== LF)) return row;
           const exponent = point < 0 ? 0 : point - digits;
-          if (field === waveField) wavelengths_m[row] = numberValue(wave, mantissa, exponent);
+          if (field === waveField) given_m[row] = numberValue(wave, mantissa, exponent);
           else if (angle) angle_rad[row] = numberValue(angle, mantissa, exponent);
         } else {
           for (; i < size; i++) {
@@ -119,7 +118,7 @@ export class PlainRows {
       i++;
       line++;
       if (end === start) continue;
-      if (field + 1 !== fields || !(wavelengths_m[row]! > 0)) return row;
+      if (field + 1 !== fields || !(given_m[row]! > 0)) return row;
       if (angleField < 0) angle_rad[row] = this.columns.fixedAngle_rad;
       else if (!(angle_rad[row]! >= 0)) return row;
       from[row] = start;
