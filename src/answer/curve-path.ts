@@ -3,26 +3,16 @@
  * the wave of the question, with its numbers. What the question fixes stays fixed along a curve: the thickness of a quarter wave
  * meant at one angle and one wave, and which layers are coherent. Nothing else is worked out: no cautions, no uncertainties.
  */
-import type { Optics } from '../interface/optics.ts';
 import type { Waves } from '../medium/bound-fit.ts';
 import { type BoundMedium, INSIDE, REFUSED, type Reach } from '../medium/bound-medium.ts';
 import { isRefusal, type Refusal } from '../medium/refusal.ts';
-import { StackRefusal } from '../stack/stack-refusal.ts';
 import { mediumSide, type SourceOf } from './medium-side.ts';
+import { type BothPowers, type OpticsLayer, opticsPowers } from './optics-powers.ts';
 import { readPath } from './path.ts';
-import { pathPower, solvePath } from './path-powers.ts';
-import { bindMedium, surfacePowers } from './powers.ts';
+import { solvePath } from './path-powers.ts';
+import { bindMedium } from './powers.ts';
 import type { MediumSpec, Question } from './question.ts';
 import { bothReferences } from './wave.ts';
-
-/** Power fractions of both polarizations. */
-export interface CurvePowers {
-  readonly Rs: number;
-  readonly Rp: number;
-  /** Null where the medium of incidence absorbs too much for them to mean anything. */
-  readonly Ts: number | null;
-  readonly Tp: number | null;
-}
 
 /** A medium of the path; one that occurs several times stands here once. */
 export interface CurveMedium {
@@ -39,11 +29,8 @@ export interface CurvePath {
   /** n d of the layers that are summed as amplitudes, at the wave of the question. */
   readonly coherentLength_m: number;
   /** Null where a medium has no data, or the laws no answer. */
-  readonly powersAt: (wavelength_m: number, angle_rad: number) => CurvePowers | null;
+  readonly powersAt: (wavelength_m: number, angle_rad: number) => BothPowers | null;
 }
-
-/** The furthest an angle goes: grazing itself is the limit of what comes before it. */
-const GRAZING_rad = Math.PI / 2 - 1e-9;
 
 /** For questions that have an answer; the refusals are those of the answer. */
 export function curvePath(question: Question, sourceOf: SourceOf): CurvePath | Refusal {
@@ -62,60 +49,61 @@ export function curvePath(question: Question, sourceOf: SourceOf): CurvePath | R
   const byId = new Map([...bound].map(([spec, medium]) => [idOf(spec), curveMedium(spec, medium)]));
   const media = [...byId.values()];
 
-  if (question.layers.length === 0) {
-    return {
-      question,
-      wavelength_m,
-      media,
-      coherentLength_m: 0,
-      powersAt: (at_m, angle_rad) => {
-        const there = referencesAt(at_m);
-        const first = there && from.opticsAt(there, 0);
-        const last = there && into.opticsAt(there, 0);
-        if (!first || !last || !(first.n.re > 0)) return null;
-        return surfacePowers(first, last, Math.min(angle_rad, GRAZING_rad), 'unpolarized');
-      },
-    };
-  }
-
-  const sides = [question.from, question.into].map((spec) =>
-    mediumSide(spec, wave, conditions, extrapolate, sourceOf),
-  );
-  const [before, beyond] = sides;
-  if (!before || !beyond || isRefusal(before) || isRefusal(beyond)) return sides.find(isRefusal) as Refusal;
-  const path = readPath(question, wave, before, beyond, sourceOf);
-  if (isRefusal(path)) return path;
-  const parts = solvePath(path, question, wavelength_m);
-  if (isRefusal(parts)) return parts;
-  const power = pathPower(parts, wavelength_m);
-  const coherentLength_m = path.layers.reduce(
-    (sum, { side, thickness_m }, i) =>
-      parts.layers[i]?.coherent ? sum + side.optics.n.re * thickness_m : sum,
-    0,
-  );
+  const thicknesses = thicknessesOf(question, sourceOf);
+  if (isRefusal(thicknesses)) return thicknesses;
+  const { layers, coherenceLength_m } = thicknesses;
   return {
     question,
     wavelength_m,
     media,
-    coherentLength_m,
+    coherentLength_m: layers.reduce((sum, l) => sum + (l.coherent ? l.opticalLength_m : 0), 0),
     powersAt: (at_m, angle_rad) => {
       const there = referencesAt(at_m);
-      if (!there) return null;
-      const optics = [from, into, ...inLayers].map((m) => m.opticsAt(there, 0));
-      const [first, last, ...inner] = optics;
-      if (!first || !last || !(first.n.re > 0)) return null;
-      const layers: { optics: Optics; thickness_m: number }[] = [];
-      for (const [i, layer] of inner.entries()) {
-        if (!layer) return null;
-        layers.push({ optics: layer, thickness_m: path.layers[i]?.thickness_m ?? 0 });
+      const first = there && from.opticsAt(there, 0);
+      const last = there && into.opticsAt(there, 0);
+      if (!first || !last) return null;
+      const between: OpticsLayer[] = [];
+      for (const [i, { thickness_m, coherent }] of layers.entries()) {
+        const optics = inLayers[i]?.opticsAt(there, 0);
+        if (!optics) return null;
+        between.push({ optics, thickness_m, coherent });
       }
-      const shift_um = (at_m - wavelength_m) * 1e6;
-      const angle = Math.min(angle_rad, GRAZING_rad);
-      return orNull(() => {
-        const { R, T } = power({ from: first, into: last, angle_rad: angle, shift_um, layers });
-        return { Rs: R[0], Rp: R[1], Ts: T[0], Tp: T[1] };
-      });
+      return opticsPowers({ from: first, layers: between, into: last, coherenceLength_m }, at_m, angle_rad);
     },
+  };
+}
+
+interface FixedLayer {
+  readonly thickness_m: number;
+  readonly coherent: boolean;
+  /** n d at the wave of the question. */
+  readonly opticalLength_m: number;
+}
+
+/** What stays as the question has it along a curve. */
+function thicknessesOf(
+  question: Question,
+  sourceOf: SourceOf,
+): { readonly layers: readonly FixedLayer[]; readonly coherenceLength_m: number } | Refusal {
+  if (question.layers.length === 0) return { layers: [], coherenceLength_m: 0 };
+  const wave = bothReferences(question.wave);
+  if (isRefusal(wave)) return wave;
+  const { conditions, extrapolate } = question;
+  const from = mediumSide(question.from, wave, conditions, extrapolate, sourceOf);
+  if (isRefusal(from)) return from;
+  const into = mediumSide(question.into, wave, conditions, extrapolate, sourceOf);
+  if (isRefusal(into)) return into;
+  const path = readPath(question, wave, from, into, sourceOf);
+  if (isRefusal(path)) return path;
+  const parts = solvePath(path, question, wave.vacuum_um * 1e-6);
+  if (isRefusal(parts)) return parts;
+  return {
+    layers: path.layers.map(({ side, thickness_m }, i) => ({
+      thickness_m,
+      coherent: parts.layers[i]?.coherent === true,
+      opticalLength_m: side.optics.n.re * thickness_m,
+    })),
+    coherenceLength_m: parts.stack.coherenceLength_m,
   };
 }
 
@@ -144,13 +132,4 @@ function referencesAt(wavelength_m: number): Waves | undefined {
   return isRefusal(there)
     ? undefined
     : { vacuum_um: Float64Array.of(there.vacuum_um), air_um: Float64Array.of(there.air_um) };
-}
-
-function orNull<T>(compute: () => T): T | null {
-  try {
-    return compute();
-  } catch (error) {
-    if (error instanceof StackRefusal) return null;
-    throw error;
-  }
 }

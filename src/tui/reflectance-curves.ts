@@ -3,10 +3,8 @@
  * answer makes the curve.
  */
 import type { Answer, MediumAnswer } from '../answer/answer.ts';
-import { fresnel } from '../interface/fresnel.ts';
+import { type OpticsPath, opticsPowers } from '../answer/optics-powers.ts';
 import type { Optics } from '../interface/optics.ts';
-import type { LayeredPath } from '../stack/layered-path.ts';
-import { mixedStack } from '../stack/mixed-stack.ts';
 
 export interface Curve {
   /** Name of the line: "s", "p". */
@@ -16,38 +14,22 @@ export interface Curve {
 }
 
 const RIGHT_ANGLE = Math.PI / 2;
-/** Grazing incidence itself has no transmitted wave to divide by. */
-const NEARLY = 1 - 1e-6;
 
 export function angleCurves(answer: Answer): readonly Curve[] {
-  if (answer.layers.length > 0) return pathCurves(answer);
-  const from = opticsOf(answer.from);
-  const into = opticsOf(answer.into);
-  const at = (x: number) => fresnel(from, into, Math.min(x, NEARLY) * RIGHT_ANGLE);
-  return [
-    { name: 's', valueAt: (x) => clamp(at(x).Rs) },
-    { name: 'p', valueAt: (x) => clamp(at(x).Rp) },
-  ];
-}
-
-/** Of a path of layers, at the wave of the answer and with its coherence. */
-function pathCurves(answer: Answer): readonly Curve[] {
-  const substance = ({ relativePermittivity: eps, relativePermeability: mu }: MediumAnswer) => ({ eps, mu });
-  const { from, into, layers, stack, wave } = answer;
-  const path: LayeredPath = {
-    incidence: {
-      eps: { re: from.relativePermittivity.re, im: 0 },
-      mu: { re: from.relativePermeability.re, im: 0 },
-    },
-    layers: layers.map((l) => ({ ...substance(l.medium), thickness_m: l.thickness_m })),
-    exit: substance(into),
+  const path: OpticsPath = {
+    from: opticsOf(answer.from),
+    layers: answer.layers.map(({ medium, thickness_m, coherent }) => ({
+      optics: opticsOf(medium),
+      thickness_m,
+      coherent,
+    })),
+    into: opticsOf(answer.into),
+    coherenceLength_m: answer.stack?.coherenceLength_m ?? 0,
   };
-  const coherence_m = stack?.coherenceLength_m ?? Number.POSITIVE_INFINITY;
-  const at = (x: number) =>
-    mixedStack(path, wave.vacuumWavelength_m, Math.min(x, NEARLY) * RIGHT_ANGLE, coherence_m);
+  const at = (x: number) => opticsPowers(path, answer.wave.vacuumWavelength_m, x * RIGHT_ANGLE);
   return [
-    { name: 's', valueAt: (x) => clamp(at(x).s.R) },
-    { name: 'p', valueAt: (x) => clamp(at(x).p.R) },
+    { name: 's', valueAt: (x) => clamp(at(x)?.Rs) },
+    { name: 'p', valueAt: (x) => clamp(at(x)?.Rp) },
   ];
 }
 
@@ -59,6 +41,6 @@ export function opticsOf(medium: MediumAnswer): Optics {
   };
 }
 
-export function clamp(value: number): number | null {
-  return Number.isFinite(value) ? Math.max(0, Math.min(1, value)) : null;
+export function clamp(value: number | undefined): number | null {
+  return value !== undefined && Number.isFinite(value) ? Math.max(0, Math.min(1, value)) : null;
 }

@@ -4,10 +4,10 @@
  * angle, polarization or wave, so that following a curve costs nothing.
  */
 import type { Answer } from '../answer/answer.ts';
+import { powerOf } from '../answer/interface-answer.ts';
+import { opticsPowers } from '../answer/optics-powers.ts';
 import type { Question } from '../answer/question.ts';
-import { fresnel } from '../interface/fresnel.ts';
 import type { Optics } from '../interface/optics.ts';
-import { mixedStack } from '../stack/mixed-stack.ts';
 import { type Curve, clamp } from './reflectance-curves.ts';
 import type { World } from './world.ts';
 
@@ -33,10 +33,9 @@ export function waveCurve(question: Question, answer: Answer, world: World): Wav
   const layers = tables.filter((t) => t !== undefined);
   if (!from || !into || layers.length < tables.length) return undefined;
   const values = from.map((optics, i) => {
-    const beyond = into[i] ?? null;
-    if (layers.length === 0) return reflectance(optics, beyond, question);
     const between = layers.map((t) => t[i] ?? null);
-    return pathReflectance(optics, between, beyond, answer, wavelengthAt(range_m, i / (from.length - 1)));
+    const wavelength_m = wavelengthAt(range_m, i / (from.length - 1));
+    return reflectance(optics, between, into[i] ?? null, answer, wavelength_m);
   });
   return {
     curve: { name: '', valueAt: (x) => between(values, x) },
@@ -63,15 +62,8 @@ export function placeOfWavelength([low, high]: readonly [number, number], wavele
   return Math.log(wavelength_m / low) / Math.log(high / low);
 }
 
-function reflectance(from: Optics | null, into: Optics | null, question: Question): number | null {
-  if (!from || !into || from.n.re <= 0) return null;
-  const { Rs, Rp } = fresnel(from, into, question.incidenceAngle_rad);
-  const { polarization } = question;
-  return clamp(polarization === 's' ? Rs : polarization === 'p' ? Rp : (Rs + Rp) / 2);
-}
-
-/** Of the path of layers; null where any of its media has no data. */
-function pathReflectance(
+/** Null where any of the media has no data. */
+function reflectance(
   from: Optics | null,
   between: readonly (Optics | null)[],
   into: Optics | null,
@@ -79,16 +71,20 @@ function pathReflectance(
   wavelength_m: number,
 ): number | null {
   const media = between.filter((m) => m !== null);
-  if (!from || !into || media.length < between.length || from.n.re <= 0) return null;
-  const path = {
-    incidence: { eps: { re: from.eps.re, im: 0 }, mu: { re: from.mu.re, im: 0 } },
-    layers: media.map(({ eps, mu }, i) => ({ eps, mu, thickness_m: answer.layers[i]?.thickness_m ?? 0 })),
-    exit: { eps: into.eps, mu: into.mu },
-  };
+  if (!from || !into || media.length < between.length) return null;
   const { incidenceAngle_rad, polarization } = answer.geometry;
-  const coherence_m = answer.stack?.coherenceLength_m ?? Number.POSITIVE_INFINITY;
-  const { s, p } = mixedStack(path, wavelength_m, incidenceAngle_rad, coherence_m);
-  return clamp(polarization === 's' ? s.R : polarization === 'p' ? p.R : (s.R + p.R) / 2);
+  const path = {
+    from,
+    layers: media.map((optics, i) => ({
+      optics,
+      thickness_m: answer.layers[i]?.thickness_m ?? 0,
+      coherent: answer.layers[i]?.coherent,
+    })),
+    into,
+    coherenceLength_m: answer.stack?.coherenceLength_m ?? 0,
+  };
+  const powers = opticsPowers(path, wavelength_m, incidenceAngle_rad);
+  return powers && clamp(powerOf(polarization, powers.Rs, powers.Rp));
 }
 
 function between(values: readonly (number | null)[], x: number): number | null {
