@@ -7,6 +7,9 @@ import { isProblem, type Problem, problem } from '../units/problem.ts';
 import { quoteInput } from '../units/quote-input.ts';
 import { value } from './option-spec.ts';
 
+/** What is done with one answer, and not with a table of them. */
+const ONE_QUESTION = ['log', 'log-file', 'plot'];
+
 export const BATCH_OPTION_ROWS = {
   fixedFrom: value({
     name: 'from',
@@ -49,6 +52,7 @@ export const BATCH_OPTION_ROWS = {
       'the question at every point of a range: angle=0..89:1, wave=400nm..700nm:5nm (in place of WAVE), temperature=20C..80C:5C, thickness1=50nm..200nm:1nm; twice for a grid; as CSV unless --json, --markdown or --plain is given',
     group: 'batch',
     repeatable: true,
+    excludes: ONE_QUESTION,
     parse(text: string): readonly SweepRange[] | Problem {
       const sweep = parseSweep(text);
       return isProblem(sweep) ? sweep : [sweep];
@@ -60,6 +64,7 @@ export const BATCH_OPTION_ROWS = {
     meaning: `what to answer: ${SHORT_NAMES.map(([name]) => name).join(', ')}, or any key of --csv such as into.groupIndex; list shows all with their meaning`,
     fallback: DEFAULT_COLUMNS.join(','),
     group: 'batch',
+    excludes: ONE_QUESTION,
     parse: parseName,
   }),
   digits: value({
@@ -68,6 +73,7 @@ export const BATCH_OPTION_ROWS = {
     meaning: 'significant digits of the answers, 1 to 17',
     fallback: 'the shortest text that reads back as the same double',
     group: 'batch',
+    excludes: ONE_QUESTION,
     parse: parseDigits,
   }),
 };

@@ -2,11 +2,15 @@
 import { type Problem, problem } from '../units/problem.ts';
 import { flag, type OptionSpec, value } from './option-spec.ts';
 
+/** Tables of many answers are not logged. */
+const TABLES = ['sweep', 'columns', 'digits'];
+
 export const LOG_OPTION_ROWS = {
   log: flag({
     name: 'log',
     meaning: 'add the answer to the logbook too; halfspace log shows what is there',
     group: 'output',
+    excludes: TABLES,
   }),
   logFile: value({
     name: 'log-file',
@@ -15,6 +19,7 @@ export const LOG_OPTION_ROWS = {
     fallback: 'logbook.jsonl in the folder of the state',
     group: 'output',
     completes: 'file',
+    excludes: TABLES,
     parse(text: string): string | Problem {
       return text === '' || text.includes('\0')
         ? problem('empty', 'the name is empty or holds a null character', 'write a path such as bench.jsonl')
