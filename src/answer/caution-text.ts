@@ -72,7 +72,10 @@ const WORDING: Readonly<Record<CautionCode, Wording>> = {
     (d, s) =>
       `${s}: temperature by a single dn/dT of ${Number(d['dn_dT']).toPrecision(3)} per K (${d['range']}): first order`,
   ],
-  'condition-not-used': ['note', (d, s) => `${s}: this model takes no ${d['condition']}; it was not used`],
+  'condition-not-used': [
+    'note',
+    (d, s) => `${s}: this model takes no ${String(d['condition']).replace(/_.*/, '')}; it was not used`,
+  ],
   'no-dispersion': ['note', (_, s) => `${s}: a single published value: no group index, no dispersion`],
   'lossy-incidence': [
     'caution',

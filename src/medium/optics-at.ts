@@ -200,7 +200,10 @@ function evaluateFit(
     notes.push({ code: 'temperature-not-modelled', details: { asked_C: warmTo_K - ZERO_CELSIUS_K, fit_C } });
   }
   for (const name of ['pressure_Pa', 'humidity', 'co2_ppm', 'salinity_g_per_kg'] as const) {
-    if (conditions[name] !== undefined && bound.used[name] === undefined && isFluidCondition(fit, name)) {
+    const asked = conditions[name];
+    if (asked === undefined || bound.used[name] !== undefined) continue;
+    const compresses = name === 'pressure_Pa' && material.class === 'liquid';
+    if (compresses ? Math.abs(asked - ATMOSPHERE_Pa) > BAROMETER_Pa : isFluidCondition(fit, name)) {
       notes.push({ code: 'condition-not-used', details: { condition: name } });
     }
   }
@@ -225,6 +228,10 @@ export function thermalForm(fit: Fit, material: Material): ThermalForm | undefin
     ? undefined
     : { form: 'constant', dn_dT_per_K: slope * 1e-6, range: 'near room temperature' };
 }
+
+const ATMOSPHERE_Pa = 101_325;
+/** Half an atmosphere moves the index of a liquid by some 1e-5, more than weather does by far. */
+const BAROMETER_Pa = 50_000;
 
 /** Pressure, humidity and salinity mean something for fluids alone: a solid beside the air they describe needs no remark. */
 function isFluidCondition(fit: Fit, name: string): boolean {
