@@ -21,8 +21,11 @@ const MOST_NAMED_FACES = 6;
 /** A trace of absorption before the surface can put R a hair above 1; the scale is not to grow for that. */
 const HAIR = 1e-4;
 
+/** Below this a power is the rounding of a sum of ones. */
+const NOISE = 1e-14;
+
 const percent = (values: readonly number[]): number[] =>
-  values.map((x) => (x > 1 && x < 1 + HAIR ? 100 : x < 0 && x > -HAIR ? 0 : x * 100));
+  values.map((x) => (x > 1 && x < 1 + HAIR ? 100 : x < NOISE && x > -HAIR ? 0 : x * 100));
 
 /** "Air → Fused silica", "Air → 16 layers → N-BK7". */
 function shortPath({ from, layers, into }: Answer): string {
@@ -98,7 +101,7 @@ export function powerChart(answer: Answer, curve: WaveCurve, quantity: WaveQuant
     hatched: curve.outside.map(({ name, from_m, to_m }) => ({
       from: axis.shown(from_m),
       to: axis.shown(to_m),
-      label: `outside the data of ${name}`,
+      label: `outside data: ${name}`,
     })),
   };
 }
@@ -129,7 +132,7 @@ export function indexChart(
       .map(({ name, from_m, to_m }) => ({
         from: axis.shown(from_m),
         to: axis.shown(to_m),
-        label: `outside the data of ${name}`,
+        label: `outside data: ${name}`,
       })),
   };
 }

@@ -150,7 +150,7 @@ describe('--plot wave', () => {
   it('hatches what is outside the data and draws nothing there', async () => {
     const line = 'vacuum fused-silica 633nm --plot wave --span 100nm..500nm';
     const { out } = await ask(line);
-    expect(out).toContain('outside the data of Fused silica');
+    expect(out).toContain('outside data: Fused silica');
     const { curves } = await documentOf(line);
     const [powers, index] = curves;
     const { vacuumWavelength_m: wave = [], R = [] } = powers?.columns ?? {};
