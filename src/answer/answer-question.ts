@@ -13,8 +13,8 @@ import { crystalPart } from './crystal-part.ts';
 import { type EnergyParts, energyParts } from './energy-answer.ts';
 import { indexUncertainty, type ThermalSide } from './input-uncertainty.ts';
 import { interfaceParts, LOSSY_INCIDENCE } from './interface-answer.ts';
-import { type MediumSide, mediumSide, type SourceOf } from './medium-side.ts';
-import { type Path, readPath } from './path.ts';
+import type { MediumSide, SourceOf } from './medium-side.ts';
+import { type Path, readEnds, readPath } from './path.ts';
 import { type PathFields, pathFields, surfaceFields } from './path-fields.ts';
 import { pathNotes, pathPower, pathSurface, solvePath, surfacePower } from './path-powers.ts';
 import { powerSpread } from './power-spread.ts';
@@ -27,11 +27,10 @@ import { bothReferences, waveAnswer } from './wave.ts';
 export function answerQuestion(question: Question, sourceOf: SourceOf): Answer | Refusal {
   const wave = bothReferences(question.wave);
   if (isRefusal(wave)) return wave;
-  const { conditions, extrapolate, incidenceAngle_rad, polarization } = question;
-  const from = mediumSide(question.from, wave, conditions, extrapolate, sourceOf);
-  if (isRefusal(from)) return from;
-  const into = mediumSide(question.into, wave, conditions, extrapolate, sourceOf);
-  if (isRefusal(into)) return into;
+  const { incidenceAngle_rad, polarization } = question;
+  const ends = readEnds(question, wave, sourceOf);
+  if (isRefusal(ends)) return ends;
+  const { from, into } = ends;
   if (from.optics.n.re === 0) {
     return refuse(
       'no-incident-wave',
@@ -43,22 +42,21 @@ export function answerQuestion(question: Question, sourceOf: SourceOf): Answer |
 
   const vacuumWavelength_m = wave.vacuum_um * 1e-6;
   const first = interfaceParts(from, into, incidenceAngle_rad, polarization, vacuumWavelength_m);
-  const path = question.layers.length > 0 ? readPath(question, wave, from, into, sourceOf) : null;
+  const path = readPath(question, wave, ends, sourceOf);
   if (isRefusal(path)) return path;
-  const parts = path && solvePath(path, question, vacuumWavelength_m);
+  const parts = path.layers.length > 0 ? solvePath(path, question, vacuumWavelength_m) : null;
   if (isRefusal(parts)) return parts;
   const surface = parts ? pathSurface(first.answer, parts, polarization) : first.answer;
 
-  const whole: Path = path ?? { from, layers: [], into };
-  const crystal = crystalPart(question, whole, wave, sourceOf);
+  const crystal = crystalPart(question, path, wave, sourceOf);
   if (isRefusal(crystal)) return crystal;
-  const media = thermalSides(whole, question, wave, sourceOf);
+  const media = thermalSides(path, question, wave, sourceOf);
   const power = parts ? pathPower(parts, vacuumWavelength_m) : surfacePower;
-  const spread = powerSpread(question, wave, whole, media, surface, power);
+  const spread = powerSpread(question, wave, path, media, surface, power);
   const powers = { R: surface.R, T: surface.T, surface: parts ? null : first.wave };
   const pulse = pulseAnswer(question, parts);
   const fields = (): PathFields =>
-    path && parts
+    parts
       ? pathFields(path, question, parts, vacuumWavelength_m)
       : surfaceFields(from, into, question, vacuumWavelength_m);
   const energy: EnergyParts | null = question.beam

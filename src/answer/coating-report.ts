@@ -9,7 +9,8 @@ import { type CoatScene, type Film, filmKey, filmsAt, substanceAt } from './coat
 import type { CoatingReport, MirrorDesign, SkippedFilm } from './coating-shape.ts';
 import { idealFilm, singleFilmCoatings } from './coating-single.ts';
 import { LOSSY_INCIDENCE, powerOf } from './interface-answer.ts';
-import { type MediumSide, mediumSide, type SourceOf } from './medium-side.ts';
+import type { MediumSide, SourceOf } from './medium-side.ts';
+import { readEnds } from './path.ts';
 import type { MediumSpec, Question } from './question.ts';
 import { bothReferences, waveAnswer } from './wave.ts';
 
@@ -34,10 +35,9 @@ export function coatingReport(asked: CoatAsked, sourceOf: SourceOf): CoatingRepo
   const { conditions, extrapolate, incidenceAngle_rad, polarization } = question;
   const wave = bothReferences(question.wave);
   if (isRefusal(wave)) return wave;
-  const from = mediumSide(question.from, wave, conditions, extrapolate, sourceOf);
-  if (isRefusal(from)) return from;
-  const into = mediumSide(question.into, wave, conditions, extrapolate, sourceOf);
-  if (isRefusal(into)) return into;
+  const ends = readEnds(question, wave, sourceOf);
+  if (isRefusal(ends)) return ends;
+  const { from, into } = ends;
   const unfit = whyNoCoating(from);
   if (unfit) return unfit;
 

@@ -6,9 +6,9 @@
 import type { Waves } from '../medium/bound-fit.ts';
 import { type BoundMedium, INSIDE, REFUSED, type Reach } from '../medium/bound-medium.ts';
 import { isRefusal, type Refusal } from '../medium/refusal.ts';
-import { mediumSide, type SourceOf } from './medium-side.ts';
+import type { SourceOf } from './medium-side.ts';
 import { type BothPowers, type OpticsLayer, opticsPowers } from './optics-powers.ts';
-import { readPath } from './path.ts';
+import { readEnds, readPath } from './path.ts';
 import { solvePath } from './path-powers.ts';
 import { bindMedium } from './powers.ts';
 import type { MediumSpec, Question } from './question.ts';
@@ -88,12 +88,9 @@ function thicknessesOf(
   if (question.layers.length === 0) return { layers: [], coherenceLength_m: 0 };
   const wave = bothReferences(question.wave);
   if (isRefusal(wave)) return wave;
-  const { conditions, extrapolate } = question;
-  const from = mediumSide(question.from, wave, conditions, extrapolate, sourceOf);
-  if (isRefusal(from)) return from;
-  const into = mediumSide(question.into, wave, conditions, extrapolate, sourceOf);
-  if (isRefusal(into)) return into;
-  const path = readPath(question, wave, from, into, sourceOf);
+  const ends = readEnds(question, wave, sourceOf);
+  if (isRefusal(ends)) return ends;
+  const path = readPath(question, wave, ends, sourceOf);
   if (isRefusal(path)) return path;
   const parts = solvePath(path, question, wave.vacuum_um * 1e-6);
   if (isRefusal(parts)) return parts;

@@ -8,8 +8,8 @@ import { fieldAt, frontField, type StackField, solveField } from '../stack/field
 import { StackRefusal } from '../stack/stack-refusal.ts';
 import type { Answer } from './answer.ts';
 import { LOSSY_INCIDENCE } from './interface-answer.ts';
-import { mediumSide, type SourceOf } from './medium-side.ts';
-import { layeredPath, type Path, readPath } from './path.ts';
+import type { SourceOf } from './medium-side.ts';
+import { layeredPath, type Path, readEnds, readPath } from './path.ts';
 import type { Question } from './question.ts';
 import { bothReferences } from './wave.ts';
 
@@ -74,14 +74,8 @@ export function fieldCurve(question: Question, answer: Answer, sourceOf: SourceO
 function pathOf(question: Question, sourceOf: SourceOf): Path | Refusal {
   const wave = bothReferences(question.wave);
   if (isRefusal(wave)) return wave;
-  const { conditions, extrapolate } = question;
-  const from = mediumSide(question.from, wave, conditions, extrapolate, sourceOf);
-  if (isRefusal(from)) return from;
-  const into = mediumSide(question.into, wave, conditions, extrapolate, sourceOf);
-  if (isRefusal(into)) return into;
-  return question.layers.length === 0
-    ? { from, layers: [], into }
-    : readPath(question, wave, from, into, sourceOf);
+  const ends = readEnds(question, wave, sourceOf);
+  return isRefusal(ends) ? ends : readPath(question, wave, ends, sourceOf);
 }
 
 function notCoherent({ layers, stack }: Answer): Refusal {

@@ -30,13 +30,25 @@ export interface Path {
   readonly into: MediumSide;
 }
 
+export type PathEnds = Pick<Path, 'from' | 'into'>;
+
+/** The first and the last medium of a question at a wave. */
+export function readEnds(question: Question, wave: FitWave, sourceOf: SourceOf): PathEnds | Refusal {
+  const { conditions, extrapolate } = question;
+  const from = mediumSide(question.from, wave, conditions, extrapolate, sourceOf);
+  if (isRefusal(from)) return from;
+  const into = mediumSide(question.into, wave, conditions, extrapolate, sourceOf);
+  return isRefusal(into) ? into : { from, into };
+}
+
+/** A path without layers is its ends: any medium may be the first one there. */
 export function readPath(
   question: Question,
   wave: FitWave,
-  from: MediumSide,
-  into: MediumSide,
+  { from, into }: PathEnds,
   sourceOf: SourceOf,
 ): Path | Refusal {
+  if (question.layers.length === 0) return { from, layers: [], into };
   if (from.optics.n.im > LOSSY_INCIDENCE * Math.abs(from.optics.n.re)) {
     return refuse(
       'lossy-incidence',
