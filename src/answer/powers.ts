@@ -8,21 +8,15 @@ import { fresnel } from '../interface/fresnel.ts';
 import type { Optics } from '../interface/optics.ts';
 import { criticalAngle, WEAK_ABSORPTION } from '../interface/special-angles.ts';
 import { type BoundMedium, bindLiteral, bindMaterial } from '../medium/bound-medium.ts';
+import type { InterfaceAnswer } from './answer.ts';
 import { LOSSY_INCIDENCE, powerOf } from './interface-answer.ts';
 import type { MediumSpec, Polarization } from './question.ts';
 
-export interface SurfacePowers {
-  readonly Rs: number;
-  readonly Rp: number;
-  readonly R: number;
-  /** Null where the medium of incidence absorbs too much for a fraction of its power to mean anything. */
-  readonly Ts: number | null;
-  readonly Tp: number | null;
-  readonly T: number | null;
-  /** Null in total reflection. */
-  readonly refractionAngle_rad: number | null;
-  readonly totalReflection: boolean;
-}
+/** T is null where the medium of incidence absorbs too much for a fraction of its power to mean anything. */
+export type SurfacePowers = Pick<
+  InterfaceAnswer,
+  'Rs' | 'Rp' | 'R' | 'Ts' | 'Tp' | 'T' | 'refractionAngle_rad' | 'totalReflection'
+>;
 
 /** The medium of a question under its conditions, ready for many waves. */
 export function bindMedium(spec: MediumSpec, conditions: Conditions, extrapolate: boolean): BoundMedium {

@@ -4,21 +4,12 @@
  */
 
 import { type Optics, opticsFromIndex, opticsFromPermittivity } from '../interface/optics.ts';
-import type { Complex } from '../num/complex.ts';
 import { ONE } from '../num/complex.ts';
 import { SPEED_OF_LIGHT_m_per_s, VACUUM_PERMITTIVITY_F_per_m } from '../units/constants.ts';
+import type { TypedMedium } from '../units/parse-literal-medium.ts';
 
 /** The numbers of a literal medium as typed. */
-export interface LiteralMedium {
-  /** n + ik, where the index was given. */
-  readonly n?: Complex;
-  /** Extraordinary index of a uniaxial crystal, whose ordinary one is `n`. */
-  readonly ne?: Complex;
-  readonly eps?: Complex;
-  readonly mu?: Complex;
-  readonly lossTangent?: number;
-  readonly conductivity_S_per_m?: number;
-}
+export type LiteralMedium = TypedMedium;
 
 export function literalOptics(literal: LiteralMedium, vacuumWavelength_m: number): Optics {
   const mu = literal.mu ?? ONE;
