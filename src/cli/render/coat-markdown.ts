@@ -1,11 +1,11 @@
 /** Coatings as Markdown: a heading, one table for each kind of design, cautions as a list. */
 import type { CoatingReport } from '../../answer/coating-shape.ts';
 import { coatHeadline } from '../../present/coat-headline.ts';
+import { bareText, type DesignTable, mirrorTable, singleFilmTable } from '../../present/coat-page.ts';
 import {
   bandCell,
   DATA_END_NOTE,
   hasOpenBand,
-  indexCell,
   lengthCell,
   lengthPrefix,
   percentCell,
@@ -18,7 +18,7 @@ import { toAscii } from '../../units/to-ascii.ts';
 export function coatMarkdown(report: CoatingReport, style: PresentStyle): string {
   const prefix = lengthPrefix(report);
   const unit = `${prefix.shown}m`;
-  const { bare, ideal, singleFilms, twoLayers, mirror, limit, cautions } = report;
+  const { ideal, twoLayers, mirror, limit, cautions } = report;
   const below = `R < ${percentCell(limit, style)} % (${unit})`;
   const idealText =
     ideal?.n != null && ideal.thickness_m !== null
@@ -30,19 +30,12 @@ export function coatMarkdown(report: CoatingReport, style: PresentStyle): string
   const lines = [
     `### ${cell(coatHeadline(report, style))}`,
     '',
-    `Bare surface: R ${percentCell(bare.R, style)} %`,
+    bareText(report, style),
     '',
     ...idealText,
     ...table(
       ['film', 'n', `quarter wave (${unit})`, 'R (%)', 'R over the spread (%)', below],
-      singleFilms.map((f) => [
-        f.film.key,
-        indexCell(f, style),
-        lengthCell(f.thickness_m, prefix, style),
-        percentCell(f.R, style),
-        rangeCell(f, style),
-        bandCell(f.band, prefix, style),
-      ]),
+      cellsOf(singleFilmTable(report, style)),
     ),
     ...table(
       ['outer', 'inner', `outer (${unit})`, `inner (${unit})`, 'R (%)', 'R over the spread (%)', below],
@@ -64,12 +57,7 @@ export function coatMarkdown(report: CoatingReport, style: PresentStyle): string
           '',
           ...table(
             ['pairs', 'layers', 'R (%)', 'R over the spread (%)'],
-            mirror.rows.map((r) => [
-              String(r.pairs),
-              String(r.layers),
-              percentCell(r.R, style),
-              rangeCell(r, style),
-            ]),
+            cellsOf(mirrorTable(mirror, style)),
           ),
         ]
       : []),
@@ -83,6 +71,9 @@ function table(heads: readonly string[], rows: readonly (readonly string[])[]): 
   if (rows.length === 0) return [];
   return [line(heads), line(heads.map(() => '---')), ...rows.map((r) => line(r.map(cell))), ''];
 }
+
+const cellsOf = (designs: DesignTable<unknown> | null): readonly (readonly string[])[] =>
+  designs?.rows.map((row) => row.cells) ?? [];
 
 const line = (cells: readonly string[]): string => `| ${cells.join(' | ')} |`;
 const cell = (text: string): string => text.replaceAll('|', '\\|').replaceAll('*', '\\*');

@@ -26,26 +26,23 @@ export function stripView(answer: Answer | null, plan: Plan, style: DotStyle, pe
 
 /** `┏━━━┻━━━┓`: the boundary widens so that what belongs to it finds room inside. */
 export function openingView(plan: Plan, pen: Pen): string {
-  const { glyphs } = pen;
-  const toMiddle = boundaryColumn(plan) - plan.left - 1;
-  const line =
-    glyphs.openLeft +
-    glyphs.openLine.repeat(toMiddle) +
-    glyphs.openMiddle +
-    glyphs.openLine.repeat(plan.middle - toMiddle - 1) +
-    glyphs.openRight;
-  return lineOfSpans([span(' '.repeat(plan.left)), span(line, 'boundary')], plan.columns, pen);
+  const { openLeft, openMiddle, openRight } = pen.glyphs;
+  return widenedBoundary(plan, pen, [openLeft, openMiddle, openRight]);
 }
 
 /** `┗━━━┳━━━┛`: it closes to a line again above the curves. */
 export function closingView(plan: Plan, pen: Pen): string {
-  const { glyphs } = pen;
+  const { closeLeft, closeMiddle, closeRight } = pen.glyphs;
+  return widenedBoundary(plan, pen, [closeLeft, closeMiddle, closeRight]);
+}
+
+function widenedBoundary(
+  plan: Plan,
+  pen: Pen,
+  [left, middle, right]: readonly [string, string, string],
+): string {
   const toMiddle = boundaryColumn(plan) - plan.left - 1;
-  const line =
-    glyphs.closeLeft +
-    glyphs.openLine.repeat(toMiddle) +
-    glyphs.closeMiddle +
-    glyphs.openLine.repeat(plan.middle - toMiddle - 1) +
-    glyphs.closeRight;
-  return lineOfSpans([span(' '.repeat(plan.left)), span(line, 'boundary')], plan.columns, pen);
+  const line = (length: number): string => pen.glyphs.openLine.repeat(length);
+  const boundary = left + line(toMiddle) + middle + line(plan.middle - toMiddle - 1) + right;
+  return lineOfSpans([span(' '.repeat(plan.left)), span(boundary, 'boundary')], plan.columns, pen);
 }
