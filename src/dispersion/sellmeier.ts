@@ -67,8 +67,9 @@ export function boundSquareForm(form: SquareForm): BoundModel {
 }
 
 /**
- * Up to three poles and an offset, written out: by far the most frequent fit; missing poles have no strength. The coefficients stand in one typed array because the
- * compiler keeps numbers captured by a closure boxed, which costs more than the arithmetic.
+ * Up to three poles and an offset, written out: by far the most frequent fit; missing poles have no strength. The
+ * coefficients stand in one typed array because the compiler keeps numbers captured by a closure boxed, which costs more than
+ * the arithmetic.
  */
 function boundThreePoles(form: SquareForm): BoundModel {
   const c = Float64Array.of(form.offset, 0, 0, -1, 0, 0, 0, -1, 0, 0, 0, -1, 0);
