@@ -12,6 +12,7 @@ import { literalOptics } from '../medium/literal.ts';
 import { type MediumAtWave, mediumAtWave } from '../medium/optics-at.ts';
 import { isRefusal, type Refusal } from '../medium/refusal.ts';
 import { div, scale } from '../num/complex.ts';
+import { shiftDecimal } from '../num/shift-decimal.ts';
 import { SPEED_OF_LIGHT_m_per_s as c, VACUUM_IMPEDANCE_ohm } from '../units/constants.ts';
 import type { FitAnswer, MediumAnswer, SourceLine } from './answer.ts';
 import type { MediumSpec } from './question.ts';
@@ -110,7 +111,7 @@ function catalogueSide(medium: MediumAtWave, wave: FitWave, sourceOf: SourceOf):
       humidity: used.humidity ?? null,
       co2_ppm: used.co2_ppm ?? null,
       salinity_g_per_kg: used.salinity_g_per_kg ?? null,
-      transparency_m: transparency ? [transparency[0] * 1e-6, transparency[1] * 1e-6] : null,
+      transparency_m: transparency ? metres(transparency) : null,
       own: material.own === true,
       fit: fitAnswer(medium, sourceOf),
     },
@@ -122,7 +123,7 @@ function fitAnswer({ fit, inRange, secondOpinion }: MediumAtWave, sourceOf: Sour
   return {
     id: fit.id,
     source: sourceLine(fit.source, sourceOf),
-    range_m: [fit.range_um[0] * 1e-6, fit.range_um[1] * 1e-6],
+    range_m: metres(fit.range_um),
     inRange,
     accuracy: fit.accuracy_n ?? null,
     model: fit.parameters.model,
@@ -218,3 +219,9 @@ function waveInMedium(input: WaveInput, wave: FitWave): WavePart {
 
 /** Turns -0 into 0. */
 const clean = (x: number): number => (x === 0 ? 0 : x);
+
+/** Published ends of a range. */
+const metres = ([from_um, to_um]: readonly [number, number]): readonly [number, number] => [
+  shiftDecimal(from_um, -6),
+  shiftDecimal(to_um, -6),
+];

@@ -5,12 +5,13 @@
 import { axesOf } from '../catalog/choose-fit.ts';
 import type { Axis, Material } from '../catalog/types.ts';
 import { isRefusal } from '../medium/refusal.ts';
+import { shiftDecimal } from '../num/shift-decimal.ts';
 import { SPEED_OF_LIGHT_m_per_s } from '../units/constants.ts';
 import { SPECTRAL_LINES } from '../units/spectral-lines.ts';
 import type { MediumAnswer } from './answer.ts';
 import { mediumSide, type SourceOf } from './medium-side.ts';
 import type { WaveSpec } from './question.ts';
-import { bothReferences } from './wave.ts';
+import { bothReferences, waveAnswer } from './wave.ts';
 
 export interface ReferenceLine {
   readonly axis: Axis;
@@ -43,7 +44,7 @@ const WAVES: readonly NamedWave[] = [
   ...LASERS_um.map(
     (um): NamedWave => ({
       line: null,
-      wavelength_m: Number((um * 1e-6).toPrecision(9)),
+      wavelength_m: shiftDecimal(um, -6),
       inAir: false,
       text: `${um}um`,
     }),
@@ -71,7 +72,15 @@ export function referenceLines(
       if (isRefusal(both)) return [];
       const side = mediumSide({ kind: 'catalogue', material, axis: theAxis }, both, {}, false, sourceOf);
       if (isRefusal(side)) return [];
-      return [{ axis: theAxis, line, wave, vacuumWavelength_m: both.vacuum_um * 1e-6, medium: side.answer }];
+      return [
+        {
+          axis: theAxis,
+          line,
+          wave,
+          vacuumWavelength_m: waveAnswer(both, wave).vacuumWavelength_m,
+          medium: side.answer,
+        },
+      ];
     }),
   );
 }

@@ -1,6 +1,8 @@
 /** The facts of an entry that a buyer asks for first, with null where nothing is on file. */
+
 import type { Material } from '../catalog/types.ts';
 import { type HazardLevel, hazardLevel } from '../medium/hazard-level.ts';
+import { shiftDecimal } from '../num/shift-decimal.ts';
 
 export interface MaterialFacts {
   readonly key: string;
@@ -34,7 +36,9 @@ export function materialFacts(material: Material): MaterialFacts {
     name: material.name,
     class: material.class,
     formula: material.formula ?? null,
-    transparency_m: transparency_um ? [fromMicro(transparency_um[0]), fromMicro(transparency_um[1])] : null,
+    transparency_m: transparency_um
+      ? [shiftDecimal(transparency_um[0], -6), shiftDecimal(transparency_um[1], -6)]
+      : null,
     transparencyBasis: material.transparencyBasis ?? USUAL_BASIS,
     hygroscopic: handling.hygroscopic ?? null,
     hazardLevel: hazardLevel(material),
@@ -48,15 +52,8 @@ export function materialFacts(material: Material): MaterialFacts {
   };
 }
 
-/** By the decimal text, so that 0.21 um is 2.1e-7 m and no neighbour of it. */
-const shifted = (value: number, power: number): number => Number(`${value}e${power}`);
-
-const fromMicro = (um: number): number => (String(um).includes('e') ? um * 1e-6 : shifted(um, -6));
-
-function scaled(value: number | undefined, power: number): number | null {
-  if (value === undefined) return null;
-  return String(value).includes('e') ? value * 10 ** power : shifted(value, power);
-}
+const scaled = (value: number | undefined, power: number): number | null =>
+  value === undefined ? null : shiftDecimal(value, power);
 
 const textOf = (value: unknown): string | null => (typeof value === 'string' ? value : null);
 const numberOf = (value: unknown): number | null => (typeof value === 'number' ? value : null);

@@ -115,12 +115,12 @@ const WAVE_NAMES = [
 ] as const;
 
 export function compareCsv({ parts, waves }: CompareReport, ascii: boolean): string {
-  const records = waves.flatMap(({ at, columns }) =>
+  const records = waves.flatMap(({ spec, at, columns }) =>
     parts.map((part, i) => {
       const data = partData(part);
       const column = columnData(columns[i] as PartAtWave | Refusal);
       return [
-        at.vacuum_um * 1e-6,
+        waveData(spec, at).vacuumWavelength_m,
         ...PART_NAMES.map((name) => data[name]),
         data.transparency_m?.[0],
         data.transparency_m?.[1],

@@ -1,5 +1,6 @@
 /** The hits of a search for programs: JSON and CSV, SI units, full precision; null with a reason beside it where there is no value. */
 import type { WaveSpec } from '../../answer/question.ts';
+import { waveAnswer } from '../../answer/wave.ts';
 import type { FitWave } from '../../catalog/choose-fit.ts';
 import type { FindReport, Hit } from '../../selection/find-report.ts';
 import type { SortOrder } from '../../selection/sort-order.ts';
@@ -33,11 +34,10 @@ export function findJson(report: FindReport, order: SortOrder, head: DocumentHea
   );
 }
 
-export const waveData = (spec: WaveSpec, at: FitWave) => ({
-  vacuumWavelength_m: at.vacuum_um * 1e-6,
-  airWavelength_m: at.air_um * 1e-6,
-  givenInAir: spec.inAir,
-});
+export const waveData = (spec: WaveSpec, at: FitWave) => {
+  const { vacuumWavelength_m, airWavelength_m, givenInAir } = waveAnswer(at, spec);
+  return { vacuumWavelength_m, airWavelength_m, givenInAir };
+};
 
 function hitData(hit: Hit) {
   const { facts, axis, alsoAxes, medium, reasons } = hit;
