@@ -1,5 +1,8 @@
 /** The cautions that go with a stated beam. */
 import type { CautionNote } from '../medium/caution.ts';
+import { type DisplayUnit, JOULE, WATT, WATT_PER_SQUARE_METRE } from '../units/display-unit.ts';
+import { formatQuantity } from '../units/format-quantity.ts';
+import { ASCII } from '../units/number-style.ts';
 import type { BeamAnswer } from './beam-answer.ts';
 import type { Beam } from './question.ts';
 
@@ -44,10 +47,11 @@ export function beamNotes(
 }
 
 function reflected(beam: Beam, R: number, answer: BeamAnswer): string {
-  if (beam.kind === 'power') return `${short(R * beam.power_W)} W`;
-  if (beam.kind === 'pulse') return `${short(R * beam.pulse.energy_J)} J per pulse`;
+  if (beam.kind === 'power') return short(R * beam.power_W, WATT);
+  if (beam.kind === 'pulse') return `${short(R * beam.pulse.energy_J, JOULE)} per pulse`;
   const { reflected: wave } = answer;
-  return wave ? `${short(wave.irradiance_W_per_m2)} W/m2` : 'the reflection';
+  return wave ? short(wave.irradiance_W_per_m2, WATT_PER_SQUARE_METRE) : 'the reflection';
 }
 
-const short = (x: number): string => String(Number(x.toPrecision(2)));
+const short = (value: number, unit: DisplayUnit): string =>
+  formatQuantity(value, unit, { significant: 2 }, { style: ASCII });

@@ -60,7 +60,13 @@ const WORDING: Readonly<Record<CautionCode, Wording>> = {
     'caution',
     (d, s) => `${s}: two sources disagree by ${signed(Number(d['difference']))} in n, more than they state`,
   ],
-  contradicted: ['note', (d, s) => `${s}: ${d['count']} printed value(s) elsewhere disagree with this fit`],
+  contradicted: [
+    'note',
+    (d, s) =>
+      d['count'] === 1
+        ? `${s}: a printed value elsewhere disagrees with this fit`
+        : `${s}: ${d['count']} printed values elsewhere disagree with this fit`,
+  ],
   'own-entry': ['note', (_, s) => `${s}: from your own catalogue folder, not from the bundled catalogue`],
   'temperature-not-modelled': [
     'caution',
