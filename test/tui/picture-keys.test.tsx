@@ -1,5 +1,7 @@
 import { afterEach, describe, expect, it } from 'vitest';
 import { makeQuestion } from '../../src/answer/question.ts';
+import { displayWidth } from '../../src/term/display-width.ts';
+import { fullLines } from '../../src/tui/picture/pages.ts';
 import { answerOf, refusalOf } from '../../src/tui/state.ts';
 import { index, named, vacuumWave } from '../helpers/ask.ts';
 import { Stage, type StageOptions } from './helpers/stage.tsx';
@@ -349,6 +351,24 @@ describe('pages', () => {
     stage.type('<escape>');
     expect(stage.state.page).toBeNull();
   });
+
+  it.each([40, 80, 119, 120, 160])(
+    'wraps what a key does to %i columns, each further line below the first, nothing cut or run together',
+    (columns) => {
+      open({ columns, rows: 40 }).type('?');
+      const page = stage.state.page;
+      const lines = page ? fullLines(stage.state, page, stage.world, columns) : [];
+      for (const { text, right } of lines) {
+        expect(displayWidth(text + (right?.text ?? ''))).toBeLessThanOrEqual(columns - 3);
+        // Where lines stand side by side there is a gap, and the right one begins at the same column everywhere.
+        if (right) expect([text.endsWith('  '), displayWidth(text)]).toEqual([true, (columns - 3 + 2) >> 1]);
+      }
+      expect(lines.some(({ right }) => right !== undefined)).toBe(columns >= 120);
+      const texts = [...lines.map((l) => l.text), ...lines.map((l) => l.right?.text ?? '')];
+      const words = texts.join(' ').replace(/\s+/g, ' ');
+      for (const { help } of stage.world.bindings.actions) expect(words).toContain(help);
+    },
+  );
 
   it('goes back with q, Esc, h, Left and Backspace, and never ends the program', () => {
     for (const key of ['q', '<escape>', 'h', '<left>', '<backspace>']) {

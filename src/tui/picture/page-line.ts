@@ -6,6 +6,8 @@ export interface PageLine {
   readonly mark: string;
   readonly role: Role;
   readonly text: string;
+  /** The right one of two columns; `text` is as wide as the left one. */
+  readonly right?: Pick<PageLine, 'role' | 'text'>;
   /** Laid out in columns: broken only where it is wider than the page. */
   readonly isLaidOut?: true;
   /** What can be put between the two media from here. */

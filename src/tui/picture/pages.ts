@@ -1,6 +1,6 @@
 /**
- * Pages to read: sources (each in its half), cautions, keys, what was copied, coatings, order check, comparison. A page takes the place of the numbers; wave
- * and geometry stay in sight above.
+ * Pages to read: sources (each in its half), cautions, keys, what was copied, coatings, order check, comparison. A page
+ * takes the place of the numbers; wave and geometry stay in sight above.
  */
 import { displayWidth } from '../../term/display-width.ts';
 import type { NumberStyle } from '../../units/number-style.ts';
@@ -57,7 +57,12 @@ export function fullLines(state: State, page: Page, world: World, columns: numbe
   const wide = Math.min(columns, WIDEST);
   switch (page.name) {
     case 'keys':
-      return finish(keyLines(state, page.filter?.text ?? '', world), state, columns, false);
+      return finish(
+        keyLines(state, page.filter?.text ?? '', world, textWidth(columns)),
+        state,
+        columns,
+        false,
+      );
     case 'cautions':
       return finish(filtered(cautionsOf(state), page), state, wide);
     case 'coatings':
@@ -134,7 +139,7 @@ export function nextMark(
 export function pageText(state: State, page: Page, world: World): string {
   const { columns } = sceneOf(state, world).plan;
   return fullLines(state, page, world, columns)
-    .map(({ mark, text }) => (mark === '' ? text : `${mark} ${text}`).trimEnd())
+    .map(({ mark, text, right }) => `${mark === '' ? '' : `${mark} `}${text}${right?.text ?? ''}`.trimEnd())
     .join('\n');
 }
 

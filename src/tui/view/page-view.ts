@@ -18,7 +18,9 @@ export function pageView(
       return lineOfSpans([span(` ${pen.glyphs.focus}`, 'marker'), span(line.text, 'focus')], columns, pen);
     const isMarked = line.mark !== '';
     const mark = span(` ${line.mark}`.padEnd(2) + (isMarked ? ' ' : ''), isMarked ? line.role : 'text');
-    return lineOfSpans([mark, span(line.text, isMarked ? 'text' : line.role)], columns, pen);
+    const { right } = line;
+    const beside = right ? [span(right.text, right.role)] : [];
+    return lineOfSpans([mark, span(line.text, isMarked ? 'text' : line.role), ...beside], columns, pen);
   });
 }
 
