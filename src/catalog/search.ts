@@ -7,7 +7,8 @@
  * ordered by the number of typing slips). Within a step: key before name before alias and code before formula, then the order of the entries given. So
  * equal input gives equal output, and typing on never moves an exact hit from the top.
  *
- * Fuse alone takes some 10 ms over 10,000 entries; only the entries that share most letter pairs with the text reach it.
+ * A key press must not be felt over 10,000 entries: letter pairs choose the entries looked at, and only those of few enough
+ * slips reach Fuse, which alone would take some 10 ms.
  */
 import Fuse from 'fuse.js';
 import type { CatalogueEntry } from './entries.ts';
@@ -45,12 +46,12 @@ const FUSE_OPTIONS = {
   ],
   includeScore: true,
   ignoreLocation: true,
-  // Generous: `countSlips` judges what Fuse lets through.
+  // Generous: `countSlips` has judged before.
   threshold: 0.5,
   minMatchCharLength: 2,
 };
 
-/** Entries handed to Fuse per search. */
+/** Entries whose slips are counted per search. */
 const SIMILAR_POOL = 160;
 /** Shorter texts hold too few letters to tell a slip from another word. */
 const SIMILAR_FROM = 3;
@@ -59,44 +60,57 @@ const SIMILAR_FROM = 3;
 export function makeSearch(entries: readonly CatalogueEntry[]): Search {
   const docs = entries.map(searchable);
   const pairs = createPairIndex(docs.map((d) => d.tight));
+  const all = docs.map((_, index) => index);
+  const classes = [...new Set(entries.map((entry) => entry.class))].map(wordLines);
   const { keys, records } = Fuse.createIndex<Searchable>(FUSE_OPTIONS.keys, docs).toJSON();
 
   return (text, limit = entries.length) => {
     const tight = foldTight(text);
     if (tight === '') return entries.slice(0, limit).map((entry) => ({ entry, closeness: 'beginning' }));
-    const direct = directHits(docs, tight, wordsOf(text));
-    const hits = direct.slice(0, limit);
-    const taken = new Set(direct.map((h) => h.index));
-    const similar =
-      hits.length < limit && tight.length >= SIMILAR_FROM
-        ? similarTo(tight, (i) => !taken.has(i)).slice(0, limit - hits.length)
-        : [];
-    return [...hits, ...similar].flatMap(({ index, closeness }) => {
+    const hits = directHits(docs, candidates(wordsOf(text)), soughtIn(tight, text));
+    if (hits.length < limit && tight.length >= SIMILAR_FROM) {
+      const taken = new Set(hits.map(({ index }) => index));
+      hits.push(...similarTo(tight, (index) => !taken.has(index)));
+    }
+    const listed: SearchHit[] = [];
+    for (const { index, closeness } of hits) {
       const entry = entries[index];
-      return entry ? [{ entry, closeness }] : [];
-    });
+      if (entry && listed.length < limit) listed.push({ entry, closeness });
+    }
+    return listed;
   };
 
+  /** Entries beside which there is no direct hit. The pairs are those of the names: a word that may be one of a class opens all. */
+  function candidates(words: readonly string[]): readonly number[] {
+    const mayBeClass = words.some((word) => classes.some((lines) => lines.includes(`\n${word}`)));
+    return mayBeClass ? all : (pairs.holdingRarest(words) ?? all);
+  }
+
   function similarTo(tight: string, admit: (index: number) => boolean): readonly Hit[] {
-    const pool = pairs.closest(tight, SIMILAR_POOL, admit);
-    const subset = pool.flatMap((index) => docs[index] ?? []);
+    const most = allowedSlips(tight);
+    const pool = pairs.closest(tight, SIMILAR_POOL, admit).flatMap((index) => {
+      const item = docs[index];
+      const slips = item ? slipsTo(tight, item, most) : most + 1;
+      return item && slips <= most ? [{ index, item, slips }] : [];
+    });
     // The prepared records of the pool, renumbered: no text is indexed again.
     const index = Fuse.parseIndex<Searchable>({
       keys,
       records: pool.flatMap((from, i) => {
-        const record = records[from];
+        const record = records[from.index];
         return record ? [{ ...record, i }] : [];
       }),
     } as Parameters<typeof Fuse.parseIndex<Searchable>>[0]);
-    return new Fuse(subset, FUSE_OPTIONS, index)
+    return new Fuse(
+      pool.map(({ item }) => item),
+      FUSE_OPTIONS,
+      index,
+    )
       .search(tight)
-      .map((r) => ({
-        index: pool[r.refIndex] ?? 0,
-        closeness: 'similar' as const,
-        slips: slipsTo(tight, r.item),
-        score: r.score ?? 1,
-      }))
-      .filter((hit) => hit.slips <= allowedSlips(tight))
+      .flatMap(({ refIndex, score = 1 }) => {
+        const hit = pool[refIndex];
+        return hit ? [{ index: hit.index, closeness: 'similar' as const, slips: hit.slips, score }] : [];
+      })
       .sort((a, b) => a.slips - b.slips || round(a.score) - round(b.score) || a.index - b.index);
   }
 }
@@ -104,14 +118,18 @@ export function makeSearch(entries: readonly CatalogueEntry[]): Search {
 /** A slip in three letters is still the same word; two in three is another one. */
 const allowedSlips = (tight: string): number => Math.max(1, Math.floor(tight.length / 3));
 
-/** Fewest slips to a whole name of the entry, or, half a slip worse, to the beginning of one. */
-function slipsTo(tight: string, doc: Searchable): number {
-  const texts = [doc.key, doc.name, ...doc.other, doc.formula];
-  return Math.min(
-    ...texts
-      .map((text) => countSlips(tight, text))
-      .map(({ whole, beginning }) => Math.min(whole, beginning + 0.5)),
-  );
+/** Fewest slips to a whole name of the entry, or, half a slip worse, to the beginning of one; infinite beyond `most`. */
+function slipsTo(tight: string, { key, name, other, formula }: Searchable, most: number): number {
+  let fewest = Number.POSITIVE_INFINITY;
+  const against = (text: string): void => {
+    const { whole, beginning } = countSlips(tight, text, most);
+    fewest = Math.min(fewest, whole, beginning + 0.5);
+  };
+  against(key);
+  against(name);
+  other.forEach(against);
+  against(formula);
+  return fewest;
 }
 
 /** Scores closer than this are equal, so that the order of the entries decides and not the last bit. */
@@ -144,7 +162,7 @@ function searchable(entry: CatalogueEntry): Searchable {
     other,
     formula,
     tight: `\n${[key, name, ...other, formula].join('\n')}\n`,
-    words: `\n${texts.flatMap(wordsOf).join('\n')}`,
+    words: texts.map(wordLines).join(''),
   };
 }
 
@@ -153,24 +171,54 @@ const wordsOf = (text: string): readonly string[] =>
     .split(/[^\p{L}\p{N}+*%]+/u)
     .filter((word) => word !== '');
 
-function directHits(docs: readonly Searchable[], tight: string, words: readonly string[]): readonly Hit[] {
-  // Four steps times four kinds of text: one list each keeps the order without a sort.
-  const lists: Hit[][] = Array.from({ length: 13 }, () => []);
-  const starts = words.map((word) => `\n${word}`);
-  for (const [index, doc] of docs.entries()) {
-    if (doc.tight.includes(tight)) {
-      const whole = doc.tight.includes(`\n${tight}\n`);
-      const begins = whole || doc.tight.includes(`\n${tight}`);
-      if (whole) lists[kindOf(doc, (s) => s === tight)]?.push({ index, closeness: 'exact' });
-      else if (begins)
-        lists[4 + kindOf(doc, (s) => s.startsWith(tight))]?.push({ index, closeness: 'beginning' });
-      else if (starts.every((s) => doc.words.includes(s))) lists[8]?.push({ index, closeness: 'word' });
-      else lists[9 + kindOf(doc, (s) => s.includes(tight))]?.push({ index, closeness: 'part' });
-    } else if (starts.length > 0 && starts.every((s) => doc.words.includes(s))) {
-      lists[8]?.push({ index, closeness: 'word' });
-    }
+/** Each word of a text after a line break. */
+const wordLines = (text: string): string =>
+  wordsOf(text)
+    .map((word) => `\n${word}`)
+    .join('');
+
+const WORD = 8;
+const RANKS = 13;
+
+/** What is typed, in the forms that the entries are asked for. */
+interface Sought {
+  readonly tight: string;
+  /** With the line break that stands before a text, and before and after it. */
+  readonly beginning: string;
+  readonly whole: string;
+  readonly words: readonly string[];
+}
+
+const soughtIn = (tight: string, text: string): Sought => ({
+  tight,
+  beginning: `\n${tight}`,
+  whole: `\n${tight}\n`,
+  words: wordsOf(text).map((word) => `\n${word}`),
+});
+
+/** Four steps times four kinds of text, but words of any kind together: one list each keeps the order without a sort. */
+function directHits(docs: readonly Searchable[], among: readonly number[], sought: Sought): Hit[] {
+  const lists: Hit[][] = Array.from({ length: RANKS }, () => []);
+  for (const index of among) {
+    const doc = docs[index];
+    const rank = doc ? rankOf(doc, sought) : RANKS;
+    if (rank < RANKS) lists[rank]?.push({ index, closeness: closenessOf(rank) });
   }
   return lists.flat();
+}
+
+const closenessOf = (rank: number): Closeness =>
+  rank < 4 ? 'exact' : rank < WORD ? 'beginning' : rank === WORD ? 'word' : 'part';
+
+/** Place of an entry among the direct hits; `RANKS` where it is none. */
+function rankOf(doc: Searchable, { tight, beginning, whole, words }: Sought): number {
+  const beginsWords = (): boolean => words.length > 0 && words.every((word) => doc.words.includes(word));
+  if (!doc.tight.includes(tight)) return beginsWords() ? WORD : RANKS;
+  if (!doc.tight.includes(beginning))
+    return beginsWords() ? WORD : WORD + 1 + kindOf(doc, (s) => s.includes(tight));
+  return doc.tight.includes(whole)
+    ? kindOf(doc, (s) => s === tight)
+    : 4 + kindOf(doc, (s) => s.startsWith(tight));
 }
 
 function kindOf(doc: Searchable, matches: (text: string) => boolean): number {
