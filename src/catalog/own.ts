@@ -14,6 +14,7 @@ import { foldTight } from './fold.ts';
 import { lookupIn } from './lookup.ts';
 import { ownMaterialShape, sourceShape } from './material-shape.ts';
 import { SPELLING_RANK, spellingsOf } from './names.ts';
+import { once } from './once.ts';
 import { readOwnCsv } from './own-csv.ts';
 import { list } from './shape.ts';
 import type { Fit, Material, Source } from './types.ts';
@@ -48,6 +49,8 @@ export const OWN_BIBLIOGRAPHY = 'bibliography.json';
 /** Reads every file it can. Never throws, whatever the texts hold. */
 export function readOwnFiles(files: readonly OwnFile[], bundled: IndexedCatalogue): OwnEntries {
   const materials = new Map<string, Material>();
+  /** Keys by their tight folds: two that differ in case or hyphens alone are one to a person. */
+  const keys = new Map<string, string>();
   const sources = new Map<string, Source>();
   const problems: OwnProblem[] = [];
   const report = (file: OwnFile, faults: readonly Fault[]): void => {
@@ -76,7 +79,7 @@ export function readOwnFiles(files: readonly OwnFile[], bundled: IndexedCatalogu
       report(file, read.faults);
       continue;
     }
-    const taken = takenBy(read.material.key, bundled, materials);
+    const taken = takenBy(read.material.key, bundled, keys);
     if (taken) {
       report(file, [
         { path: 'key', message: `"${read.material.key}" ${taken}`, remedy: 'choose a key of its own' },
@@ -85,7 +88,9 @@ export function readOwnFiles(files: readonly OwnFile[], bundled: IndexedCatalogu
     }
     const faults = [...addSources(read.sources, 'sources'), ...checkMaterial(read.material, hasSource)];
     report(file, faults);
-    if (faults.length === 0) materials.set(read.material.key, read.material);
+    if (faults.length > 0) continue;
+    materials.set(read.material.key, read.material);
+    keys.set(foldTight(read.material.key), read.material.key);
   }
   return { materials: [...materials.values()], sources: [...sources.values()], problems };
 }
@@ -175,12 +180,12 @@ function controlCharacters(root: unknown): readonly Fault[] {
 function takenBy(
   key: string,
   bundled: IndexedCatalogue,
-  own: ReadonlyMap<string, Material>,
+  ownKeys: ReadonlyMap<string, string>,
 ): string | undefined {
   const tight = foldTight(key);
   const [first] = bundled.spellings(tight);
   if (first) return `names the bundled entry ${first.key}, which stays`;
-  const twin = [...own.keys()].find((k) => foldTight(k) === tight);
+  const twin = ownKeys.get(tight);
   return twin === undefined ? undefined : `is the key of another file (${twin})`;
 }
 
@@ -189,8 +194,9 @@ export function withOwn(bundled: IndexedCatalogue, own: OwnEntries): IndexedCata
   if (own.materials.length === 0 && own.sources.length === 0) return bundled;
   const materials = new Map(own.materials.map((m) => [m.key, m]));
   const sources = new Map(own.sources.map((s) => [s.id, s]));
-  const ownEntries: readonly CatalogueEntry[] = own.materials.map(entryOf);
-  const ownSpellings = own.materials.flatMap(spellingsOf);
+  const ownEntries = new Map(own.materials.map((m) => [m.key, entryOf(m)]));
+  const all = once((): readonly CatalogueEntry[] => [...bundled.entries(), ...ownEntries.values()]);
+  const ownSpellings = once(() => byTightForm(own.materials.flatMap(spellingsOf)));
   const merged: IndexedCatalogue = {
     version: bundled.version,
     hash: bundled.hash,
@@ -200,16 +206,26 @@ export function withOwn(bundled: IndexedCatalogue, own: OwnEntries): IndexedCata
     material: (key) => materials.get(key) ?? bundled.material(key),
     keys: () => [...bundled.keys(), ...materials.keys()],
     source: (id) => bundled.source(id) ?? sources.get(id),
-    entries: () => [...bundled.entries(), ...ownEntries],
-    entry: (key) => ownEntries.find((e) => e.key === key) ?? bundled.entry(key),
+    entries: all,
+    entry: (key) => ownEntries.get(key) ?? bundled.entry(key),
     spellings(tight) {
       const base = bundled.spellings(tight);
-      const mine = ownSpellings.filter((s) => s.tight === tight);
+      const mine = ownSpellings().get(tight) ?? [];
       return mine.length === 0 ? base : [...base, ...mine.map((s) => notAbove(base, s))];
     },
     sourceIds: () => [...bundled.sourceIds(), ...sources.keys()],
   };
   return merged;
+}
+
+function byTightForm(spellings: readonly Spelling[]): ReadonlyMap<string, readonly Spelling[]> {
+  const forms = new Map<string, Spelling[]>();
+  for (const spelling of spellings) {
+    const same = forms.get(spelling.tight);
+    if (same) same.push(spelling);
+    else forms.set(spelling.tight, [spelling]);
+  }
+  return forms;
 }
 
 /** An own spelling, weakened to the strongest bundled kind of the same loose form (or tight form, where none has that). */
