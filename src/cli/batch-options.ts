@@ -30,7 +30,8 @@ export const BATCH_OPTION_ROWS = {
   fixedPath: value({
     name: 'path',
     placeholder: 'PATH',
-    meaning: 'path of every row with its layers, in quotes: "air mgf2@qw n-bk7", or with > between the media',
+    meaning:
+      'path of every row with its layers, in quotes: "air magnesium-fluoride-film@qw n-bk7", or with > between the media',
     group: 'batch',
     parse: parseName,
     excludes: ['from', 'into'],

@@ -38,7 +38,7 @@ export async function runRows(
   }
   if (options.output !== undefined) emptyFile(output.descriptor);
   const interrupt = holdInterrupts();
-  const progress = progressOn(context, options);
+  const progress = progressOn(inputs.paths, context, options);
   const control: BatchControl = {
     interrupted: interrupt.interrupted,
     onInterrupt: interrupt.onInterrupt,
@@ -102,12 +102,15 @@ export function note(context: Context, options: OptionValues, text: string): voi
 
 const PROGRESS_EVERY_ms = 250;
 
-/** Rows done, on a terminal that shows nothing else. */
+/** Rows done, on a terminal on which neither answers appear nor questions are typed. */
 function progressOn(
+  paths: readonly string[],
   context: Context,
   options: OptionValues,
 ): { show: (rows: number) => void; clear: () => void } {
-  const on = context.stderrIsTTY && !context.stdoutIsTTY && !context.stdinIsTTY && !options.quiet;
+  const showsAnswers = context.stdoutIsTTY && (options.output ?? '-') === '-';
+  const isTyped = context.stdinIsTTY && paths.includes('-');
+  const on = context.stderrIsTTY && !showsAnswers && !isTyped && !options.quiet;
   if (!on) return { show: () => undefined, clear: () => undefined };
   const start_ms = context.clock().now_ms;
   let last_ms = start_ms;
