@@ -5,12 +5,35 @@ import { type Line, median, percentile } from './figure.ts';
 import { ENVIRONMENT, HOME, PROGRAM, ROOT } from './program.ts';
 import { type Pressed, Screen } from './screen.ts';
 
-/** A stretch of ordinary use: angles, polarization, a wave typed, media searched, pages opened and left. */
+/**
+ * A stretch of ordinary use: angles, polarization, a wave typed, media searched, pages opened and left, a layer and a power
+ * typed, a curve read off.
+ */
 const ORDINARY = [
   ...['a', '4', '5', '\r', 'p', 'p', 'p', '+', '+', '+', '-', '-'],
   ...['w', '1', '0', '6', '4', '\r', '+', '+', '-', '\x1b[C', '\x1b[C', '\x1b[D'],
   ...['i', 'g', 'e', 'r', '\x1b[B', '\r', 'f', 'w', 'a', 't', 'e', 'r', '\r'],
   ...['?', '\x1b', 'd', '\x1b', 's', '\x1b[B', '\x1b[B', '\x1b[A', '\x1b', '\t', '\t', '\x1b'],
+  ...[
+    'm',
+    'n',
+    '=',
+    '1',
+    '\x1b',
+    'b',
+    '1',
+    '0',
+    'm',
+    'W',
+    '\x1b',
+    'r',
+    '\x1b[C',
+    '\x1b[C',
+    '\x1b[D',
+    '\x1b',
+    'x',
+    'x',
+  ],
 ];
 
 export async function keyPresses(repeats: number): Promise<readonly Line[]> {

@@ -33,7 +33,10 @@ export function unknownRow(columns: number): CellRow {
   };
 }
 
-/** The text that turns `before` into `after` on a screen of `columns` columns; it ends in the default style. */
+/**
+ * The text that turns `before` into `after` on a screen of `columns` columns. The style of the last cell written stays on, as
+ * `pen` says: the next frame mostly begins with another, and what stands between frames sets its own.
+ */
 export function diffFrames(
   before: readonly CellRow[],
   after: readonly CellRow[],
@@ -49,7 +52,7 @@ export function diffFrames(
     if (old.agreed && row.agreed) out += diffRow(old, row, y, pen, columns);
     else if (!isSameRow(old, row)) out += diffRow(unknownRow(columns), row, y, pen, columns);
   }
-  return out + setStyle(pen, PLAIN);
+  return out;
 }
 
 function diffRow(old: CellRow, row: CellRow, y: number, pen: Pen, columns: number): string {

@@ -43,7 +43,8 @@ export const PLAIN_THEME: Theme = {
   aside: {},
   field: { underline: true },
   focus: { inverse: true },
-  cursor: { inverse: true },
+  // As underlined as the text it stands in: a letter typed before it costs one switch less.
+  cursor: { underline: true, inverse: true },
   result: { bold: true },
   heading: { bold: true },
   key: { bold: true },

@@ -261,12 +261,12 @@ describe('bytes of a difference', () => {
 
   it.each([
     ['a plain digit', `${' '.repeat(50)}1.4585`, `${' '.repeat(50)}1.4586`, 10],
-    ['a bold digit', `${' '.repeat(50)}\x1b[1m1.4585\x1b[22m`, `${' '.repeat(50)}\x1b[1m1.4586\x1b[22m`, 17],
+    ['a bold digit', `${' '.repeat(50)}\x1b[1m1.4585\x1b[22m`, `${' '.repeat(50)}\x1b[1m1.4586\x1b[22m`, 14],
     [
       'a coloured digit',
       `${' '.repeat(50)}\x1b[1;33m1.4585\x1b[m`,
       `${' '.repeat(50)}\x1b[1;33m1.4586\x1b[m`,
-      20,
+      17,
     ],
     ['two digits close together', `${' '.repeat(50)}1.4585`, `${' '.repeat(50)}2.4586`, 14],
     [
@@ -276,6 +276,12 @@ describe('bytes of a difference', () => {
       13,
     ],
     ['two digits far apart', `1${' '.repeat(50)}1`, `2${' '.repeat(50)}2`, 12],
+    [
+      'a letter typed before the cursor of a field',
+      `${' '.repeat(94)}\x1b[4mfuse\x1b[4;7m \x1b[m`,
+      `${' '.repeat(94)}\x1b[4mfused\x1b[4;7m \x1b[m`,
+      18,
+    ],
     ['an emptied row', 'x'.repeat(80), '', 8],
     ['a shortened row', 'x'.repeat(80), 'x'.repeat(40), 9],
     ['nothing', 'same', 'same', 0],
