@@ -54,7 +54,8 @@ export async function coreLoops(): Promise<readonly Line[]> {
   const dispersion = await contest('dispersion-loops');
   const surface = await contest('fresnel-loops');
   return [
-    line('index of a glass', dispersion['index'], 0.9),
+    line('index of a glass, many waves', dispersion['indices'], 0.9),
+    line('index of a glass, wave by wave', dispersion['index']),
     line('group index of a glass', dispersion['groupIndex'], 0.9),
     line('complex Fresnel, s and p, as records', surface['records']),
     line('complex Fresnel, s and p, as numbers', surface['numbers'], 0.8),

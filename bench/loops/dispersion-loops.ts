@@ -20,18 +20,33 @@ const BK7: ModelParameters = {
 const OTHERS: readonly ModelParameters[] = [
   { model: 'sellmeier', offset: 2.1, poles: [{ B: 0.9, C_um2: 0.012 }], terms: [{ c: -0.01, power: 2 }] },
   { model: 'constant', n: 1.33, k: 0 },
+  {
+    model: 'sellmeier',
+    offset: 1,
+    poles: [
+      { B: 1.2, C_um2: 0.01 },
+      { B: 0.9, C_um2: 90 },
+    ],
+  },
 ] as unknown as readonly ModelParameters[];
 
-const COUNT = 4096;
-const REPEATS = 5;
+/** As many at a time as a batch evaluates; a long first call would be compiled before all of it had been seen. */
+const COUNT = 512;
+const REPEATS = 40;
 const waves_um = Float64Array.from({ length: COUNT }, (_, i) => 0.4 + (1.2 * i) / COUNT);
 const results = new Float64Array(COUNT);
 
 const bound = bindModel(BK7, {});
 for (const other of OTHERS) {
-  const { evaluate, evaluateFirst = evaluate } = bindModel(other, {});
+  const { evaluate, index, groupIndex, indexBlock } = bindModel(other, {});
   const jet = new Float64Array(8);
-  for (let i = 0; i < 20_000; i++) evaluateFirst(waves_um[i % COUNT]!, jet);
+  for (let i = 0; i < 20_000; i++) {
+    const L = waves_um[i % COUNT]!;
+    evaluate(L, jet);
+    index?.(L);
+    groupIndex?.(L);
+    if (i % 100 === 0) indexBlock?.(waves_um, 100, results);
+  }
 }
 
 function handIndex(): void {
@@ -46,6 +61,12 @@ function handIndex(): void {
     const x = L * L;
     results[i] = Math.sqrt(1 + (B1 * x) / (x - C1) + (B2 * x) / (x - C2) + (B3 * x) / (x - C3));
   }
+}
+
+function coreIndices(): void {
+  const { indexBlock } = bound;
+  if (!indexBlock) throw new Error('this fit has no short way to the n of many waves');
+  indexBlock(waves_um, COUNT, results);
 }
 
 function coreIndex(): void {
@@ -73,24 +94,15 @@ function handGroupIndex(): void {
   }
 }
 
-const jet = new Float64Array(8);
 function coreGroupIndex(): void {
-  const { evaluateFirst } = bound;
-  if (!evaluateFirst) throw new Error('this fit has no short way to dn/dL');
-  for (let i = 0; i < COUNT; i++) {
-    const L = waves_um[i]!;
-    evaluateFirst(L, jet);
-    results[i] = jet[0]! - L * jet[1]!;
-  }
+  const { groupIndex } = bound;
+  if (!groupIndex) throw new Error('this fit has no short way to the group index');
+  for (let i = 0; i < COUNT; i++) results[i] = groupIndex(waves_um[i]!);
 }
 
+const common = { result: () => results, evaluations: COUNT, repeats: REPEATS };
 race({
-  index: { hand: handIndex, core: coreIndex, result: () => results, evaluations: COUNT, repeats: REPEATS },
-  groupIndex: {
-    hand: handGroupIndex,
-    core: coreGroupIndex,
-    result: () => results,
-    evaluations: COUNT,
-    repeats: REPEATS,
-  },
+  indices: { hand: handIndex, core: coreIndices, ...common },
+  index: { hand: handIndex, core: coreIndex, ...common },
+  groupIndex: { hand: handGroupIndex, core: coreGroupIndex, ...common },
 });

@@ -40,7 +40,11 @@ export interface BoundModel {
   readonly evaluate: Evaluator;
   /** Only n, only for models whose k is zero: the cheap path for searches. The value `evaluate` writes, to rounding. */
   readonly index?: (wavelength_um: number) => number;
-  /** Writes n, dn/dL, k, dk/dL alone and leaves the higher derivatives untouched: the cheap path for group indices. */
+  /** n of the first `count` wavelengths, for models whose k is zero: the numbers `evaluate` writes, to the last bit. */
+  readonly indexBlock?: (wavelengths_um: Float64Array, count: number, n: Float64Array) => void;
+  /** n - L dn/dL of what `evaluate` writes, to rounding, for models whose k is zero; not finite where n^2 <= 0. */
+  readonly groupIndex?: (wavelength_um: number) => number;
+  /** Writes n, dn/dL, k, dk/dL alone and leaves the higher derivatives untouched: the cheap path of batches. */
   readonly evaluateFirst?: Evaluator;
   /** Writes Re mu_r, Im mu_r into the two-element array; absent where mu_r = 1. n of `evaluate` is sqrt(eps mu) then. */
   readonly permeability?: (wavelength_um: number, out: Float64Array) => void;

@@ -31,8 +31,15 @@ function squareForm(p: SellmeierParameters): SquareForm | undefined {
 export function bindSellmeier(p: SellmeierParameters): BoundModel {
   const form = squareForm(p);
   if (!form) return boundGeneral(p);
-  const plain = form.rising.length === 0 && form.falling.length === 0;
-  return plain && form.poles.length <= 12 ? boundThreePoles(form) : boundSquareForm(form);
+  return isShort(form) ? boundThreePoles(form) : boundSquareForm(form);
+}
+
+/** Above it the parts of `boundThreePoles` would cancel digits that this keeps. */
+const MOST_IN_OFFSET = 16;
+
+function isShort({ poles, rising, falling }: SquareForm): boolean {
+  const b = poles.filter((_, i) => i % 4 === 0).reduce((sum, each) => sum + Math.abs(each), 0);
+  return poles.length <= 12 && rising.length === 0 && falling.length === 0 && b <= MOST_IN_OFFSET;
 }
 
 const common = { used: {}, hasDerivative: true, derivativeOrder: 3, complex: false } as const;
@@ -67,28 +74,35 @@ export function boundSquareForm(form: SquareForm): BoundModel {
 }
 
 /**
- * Up to three poles and an offset, written out: by far the most frequent fit; missing poles have no strength. The
- * coefficients stand in one typed array because the compiler keeps numbers captured by a closure boxed, which costs more than
- * the arithmetic.
+ * Up to three poles and an offset, written out: by far the most frequent fit; missing poles have no strength. Each pole is taken
+ * apart, (b x + a)/(x - C) = b + D/(x - C), and the b join the offset: half the coefficients to fetch. They stand in one typed
+ * array because the compiler keeps numbers captured by a closure boxed, which costs more than the arithmetic.
  */
-function boundThreePoles(form: SquareForm): BoundModel {
-  const c = Float64Array.of(form.offset, 0, 0, -1, 0, 0, 0, -1, 0, 0, 0, -1, 0);
-  c.set(form.poles, 1);
+function boundThreePoles({ poles, offset }: SquareForm): BoundModel {
+  const c = Float64Array.of(offset, 0, -1, 0, -1, 0, -1);
+  for (let i = 0; i < poles.length / 4; i++) {
+    c[0]! += poles[4 * i]!;
+    c[2 * i + 1] = poles[4 * i + 3]!;
+    c[2 * i + 2] = poles[4 * i + 2]!;
+  }
   return {
     ...common,
     evaluate(wavelength_um, out) {
       const x = wavelength_um * wavelength_um;
-      const r1 = 1 / (x - c[3]!);
-      const r2 = 1 / (x - c[7]!);
-      const r3 = 1 / (x - c[11]!);
-      const f0 = c[0]! + (c[1]! * x + c[2]!) * r1 + (c[5]! * x + c[6]!) * r2 + (c[9]! * x + c[10]!) * r3;
-      const p1 = c[4]! * r1 * r1;
-      const p2 = c[8]! * r2 * r2;
-      const p3 = c[12]! * r3 * r3;
+      const r1 = 1 / (x - c[2]!);
+      const r2 = 1 / (x - c[4]!);
+      const r3 = 1 / (x - c[6]!);
+      const f1 = c[1]! * r1;
+      const f2 = c[3]! * r2;
+      const f3 = c[5]! * r3;
+      const square = c[0]! + f1 + f2 + f3;
+      const p1 = f1 * r1;
+      const p2 = f2 * r2;
+      const p3 = f3 * r3;
       const q1 = p1 * r1;
       const q2 = p2 * r2;
       const q3 = p3 * r3;
-      const n = f0 > 0 ? Math.sqrt(f0) : Number.NaN;
+      const n = square > 0 ? Math.sqrt(square) : Number.NaN;
       const h = 0.5 / n;
       const n1 = -(p1 + p2 + p3) * h;
       const n2 = (q1 + q2 + q3 - n1 * n1) * h;
@@ -104,24 +118,49 @@ function boundThreePoles(form: SquareForm): BoundModel {
     },
     evaluateFirst(wavelength_um, out) {
       const x = wavelength_um * wavelength_um;
-      const r1 = 1 / (x - c[3]!);
-      const r2 = 1 / (x - c[7]!);
-      const r3 = 1 / (x - c[11]!);
-      const f0 = c[0]! + (c[1]! * x + c[2]!) * r1 + (c[5]! * x + c[6]!) * r2 + (c[9]! * x + c[10]!) * r3;
-      const n = f0 > 0 ? Math.sqrt(f0) : Number.NaN;
+      const r1 = 1 / (x - c[2]!);
+      const r2 = 1 / (x - c[4]!);
+      const r3 = 1 / (x - c[6]!);
+      const f1 = c[1]! * r1;
+      const f2 = c[3]! * r2;
+      const f3 = c[5]! * r3;
+      const square = c[0]! + f1 + f2 + f3;
+      const n = square > 0 ? Math.sqrt(square) : Number.NaN;
       out[5] = 0;
       out[0] = n;
-      out[1] = (-wavelength_um * (c[4]! * r1 * r1 + c[8]! * r2 * r2 + c[12]! * r3 * r3)) / n;
+      out[1] = (-wavelength_um * (f1 * r1 + f2 * r2 + f3 * r3)) / n;
       out[4] = 0;
     },
     index(wavelength_um) {
       const x = wavelength_um * wavelength_um;
-      const square =
-        c[0]! +
-        (c[1]! * x + c[2]!) / (x - c[3]!) +
-        (c[5]! * x + c[6]!) / (x - c[7]!) +
-        (c[9]! * x + c[10]!) / (x - c[11]!);
+      const square = c[0]! + c[1]! / (x - c[2]!) + c[3]! / (x - c[4]!) + c[5]! / (x - c[6]!);
       return square > 0 ? Math.sqrt(square) : Number.NaN;
+    },
+    groupIndex(wavelength_um) {
+      const x = wavelength_um * wavelength_um;
+      const r1 = 1 / (x - c[2]!);
+      const r2 = 1 / (x - c[4]!);
+      const r3 = 1 / (x - c[6]!);
+      const f1 = c[1]! * r1;
+      const f2 = c[3]! * r2;
+      const f3 = c[5]! * r3;
+      const square = c[0]! + f1 + f2 + f3;
+      return (square + x * (f1 * r1 + f2 * r2 + f3 * r3)) / Math.sqrt(square);
+    },
+    indexBlock(wavelengths_um, count, n) {
+      const S = c[0]!;
+      const D1 = c[1]!;
+      const C1 = c[2]!;
+      const D2 = c[3]!;
+      const C2 = c[4]!;
+      const D3 = c[5]!;
+      const C3 = c[6]!;
+      for (let i = 0; i < count; i++) {
+        const L = wavelengths_um[i]!;
+        const x = L * L;
+        const square = S + D1 * (1 / (x - C1)) + D2 * (1 / (x - C2)) + D3 * (1 / (x - C3));
+        n[i] = square > 0 ? Math.sqrt(square) : Number.NaN;
+      }
     },
   };
 }

@@ -158,6 +158,7 @@ function makeEvaluator(fit: Fit, material: Material, conditions: Conditions, bou
     }
     if (warm?.absolute) applyThermalForm(warm.form, warm.from_K, warm.to_K, vacuum_um[i]!, jet);
   };
+  const { indexBlock } = bound;
   return {
     evaluate(waves, i, out, at) {
       evaluate(waves, i);
@@ -166,6 +167,11 @@ function makeEvaluator(fit: Fit, material: Material, conditions: Conditions, bou
       out[at + 1] = jet[K]!;
     },
     indexBlock(waves, count, n) {
+      if (indexBlock && !warm) {
+        indexBlock(inAir ? waves.air_um : waves.vacuum_um, count, n);
+        if (inAir) for (let i = 0; i < count; i++) n[i] = n[i]! * airIndex(waves.vacuum_um[i]!);
+        return;
+      }
       for (let i = 0; i < count; i++) {
         evaluate(waves, i);
         n[i] = jet[N]!;

@@ -80,6 +80,7 @@ export function quickOptics(survey: Survey, medium: QuickMedium): QuickOptics {
 /** n_g = n - L n' of the printed formula in its own reference, as the answer states it; null where the fit has no slope. */
 export function quickGroupIndex({ bound, wave }: QuickMedium): number | null {
   if (!bound.hasDerivative || bound.derivativeOrder < 1) return null;
+  if (bound.groupIndex) return bound.groupIndex(wave.vacuum_um);
   bound.evaluate(wave.vacuum_um, scratch);
   return scratch[N]! - wave.vacuum_um * scratch[N + 1]!;
 }

@@ -162,6 +162,15 @@ describe('cheap paths', () => {
         expect(full[4]).toBe(0);
         expect(Math.abs(model.index(value.um) - (full[0] as number))).toBeLessThan(4e-15);
       }
+      if (model.indexBlock) {
+        const n = new Float64Array(3).fill(-1);
+        model.indexBlock(Float64Array.of(value.um, value.um * 1.01, value.um), 2, n);
+        expect([...n]).toEqual([full[0], jetAt(model, value.um * 1.01)[0], -1]);
+      }
+      if (model.groupIndex) {
+        const want = (full[0] as number) - value.um * (full[1] as number);
+        expect(Math.abs(model.groupIndex(value.um) - want)).toBeLessThan(4e-15 * Math.abs(want));
+      }
       if (model.evaluateFirst) {
         const first = new Float64Array(JET_LENGTH).fill(Number.NaN);
         model.evaluateFirst(value.um, first);
@@ -178,5 +187,7 @@ describe('cheap paths', () => {
     const model = bindModel(glass.parameters, {});
     expect(model.index).toBeDefined();
     expect(model.evaluateFirst).toBeDefined();
+    expect(model.indexBlock).toBeDefined();
+    expect(model.groupIndex).toBeDefined();
   });
 });

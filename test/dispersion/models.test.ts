@@ -97,7 +97,28 @@ describe('Sellmeier', () => {
   it('gives NaN and not a false index where n^2 <= 0', () => {
     const p = TRANSPARENT_FITS[0]?.parameters as ModelParameters;
     expect(index(p, 10.1).re).toBeNaN();
-    expect(bindModel(p, {}).index?.(10.1)).toBeNaN();
+    const model = bindModel(p, {});
+    expect(model.index?.(10.1)).toBeNaN();
+    expect(model.groupIndex?.(10.1)).toBeNaN();
+    const n = new Float64Array(1);
+    model.indexBlock?.(Float64Array.of(10.1), 1, n);
+    expect(n[0]).toBeNaN();
+  });
+
+  it('loses no digit of a strong pole far away: silicon nitride, 40314 L^2/(L^2 - 1239.842^2) (Luke 2015)', () => {
+    const [C1, C2] = [0.1353406 ** 2, 1239.842 ** 2];
+    const p: ModelParameters = {
+      model: 'sellmeier',
+      offset: 1,
+      poles: [
+        { B: 3.0249, C_um2: C1 },
+        { B: 40314, C_um2: C2 },
+      ],
+    };
+    for (const L of [0.4, 1.55, 5]) {
+      const n = Math.sqrt(1 + (3.0249 * L * L) / (L * L - C1) + (40314 * L * L) / (L * L - C2));
+      expect(Math.abs(index(p, L).re - n)).toBeLessThan(1e-15);
+    }
   });
 
   it('follows germania-doped silica to pure germania, Fleming 1984', () => {

@@ -52,6 +52,10 @@ function put({ vacuum_um, air_um }: FitWave): void {
 function same(bound: BoundMedium, at: FitWave, expected: ReturnType<typeof mediumAtWave>): void {
   put(at);
   const reach = bound.indexAt(waves, 1, out, 0);
+  const alone = { vacuum_um: waves.vacuum_um.subarray(1), air_um: waves.air_um.subarray(1) };
+  const n = new Float64Array(1);
+  expect(bound.indexBlock(alone, 1, n)).toBe(reach === REFUSED ? 0 : 1);
+  if (reach !== REFUSED) expect(n[0]).toBe(out[0]);
   const optics = bound.opticsAt(waves, 1);
   const pole = isRefusal(expected) && expected.code === 'no-index-here';
   if (!pole) expect(bound.reachAt(waves, 1)).toBe(reach);
