@@ -6,7 +6,7 @@ import type { Line } from './figure.ts';
 import { ENVIRONMENT, HOME, isInstalled, PROGRAM } from './program.ts';
 import { compare } from './rounds.ts';
 
-const ROWS = 500_000;
+const ROWS = 1_000_000;
 
 /** The index of fused silica (Malitson 1965) behind each row, as an awk program. */
 const AWK = `BEGIN { FS = OFS = "," } NR == 1 { print $0, "n"; next } {
