@@ -16,7 +16,7 @@ export const LOG_COMMANDS = [
       },
       {
         name: 'ID',
-        meaning: 'the id of a record or its first digits; the words searched for',
+        meaning: 'the id of a record, its first digits, or last; the words searched for',
         optional: true,
         many: true,
       },

@@ -113,7 +113,9 @@ describe('log show and log last', () => {
     expect(out).toContain('halfspace air n=1.5 633nm\n');
     const last = await log.run(['log', 'last']);
     expect(last.out).toContain(`record ${log.last().id}`);
-    expect((await log.run(['log', 'show', log.last().id])).out).toBe(last.out);
+    for (const id of [log.last().id, 'last']) expect((await log.run(['log', 'show', id])).out).toBe(last.out);
+    expect((await log.run(['log', 'export', 'last'])).out).toBe(last.out);
+    expect((await log.run(['log', 'rerun', 'last'])).out).toContain(log.last().id);
   });
 
   it('in every form, every number to the last bit on request', async () => {

@@ -4,7 +4,7 @@ import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { afterEach, beforeEach, describe, expect, it } from 'vitest';
-import { PtySession } from '../helpers/pty.ts';
+import { isAlive, PtySession } from '../helpers/pty.ts';
 
 const PROGRAM =
   process.env['HALFSPACE_PROGRAM'] ?? fileURLToPath(new URL('../../dist/halfspace.js', import.meta.url));
@@ -100,6 +100,17 @@ describe.skipIf(!existsSync(PROGRAM))('the program in a terminal', () => {
     session.signal('SIGTERM');
     expect(await session.exited).toBe(143);
     expect(session.model.modes()).toMatchObject({ alternateScreen: false, cursorShown: true });
+  });
+
+  it('ends with the connection, and the last question is found again', async () => {
+    await start();
+    await type('a30\r', /angle 30°/);
+    const { pid } = session;
+    session.drop();
+    const end_ms = performance.now() + 5000;
+    while (isAlive(pid) && performance.now() < end_ms) await new Promise((r) => setTimeout(r, 10));
+    expect(isAlive(pid)).toBe(false);
+    expect(JSON.parse(readFileSync(configFile(), 'utf8')).last.incidenceAngle_rad).toBeCloseTo(Math.PI / 6, 12);
   });
 
   it('shows after a resize what a fresh start at that size shows', async () => {

@@ -16,6 +16,8 @@ import type { OptionKey, OptionValues } from '../options.ts';
 import { optionSpec } from '../options.ts';
 import { reportRefusal } from '../report-refusal.ts';
 
+const LAST = 'last';
+
 type Form = 'json' | 'csv' | 'markdown' | 'latex' | 'plain';
 
 const FORMS: Readonly<Record<LogActionName, readonly Form[]>> = {
@@ -63,10 +65,7 @@ async function act(
     }
     case 'show':
     case 'last': {
-      const entry =
-        action.name === 'show'
-          ? findRecord(reading.entries('newest-first'), action.id)
-          : (reading.records('newest-first').next().value ?? reading.trouble ?? emptyLogbook(reading.file));
+      const entry = recordWith(action.name === 'show' ? action.id : LAST, reading);
       if (isRefusal(entry)) return entry;
       if (entry.altered) say(alteredNote(entry), context);
       outlet.write(oneRecord(entry.record, options, head, ascii));
@@ -99,11 +98,18 @@ async function act(
 function findAll(ids: readonly string[], reading: Reading): readonly RecordEntry[] | Refusal {
   const found: RecordEntry[] = [];
   for (const id of ids) {
-    const entry = findRecord(reading.entries('newest-first'), id);
+    const entry = recordWith(id, reading);
     if (isRefusal(entry)) return entry;
     found.push(entry);
   }
   return found;
+}
+
+/** `last` in place of an id is the newest one. */
+function recordWith(id: string, reading: Reading): RecordEntry | Refusal {
+  if (id !== LAST) return findRecord(reading.entries('newest-first'), id);
+  const newest = reading.records('newest-first').next();
+  return newest.done ? (reading.trouble ?? emptyLogbook(reading.file)) : newest.value;
 }
 
 function formRefusal({ name }: LogAction, options: OptionValues): Refusal | undefined {

@@ -2,11 +2,14 @@
  * Keeps the last question, the media used and the drawing in the settings file: a while after they changed, and at the end.
  * While keys come, nothing is written.
  */
+import { setTimeout as sleep } from 'node:timers/promises';
 import type { State } from '../state.ts';
 import { plainQuestion } from './plain-question.ts';
 import type { SettingsFile } from './settings-file.ts';
 
 const QUIET_ms = 1500;
+/** So soon after the first change the file is made ready, so that it can be written at an ending that leaves no time. */
+const OPEN_ms = 100;
 
 export class KeptSettings {
   readonly #file: SettingsFile;
@@ -14,6 +17,7 @@ export class KeptSettings {
   #kept: State;
   #state: State;
   #timer: NodeJS.Timeout | undefined;
+  #opening: Promise<void> | undefined;
 
   constructor(file: SettingsFile, first: State, onProblem: (text: string) => void) {
     this.#file = file;
@@ -29,19 +33,26 @@ export class KeptSettings {
     clearTimeout(this.#timer);
     this.#timer = setTimeout(() => void this.save(), QUIET_ms);
     this.#timer.unref();
+    this.#opening ??= sleep(OPEN_ms, undefined, { ref: false }).then(() => this.#open());
   }
 
   /** Writes what has changed. */
   async save(): Promise<void> {
     clearTimeout(this.#timer);
     if (!this.#hasChanged) return;
-    const problem = (await this.#file.open()) ?? this.#write();
+    await this.#open();
+    const problem = this.#write();
     if (problem !== undefined) this.#onProblem(problem);
   }
 
   /** As `save`, where that needs no waiting: for endings that leave no time. */
   saveIfOpen(): void {
     if (this.#file.isOpen && this.#hasChanged) this.#write();
+  }
+
+  async #open(): Promise<void> {
+    const problem = await this.#file.open();
+    if (problem !== undefined) this.#onProblem(problem);
   }
 
   get #hasChanged(): boolean {
