@@ -97,22 +97,22 @@ export function createStackKernel(
  */
 export function propagate(kernel: StackKernel, k0_rad_per_m: number): void {
   startAtExit(kernel);
-  const { kind, layerMedium, thickness_m, k0d, decay, rescaleS, rescaleP, media, fields, waves } = kernel;
+  const { decay, rescaleS, rescaleP, media, waves } = kernel;
+  let j = kernel.layerCount - 1;
+  while (j >= 0) {
+    j = crossRealLayers(kernel, j, k0_rad_per_m);
+    if (j >= 0) crossComplexLayer(kernel, j--, k0_rad_per_m);
+  }
   let stepS = 1;
   let stepP = 1;
-  for (let j = kernel.layerCount - 1; j >= 0; j--) {
-    k0d[j] = k0_rad_per_m * (thickness_m[j] as number);
-    if (kind[layerMedium[j] as number] === COMPLEX) crossComplexLayer(kernel, j);
-    else crossRealLayer(kernel, j);
-    rescaleS[j] = keepInRange(fields, j * FIELD_STRIDE);
-    rescaleP[j] = keepInRange(fields, j * FIELD_STRIDE + 4);
-    stepS *= (decay[j] as number) * (rescaleS[j] as number);
-    stepP *= (decay[j] as number) * (rescaleP[j] as number);
+  for (let i = kernel.layerCount - 1; i >= 0; i--) {
+    stepS *= (decay[i] as number) * (rescaleS[i] as number);
+    stepP *= (decay[i] as number) * (rescaleP[i] as number);
   }
   // r = (y0 E - H)/(y0 E + H), scale = 2 y0/(y0 E + H); y0 = kappa0/mu0 (s), eps0/kappa0 (p), multiplied through.
   const from = kernel.incidence * MEDIUM_STRIDE;
-  enter(waves, R_S, media, from + KAPPA, from + MU, fields, 0);
-  enter(waves, R_P_TANGENTIAL, media, from + EPS, from + KAPPA, fields, 4);
+  enter(waves, R_S, media, from + KAPPA, from + MU, kernel.fields, 0);
+  enter(waves, R_P_TANGENTIAL, media, from + EPS, from + KAPPA, kernel.fields, 4);
   waves[EXIT_SCALE_S] = (waves[SCALE_S] as number) * stepS;
   waves[EXIT_SCALE_S + 1] = (waves[SCALE_S + 1] as number) * stepS;
   waves[EXIT_SCALE_P] = (waves[SCALE_P] as number) * stepP;
@@ -141,57 +141,97 @@ function startAtExit({ media, fields, exit, layerCount }: StackKernel): void {
   fields[at + 7] = 0;
 }
 
-/** Fields above layer j from those below, where eps and mu are real: c, g, Z and Y are real too. */
-function crossRealLayer(kernel: StackKernel, j: number): void {
-  const { media, fields } = kernel;
-  const medium = kernel.layerMedium[j] as number;
-  const m = medium * MEDIUM_STRIDE;
-  const kind = kernel.kind[medium];
-  const x = kernel.k0d[j] as number;
-  let e = 1;
-  let c = 1;
-  let g = x;
-  if (kind === PROPAGATING) {
-    const k = media[m + KAPPA] as number;
-    c = Math.cos(k * x);
-    g = Math.sin(k * x) / k;
-  } else if (kind === EVANESCENT) {
-    const k = media[m + KAPPA + 1] as number;
-    e = Math.exp(-k * x);
-    const sinh = -Math.expm1(-2 * k * x) / 2;
-    c = 1 - sinh;
-    g = sinh / k;
+/**
+ * Fields above the layers from `from` upwards that have real eps and mu: there c, g, Z and Y are real too. Stops at the first
+ * complex layer and returns its number, -1 where there is none. The fields in hand stay in variables all the way.
+ */
+function crossRealLayers(kernel: StackKernel, from: number, k0_rad_per_m: number): number {
+  const { media, fields, kind, layerMedium, thickness_m, k0d, decay, rescaleS, rescaleP } = kernel;
+  let at = (from + 1) * FIELD_STRIDE;
+  let sEr = fields[at] as number;
+  let sEi = fields[at + 1] as number;
+  let sHr = fields[at + 2] as number;
+  let sHi = fields[at + 3] as number;
+  let pEr = fields[at + 4] as number;
+  let pEi = fields[at + 5] as number;
+  let pHr = fields[at + 6] as number;
+  let pHi = fields[at + 7] as number;
+  let j = from;
+  for (; j >= 0; j--) {
+    const medium = layerMedium[j] as number;
+    const how = kind[medium];
+    if (how === COMPLEX) break;
+    const m = medium * MEDIUM_STRIDE;
+    const x = k0_rad_per_m * (thickness_m[j] as number);
+    let e = 1;
+    let c = 1;
+    let g = x;
+    if (how === PROPAGATING) {
+      const k = media[m + KAPPA] as number;
+      c = Math.cos(k * x);
+      g = Math.sin(k * x) / k;
+    } else if (how === EVANESCENT) {
+      const k = media[m + KAPPA + 1] as number;
+      e = Math.exp(-k * x);
+      const sinh = -Math.expm1(-2 * k * x) / 2;
+      c = 1 - sinh;
+      g = sinh / k;
+    }
+    const zs = (media[m + Z_S] as number) * g;
+    const ys = (media[m + Y_S] as number) * g;
+    const zp = (media[m + Z_P] as number) * g;
+    const yp = (media[m + Y_P] as number) * g;
+    // The new E is stored last: the new H needs the old one.
+    const nextSEr = c * sEr + zs * sHi;
+    const nextSEi = c * sEi - zs * sHr;
+    sHr = c * sHr + ys * sEi;
+    sHi = c * sHi - ys * sEr;
+    sEr = nextSEr;
+    sEi = nextSEi;
+    const nextPEr = c * pEr + zp * pHi;
+    const nextPEi = c * pEi - zp * pHr;
+    pHr = c * pHr + yp * pEi;
+    pHi = c * pHi - yp * pEr;
+    pEr = nextPEr;
+    pEi = nextPEi;
+    const sizeS = Math.abs(sEr) + Math.abs(sEi) + Math.abs(sHr) + Math.abs(sHi);
+    const sizeP = Math.abs(pEr) + Math.abs(pEi) + Math.abs(pHr) + Math.abs(pHi);
+    let factorS = 1;
+    let factorP = 1;
+    if (!(sizeS <= TOO_LARGE && sizeS >= TOO_SMALL && sizeP <= TOO_LARGE && sizeP >= TOO_SMALL)) {
+      factorS = rescaling(sizeS);
+      factorP = rescaling(sizeP);
+      sEr *= factorS;
+      sEi *= factorS;
+      sHr *= factorS;
+      sHi *= factorS;
+      pEr *= factorP;
+      pEi *= factorP;
+      pHr *= factorP;
+      pHi *= factorP;
+    }
+    k0d[j] = x;
+    decay[j] = e;
+    rescaleS[j] = factorS;
+    rescaleP[j] = factorP;
+    at = j * FIELD_STRIDE;
+    fields[at] = sEr;
+    fields[at + 1] = sEi;
+    fields[at + 2] = sHr;
+    fields[at + 3] = sHi;
+    fields[at + 4] = pEr;
+    fields[at + 5] = pEi;
+    fields[at + 6] = pHr;
+    fields[at + 7] = pHi;
   }
-  const zs = (media[m + Z_S] as number) * g;
-  const ys = (media[m + Y_S] as number) * g;
-  const zp = (media[m + Z_P] as number) * g;
-  const yp = (media[m + Y_P] as number) * g;
-  const at = (j + 1) * FIELD_STRIDE;
-  const sEr = fields[at] as number;
-  const sEi = fields[at + 1] as number;
-  const sHr = fields[at + 2] as number;
-  const sHi = fields[at + 3] as number;
-  const pEr = fields[at + 4] as number;
-  const pEi = fields[at + 5] as number;
-  const pHr = fields[at + 6] as number;
-  const pHi = fields[at + 7] as number;
-  const to = j * FIELD_STRIDE;
-  kernel.decay[j] = e;
-  fields[to] = c * sEr + zs * sHi;
-  fields[to + 1] = c * sEi - zs * sHr;
-  fields[to + 2] = c * sHr + ys * sEi;
-  fields[to + 3] = c * sHi - ys * sEr;
-  fields[to + 4] = c * pEr + zp * pHi;
-  fields[to + 5] = c * pEi - zp * pHr;
-  fields[to + 6] = c * pHr + yp * pEi;
-  fields[to + 7] = c * pHi - yp * pEr;
+  return j;
 }
 
 /** The same where eps or mu is complex. */
-function crossComplexLayer(kernel: StackKernel, j: number): void {
-  const { media } = kernel;
+function crossComplexLayer(kernel: StackKernel, j: number, k0_rad_per_m: number): void {
+  const { media, fields, turning } = kernel;
   const m = (kernel.layerMedium[j] as number) * MEDIUM_STRIDE;
-  const x = kernel.k0d[j] as number;
+  const x = k0_rad_per_m * (kernel.thickness_m[j] as number);
   const kr = media[m + KAPPA] as number;
   const ki = media[m + KAPPA + 1] as number;
   const sinh = -Math.expm1(-2 * ki * x) / 2;
@@ -201,7 +241,6 @@ function crossComplexLayer(kernel: StackKernel, j: number): void {
   const sr = sin * cosh;
   const si = cos * sinh;
   const overK = 1 / (kr * kr + ki * ki);
-  const { turning } = kernel;
   turning[0] = cos * cosh;
   turning[1] = -sin * sinh;
   // -i g, so that what follows are plain complex products.
@@ -209,8 +248,11 @@ function crossComplexLayer(kernel: StackKernel, j: number): void {
   turning[3] = -(sr * kr + si * ki) * overK;
   // Im kappa d = -ln decay; expm1 above has the accuracy near 0 that 1 - decay^2 would lose.
   kernel.decay[j] = Math.exp(-ki * x);
+  kernel.k0d[j] = x;
   turn(kernel, j, 0, m + Z_S, m + Y_S);
   turn(kernel, j, 4, m + Z_P, m + Y_P);
+  kernel.rescaleS[j] = keepInRange(fields, j * FIELD_STRIDE);
+  kernel.rescaleP[j] = keepInRange(fields, j * FIELD_STRIDE + 4);
 }
 
 /** E = c E + Z g H, H = c H + Y g E for one polarization, with the layer's complex c and -i g in `turning`. */
@@ -239,16 +281,21 @@ function turn({ media, fields, turning }: StackKernel, j: number, side: number, 
   fields[to + 3] = cr * Hi + ci * Hr + yr * Ei + yi * Er;
 }
 
-/** Brings four fields back into the range of doubles if they left it; returns the factor used, as a rule 1. */
-function keepInRange(fields: Float64Array, at: number): number {
-  const size =
-    Math.abs(fields[at] as number) +
-    Math.abs(fields[at + 1] as number) +
-    Math.abs(fields[at + 2] as number) +
-    Math.abs(fields[at + 3] as number);
+/** The factor that brings fields of this size back into the range of doubles, as a rule 1. */
+function rescaling(size: number): number {
   if (size <= TOO_LARGE && size >= TOO_SMALL) return 1;
-  const factor = size > TOO_LARGE ? TOO_SMALL : TOO_LARGE;
-  for (let i = at; i < at + 4; i++) fields[i] = (fields[i] as number) * factor;
+  return size > TOO_LARGE ? TOO_SMALL : TOO_LARGE;
+}
+
+/** Brings four fields back into range if they left it; returns the factor used. */
+function keepInRange(fields: Float64Array, at: number): number {
+  const factor = rescaling(
+    Math.abs(fields[at] as number) +
+      Math.abs(fields[at + 1] as number) +
+      Math.abs(fields[at + 2] as number) +
+      Math.abs(fields[at + 3] as number),
+  );
+  if (factor !== 1) for (let i = at; i < at + 4; i++) fields[i] = (fields[i] as number) * factor;
   return factor;
 }
 
