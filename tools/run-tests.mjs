@@ -9,8 +9,8 @@ export const root = path.dirname(path.dirname(fileURLToPath(import.meta.url)));
 
 /** True where the build went well; it says itself why not. */
 export const build = () =>
-  spawnSync(process.execPath, ['--import', 'tsx', 'tools/build.ts'], { cwd: root, stdio: 'inherit' }).status ===
-  0;
+  spawnSync(process.execPath, ['--import', 'tsx', 'tools/build.ts'], { cwd: root, stdio: 'inherit' })
+    .status === 0;
 
 /** Runs the tests that the arguments name, all where they name none. The exit status, and a line that sums up. */
 export function runTests(node, args) {

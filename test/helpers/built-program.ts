@@ -16,13 +16,16 @@ export interface ProcessEnd {
 export interface ProcessOptions {
   readonly env?: Readonly<Record<string, string>>;
   readonly cwd?: string;
+  /** Another built program. */
+  readonly program?: string;
   readonly onStart?: (child: ChildProcess) => void;
 }
 
 /** Runs `halfspace` with words; nothing of the environment but PATH gets in. */
 export function runBuilt(words: readonly string[], options: ProcessOptions = {}): Promise<ProcessEnd> {
-  if (!existsSync(PROGRAM)) throw new Error(`${PROGRAM} is not there: build the program first`);
-  return runProcess(process.execPath, [PROGRAM, ...words], options);
+  const { program = PROGRAM } = options;
+  if (!existsSync(program)) throw new Error(`${program} is not there: build the program first`);
+  return runProcess(process.execPath, [program, ...words], options);
 }
 
 /** Runs a line in `sh`, in which `halfspace` is the built program. */
