@@ -107,6 +107,14 @@ function thicknessesOf(
 const idOf = (spec: MediumSpec): string =>
   spec.kind === 'literal' ? `=${spec.text}` : `${spec.material.key}:${spec.axis ?? ''}`;
 
+/** A medium made ready for curves by itself. */
+export function mediumForCurves(
+  spec: MediumSpec,
+  { conditions, extrapolate }: Pick<Question, 'conditions' | 'extrapolate'>,
+): CurveMedium {
+  return curveMedium(spec, bindMedium(spec, conditions, extrapolate));
+}
+
 function curveMedium(spec: MediumSpec, bound: BoundMedium): CurveMedium {
   return {
     spec,

@@ -21,7 +21,7 @@ const PULSES_UP_TO_k = 0.1;
 
 export function indexCurve(
   medium: CurveMedium,
-  question: Question,
+  question: Pick<Question, 'conditions' | 'extrapolate'>,
   wavelength_m: readonly number[],
   sourceOf: SourceOf,
 ): IndexCurve {

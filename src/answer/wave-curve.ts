@@ -33,7 +33,7 @@ const LIMITS: PointLimits = { least: 481, most: MOST_POINTS };
 /** Two octaves to either side of the octave that the wave is in: the span stays while the wave is stepped. */
 const OCTAVES = 2;
 /** Wider spans are shown by equal ratios. */
-const LINEAR_UP_TO = 4;
+export const LINEAR_UP_TO = 4;
 const REACH_POINTS = 400;
 const HALVINGS = 60;
 
@@ -55,7 +55,7 @@ export function waveCurve(path: CurvePath, span_m: Span_m = usualSpan(path), lim
 }
 
 /** Around the wave of the question as far as all media have data; the whole window where they have none at that wave. */
-export function usualSpan({ wavelength_m, media }: CurvePath): Span_m {
+export function usualSpan({ wavelength_m, media }: Pick<CurvePath, 'wavelength_m' | 'media'>): Span_m {
   const octave = 2 ** Math.round(Math.log2(wavelength_m));
   const window: Span_m = [octave / 2 ** OCTAVES, octave * 2 ** OCTAVES];
   if (!isCovered(media, wavelength_m)) return window;

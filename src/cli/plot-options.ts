@@ -18,7 +18,7 @@ export const PLOT_OPTION_ROWS = {
     name: 'plot',
     choices: PLOTS,
     meaning:
-      'a chart in place of the numbers: R over the angle, R and T and the indices over the wavelength, or |E|^2 through the path; its points with --json or --csv, a table with --linear',
+      'a chart in place of the numbers: R over the angle, R and T and the indices over the wavelength (of media compared, the indices), or |E|^2 through the path; its points with --json or --csv, a table with --linear',
     group: 'form',
     excludes: ['sweep', 'columns', 'digits'],
     parse: choiceParser('a plot', PLOTS),

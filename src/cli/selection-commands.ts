@@ -90,13 +90,17 @@ export const SELECTION_COMMANDS = [
       },
       { name: 'WAVE', meaning: 'one or more, behind the parts', many: true },
     ],
-    options: ['airWavelength', 'temperature_K', 'catalog', 'json', 'csv', 'markdown'],
+    options: ['airWavelength', 'temperature_K', 'catalog', 'json', 'csv', 'markdown', 'plot', 'span', 'svg'],
     examples: [
       {
         line: 'compare zinc-selenide@3mm germanium@3mm kcl@3mm 10.6um',
         meaning: 'windows: loss, hardness, hazards',
       },
       { line: 'compare n-bk7 fused-silica calcium-fluoride 400nm 1064nm', meaning: 'media at two waves' },
+      {
+        line: 'compare n-bk7 n-sf11 calcium-fluoride 633nm --plot wave',
+        meaning: 'their dispersion as a chart',
+      },
     ],
   },
   {

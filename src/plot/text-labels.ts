@@ -1,41 +1,22 @@
 /** The texts around the curves of a terminal chart: heading with legend, labels of marks, axes with ticks, labels at the line ends. */
 import { toAscii } from '../units/to-ascii.ts';
 import { type Chart, forEachRun } from './chart.ts';
-import { letterOf } from './dash-patterns.ts';
-import { DotRaster, dashesAt, type GlyphLevel } from './dot-raster.ts';
-import { axisGlyphs, HATCH, MARK_LINE } from './text-glyphs.ts';
+import type { GlyphLevel } from './dot-raster.ts';
+import { axisGlyphs, MARK_LINE } from './text-glyphs.ts';
 import type { TextGrid } from './text-grid.ts';
+import { headingRows, legendEntries } from './text-heading.ts';
 import { plotColumnOf, plotRowOf, type TextLayout } from './text-layout.ts';
 
 /** Title of the y axis, then a sample and the label of each series and of each hatched range. */
 export function writeHeading(chart: Chart, layout: TextLayout, level: GlyphLevel, grid: TextGrid): void {
-  if (!layout.hasHeading) return;
-  const samples = chart.series.flatMap(({ label }, i) =>
-    label === '' ? [] : [`${lineSample(level, i)} ${label}`],
-  );
-  const needsSamples = chart.series.length > 1 || layout.endColumns === 0;
-  const hatched = new Set((chart.hatched ?? []).map(({ label }) => label));
+  if (layout.headingRows === 0) return;
   const entries = [
     layout.yTexts.title,
-    ...(needsSamples ? samples : []),
-    ...[...hatched].map((label) => `${HATCH[level].repeat(3)} ${label}`),
+    ...legendEntries(chart, level, chart.series.length > 1 || layout.endColumns === 0),
     ...marksWithoutRow(chart, layout).map((label) => `${MARK_LINE[level]} ${label}`),
-  ];
-  writeCut(grid, 0, 0, plain(entries.join('  '), layout), layout);
-}
-
-/** A piece of the line long enough to see its dashes come again. */
-function lineSample(level: GlyphLevel, seriesIndex: number): string {
-  if (level === 'ascii') return letterOf(seriesIndex);
-  const dashes = dashesAt(level, seriesIndex);
-  const dots = dashes.reduce((sum, run) => sum + run, dashes[0] ?? 0);
-  const columns = Math.max(4, Math.min(9, Math.ceil(level === 'braille' ? dots / 2 : dots)));
-  const raster = new DotRaster(columns, 1, level);
-  const row = level === 'braille' ? 1 : 0;
-  raster.line([0, row], [raster.dotColumns - 1, row], dashes, 0, '');
-  return Array.from({ length: columns }, (_, column) => raster.glyph(0, column))
-    .join('')
-    .trimEnd();
+  ].map((text) => plain(text, layout));
+  const rows = headingRows(entries, layout.width, layout.headingRows, (text) => columnsOf(text, layout));
+  for (const [row, text] of rows.entries()) writeCut(grid, row, 0, text, layout);
 }
 
 interface PlacedLabel {
@@ -81,7 +62,7 @@ function marksWithoutRow(chart: Chart, layout: TextLayout): readonly string[] {
 
 export function writeMarkLabels(chart: Chart, layout: TextLayout, grid: TextGrid): void {
   for (const { row, column, text } of placeMarkLabels(chart, layout).placed)
-    grid.write((layout.hasHeading ? 1 : 0) + row, column, text);
+    grid.write(layout.headingRows + row, column, text);
 }
 
 export function writeAxes(layout: TextLayout, grid: TextGrid): void {

@@ -6,6 +6,7 @@ import type { Chart } from './chart.ts';
 import { type ChartScale, xScale, yScale } from './chart-scale.ts';
 import type { GlyphLevel } from './dot-raster.ts';
 import { type Clusters, simpleClusters } from './text-grid.ts';
+import { headingRows, legendEntries } from './text-heading.ts';
 import { type AxisTexts, axisTexts } from './tick-text.ts';
 
 export interface TextChartOptions {
@@ -35,7 +36,8 @@ export interface TextLayout {
     readonly rows: number;
     readonly columns: number;
   };
-  readonly hasHeading: boolean;
+  /** Rows of the title and the legend; none where there is no room. */
+  readonly headingRows: number;
   /** Rows below the heading for the labels of marks. */
   readonly markRows: number;
   readonly hasYTicks: boolean;
@@ -50,6 +52,10 @@ const ROWS_PER_TICK = 4;
 const COLUMNS_PER_TICK = 12;
 const LEAST_PLOT_COLUMNS = 20;
 const WIDEST_END_LABEL = 10;
+const LEAST_WITH_HEADING = 5;
+/** From this height on a legend that takes more than a row has them. */
+const LEAST_WITH_LEGEND_ROWS = 14;
+const MOST_HEADING_ROWS = 3;
 
 export function layOut(chart: Chart, options: TextChartOptions): TextLayout {
   const width = wholeCells(options.width);
@@ -58,18 +64,26 @@ export function layOut(chart: Chart, options: TextChartOptions): TextLayout {
   const clusters = options.clusters ?? simpleClusters;
   const columnsOf = (text: string): number => clusters(text).reduce((sum, cluster) => sum + cluster.width, 0);
 
-  const hasHeading = height >= 5;
   const markRows = (chart.marks ?? []).length === 0 || height < 8 ? 0 : height < 12 ? 1 : 2;
   const hasAxisRow = height >= 3;
   const hasTickRow = height >= 4;
   const hasXTitle = height >= 7;
-  const row = (hasHeading ? 1 : 0) + markRows;
-  const rows = Math.max(0, height - row - (hasAxisRow ? 1 : 0) - (hasTickRow ? 1 : 0) - (hasXTitle ? 1 : 0));
+  const foot = (hasAxisRow ? 1 : 0) + (hasTickRow ? 1 : 0) + (hasXTitle ? 1 : 0);
 
   const x = xScale(chart);
-  const yTickCount = Math.max(2, Math.round(rows / ROWS_PER_TICK));
-  const y = yScale(chart, x, yTickCount);
-  const yTexts = axisTexts(y, yTickCount, ascii);
+  const yAxis = (headRows: number) => {
+    const row = headRows + markRows;
+    const rows = Math.max(0, height - row - foot);
+    const tickCount = Math.max(2, Math.round(rows / ROWS_PER_TICK));
+    const y = yScale(chart, x, tickCount);
+    return { row, rows, y, yTexts: axisTexts(y, tickCount, ascii) };
+  };
+  const least = height >= LEAST_WITH_HEADING ? 1 : 0;
+  const title = yAxis(least).yTexts.title;
+  const hasLegend = height >= LEAST_WITH_LEGEND_ROWS && chart.series.length > 1;
+  const entries = [title, ...legendEntries(chart, options.level, true)];
+  const headRows = hasLegend ? headingRows(entries, width, MOST_HEADING_ROWS, columnsOf).length : least;
+  const { row, rows, y, yTexts } = yAxis(headRows);
   const tickColumns = Math.max(0, ...yTexts.ticks.map(({ text }) => columnsOf(text)));
   const hasYTicks = hasAxisRow && width >= tickColumns + 9;
   const column = hasYTicks ? tickColumns + 1 : hasAxisRow && width >= 2 ? 1 : 0;
@@ -90,7 +104,7 @@ export function layOut(chart: Chart, options: TextChartOptions): TextLayout {
     xTexts,
     yTexts,
     plot: { row, column, rows, columns },
-    hasHeading,
+    headingRows: headRows,
     markRows,
     hasYTicks,
     hasAxisRow,

@@ -10,6 +10,8 @@ export type WaveQuantity = 'wavelength' | 'frequency';
 export interface WaveAxis {
   readonly chart: ChartAxis;
   readonly shown: (wavelength_m: number) => number;
+  /** At a wave, named by it. */
+  readonly at: (wavelength_m: number) => ChartMark;
   /** Where the question stands. */
   readonly mark: (answer: Answer) => ChartMark;
 }
@@ -26,6 +28,10 @@ export function waveAxis(span_m: readonly [number, number], quantity: WaveQuanti
   const shown = (wavelength_m: number): number =>
     prefix.power < 0 ? si(wavelength_m) * 10 ** -prefix.power : si(wavelength_m) / 10 ** prefix.power;
   const [low, high] = span_m;
+  const at = (wavelength_m: number): ChartMark => ({
+    x: shown(wavelength_m),
+    label: formatQuantity(Number(si(wavelength_m).toPrecision(6)), unit, 'shortest'),
+  });
   return {
     chart: {
       label: isFrequency ? 'frequency' : 'wavelength in vacuum',
@@ -34,10 +40,11 @@ export function waveAxis(span_m: readonly [number, number], quantity: WaveQuanti
       range: [shown(low), shown(high)],
     },
     shown,
-    mark: ({ wave: { vacuumWavelength_m } }) => ({
-      x: shown(vacuumWavelength_m),
-      label: `here ${formatQuantity(Number(si(vacuumWavelength_m).toPrecision(6)), unit, 'shortest')}`,
-    }),
+    at,
+    mark: ({ wave: { vacuumWavelength_m } }) => {
+      const { x, label } = at(vacuumWavelength_m);
+      return { x, label: `here ${label}` };
+    },
   };
 }
 

@@ -237,6 +237,26 @@ describe('texts of several widths', () => {
     expect(widths).toEqual(new Array(12).fill(50));
     expect(lines.join('\n')).toContain('石英');
   });
+
+  it('gives a long legend as many rows as it needs, and cuts it in a low chart', () => {
+    const series = ['the first medium', 'the second medium', 'the third medium', 'the fourth medium'].map(
+      (label, i) => ({ label, x: [0, 1], y: [i, i + 1] }),
+    );
+    const chart: Chart = {
+      title: 'many',
+      x: { label: 'x', unit: '', scale: 'linear' },
+      y: { label: 'index', unit: '', scale: 'linear' },
+      series,
+    };
+    for (const level of ['braille', 'blocks', 'ascii'] as const) {
+      const tall = brailleChart(chart, { width: 60, height: 20, level });
+      expect(tall).toHaveLength(20);
+      for (const { label } of series) expect(tall.slice(0, 3).join('\n')).toContain(label);
+      const low = brailleChart(chart, { width: 60, height: 12, level });
+      expect(low[0]?.trimEnd()).toMatch(/(?:…|\.\.\.)$/);
+      expect(low[1]).not.toContain('medium');
+    }
+  });
 });
 
 function bit(column: number, row: number): number {

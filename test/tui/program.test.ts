@@ -110,7 +110,10 @@ describe.skipIf(!existsSync(PROGRAM))('the program in a terminal', () => {
     const end_ms = performance.now() + 5000;
     while (isAlive(pid) && performance.now() < end_ms) await new Promise((r) => setTimeout(r, 10));
     expect(isAlive(pid)).toBe(false);
-    expect(JSON.parse(readFileSync(configFile(), 'utf8')).last.incidenceAngle_rad).toBeCloseTo(Math.PI / 6, 12);
+    expect(JSON.parse(readFileSync(configFile(), 'utf8')).last.incidenceAngle_rad).toBeCloseTo(
+      Math.PI / 6,
+      12,
+    );
   });
 
   it('shows after a resize what a fresh start at that size shows', async () => {

@@ -20,12 +20,18 @@ export const run: Command = async ({ operands, options }, context) => {
     parts.push(part);
   }
   const { temperature_K } = options;
-  const report = compareReport(makeSurvey(catalogue), parts, split.waves, { temperature_K });
+  const survey = makeSurvey(catalogue);
+  const report = compareReport(survey, parts, split.waves, { temperature_K });
   if (isRefusal(report)) return reportRefusal(report, context);
   const ascii = options.ascii === true;
   const style = { ascii: context.ascii };
-  if (json)
-    context.write(compareJson(report, { version: context.version, catalogue: catalogue.hash }, ascii));
+  const head = { version: context.version, catalogue: catalogue.hash };
+  if (options.plot !== undefined) {
+    const { showComparePlot } = await import('../plot/compare-plot.ts');
+    const trouble = showComparePlot(report, survey, options, context, head);
+    return trouble ? reportRefusal(trouble, context) : 0;
+  }
+  if (json) context.write(compareJson(report, head, ascii));
   else if (options.csv) context.write(compareCsv(report, ascii));
   else context.write(options.markdown ? compareMarkdown(report, style) : compareText(report, style));
   return 0;

@@ -45,7 +45,7 @@ function besides(curve: Curve): object {
   }
 }
 
-function columnsOf(curve: Curve): readonly Column[] {
+export function columnsOf(curve: Curve): readonly Column[] {
   switch (curve.kind) {
     case 'angle':
       return [
@@ -82,7 +82,7 @@ function columnsOf(curve: Curve): readonly Column[] {
  * One table: curves over the same points stand side by side, those of several media told apart by their number. A curve with
  * fewer points has empty cells between them.
  */
-export function plotCsv({ curves }: Plot, ascii: boolean): string {
+export function plotCsv(curves: readonly Curve[], ascii: boolean): string {
   const [first, ...others] = curves;
   if (!first) return '';
   const [points, ...powers] = columnsOf(first);

@@ -27,11 +27,8 @@ export function readPlot(options: OptionValues, question: Question): PlotRequest
       const span_rad = span && angleSpan(span);
       return isRefusal(span_rad) ? span_rad : { kind, span_rad };
     }
-    case 'wave': {
-      const span_m = span && waveSpan(span, options.airWavelength === true);
-      if (isRefusal(span_m)) return span_m;
-      return { kind, span_m, quantity: quantityOf(span?.high ?? question.wave.text) };
-    }
+    case 'wave':
+      return readWavePlot(options, question.wave.text);
     case 'field':
       return span === undefined
         ? { kind }
@@ -42,6 +39,16 @@ export function readPlot(options: OptionValues, question: Question): PlotRequest
             'leave it out: the field is drawn through the whole path',
           );
   }
+}
+
+/** @param waveText the wave as typed: a frequency has its axis run along frequencies */
+export function readWavePlot(
+  { span, airWavelength }: Pick<OptionValues, 'span' | 'airWavelength'>,
+  waveText: string,
+): Extract<PlotRequest, { kind: 'wave' }> | Refusal {
+  const span_m = span && waveSpan(span, airWavelength === true);
+  if (isRefusal(span_m)) return span_m;
+  return { kind: 'wave', span_m, quantity: quantityOf(span?.high ?? waveText) };
 }
 
 function angleSpan({ low, high }: TypedSpan): Ends | Refusal {
