@@ -13,6 +13,7 @@
 import { rmSync } from 'node:fs';
 import os from 'node:os';
 import { batch } from './batch.ts';
+import { bigSearch } from './big-search.ts';
 import { figureText, isMissing, type Line, verdict } from './figure.ts';
 import { keyPresses } from './keys.ts';
 import { coreLoops, searchLoops, stackLoops } from './loops.ts';
@@ -30,7 +31,7 @@ const PARTS: Readonly<Record<string, () => Promise<readonly Line[]>>> = {
   keys: () => keyPresses(isQuick ? 1 : 3),
   core: coreLoops,
   stack: stackLoops,
-  search: searchLoops,
+  search: async () => [...(await searchLoops()), ...(await bigSearch())],
   batch: () => batch(isQuick ? 3 : 7),
   memory,
 };

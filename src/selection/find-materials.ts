@@ -5,13 +5,13 @@
 
 import { bothReferences } from '../answer/wave.ts';
 import { axesOf, type FitWave } from '../catalog/choose-fit.ts';
-import { foldLoose, foldTight } from '../catalog/fold.ts';
 import type { Axis, Material } from '../catalog/types.ts';
 import { hazardLevel } from '../medium/hazard-level.ts';
 import { isRefusal, type Refusal } from '../medium/refusal.ts';
 import { Candidate } from './candidate.ts';
-import { type Criteria, type Exclusion, RANGE_MEASURES, type RangeMeasure } from './criteria.ts';
+import { type Criteria, type Excludable, RANGE_MEASURES, type RangeMeasure } from './criteria.ts';
 import { matchesClass } from './material-class.ts';
+import { wordTest } from './material-words.ts';
 import type { Survey } from './survey.ts';
 import { isUndecided, type Undecided, type UndecidedReason, undecided } from './undecided.ts';
 import { within } from './value-range.ts';
@@ -32,130 +32,119 @@ export interface FindResult {
   readonly undecided: ReadonlyMap<UndecidedReason, number>;
 }
 
-/** How a material on an axis at the wave of the criteria is measured. */
-export type CandidateOf = (material: Material, axis: Axis, wave: FitWave | undefined) => Candidate;
+/** A material on each of its axes, at the wave of the criteria. */
+export type CandidatesOf = (material: Material, wave: FitWave | undefined) => readonly Candidate[];
+
+/** Nothing measured before. */
+export function freshCandidates(survey: Survey): CandidatesOf {
+  return (material, wave) => {
+    const described = axesOf(material);
+    // An entry of measured reflectances alone has no axis, and no data at any wave.
+    const axes: readonly Axis[] = described.length > 0 ? described : ['isotropic'];
+    return axes.map((axis) => new Candidate(survey, material, axis, wave));
+  };
+}
 
 /**
  * Refuses only a wave outside what the program covers.
- * @param candidateOf hands out candidates measured before, where the same wave is searched again and again.
+ * @param candidatesOf hands out candidates measured before, where the same wave is searched again and again.
  */
 export function findMaterials(
   survey: Survey,
   criteria: Criteria,
-  candidateOf: CandidateOf = (material, axis, wave) => new Candidate(survey, material, axis, wave),
+  candidatesOf: CandidatesOf = freshCandidates(survey),
 ): FindResult | Refusal {
   const wave = criteria.wave && bothReferences(criteria.wave);
   if (isRefusal(wave)) return wave;
   const found: Found[] = [];
   const reasons = new Map<UndecidedReason, number>();
+  const isAmong = classTest(survey.classes, criteria);
+  const hasWords = wordTest(criteria.words);
+  const asksHygroscopic = excludesHygroscopic(criteria);
   for (const material of survey.materials) {
-    if (!meetsFacts(material, criteria)) continue;
-    const verdict = judge(material, criteria, wave, candidateOf);
+    if (!isAmong(material.class) || !hasWords(material) || hasExcluded(material, criteria)) continue;
+    const verdict = judge(candidatesOf(material, wave), criteria);
     if (verdict === false) continue;
-    if (isUndecided(verdict)) reasons.set(verdict.undecided, (reasons.get(verdict.undecided) ?? 0) + 1);
-    else found.push(verdict);
+    const open = isUndecided(verdict) ? verdict.undecided : undefined;
+    const reason = open ?? (asksHygroscopic && !hygroscopicOnFile(material) ? 'not-on-file' : undefined);
+    if (reason) reasons.set(reason, (reasons.get(reason) ?? 0) + 1);
+    else if (!isUndecided(verdict)) found.push(verdict);
   }
   return { wave: wave ?? null, found, examined: survey.materials.length, undecided: reasons };
 }
 
 type Verdict = boolean | Undecided;
 
-/** What can be told from the material alone, without data of a wave. */
-function meetsFacts(material: Material, { words, classes, not }: Criteria): boolean {
-  if (classes.length > 0 && !classes.some((typed) => matchesClass(typed, material.class))) return false;
-  if (not.some((exclusion) => isExcluded(material, exclusion) === true)) return false;
-  return words.length === 0 || matchesWords(material, words);
+/** Whether media of a class are looked at; the classes are few and the media many. */
+function classTest(all: readonly string[], { classes, not }: Criteria): (materialClass: string) => boolean {
+  const excluded = not.flatMap((exclusion) => (exclusion.kind === 'class' ? [exclusion.text] : []));
+  const looked = new Set(
+    all.filter(
+      (name) =>
+        (classes.length === 0 || classes.some((typed) => matchesClass(typed, name))) &&
+        !excluded.some((typed) => matchesClass(typed, name)),
+    ),
+  );
+  return (materialClass) => looked.has(materialClass);
 }
 
-/** Undefined where the fact is not on file. */
-function isExcluded(material: Material, exclusion: Exclusion): boolean | undefined {
-  if (exclusion.kind === 'class') return matchesClass(exclusion.text, material.class);
-  const level = hazardLevel(material);
-  switch (exclusion.property) {
+const hasExcluded = (material: Material, { not }: Criteria): boolean =>
+  not.some((exclusion) => exclusion.kind === 'property' && hasProperty(material, exclusion.property));
+
+/** False too where the fact is not on file. */
+function hasProperty(material: Material, property: Excludable): boolean {
+  switch (property) {
     case 'toxic':
-      return level === 'toxic';
+      return hazardLevel(material) === 'toxic';
     case 'hazardous':
-      return level !== 'none-on-file';
-    case 'hygroscopic': {
-      const degree = material.handling?.hygroscopic;
-      return degree === undefined ? undefined : degree !== 'no';
-    }
+      return hazardLevel(material) !== 'none-on-file';
+    case 'hygroscopic':
+      return (material.handling?.hygroscopic ?? 'no') !== 'no';
   }
 }
 
-/** Every word begins a word of key, name, aliases, formula, code or class, or stands inside key or name. */
-export function matchesWords(material: Material, words: readonly string[]): boolean {
-  const texts = [
-    material.key,
-    material.name,
-    ...material.aliases,
-    material.formula ?? '',
-    material.glassCode ?? '',
-    material.class,
-  ];
-  const loose = texts.map((text) => `-${foldLoose(text).replace(/[^\p{L}\p{N}+*%-]+/gu, '-')}`);
-  const tight = texts.map(foldTight);
-  return words.every((typed) => {
-    const word = foldLoose(typed);
-    const joined = foldTight(typed);
-    return (
-      joined === '' ||
-      loose.some((text) => text.includes(`-${word}`)) ||
-      tight.some((text, i) => text.startsWith(joined) || (i < 2 && text.includes(joined)))
-    );
-  });
+/** The first axis that meets the conditions with the others that do; else what cannot be decided on the first such axis. */
+function judge(candidates: readonly Candidate[], criteria: Criteria): Found | false | Undecided {
+  let first: Candidate | undefined;
+  let open: Undecided | undefined;
+  let alsoAxes = NO_AXES;
+  for (const candidate of candidates) {
+    const verdict = judgeAxis(candidate, criteria);
+    if (isUndecided(verdict)) open ??= verdict;
+    else if (verdict && first) alsoAxes = [...alsoAxes, candidate.axis];
+    else if (verdict) first = candidate;
+  }
+  return first ? { candidate: first, alsoAxes } : (open ?? false);
 }
 
-function judge(
-  material: Material,
-  criteria: Criteria,
-  wave: FitWave | undefined,
-  candidateOf: CandidateOf,
-): Found | false | Undecided {
-  const fact = material.handling?.hygroscopic === undefined && excludesHygroscopic(criteria);
-  const described = axesOf(material);
-  // An entry of measured reflectances alone has no axis, and no data at any wave.
-  const axes: readonly Axis[] = described.length > 0 ? described : ['isotropic'];
-  const candidates = axes.map((axis) => candidateOf(material, axis, wave));
-  const verdicts = candidates.map((candidate) => judgeAxis(candidate, criteria));
-  const fitting = candidates.filter((_, i) => verdicts[i] === true);
-  const [first, ...others] = fitting;
-  if (first) {
-    return fact ? undecided('not-on-file') : { candidate: first, alsoAxes: others.map((o) => o.axis) };
-  }
-  return verdicts.find(isUndecided) ?? false;
-}
+const NO_AXES: readonly Axis[] = [];
+
+const hygroscopicOnFile = (material: Material): boolean => material.handling?.hygroscopic !== undefined;
 
 const excludesHygroscopic = (criteria: Criteria): boolean =>
   criteria.not.some((x) => x.kind === 'property' && x.property === 'hygroscopic');
 
-/** False as soon as one condition fails; else the first that cannot be decided; else true. */
+/** False as soon as one condition fails, the cheapest first; else the first that cannot be decided; else true. */
 function judgeAxis(candidate: Candidate, criteria: Criteria): Verdict {
-  let open: Undecided | undefined;
-  for (const verdict of verdicts(candidate, criteria)) {
-    if (verdict === false) return false;
-    if (isUndecided(verdict)) open ??= verdict;
-  }
-  return open ?? true;
-}
-
-/** Cheapest first. */
-function* verdicts(candidate: Candidate, criteria: Criteria): Generator<Verdict> {
   const { clear_m, ranges, maxLoss, thickness_m } = criteria;
+  let open: Undecided | undefined;
   const clear = clear_m ? candidate.isClear(clear_m) : true;
-  if (clear === false) yield false;
-  if (criteria.wave) yield candidate.medium ? true : undecided('no-data-at-wave');
-  if (clear === undefined) yield undecided('no-transparency-on-file');
+  if (clear === false) return false;
+  if (criteria.wave && !candidate.medium) open = undecided('no-data-at-wave');
+  if (clear === undefined) open ??= undecided('no-transparency-on-file');
   for (const measure of RANGE_MEASURES) {
     const range = ranges[measure];
     if (!range) continue;
     const value = measured(candidate, measure);
-    yield isUndecided(value) ? value : within(range, value);
+    if (isUndecided(value)) open ??= value;
+    else if (!within(range, value)) return false;
   }
   if (maxLoss !== undefined) {
     const loss = candidate.loss(thickness_m);
-    yield isUndecided(loss) ? loss : within({ to: maxLoss }, loss.fraction);
+    if (isUndecided(loss)) open ??= loss;
+    else if (!within({ to: maxLoss }, loss.fraction)) return false;
   }
+  return open ?? true;
 }
 
 /** A birefringence is asked by its size, whichever its sign. */

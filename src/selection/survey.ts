@@ -11,6 +11,8 @@ import { type AbsorptionInterpolant, bindAbsorption } from '../medium/absorption
 export interface Survey {
   /** In the order of the catalogue. */
   readonly materials: readonly Material[];
+  /** Of the materials, each once. */
+  readonly classes: readonly string[];
   readonly material: (key: string) => Material | undefined;
   readonly bind: (fit: Fit) => BoundModel;
   readonly absorption: (material: Material) => AbsorptionInterpolant;
@@ -20,8 +22,10 @@ export interface Survey {
 export function makeSurvey(catalogue: Pick<IndexedCatalogue, 'keys' | 'material' | 'source'>): Survey {
   const models = new Map<Fit, BoundModel>();
   const absorptions = new Map<Material, AbsorptionInterpolant>();
+  const materials = catalogue.keys().flatMap((key) => catalogue.material(key) ?? []);
   return {
-    materials: catalogue.keys().flatMap((key) => catalogue.material(key) ?? []),
+    materials,
+    classes: [...new Set(materials.map((material) => material.class))],
     material: (key) => catalogue.material(key),
     bind: (fit) => remembered(models, fit, () => bindModel(fit.parameters, {})),
     absorption: (material) => remembered(absorptions, material, () => bindAbsorption(material.absorption)),

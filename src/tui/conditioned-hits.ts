@@ -4,8 +4,10 @@
  * as they stand are taken with slips.
  */
 import type { WaveSpec } from '../answer/question.ts';
+import type { Material } from '../catalog/types.ts';
 import { isRefusal } from '../medium/refusal.ts';
-import { type FindResult, type Found, matchesWords } from '../selection/find-materials.ts';
+import type { FindResult, Found } from '../selection/find-materials.ts';
+import { wordTest } from '../selection/material-words.ts';
 import { type ConditionReading, parseConditions } from '../selection/parse-conditions.ts';
 import { defaultOrder, sortFound } from '../selection/sort-found.ts';
 import { UNDECIDED_WORDS, type UndecidedReason } from '../selection/undecided.ts';
@@ -22,8 +24,8 @@ export interface ConditionedHits {
 }
 
 const made = new WeakMap<World, WeakMap<WaveSpec, Map<string, ConditionedHits | undefined>>>();
-/** Texts kept: typing and deleting go over the same ones. */
-const MOST_TEXTS = 64;
+/** Texts kept, for the views of one frame and a letter taken back; lists of thousands are heavy to keep. */
+const MOST_TEXTS = 4;
 
 /** Undefined where the text holds nothing but words: then it is a name. */
 export function conditionedHits(text: string, wave: WaveSpec, world: World): ConditionedHits | undefined {
@@ -39,22 +41,22 @@ export function conditionedHits(text: string, wave: WaveSpec, world: World): Con
 }
 
 function findConditioned(text: string, wave: WaveSpec, world: World): ConditionedHits | undefined {
-  const { materials } = world.survey();
-  const classes = [...new Set(materials.map((m) => m.class))];
+  const { materials, classes } = world.survey();
   const reading = parseConditions(text, { classes, wave });
   if (reading.parts.every((part) => part.kind === 'word')) return undefined;
   const { words } = reading.criteria;
   const criteria = { ...reading.criteria, words: [] };
-  const result = world.find(criteria, words.length === 0 ? undefined : keysFor(words, world));
+  const result = world.find(criteria, words.length === 0 ? undefined : meant(words, world));
   if (isRefusal(result)) return { reading, found: [], count: result.message };
   const found = sortFound(result.found, defaultOrder(criteria), criteria);
   return { reading, found, count: countText(result, materials.length, criteria.wave) };
 }
 
 /** Those that hold the words; where none does, those that come close. */
-function keysFor(words: readonly string[], world: World): readonly string[] {
-  const strict = world.survey().materials.filter((m) => matchesWords(m, words));
-  return (strict.length > 0 ? strict : world.search(words.join(' '))).map(({ key }) => key);
+function meant(words: readonly string[], world: World): readonly Material[] {
+  const { materials, material } = world.survey();
+  const strict = materials.filter(wordTest(words));
+  return strict.length > 0 ? strict : world.search(words.join(' ')).flatMap(({ key }) => material(key) ?? []);
 }
 
 function countText({ found, undecided }: FindResult, total: number, wave: WaveSpec | undefined): string {

@@ -5,10 +5,10 @@
 import type { MediumSpec, Question } from '../answer/question.ts';
 import { bothReferences } from '../answer/wave.ts';
 import { axesOf, defaultAxis } from '../catalog/choose-fit.ts';
-import type { CatalogueEntry } from '../catalog/entries.ts';
+import { type CatalogueEntry, entryOf } from '../catalog/entries.ts';
 import type { Axis } from '../catalog/types.ts';
 import { isRefusal } from '../medium/refusal.ts';
-import type { Candidate } from '../selection/candidate.ts';
+import type { Found } from '../selection/find-materials.ts';
 import { isProblem, type Problem, problem } from '../units/problem.ts';
 import { quoteInput } from '../units/quote-input.ts';
 import { type ConditionedHits, conditionedHits } from './conditioned-hits.ts';
@@ -19,30 +19,65 @@ export type Hit =
   | { readonly kind: 'literal'; readonly medium: MediumSpec }
   | { readonly kind: 'entry'; readonly entry: CatalogueEntry; readonly axis?: Axis | undefined };
 
-export function hitsFor(
-  text: string,
-  recent: readonly string[],
-  question: Question,
-  world: World,
-): readonly Hit[] {
+/** A list of hits; one out of sight is not made. */
+export type Hits = Pick<readonly Hit[], 'length' | 'at' | 'slice'>;
+
+function lazily<T>(items: readonly T[], hit: (item: T) => Hit): Hits {
+  return {
+    length: items.length,
+    at: (i) => {
+      const item = items.at(i);
+      return item === undefined ? undefined : hit(item);
+    },
+    slice: (from, to) => items.slice(from, to).map(hit),
+  };
+}
+
+interface Made {
+  readonly from: readonly unknown[];
+  readonly hits: Hits;
+}
+
+/** The last list of a question: the views of one frame all ask for it. */
+const made = new WeakMap<Question, Made>();
+
+export function hitsFor(text: string, recent: readonly string[], question: Question, world: World): Hits {
+  // All media too: a better search is loaded while the program runs.
+  const from = [text, recent, world, world.search('')];
+  let list = made.get(question);
+  if (!list || from.some((part, i) => part !== list?.from[i])) {
+    list = { from, hits: makeHits(text, recent, question, world) };
+    made.set(question, list);
+  }
+  return list.hits;
+}
+
+function makeHits(text: string, recent: readonly string[], question: Question, world: World): Hits {
   const typed = text.trim();
   const literal = readLiteral(typed);
-  if (literal !== undefined && !isProblem(literal)) return [{ kind: 'literal', medium: literal }];
-  if (typed === '') return recentFirst(world.search(typed), recent);
+  if (literal !== undefined && !isProblem(literal)) return [{ kind: 'literal' as const, medium: literal }];
+  if (typed === '') return lazily(recentFirst(world.search(typed), recent), entryHit);
   const named = world.lookup(typed);
   const conditioned = named.kind === 'one' ? undefined : conditionsIn(text, question, world);
-  if (conditioned) return conditioned.found.flatMap(({ candidate }) => hitOf(candidate, world));
+  if (conditioned) return lazily(conditioned.found, foundHit);
   if (literal !== undefined) return [];
   const found = world.search(typed);
-  const entries = found.map((entry): Hit => ({ kind: 'entry', entry }));
-  if (named.kind !== 'one') return entries;
+  if (named.kind !== 'one') return lazily(found, entryHit);
   const { material, axis } = named.found;
-  const exact = found.find((e) => e.key === material.key) ?? entryOfMaterial(world, material.key);
-  if (!exact) return entries;
-  return [
-    { kind: 'entry', entry: exact, axis },
-    ...entries.filter((h) => h.kind === 'entry' && h.entry.key !== material.key),
-  ];
+  const exact = entryOf(material);
+  const others = found.filter((entry) => entry.key !== exact.key);
+  return lazily([exact, ...others], (entry) => ({
+    kind: 'entry',
+    entry,
+    axis: entry === exact ? axis : undefined,
+  }));
+}
+
+const entryHit = (entry: CatalogueEntry): Hit => ({ kind: 'entry', entry });
+
+function foundHit({ candidate: { material, axis } }: Found): Hit {
+  const entry = entryOf(material);
+  return { kind: 'entry', entry, axis: entry.axes.length > 1 ? axis : undefined };
 }
 
 /** The conditions in a text; undefined where it is a name or a medium by its numbers. */
@@ -53,30 +88,15 @@ export function conditionsIn(text: string, question: Question, world: World): Co
   return conditionedHits(text, question.wave, world);
 }
 
-function hitOf({ material, axis }: Candidate, world: World): readonly Hit[] {
-  const entry = entryByKey(world).get(material.key);
-  if (!entry) return [];
-  return [{ kind: 'entry', entry, axis: axesOf(material).length > 1 ? axis : undefined }];
-}
-
-const byKey = new WeakMap<readonly CatalogueEntry[], ReadonlyMap<string, CatalogueEntry>>();
-
-function entryByKey(world: World): ReadonlyMap<string, CatalogueEntry> {
-  const all = world.search('');
-  const known = byKey.get(all) ?? new Map(all.map((e) => [e.key, e]));
-  byKey.set(all, known);
-  return known;
-}
-
-function entryOfMaterial(world: World, key: string): CatalogueEntry | undefined {
-  return world.search(key).find((e) => e.key === key);
-}
-
-function recentFirst(entries: readonly CatalogueEntry[], recent: readonly string[]): readonly Hit[] {
-  const known = new Map(entries.map((e) => [e.key, e]));
-  const first = recent.flatMap((key) => known.get(key) ?? []);
-  const rest = entries.filter((e) => !recent.includes(e.key));
-  return [...first, ...rest].map((entry) => ({ kind: 'entry', entry }));
+function recentFirst(
+  entries: readonly CatalogueEntry[],
+  recent: readonly string[],
+): readonly CatalogueEntry[] {
+  const used = new Set(recent);
+  const first = entries
+    .filter(({ key }) => used.has(key))
+    .sort((a, b) => recent.indexOf(a.key) - recent.indexOf(b.key));
+  return [...first, ...entries.filter(({ key }) => !used.has(key))];
 }
 
 /** Why nothing is offered for a text. */

@@ -4,13 +4,19 @@
  */
 import type { WaveSpec } from '../answer/question.ts';
 import { bothReferences } from '../answer/wave.ts';
-import { axesOf, type FitWave } from '../catalog/choose-fit.ts';
+import type { FitWave } from '../catalog/choose-fit.ts';
 import type { IndexedCatalogue } from '../catalog/entries.ts';
-import type { Axis, Material } from '../catalog/types.ts';
+import type { Material } from '../catalog/types.ts';
 import { isRefusal, type Refusal } from '../medium/refusal.ts';
-import { Candidate } from '../selection/candidate.ts';
+import type { Candidate } from '../selection/candidate.ts';
 import type { Criteria } from '../selection/criteria.ts';
-import { type FindResult, findMaterials } from '../selection/find-materials.ts';
+import {
+  type CandidatesOf,
+  type FindResult,
+  findMaterials,
+  freshCandidates,
+} from '../selection/find-materials.ts';
+import { namesOf } from '../selection/material-words.ts';
 import { makeSurvey, type Survey } from '../selection/survey.ts';
 
 /** Work at most this long before looking after keys again. */
@@ -19,9 +25,10 @@ const PIECE_ms = 4;
 export class MediumFinder {
   readonly #catalogue: IndexedCatalogue;
   #survey: Survey | undefined;
+  #candidatesOf: CandidatesOf | undefined;
   /** Vacuum wavelength in um that the candidates are measured at. */
   #at_um: number | undefined;
-  #candidates = new Map<Material, Map<Axis, Candidate>>();
+  #candidates = new Map<Material, readonly Candidate[]>();
   #waiting: string[] = [];
   #timer: NodeJS.Timeout | undefined;
 
@@ -34,12 +41,11 @@ export class MediumFinder {
     return this.#survey;
   }
 
-  /** `among`: keys to look at, in the order wanted; all in the order of the catalogue where absent. */
-  find(criteria: Criteria, among: readonly string[] | undefined): FindResult | Refusal {
+  /** `among`: media to look at, in the order wanted; all in the order of the catalogue where absent. */
+  find(criteria: Criteria, among: readonly Material[] | undefined): FindResult | Refusal {
     const survey = this.survey();
-    const materials = among?.flatMap((key) => survey.material(key) ?? []) ?? survey.materials;
-    return findMaterials({ ...survey, materials }, criteria, (m, axis, wave) =>
-      this.#candidate(m, axis, wave),
+    return findMaterials({ ...survey, materials: among ?? survey.materials }, criteria, (material, wave) =>
+      wave ? this.#measured(material, wave) : this.#fresh()(material, wave),
     );
   }
 
@@ -69,8 +75,9 @@ export class MediumFinder {
   #measure(key: string | undefined, at: FitWave): void {
     const material = key === undefined ? undefined : this.#catalogue.material(key);
     if (!material) return;
+    namesOf(material);
     // Asking for the medium is what measures it.
-    for (const axis of axesOf(material)) void this.#candidate(material, axis, at).medium;
+    for (const candidate of this.#measured(material, at)) void candidate.medium;
   }
 
   #moveTo(at: FitWave): void {
@@ -79,19 +86,18 @@ export class MediumFinder {
     this.#candidates = new Map();
   }
 
-  #candidate(material: Material, axis: Axis, wave: FitWave | undefined): Candidate {
-    if (wave && wave.vacuum_um !== this.#at_um) this.#moveTo(wave);
-    if (!wave) return new Candidate(this.survey(), material, axis, undefined);
-    let axes = this.#candidates.get(material);
-    if (!axes) {
-      axes = new Map();
-      this.#candidates.set(material, axes);
+  #fresh(): CandidatesOf {
+    this.#candidatesOf ??= freshCandidates(this.survey());
+    return this.#candidatesOf;
+  }
+
+  #measured(material: Material, wave: FitWave): readonly Candidate[] {
+    if (wave.vacuum_um !== this.#at_um) this.#moveTo(wave);
+    let candidates = this.#candidates.get(material);
+    if (!candidates) {
+      candidates = this.#fresh()(material, wave);
+      this.#candidates.set(material, candidates);
     }
-    let candidate = axes.get(axis);
-    if (!candidate) {
-      candidate = new Candidate(this.survey(), material, axis, wave);
-      axes.set(axis, candidate);
-    }
-    return candidate;
+    return candidates;
   }
 }

@@ -30,8 +30,8 @@ export interface RealWorld extends World {
   stop(): void;
 }
 
-/** Texts whose hits are kept: typing and deleting go over the same ones. */
-const MOST_TEXTS = 64;
+/** Texts whose hits are kept, for the views of one frame and a letter taken back; lists of thousands are heavy to keep. */
+const MOST_TEXTS = 4;
 
 export function realWorld(
   catalogue: IndexedCatalogue,
@@ -47,9 +47,11 @@ export function realWorld(
   const charts = new Charts(sourceOf);
   let find: SearchEntries = (text) => plainSearch(catalogue.entries(), text);
   let found = new Map<string, readonly CatalogueEntry[]>();
+  let all = catalogue.entries();
   return {
     answer: (question) => answerOrReport(question, sourceOf),
     search: (text) => {
+      if (text === '') return all;
       const known = found.get(text);
       if (known) return known;
       const entries = find(text);
@@ -81,6 +83,8 @@ export function realWorld(
       const search = makeSearch(catalogue.entries());
       find = (text) => search(text).map((hit) => hit.entry);
       found = new Map();
+      // Another list, so that whoever keeps hits sees that they are to be made anew.
+      all = [...all];
     },
     stop: () => {
       tables.stop();

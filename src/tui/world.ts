@@ -24,8 +24,8 @@ export interface World {
   answer(question: Question): Answer | Refusal;
   /** Best match first; everything for an empty text. */
   search(text: string): readonly CatalogueEntry[];
-  /** The media that meet criteria, among those with these keys or all; measured once at each wave. */
-  find(criteria: Criteria, among: readonly string[] | undefined): FindResult | Refusal;
+  /** The media that meet criteria, among those given or all; measured once at each wave. */
+  find(criteria: Criteria, among: readonly Material[] | undefined): FindResult | Refusal;
   /** Coatings for the two media of a question; undefined while they are being designed. */
   coatings(question: Question): CoatingReport | Refusal | undefined;
   /** The whole catalogue, for what compares media. */

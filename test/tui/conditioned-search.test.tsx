@@ -6,9 +6,9 @@ let stage: Stage;
 afterEach(() => stage.end());
 
 const keys = (): string[] =>
-  hitsFor(stage.state.search?.line.text ?? '', [], stage.state.question, stage.world).flatMap((h) =>
-    h.kind === 'entry' ? [h.entry.key] : [],
-  );
+  hitsFor(stage.state.search?.line.text ?? '', [], stage.state.question, stage.world)
+    .slice()
+    .flatMap((h) => (h.kind === 'entry' ? [h.entry.key] : []));
 const noticeOf = async (): Promise<string> => (await stage.lines()).slice(-4, -1).join(' ');
 
 describe('conditions beside the name of a medium', () => {

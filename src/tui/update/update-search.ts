@@ -74,7 +74,7 @@ function select(state: State, search: Search, by: number, world: World): State {
 }
 
 function choose(state: State, search: Search, world: World): State {
-  const hit = hitsFor(search.line.text, state.recent, state.question, world)[search.selected];
+  const hit = hitsFor(search.line.text, state.recent, state.question, world).at(search.selected);
   const medium = hit && mediumOfHit(hit, state.question, world);
   if (!hit || !medium) {
     return {
