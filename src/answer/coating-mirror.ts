@@ -16,6 +16,7 @@ import {
 } from './coating-scene.ts';
 import type { MirrorDesign, MirrorRow } from './coating-shape.ts';
 import { filmAnswer, quarterWave_m } from './coating-single.ts';
+import type { InSteps } from './in-steps.ts';
 
 /** More pairs are no mirror anybody makes. */
 const MOST_PAIRS = 200;
@@ -30,7 +31,7 @@ export interface MirrorAsked {
   readonly pairs: number | null;
 }
 
-export function mirrorDesign(scene: CoatScene, asked: MirrorAsked): MirrorDesign {
+export function* mirrorDesign(scene: CoatScene, asked: MirrorAsked): InSteps<MirrorDesign> {
   const { high, low, wanted } = asked;
   const nH = high.side.optics.n.re;
   const H: CoatedLayer = { film: high, thickness_m: quarterWave_m(scene, nH) };
@@ -47,14 +48,19 @@ export function mirrorDesign(scene: CoatScene, asked: MirrorAsked): MirrorDesign
   const needed = pairsNeeded(scene, high, low, wanted, extraHigh, (pairs) =>
     reflectance(scene, layers(pairs)),
   );
-  const last = asked.pairs ?? needed ?? 10;
+  yield;
+  const rows: MirrorRow[] = [];
+  for (const pairs of rowNumbers(asked.pairs ?? needed ?? 10)) {
+    rows.push(row(pairs));
+    yield;
+  }
   return {
     high: filmAnswer(high),
     low: filmAnswer(low),
     highThickness_m: H.thickness_m,
     lowThickness_m: L.thickness_m,
     extraHigh,
-    rows: rowNumbers(last).map(row),
+    rows,
     wanted,
     pairsNeeded: needed === null ? null : row(needed),
     stopBand: band(scene, high, low),

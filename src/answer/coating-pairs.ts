@@ -20,6 +20,7 @@ import {
 } from './coating-scene.ts';
 import type { TwoLayerDesign, TwoLayerSolution } from './coating-shape.ts';
 import { CLEAR_SUBSTRATE, filmAnswer } from './coating-single.ts';
+import type { InSteps } from './in-steps.ts';
 
 /** How far off the wave a design is looked at, over the wave. */
 const OFF_WAVE = 0.03;
@@ -34,28 +35,33 @@ interface Candidate {
   readonly merit: number;
 }
 
-export function twoLayerDesigns(
+export function* twoLayerDesigns(
   scene: CoatScene,
   films: readonly Film[],
   limit: number,
-): readonly TwoLayerDesign[] {
+): InSteps<readonly TwoLayerDesign[]> {
   const { n } = scene.into.optics;
   if (n.im > CLEAR_SUBSTRATE * n.re || !(normalIndex(n.re, scene.tangentialIndex) > 0)) return [];
-  const candidates = films.flatMap((outer) =>
-    films.flatMap((inner): readonly Candidate[] => {
-      if (outer === inner) return [];
-      const thicknesses = solutionsOf(scene, outer, inner).filter((t) =>
-        t.every((d) => d > THINNEST * scene.vacuumWavelength_m),
-      );
-      if (thicknesses.length === 0) return [];
-      const merits = thicknesses.map((t) => offWave(scene, layersOf(outer, inner, t)));
-      return [{ outer, inner, thicknesses, merit: Math.min(...merits) }];
-    }),
+  const candidates: Candidate[] = [];
+  for (const outer of films) {
+    candidates.push(...films.flatMap((inner) => candidateOf(scene, outer, inner) ?? []));
+    yield;
+  }
+  const designs: TwoLayerDesign[] = [];
+  for (const candidate of candidates.sort((a, b) => a.merit - b.merit).slice(0, MOST_DESIGNS)) {
+    designs.push(yield* design(scene, candidate, limit));
+  }
+  return designs;
+}
+
+function candidateOf(scene: CoatScene, outer: Film, inner: Film): Candidate | undefined {
+  if (outer === inner) return undefined;
+  const thicknesses = solutionsOf(scene, outer, inner).filter((t) =>
+    t.every((d) => d > THINNEST * scene.vacuumWavelength_m),
   );
-  return candidates
-    .sort((a, b) => a.merit - b.merit)
-    .slice(0, MOST_DESIGNS)
-    .map((candidate) => design(scene, candidate, limit));
+  if (thicknesses.length === 0) return undefined;
+  const merits = thicknesses.map((t) => offWave(scene, layersOf(outer, inner, t)));
+  return { outer, inner, thicknesses, merit: Math.min(...merits) };
 }
 
 const layersOf = (outer: Film, inner: Film, [a, b]: readonly [number, number]): readonly CoatedLayer[] => [
@@ -71,19 +77,25 @@ function offWave(scene: CoatScene, layers: readonly CoatedLayer[]): number {
   return sides.length === 0 ? Number.POSITIVE_INFINITY : sides.reduce((a, b) => a + b) / sides.length;
 }
 
-function design(scene: CoatScene, { outer, inner, thicknesses }: Candidate, limit: number): TwoLayerDesign {
+function* design(
+  scene: CoatScene,
+  { outer, inner, thicknesses }: Candidate,
+  limit: number,
+): InSteps<TwoLayerDesign> {
   const oblique = scene.tangentialIndex > 0 && scene.polarization === 'unpolarized';
-  const solutions = thicknesses.map((start): TwoLayerSolution => {
+  const solutions: TwoLayerSolution[] = [];
+  for (const start of thicknesses) {
     const [outerThickness_m, innerThickness_m] = oblique ? downhill(scene, outer, inner, start) : start;
     const layers = layersOf(outer, inner, [outerThickness_m, innerThickness_m]);
-    return {
+    solutions.push({
       outerThickness_m,
       innerThickness_m,
       R: reflectance(scene, layers),
       ...rangeOverSpread(scene, layers),
       band: bandBelow(scene, layers, limit),
-    };
-  });
+    });
+    yield;
+  }
   const width = ({ band }: TwoLayerSolution): number => (band ? band.to_m - band.from_m : -1);
   return {
     outer: filmAnswer(outer),

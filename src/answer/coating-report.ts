@@ -8,6 +8,7 @@ import { twoLayerDesigns } from './coating-pairs.ts';
 import { type CoatScene, type Film, filmKey, filmsAt, substanceAt } from './coating-scene.ts';
 import type { CoatingReport, MirrorDesign, SkippedFilm } from './coating-shape.ts';
 import { idealFilm, singleFilmCoatings } from './coating-single.ts';
+import { type InSteps, runToEnd } from './in-steps.ts';
 import { LOSSY_INCIDENCE, powerOf } from './interface-answer.ts';
 import type { MediumSide, SourceOf } from './medium-side.ts';
 import { readEnds } from './path.ts';
@@ -30,7 +31,14 @@ export interface CoatAsked {
   };
 }
 
-export function coatingReport(asked: CoatAsked, sourceOf: SourceOf): CoatingReport | Refusal {
+export const coatingReport = (asked: CoatAsked, sourceOf: SourceOf): CoatingReport | Refusal =>
+  runToEnd(coatingReportInSteps(asked, sourceOf));
+
+/** The same in pieces of a few milliseconds. */
+export function* coatingReportInSteps(
+  asked: CoatAsked,
+  sourceOf: SourceOf,
+): InSteps<CoatingReport | Refusal> {
   const { question, limit } = asked;
   const { conditions, extrapolate, incidenceAngle_rad, polarization } = question;
   const wave = bothReferences(question.wave);
@@ -56,7 +64,7 @@ export function coatingReport(asked: CoatAsked, sourceOf: SourceOf): CoatingRepo
   };
   const { high, low } = asked.mirror;
   const specs = [...asked.films, ...(high ? [high] : []), ...(low ? [low] : [])];
-  const { films, skipped } = filmsAt(
+  const { films, skipped } = yield* filmsAt(
     specs.filter((spec, i) => specs.findIndex((other) => filmKey(other) === filmKey(spec)) === i),
     wave,
     conditions,
@@ -65,7 +73,7 @@ export function coatingReport(asked: CoatAsked, sourceOf: SourceOf): CoatingRepo
     sourceOf,
   );
   const designed = films.filter((f) => asked.films.some((spec) => filmKey(spec) === f.key));
-  const mirror = mirrorPart(scene, films, designed, skipped, asked);
+  const mirror = yield* mirrorPart(scene, films, designed, skipped, asked);
   if (isRefusal(mirror)) return mirror;
   const bare = fresnel(from.optics, into.optics, incidenceAngle_rad);
   return {
@@ -76,8 +84,8 @@ export function coatingReport(asked: CoatAsked, sourceOf: SourceOf): CoatingRepo
     bare: { R: powerOf(polarization, bare.Rs, bare.Rp), Rs: bare.Rs, Rp: bare.Rp },
     limit,
     ideal: idealFilm(scene),
-    singleFilms: singleFilmCoatings(scene, designed, limit),
-    twoLayers: twoLayerDesigns(scene, designed, limit),
+    singleFilms: yield* singleFilmCoatings(scene, designed, limit),
+    twoLayers: yield* twoLayerDesigns(scene, designed, limit),
     mirror,
     skipped,
     cautions: cautionsOf(from, into, films),
@@ -96,13 +104,13 @@ function whyNoCoating({ name, optics: { n } }: MediumSide): Refusal | undefined 
 }
 
 /** Null where no two films differ in index. */
-function mirrorPart(
+function* mirrorPart(
   scene: CoatScene,
   films: readonly Film[],
   designed: readonly Film[],
   skipped: readonly SkippedFilm[],
   { mirror: { high, low, wanted, pairs } }: CoatAsked,
-): MirrorDesign | null | Refusal {
+): InSteps<MirrorDesign | null | Refusal> {
   const byIndex = [...designed].sort((a, b) => a.side.optics.n.re - b.side.optics.n.re);
   const pick = (key: string | undefined, otherwise: Film | undefined): Film | Refusal | undefined => {
     if (key === undefined) return otherwise;
@@ -132,7 +140,7 @@ function mirrorPart(
         )
       : null;
   }
-  return mirrorDesign(scene, { high: H, low: L, wanted, pairs });
+  return yield* mirrorDesign(scene, { high: H, low: L, wanted, pairs });
 }
 
 const IDEAL_LAYERS: CautionNote = {

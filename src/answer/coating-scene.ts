@@ -13,6 +13,7 @@ import type { Polarization as OnePolarization, Substance } from '../stack/layere
 import { substanceFromIndex } from '../stack/layered-path.ts';
 import { normalIndex } from '../stack/oblique-film.ts';
 import type { SkippedFilm } from './coating-shape.ts';
+import type { InSteps } from './in-steps.ts';
 import { powerOf } from './interface-answer.ts';
 import { type MediumSide, mediumSide, type SourceOf } from './medium-side.ts';
 import { transparentIncidence } from './path.ts';
@@ -77,17 +78,18 @@ export function substanceAt(
 }
 
 /** The films that reach the wave and do not absorb, and why the others are left out. */
-export function filmsAt(
+export function* filmsAt(
   specs: readonly MediumSpec[],
   wave: FitWave,
   conditions: Conditions,
   extrapolate: boolean,
   tangentialIndex: number,
   sourceOf: SourceOf,
-): { readonly films: readonly Film[]; readonly skipped: readonly SkippedFilm[] } {
+): InSteps<{ readonly films: readonly Film[]; readonly skipped: readonly SkippedFilm[] }> {
   const films: Film[] = [];
   const skipped: SkippedFilm[] = [];
   for (const spec of specs) {
+    yield;
     const key = filmKey(spec);
     const name = spec.kind === 'literal' ? spec.text : spec.material.name;
     const side = mediumSide(spec, wave, conditions, extrapolate, sourceOf);
@@ -188,7 +190,10 @@ export function rangeOverSpread(scene: CoatScene, layers: readonly CoatedLayer[]
   return { R_low: Math.min(...all), R_high: Math.max(...all) };
 }
 
-/** The band around the wave in which R stays at or below a limit, an octave either way; `open` where data end before it does. */
+/**
+ * The band around the wave in which R stays at or below a limit, an octave either way; `open` where data end before it does.
+ * With a medium whose index is printed for one wave alone nothing but that wave can be told.
+ */
 export function bandBelow(
   scene: CoatScene,
   layers: readonly CoatedLayer[],
@@ -196,6 +201,11 @@ export function bandBelow(
 ): LowReflectanceBand | null {
   const around_m = scene.vacuumWavelength_m;
   const R = (wavelength_m: number): number => reflectance(scene, layers, wavelength_m);
+  if ([scene.from, scene.into, ...layers.map((l) => l.film.side)].some(isPrintedForOneWave)) {
+    return R(around_m) <= limit
+      ? { from_m: around_m, to_m: around_m, openBelow: true, openAbove: true }
+      : null;
+  }
   const band = lowReflectanceBand(R, around_m, limit, { from_m: around_m / 2, to_m: around_m * 2 });
   if (!band) return null;
   const endsData = (wavelength_m: number): boolean => Number.isNaN(R(wavelength_m));
@@ -204,6 +214,11 @@ export function bandBelow(
     openBelow: band.openBelow || endsData(band.from_m * (1 - 1e-9)),
     openAbove: band.openAbove || endsData(band.to_m * (1 + 1e-9)),
   };
+}
+
+function isPrintedForOneWave({ answer }: MediumSide): boolean {
+  const range_m = answer.fit?.range_m;
+  return range_m !== undefined && range_m[0] === range_m[1];
 }
 
 /** The medium of incidence without its weak absorption. */

@@ -6,6 +6,7 @@ import { complex, ONE } from '../num/complex.ts';
 import { idealFilmIndexAt, normalIndex } from '../stack/oblique-film.ts';
 import { bandBelow, type CoatScene, type Film, rangeOverSpread, reflectances } from './coating-scene.ts';
 import type { FilmAnswer, IdealFilm, SingleFilmCoating } from './coating-shape.ts';
+import type { InSteps } from './in-steps.ts';
 import { powerOf } from './interface-answer.ts';
 
 /** A substrate absorbing more than this, k over n, has no ideal film of a real index. */
@@ -20,27 +21,32 @@ export function quarterWave_m(scene: CoatScene, n: number): number {
   return scene.vacuumWavelength_m / (4 * normalIndex(n, scene.tangentialIndex));
 }
 
-export function singleFilmCoatings(
+export function* singleFilmCoatings(
   scene: CoatScene,
   films: readonly Film[],
   limit: number,
-): readonly SingleFilmCoating[] {
-  return films
-    .map((film): SingleFilmCoating => {
-      const thickness_m = quarterWave_m(scene, film.side.optics.n.re);
-      const layers = [{ film, thickness_m }];
-      const { s, p } = reflectances(scene, layers);
-      return {
-        film: filmAnswer(film),
-        thickness_m,
-        R: powerOf(scene.polarization, s, p),
-        Rs: s,
-        Rp: p,
-        ...rangeOverSpread(scene, layers),
-        band: bandBelow(scene, layers, limit),
-      };
-    })
-    .sort((a, b) => a.R - b.R);
+): InSteps<readonly SingleFilmCoating[]> {
+  const found: SingleFilmCoating[] = [];
+  for (const film of films) {
+    found.push(singleFilmCoating(scene, film, limit));
+    yield;
+  }
+  return found.sort((a, b) => a.R - b.R);
+}
+
+function singleFilmCoating(scene: CoatScene, film: Film, limit: number): SingleFilmCoating {
+  const thickness_m = quarterWave_m(scene, film.side.optics.n.re);
+  const layers = [{ film, thickness_m }];
+  const { s, p } = reflectances(scene, layers);
+  return {
+    film: filmAnswer(film),
+    thickness_m,
+    R: powerOf(scene.polarization, s, p),
+    Rs: s,
+    Rp: p,
+    ...rangeOverSpread(scene, layers),
+    band: bandBelow(scene, layers, limit),
+  };
 }
 
 /** Null on a substrate that absorbs or reflects totally. */

@@ -45,9 +45,10 @@ export function indexCell({ film }: SingleFilmCoating, style: PresentStyle): str
   return formatUncertain(film.n, film.spread || null, { significant: 4 }, style);
 }
 
-/** "498 to 622", its ends marked where data end. */
+/** "498 to 622", its ends marked where data end; "550 only" where data are of that wave alone. */
 export function bandCell(band: LowReflectanceBand | null, prefix: SiPrefix, style: PresentStyle): string {
   if (!band) return '-';
+  if (band.from_m === band.to_m) return `${lengthCell(band.from_m, prefix, style, 3)} only${DATA_END}`;
   const low = `${band.openBelow ? DATA_END : ''}${lengthCell(band.from_m, prefix, style, 3)}`;
   return `${low} to ${lengthCell(band.to_m, prefix, style, 3)}${band.openAbove ? DATA_END : ''}`;
 }

@@ -78,7 +78,7 @@ export interface LowReflectanceBand {
 }
 
 /** Points per octave at which the reflectance is looked at before an edge is narrowed down. */
-const SEARCH_STEPS = 400;
+const SEARCH_STEPS = 64;
 
 /**
  * The band around a wavelength in which a reflectance stays at or below a limit, searched outwards within a range; null
@@ -110,22 +110,55 @@ function edge(
   end_m: number,
 ): { at_m: number; open: boolean } {
   const steps = Math.max(1, Math.ceil(SEARCH_STEPS * Math.abs(Math.log2(end_m / start_m))));
-  let inside = start_m;
+  let inside_m = start_m;
   for (let i = 1; i <= steps; i++) {
-    const next = i === steps ? end_m : start_m * (end_m / start_m) ** (i / steps);
-    if (!(reflectance(next) <= limit)) {
-      let outside = next;
-      // Halving until neighbours in double precision would be the same wavelength to 12 digits.
-      while (Math.abs(outside - inside) > 1e-12 * start_m) {
-        const middle = (inside + outside) / 2;
-        if (reflectance(middle) <= limit) inside = middle;
-        else outside = middle;
-      }
-      return { at_m: inside, open: false };
+    const next_m = i === steps ? end_m : start_m * (end_m / start_m) ** (i / steps);
+    if (!(reflectance(next_m) <= limit)) {
+      return { at_m: crossing_m((l) => reflectance(l) - limit, inside_m, next_m), open: false };
     }
-    inside = next;
+    inside_m = next_m;
   }
   return { at_m: end_m, open: true };
+}
+
+/** Ten digits of an edge are more than any index gives. */
+const EDGE_WIDTH = 1e-10;
+
+/**
+ * The last wavelength found at which `excess` is not above zero, between one where it is not and one where it is, or where there
+ * are no data (NaN). False position, the value of an end that stays put twice halved (the Illinois rule); halving where data end.
+ */
+function crossing_m(
+  excess: (vacuumWavelength_m: number) => number,
+  inside_m: number,
+  outside_m: number,
+): number {
+  const width_m = EDGE_WIDTH * inside_m;
+  let inside = inside_m;
+  let outside = outside_m;
+  let below = excess(inside);
+  let above = excess(outside);
+  let stayed: 'inside' | 'outside' | undefined;
+  while (Math.abs(outside - inside) > width_m) {
+    const whole = outside - inside;
+    // Off both ends by a little, so that the bracket closes around an end that is the crossing.
+    const least = Math.min(0.5, width_m / 4 / Math.abs(whole));
+    const share = Number.isFinite(above) ? below / (below - above) : 0.5;
+    const at = inside + whole * Math.min(1 - least, Math.max(least, share));
+    const value = excess(at);
+    if (value <= 0) {
+      inside = at;
+      below = value;
+      if (stayed === 'outside') above /= 2;
+      stayed = 'outside';
+    } else {
+      outside = at;
+      above = value;
+      if (stayed === 'inside') below /= 2;
+      stayed = 'inside';
+    }
+  }
+  return inside;
 }
 
 export interface TwoLayerCoating {

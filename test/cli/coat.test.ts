@@ -58,6 +58,14 @@ describe('halfspace coat', () => {
     expect(await R(`air magnesium-fluoride-film@${d} n-bk7 ${edge}nm`)).toBeCloseTo(0.015, 9);
   });
 
+  it('of a film printed for one wave nothing but that wave is told', async () => {
+    const { singleFilms } = await report('air n-bk7 550nm --films cryolite-film --limit 1%');
+    expect(singleFilms[0]?.band).toEqual({ from_m: 550e-9, to_m: 550e-9, openBelow: true, openAbove: true });
+    const { out } = await run(words('coat air n-bk7 550nm --films cryolite-film --limit 1%'));
+    expect(out).toMatch(/cryolite-film .* 550 only\*\n/);
+    expect(out).toMatch(/the data of a medium end here/);
+  });
+
   it('reflectors: each row is the very path; the pairs needed are the fewest', async () => {
     const films = '--high tantalum-pentoxide-film --low silicon-dioxide-film';
     const { mirror } = await report(`air fused-silica 633nm ${films} --reflect 99% --pairs 6`);
