@@ -2,7 +2,7 @@
  * Entry of the program: picks the face from the arguments and the terminal. The only place, with src/term, that touches the
  * process, and the only one that sets the exit status. One question is answered without loading anything else.
  */
-import { createRequire } from 'node:module';
+import { isatty } from 'node:tty';
 import type { IndexedCatalogue } from './catalog/entries.ts';
 import { CatalogueFileError, loadCatalogue } from './catalog/load.ts';
 import { problemText as ownProblemText } from './catalog/own.ts';
@@ -26,10 +26,6 @@ const NOT_UNDERSTOOD = 2;
 
 /** The catalogue or a file cannot be read or written. */
 class FileTrouble extends Error {}
-
-/** `node:tty` brings streams and sockets along, a tenth of a start; most answers never ask. */
-const isTerminal = (descriptor: number): boolean =>
-  (createRequire(import.meta.url)('node:tty') as typeof import('node:tty')).isatty(descriptor);
 
 function makeContext(options: OptionValues): Context {
   const known = new Map<string | undefined, IndexedCatalogue>();
@@ -55,13 +51,13 @@ function makeContext(options: OptionValues): Context {
     version: VERSION,
     env,
     get stdinIsTTY() {
-      return isTerminal(0);
+      return isatty(0);
     },
     get stdoutIsTTY() {
-      return isTerminal(1);
+      return isatty(1);
     },
     get stderrIsTTY() {
-      return isTerminal(2);
+      return isatty(2);
     },
     ascii: options.ascii === true || decideGlyphs(env) === 'ascii',
     catalogue,

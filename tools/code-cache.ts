@@ -22,7 +22,7 @@ for (const question of [
 ]) {
   process.argv = [process.execPath, 'halfspace', ...question];
   fs.writeSync = (fd, bytes) => bytes.length;
-  script.runInThisContext()(require, file, () => {});
+  script.runInThisContext()(require, keep, () => {});
 }
 fs.writeSync = quiet;
 fs.writeFileSync(path.join(keep, 'core.cache'), script.createCachedData());
@@ -41,11 +41,11 @@ const importPart = (name) => {
   if (path.basename(name, '.mjs') !== part) return import(path.join(dist, name));
   script = load(part + '.js');
   const module = { exports: {} };
-  script.runInThisContext()(require, path.join(dist, part + '.js'), importPart, module);
+  script.runInThisContext()(require, dist, importPart, module);
   return Promise.resolve(module.exports);
 };
 process.argv = [process.execPath, 'halfspace', ...line];
-load('core.js').runInThisContext()(require, path.join(dist, 'core.js'), importPart);
+load('core.js').runInThisContext()(require, dist, importPart);
 process.once('beforeExit', () => {
   if (process.exitCode || !script) throw new Error(part + ' did not run');
   fs.writeFileSync(path.join(dist, part + '.cache'), script.createCachedData());

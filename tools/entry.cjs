@@ -12,7 +12,7 @@ const start = (name, ...more) => {
   } catch {}
   new vm.Script(source, { filename: file, cachedData }).runInThisContext()(
     require,
-    file,
+    __dirname,
     importPart,
     ...more,
   );

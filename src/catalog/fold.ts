@@ -6,6 +6,7 @@
  * Both are total and idempotent. Case and separators are the only differences they ever hide: "CsI" and "c-Si" meet in
  * the tight form, so a resolver asks for the loose form first.
  */
+import { isAscii, isDigit, isLetter } from '../num/ascii.ts';
 
 const GREEK: Readonly<Record<string, string>> = {
   α: 'alpha',
@@ -32,12 +33,10 @@ const GREEK: Readonly<Record<string, string>> = {
   ω: 'omega',
 };
 
-/** Most names typed are ASCII; the Unicode tables that the long way needs cost a millisecond to load. */
-const ASCII = /^[\x20-\x7e]*$/;
-
 /** The loose form; separators become single hyphens, none at the ends. */
 export function foldLoose(text: string): string {
-  if (ASCII.test(text)) return hyphenated(text.toLowerCase(), /[ \-_.]+/g);
+  // Most names typed are ASCII; the Unicode tables that the long way needs cost a millisecond to load.
+  if (isAscii(text)) return hyphenatedAscii(text.toLowerCase());
   const folded = text
     .replace(/[®™©℠]/g, '')
     .normalize('NFKD')
@@ -47,14 +46,35 @@ export function foldLoose(text: string): string {
     .replace(/\p{M}/gu, '')
     .replace(/ς/g, 'σ')
     .replace(/[α-ω]/g, (c) => GREEK[c] ?? c);
-  return hyphenated(folded, /[\s\-_.\u2010-\u2015\u2212\u00b7\u2022\u2219\u22c5\u30fb\ufe58\ufe63\uff0d]+/g);
+  return folded
+    .replace(/[\s\-_.\u2010-\u2015\u2212\u00b7\u2022\u2219\u22c5\u30fb\ufe58\ufe63\uff0d]+/g, '-')
+    .replace(/^-|-$/g, '');
 }
 
-const hyphenated = (text: string, separators: RegExp): string =>
-  text.replace(separators, '-').replace(/^-+|-+$/g, '');
+function hyphenatedAscii(text: string): string {
+  let out = '';
+  let separated = false;
+  for (const character of text) {
+    if (' -_.'.includes(character)) separated = out !== '';
+    else {
+      out += separated ? `-${character}` : character;
+      separated = false;
+    }
+  }
+  return out;
+}
 
 /** The tight form: of the loose one only letters, digits, `+`, `*`, `%` and `:` remain. */
 export function foldTight(text: string): string {
   const loose = foldLoose(text);
-  return ASCII.test(loose) ? loose.replace(/[^a-z0-9+*%:]+/g, '') : loose.replace(/[^\p{L}\p{N}+*%:]+/gu, '');
+  return isAscii(loose) ? tightAscii(loose) : loose.replace(/[^\p{L}\p{N}+*%:]+/gu, '');
+}
+
+function tightAscii(loose: string): string {
+  let out = '';
+  for (const character of loose) {
+    const code = character.charCodeAt(0);
+    if (isLetter(code) || isDigit(code) || '+*%:'.includes(character)) out += character;
+  }
+  return out;
 }

@@ -3,8 +3,7 @@
  * parsing beyond a short header (see packed.ts). Run from the sources, it takes the file of the last build.
  */
 import { existsSync, fstatSync, openSync, readFileSync, readSync } from 'node:fs';
-import { dirname, join } from 'node:path';
-import { fileURLToPath } from 'node:url';
+import { join } from 'node:path';
 import type { IndexedCatalogue } from './entries.ts';
 import { type OwnProblem, readOwnFiles, withOwn } from './own.ts';
 import { ownFolderPath, readOwnFolder } from './own-folder.ts';
@@ -81,7 +80,7 @@ export function readCheckValues(folder?: string): string {
 /** Beside the running program, or, where it runs from its sources, in the folder of the last build. */
 function pathOf(name: string, folder: string | undefined): string {
   if (folder !== undefined) return join(folder, name);
-  const here = dirname(fileURLToPath(import.meta.url));
+  const here = import.meta.dirname;
   const beside = join(here, name);
   const built = join(here, '..', '..', 'dist', name);
   return !existsSync(beside) && existsSync(built) ? built : beside;

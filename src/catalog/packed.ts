@@ -106,7 +106,7 @@ function findAll(section: Buffer, first: string): (readonly string[])[] {
 
 function lineStart(section: Buffer, first: string, from: number): number {
   // A line break or tab inside the sought field would match across fields.
-  if (/[\n\t]/.test(first)) return -1;
+  if (first.includes('\n') || first.includes('\t')) return -1;
   const at = section.indexOf(`\n${first}\t`, from);
   return at < 0 ? -1 : at + 1;
 }

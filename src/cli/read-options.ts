@@ -4,6 +4,7 @@
  * operands that begin with a dash. What follows an option that takes a value is its value, even if it begins with a dash
  * (`--temperature -40C`), unless it is itself an option. `-5` and `-` are operands. No abbreviations.
  */
+import { isDigit } from '../num/ascii.ts';
 import { orList } from '../units/parse-choice.ts';
 import { quoteInput } from '../units/quote-input.ts';
 import { nearest } from './nearest.ts';
@@ -95,7 +96,8 @@ function withValue(key: OptionKey, inline: string | undefined, next: string | un
 }
 
 function looksLikeOption(argument: string): boolean {
-  return /^-[^\d.]/.test(argument);
+  const second = argument[1];
+  return argument[0] === '-' && second !== undefined && second !== '.' && !isDigit(argument.charCodeAt(1));
 }
 
 function isKnownOption(argument: string): boolean {

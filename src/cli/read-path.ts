@@ -77,7 +77,7 @@ export function isUnread(read: readonly Layer[] | UnreadLayer): read is UnreadLa
 
 /** True for the words that open or close a group. */
 export function isGroupMark(word: string): boolean {
-  return word === CLOSES || OPENS.test(word);
+  return word.endsWith(CLOSES) && (word === CLOSES || OPENS.test(word));
 }
 
 const layerName = (text: string): string => text.split('@')[0] ?? '';

@@ -105,7 +105,7 @@ function readEnd(text: string, catalogue: IndexedCatalogue): MediumSpec | Refusa
       'a group of layers stands between them: air 8x: n=2.3@qw n=1.46@qw : n-bk7 633nm',
     );
   }
-  if (/@/.test(text)) {
+  if (text.includes('@')) {
     return refuse(
       'end-with-thickness',
       2,

@@ -9,8 +9,11 @@ export type HazardLevel = 'none-on-file' | 'hazardous' | 'toxic';
 const TOXIC =
   /toxic|poison|carcino|explosive|corrosive|lead |lead-|arsen|cadmium|selen|tellur|thall|beryll|barium compound|mercury/i;
 
+/** How the facts begin where nothing grave is on file. */
+const BENIGN: readonly string[] = ['none known', 'low'];
+
 export function hazardLevel(material: Material): HazardLevel {
   const hazard = material.handling?.hazard;
-  if (!hazard || /^(none known|low)/i.test(hazard)) return 'none-on-file';
+  if (!hazard || BENIGN.some((start) => hazard.toLowerCase().startsWith(start))) return 'none-on-file';
   return TOXIC.test(hazard) ? 'toxic' : 'hazardous';
 }

@@ -43,7 +43,8 @@ export function decideColor({ flag, configured, env, isTTY }: ColorFacts): boole
 export function decideGlyphs(env: Environment, override?: GlyphLevel | undefined): GlyphLevel {
   if (override !== undefined) return override;
   const locale = env['LC_ALL'] || env['LC_CTYPE'] || env['LANG'] || '';
-  if (!/utf-?8/i.test(locale)) return 'ascii';
+  const charset = locale.toLowerCase();
+  if (!charset.includes('utf-8') && !charset.includes('utf8')) return 'ascii';
   return env['TERM'] === 'linux' ? 'blocks' : 'braille';
 }
 

@@ -2,7 +2,19 @@
  * A typed unit in the one spelling the table of units uses: NFKC (both code points of angstrom, ohm, kelvin; superscripts
  * as digits), `u` for micro, `W/cm2` for W·cm⁻², W cm^-2, W / cm². Letters keep their case.
  */
+import { isLetter } from '../num/ascii.ts';
+
 export function canonicalUnit(text: string): string {
+  return isWord(text) ? text : inOneSpelling(text);
+}
+
+/** Letters from a to z alone are as they should be; most units are. */
+function isWord(text: string): boolean {
+  for (let i = 0; i < text.length; i++) if (!isLetter(text.charCodeAt(i))) return false;
+  return true;
+}
+
+function inOneSpelling(text: string): string {
   return text
     .trim()
     .replaceAll('º', '°')

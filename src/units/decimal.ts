@@ -5,6 +5,8 @@
  * The decimal of a double is its shortest text that reads back as the same double. Ties go away from zero
  * (ISO 80000-1:2022 annex B, rule B). Only finite numbers have a decimal.
  */
+import { skipDigits, skipSign } from '../num/ascii.ts';
+
 export interface Decimal {
   readonly negative: boolean;
   /** Digits without leading zeros; trailing zeros are kept as typed. "0" for zero. */
@@ -13,17 +15,27 @@ export interface Decimal {
   readonly exponent: number;
 }
 
-const PARTS = /^([+-]?)(\d*)\.?(\d*)(?:[eE]([+-]?\d+))?$/;
-
 /** Text of a plain decimal number (`-12.50e-3`) to its decimal; undefined for anything else. */
 export function decimalOfText(text: string): Decimal | undefined {
-  const parts = PARTS.exec(text);
-  if (!parts) return undefined;
-  const [, sign, whole = '', fraction = '', power = '0'] = parts;
-  const all = whole + fraction;
-  if (all === '') return undefined;
-  const digits = all.replace(/^0+(?=\d)/, '');
-  return { negative: sign === '-', digits, exponent: Number(power) - fraction.length };
+  const start = skipSign(text, 0);
+  const point = skipDigits(text, start);
+  const afterPoint = text[point] === '.' ? point + 1 : point;
+  const end = skipDigits(text, afterPoint);
+  const all = text.slice(start, point) + text.slice(afterPoint, end);
+  const power = powerAt(text, end);
+  if (all === '' || power === undefined) return undefined;
+  let zeros = 0;
+  while (zeros < all.length - 1 && all[zeros] === '0') zeros++;
+  return { negative: text[0] === '-', digits: all.slice(zeros), exponent: power - (end - afterPoint) };
+}
+
+/** The power of ten that is all of the text from `at` on, `e-3`; 0 where nothing stands there. */
+function powerAt(text: string, at: number): number | undefined {
+  if (at === text.length) return 0;
+  if (text[at] !== 'e' && text[at] !== 'E') return undefined;
+  const digits = skipSign(text, at + 1);
+  const end = skipDigits(text, digits);
+  return end > digits && end === text.length ? Number(text.slice(at + 1)) : undefined;
 }
 
 /** The decimal of a finite double; throws RangeError for NaN and infinities, which no caller may pass. */
@@ -44,7 +56,9 @@ export function shiftDecimal(d: Decimal, shift: number): Decimal {
 
 /** Without trailing zeros; equal in value. */
 export function trimZeros(d: Decimal): Decimal {
-  const digits = d.digits.replace(/0+$/, '') || '0';
+  let kept = d.digits.length;
+  while (kept > 1 && d.digits[kept - 1] === '0') kept--;
+  const digits = d.digits.slice(0, kept);
   const dropped = d.digits.length - digits.length;
   return { ...d, digits, exponent: digits === '0' ? 0 : d.exponent + dropped };
 }

@@ -76,10 +76,13 @@ export function columnPrefix(values: readonly number[], unit: DisplayUnit): SiPr
   return largestPrefix(shiftDecimal(decimalOf(largest), -unit.power), unit);
 }
 
+/** Symbols that follow the number without a space: ISO 80000-1, 7.1.4. */
+const STANDS_CLOSE: readonly string[] = ['°', '′', '″'];
+
 /** A number already written, with its unit. */
 export function withUnit(number: string, symbol: string, style: NumberStyle = SCREEN): string {
   if (symbol === '' || number === NO_VALUE) return number;
-  const text = /^[°′″]$/u.test(symbol) ? number + symbol : `${number} ${symbol}`;
+  const text = STANDS_CLOSE.includes(symbol) ? number + symbol : `${number} ${symbol}`;
   return style.ascii ? toAscii(text) : text;
 }
 

@@ -19,7 +19,7 @@ const SEXAGESIMAL =
 
 /** Any plane angle, in radians. */
 export function parseAngle(text: string): number | Problem {
-  const parts = SEXAGESIMAL.exec(text.trim());
+  const parts = text.includes('°') || text.includes('º') ? SEXAGESIMAL.exec(text.trim()) : undefined;
   if (!parts) return parseValue(text, SPEC);
   const [degrees = 0, minutes = 0, seconds = 0] = parts.slice(1).map((part) => Number(part ?? 0));
   if (minutes < 60 && seconds < 60) return ((degrees + minutes / 60 + seconds / 3600) * Math.PI) / 180;

@@ -8,7 +8,7 @@ import { orList } from './parse-choice.ts';
 import { parseQuantity, type QuantitySpec } from './parse-quantity.ts';
 import { isProblem, type Problem, problem } from './problem.ts';
 import { quoteInput } from './quote-input.ts';
-import { findSpectralLine, lineSpelling, SPECTRAL_LINES } from './spectral-lines.ts';
+import { findSpectralLine, lineSpelling, namesLine, SPECTRAL_LINES } from './spectral-lines.ts';
 import { KIND_NAMES, type UnitKind } from './unit.ts';
 import { wavelengthFromFrequency, wavelengthFromPhotonEnergy, wavelengthFromWavenumber } from './wave.ts';
 
@@ -56,7 +56,7 @@ export function parseWave(text: string, reading: WaveReading = {}): TypedWave | 
   const line = findSpectralLine(trimmed);
   if (line)
     return { kind: 'line', wavelength_m: line.airWavelength_m, inAir: true, text: lineSpelling(line) };
-  if (/[- ]line$/i.test(trimmed)) {
+  if (namesLine(trimmed) && /[- ]line$/i.test(trimmed)) {
     const names = SPECTRAL_LINES.map((l) => l.symbol).join(' ');
     return problem(
       'unit-unknown',
@@ -64,7 +64,7 @@ export function parseWave(text: string, reading: WaveReading = {}): TypedWave | 
       `lines are ${names}, as in d-line`,
     );
   }
-  const air = /^(.*\p{L})[\s(]+air\)?$/iu.exec(trimmed);
+  const air = trimmed.toLowerCase().includes('air') && /^(.*\p{L})[\s(]+air\)?$/iu.exec(trimmed);
   if (air) return problem('unit-unknown', `${quoteInput(trimmed)} is not a wave`, airRemedy(air[1] ?? ''));
   const quantity = parseQuantity(trimmed, SPEC);
   if (isProblem(quantity)) {

@@ -3,10 +3,8 @@
  * overrides and unpaired surrogates become `?`, long text is cut.
  */
 const LONGEST = 40;
-const UNSAFE = /[\p{Cc}\p{Cf}\p{Cs}\p{Co}\p{Zl}\p{Zp}]/gu;
-
 export function quoteInput(text: string): string {
-  const clean = text.slice(0, 4 * LONGEST).replace(UNSAFE, '?');
+  const clean = text.slice(0, 4 * LONGEST).replace(/[\p{Cc}\p{Cf}\p{Cs}\p{Co}\p{Zl}\p{Zp}]/gu, '?');
   const characters = [...clean];
   return characters.length > LONGEST ? `"${characters.slice(0, LONGEST - 3).join('')}..."` : `"${clean}"`;
 }

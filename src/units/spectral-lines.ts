@@ -37,11 +37,13 @@ export function lineSpelling(lineOf: SpectralLine): string {
   return `${lineOf.symbol}-line`;
 }
 
-const SPELLING = /^(\p{L})(['\u2032\u2019]|-prime)?[- ]line$/iu;
+/** Whether the text ends in the word that all names of lines end in; anything else is a wave in figures. */
+export const namesLine = (text: string): boolean => text.trim().toLowerCase().endsWith('line');
 
 /** The line typed; undefined if the text names none. Case matters for d and D only. */
 export function findSpectralLine(text: string): SpectralLine | undefined {
-  const parts = SPELLING.exec(text.trim());
+  if (!namesLine(text)) return undefined;
+  const parts = /^(\p{L})(['\u2032\u2019]|-prime)?[- ]line$/iu.exec(text.trim());
   if (!parts) return undefined;
   const symbol = (parts[1] ?? '') + (parts[2] === undefined ? '' : "'");
   const exact = SPECTRAL_LINES.find((l) => l.symbol === symbol);

@@ -2,6 +2,8 @@
  * Screen text in the bytes 0x20 to 0x7E: `µm` -> `um`, `56.31°` -> `56.31 deg`, `±` -> `+/-`, `4.1 × 10⁻⁶` -> `4.1e-6`,
  * `W/m²` -> `W/m2`, Greek letters by name. Latin letters lose their accents; anything else becomes `?`.
  */
+import { isAscii } from '../num/ascii.ts';
+
 const WORDS: Readonly<Record<string, string>> = {
   '\u00b5': 'u',
   μ: 'mu',
@@ -52,7 +54,7 @@ const FIGURES = '⁰¹²³⁴⁵⁶⁷⁸⁹';
 const POWER_OF_TEN = /\s?×\s?10([⁺⁻]?[⁰¹²³⁴⁵⁶⁷⁸⁹]+)/gu;
 
 export function toAscii(text: string): string {
-  if (/^[\x20-\x7e]*$/.test(text)) return text;
+  if (isAscii(text)) return text;
   return [
     ...text
       .replace(POWER_OF_TEN, (_, power: string) => `e${figures(power)}`)
