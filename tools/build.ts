@@ -12,7 +12,8 @@ import { chmodSync, copyFileSync, mkdirSync, readFileSync, rmSync, writeFileSync
 import path from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { type BuildOptions, build, type Metafile, type Plugin } from 'esbuild';
-import { makeCodeCache, makePartCache } from './code-cache.ts';
+import { makeCache } from './code-cache.ts';
+import { buildLateParts, callLate, type LateModules } from './late-parts.ts';
 import { writeNotices } from './licences.ts';
 import { writePackedCatalogue } from './pack-catalog.ts';
 
@@ -29,6 +30,7 @@ const common: BuildOptions = {
   legalComments: 'none',
   metafile: true,
   logLevel: 'warning',
+  logOverride: { 'import-is-undefined': 'error' },
   absWorkingDir: root,
 };
 const define = {
@@ -66,6 +68,13 @@ const ALONE: ReadonlyMap<string, readonly string[]> = new Map([
   ['cli-commands-sweep', ['air', 'n-bk7', '--sweep', 'wave=400nm..700nm:1nm', '-o', '/dev/null']],
   ['cli-commands-stream', ['stream', '--from', 'air', '--into', 'n-bk7', '-o', '/dev/null', '{rows}']],
 ]);
+
+/** What most starts are: a few questions about one surface. */
+const PLAIN_QUESTIONS = [
+  ['air', 'n-bk7', '633nm', '--angle', '45', '--pol', 'p'],
+  ['air', 'fused-silica', '632.8nm'],
+  ['--json', 'vacuum', 'gold', '633nm'],
+];
 
 /** Ink asks for the developer tools only in development; the package is not installed. */
 const withoutDevtools: Plugin = {
@@ -129,25 +138,27 @@ export async function buildAll(): Promise<void> {
   writeFileSync(path.join(dist, 'package.json'), '{"type":"commonjs"}\n');
 
   const parts = new Map<string, string>();
+  const met: LateModules = new Map();
+  const src = path.join(root, 'src');
   const script: BuildOptions = {
     ...common,
     outdir: dist,
     format: 'cjs',
     define: { ...define, 'import.meta.dirname': '__dirname' },
-    banner: { js: '(function(require,__dirname,importPart,module){' },
+    banner: { js: '(function(require,__dirname,importPart,loadNow,module){' },
     footer: { js: '})' },
     plugins: [lazyParts(parts)],
   };
   const entry = await build({
     ...script,
     entryPoints: { core: path.join(root, 'src/main.ts') },
-    plugins: [lazyParts(parts), lateModules],
+    plugins: [lazyParts(parts), callLate(src, met), lateModules],
   });
+  const late = await buildLateParts(script, src, met);
   refuseHeavyEntry(entry.metafile!);
   importThroughEntry(path.join(dist, 'core.js'));
   copyFileSync(path.join(root, 'tools/entry.cjs'), path.join(dist, 'halfspace.js'));
   chmodSync(path.join(dist, 'halfspace.js'), 0o755);
-  makeCodeCache(dist);
 
   const chosen = (alone: boolean): Record<string, string> =>
     Object.fromEntries([...parts].filter(([name]) => ALONE.has(name) === alone));
@@ -171,19 +182,22 @@ export async function buildAll(): Promise<void> {
     },
     plugins: [withoutDevtools],
   });
-  for (const [name, line] of ALONE) {
+  for (const name of ALONE.keys()) {
     importThroughEntry(path.join(dist, `${name}.js`));
-    makePartCache(dist, name, line);
   }
+  for (const { name } of met.keys()) importThroughEntry(path.join(dist, `${name}.js`));
+  makeCache(dist, 'core', PLAIN_QUESTIONS);
+  for (const [name, line] of ALONE) makeCache(dist, name, [line]);
+  for (const { name, lines } of met.keys()) makeCache(dist, name, lines);
   const inputsOf = (...metas: (Metafile | undefined)[]): string[] => [
     ...new Set(metas.flatMap((meta) => Object.keys(meta?.inputs ?? {}))),
   ];
-  const inputs = [entry, rest].flatMap(({ metafile }) => Object.keys(metafile!.inputs));
-  writeNotices(root, dist, inputs);
-  writeFileSync(
-    path.join(dist, 'inputs.json'),
-    JSON.stringify({ entry: inputsOf(entry.metafile), parts: inputsOf(alone.metafile, rest.metafile) }),
-  );
+  const inputs = {
+    entry: inputsOf(entry.metafile),
+    parts: inputsOf(...late, alone.metafile, rest.metafile),
+  };
+  writeNotices(root, dist, [...inputs.entry, ...inputs.parts]);
+  writeFileSync(path.join(dist, 'inputs.json'), JSON.stringify(inputs));
 }
 
 if (process.argv[1] === fileURLToPath(import.meta.url)) await buildAll();

@@ -3,26 +3,29 @@
 'use strict';
 const fs = require('node:fs');
 const vm = require('node:vm');
-const start = (name, ...more) => {
-  const file = `${__dirname}/${name}.js`;
-  const source = fs.readFileSync(file, 'latin1');
+const start = (name, module) => {
+  const filename = `${__dirname}/${name}.js`;
+  const source = fs.readFileSync(filename, 'latin1');
   let cachedData;
   try {
     cachedData = fs.readFileSync(`${__dirname}/${name}.cache`);
   } catch {}
-  new vm.Script(source, { filename: file, cachedData }).runInThisContext()(
-    require,
-    __dirname,
-    importPart,
-    ...more,
-  );
+  const script = new vm.Script(source, { filename, cachedData });
+  script.runInThisContext()(require, __dirname, importPart, loadNow, module);
+};
+const loaded = new Map();
+const loadNow = (name) => {
+  let module = loaded.get(name);
+  if (!module) {
+    module = { exports: {} };
+    loaded.set(name, module);
+    start(name, module);
+  }
+  return module.exports;
 };
 // A part is either a script with a code cache of its own, or a module.
 const importPart = (part) => {
   const name = part.slice(2, -4);
-  if (!fs.existsSync(`${__dirname}/${name}.js`)) return import(part);
-  const module = { exports: {} };
-  start(name, module);
-  return Promise.resolve(module.exports);
+  return fs.existsSync(`${__dirname}/${name}.js`) ? Promise.resolve(loadNow(name)) : import(part);
 };
 start('core');

@@ -16,11 +16,12 @@ import { interfaceParts, LOSSY_INCIDENCE } from './interface-answer.ts';
 import type { MediumSide, SourceOf } from './medium-side.ts';
 import { type Path, readEnds, readPath } from './path.ts';
 import { type PathFields, pathFields, surfaceFields } from './path-fields.ts';
-import { pathNotes, pathPower, pathSurface, solvePath, surfacePower } from './path-powers.ts';
+import { pathNotes, pathPower, pathSurface, solvePath } from './path-powers.ts';
 import { powerSpread } from './power-spread.ts';
 import { pulseAnswer, pulseNotes } from './pulse-answer.ts';
 import type { MediumSpec, Question } from './question.ts';
 import { spreadNotes, uncertaintyPart } from './spread-answer.ts';
+import { surfacePower } from './surface-power.ts';
 import { thermalSlope } from './thermal-slope.ts';
 import { bothReferences, waveAnswer } from './wave.ts';
 
@@ -48,13 +49,14 @@ export function answerQuestion(question: Question, sourceOf: SourceOf): Answer |
   if (isRefusal(parts)) return parts;
   const surface = parts ? pathSurface(first.answer, parts, polarization) : first.answer;
 
-  const crystal = crystalPart(question, path, wave, sourceOf);
+  const crystal = question.cut ? crystalPart(question, question.cut, path, wave, sourceOf) : null;
   if (isRefusal(crystal)) return crystal;
   const media = thermalSides(path, question, wave, sourceOf);
   const power = parts ? pathPower(parts, vacuumWavelength_m) : surfacePower;
   const spread = powerSpread(question, wave, path, media, surface, power);
   const powers = { R: surface.R, T: surface.T, surface: parts ? null : first.wave };
-  const pulse = pulseAnswer(question, parts);
+  const pulsed = question.pulseDuration_s !== undefined || question.beam !== undefined;
+  const pulse = pulsed ? pulseAnswer(question, parts) : null;
   const fields = (): PathFields =>
     parts
       ? pathFields(path, question, parts, vacuumWavelength_m)
@@ -94,7 +96,7 @@ export function answerQuestion(question: Question, sourceOf: SourceOf): Answer |
       interfaceNotes: [
         ...surfaceNotes(from, surface),
         ...(parts ? pathNotes(parts) : []),
-        ...pulseNotes(pulse),
+        ...(pulse ? pulseNotes(pulse) : []),
         ...spreadNotes(spread, surface),
         ...(crystal ? crystalNotes(crystal) : []),
       ],

@@ -6,17 +6,16 @@ import { cutMedium, uniaxialSides } from './crystal-media.ts';
 import type { CrystalAnswer } from './crystal-shape.ts';
 import type { SourceOf } from './medium-side.ts';
 import type { Path } from './path.ts';
-import type { Question } from './question.ts';
+import type { CrystalCut, Question } from './question.ts';
 
-/** Null where the question states no cut. */
 export function crystalPart(
   question: Question,
+  cut: CrystalCut,
   path: Path,
   wave: FitWave,
   sourceOf: SourceOf,
-): CrystalAnswer | null | Refusal {
-  const { cut, conditions, extrapolate, tolerances } = question;
-  if (!cut) return null;
+): CrystalAnswer | Refusal {
+  const { conditions, extrapolate, tolerances } = question;
   const meant = cutMedium(question);
   if (isRefusal(meant)) return meant;
   const crystal = uniaxialSides(meant.spec, wave, conditions, extrapolate, sourceOf);

@@ -1,8 +1,7 @@
 /**
- * Where the answer's powers come from: the one surface, or the whole path of layers; both also at moved inputs, for the
- * uncertainty. Refusals of the laws become refusals of the answer here.
+ * Where the answer's powers come from where there are layers: the whole path; also at moved inputs, for the uncertainty.
+ * Refusals of the laws become refusals of the answer here.
  */
-import { fresnel } from '../interface/fresnel.ts';
 import { reflectionLoss_dB, returnLoss_dB } from '../interface/losses.ts';
 import type { CautionNote } from '../medium/caution.ts';
 import { lengthText } from '../medium/range-text.ts';
@@ -17,17 +16,7 @@ import type { Moved } from './moved.ts';
 import type { Path } from './path.ts';
 import type { Polarization, Question } from './question.ts';
 import { type StackParts, stackParts } from './stack-answer.ts';
-
-/** [s, p] of reflectance and transmittance. */
-export interface BothPolarizations {
-  readonly R: readonly [number, number];
-  readonly T: readonly [number, number];
-}
-
-export function surfacePower({ from, into, angle_rad }: Moved): BothPolarizations {
-  const w = fresnel(from, into, angle_rad);
-  return { R: [w.Rs, w.Rp], T: [w.Ts, w.Tp] };
-}
+import type { BothPolarizations } from './surface-power.ts';
 
 export function solvePath(path: Path, question: Question, vacuumWavelength_m: number): StackParts | Refusal {
   try {

@@ -4,8 +4,8 @@ import { movableInputs, type ThermalSide } from './input-uncertainty.ts';
 import { powerOf } from './interface-answer.ts';
 import { type Moved, moved, noOffsets } from './moved.ts';
 import type { Path } from './path.ts';
-import type { BothPolarizations } from './path-powers.ts';
 import type { Question } from './question.ts';
+import type { BothPolarizations } from './surface-power.ts';
 import { propagateAll, type Spread } from './uncertainty.ts';
 
 export interface PowerSpread {

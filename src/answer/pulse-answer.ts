@@ -54,8 +54,8 @@ function dispersionOf(
   return { gdd_s2, tod_s3 };
 }
 
-export function pulseNotes(pulse: PulseAnswer | null): readonly CautionNote[] {
-  if (!pulse || pulse.thirdOrderRatio === null || pulse.thirdOrderRatio < THIRD_ORDER_MATTERS) return [];
+export function pulseNotes(pulse: PulseAnswer): readonly CautionNote[] {
+  if (pulse.thirdOrderRatio === null || pulse.thirdOrderRatio < THIRD_ORDER_MATTERS) return [];
   const text =
     'third-order dispersion outweighs the second here: the gaussian broadening is not to be trusted';
   return [{ code: 'approximation', details: { text } }];

@@ -2,7 +2,7 @@
  * Reads the folder of a user's own entries: $XDG_DATA_HOME/halfspace/materials (by default
  * ~/.local/share/halfspace/materials), or the one the user names. Where it does not exist the cost is one look at the disk.
  */
-import { readdirSync, readFileSync, statSync } from 'node:fs';
+import { existsSync, readdirSync, readFileSync, statSync } from 'node:fs';
 import { homedir } from 'node:os';
 import { isAbsolute, join } from 'node:path';
 import type { OwnFile, OwnProblem } from './own.ts';
@@ -25,7 +25,7 @@ export function ownFolderPath(env: Readonly<Record<string, string | undefined>>)
 /** All .json and .csv files of the folder in the order of their names; undefined where there is no such folder. */
 export function readOwnFolder(folder: string): OwnFolder | undefined {
   try {
-    if (!statSync(folder, { throwIfNoEntry: false })?.isDirectory()) return undefined;
+    if (!existsSync(folder) || !statSync(folder).isDirectory()) return undefined;
     const files: OwnFile[] = [];
     const problems: OwnProblem[] = [];
     const names = readdirSync(folder).filter((n) => !n.startsWith('.') && /\.(json|csv)$/i.test(n));

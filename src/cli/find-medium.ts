@@ -5,7 +5,8 @@
 import type { MediumSpec } from '../answer/question.ts';
 import type { IndexedCatalogue } from '../catalog/entries.ts';
 import { type Refusal, refuse } from '../medium/refusal.ts';
-import { isLiteralMedium, parseLiteralMedium } from '../units/parse-literal-medium.ts';
+import { isLiteralMedium } from '../units/is-literal-medium.ts';
+import { parseLiteralMedium } from '../units/parse-literal-medium.ts';
 import { isProblem } from '../units/problem.ts';
 import { quoteInput } from '../units/quote-input.ts';
 

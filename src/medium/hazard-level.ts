@@ -6,14 +6,16 @@ import type { Material } from '../catalog/types.ts';
 
 export type HazardLevel = 'none-on-file' | 'hazardous' | 'toxic';
 
-const TOXIC =
-  /toxic|poison|carcino|explosive|corrosive|lead |lead-|arsen|cadmium|selen|tellur|thall|beryll|barium compound|mercury/i;
+const TOXIC: readonly string[] = [
+  ...['toxic', 'poison', 'carcino', 'explosive', 'corrosive', 'lead ', 'lead-', 'arsen', 'cadmium', 'selen'],
+  ...['tellur', 'thall', 'beryll', 'barium compound', 'mercury'],
+];
 
 /** How the facts begin where nothing grave is on file. */
 const BENIGN: readonly string[] = ['none known', 'low'];
 
 export function hazardLevel(material: Material): HazardLevel {
-  const hazard = material.handling?.hazard;
-  if (!hazard || BENIGN.some((start) => hazard.toLowerCase().startsWith(start))) return 'none-on-file';
-  return TOXIC.test(hazard) ? 'toxic' : 'hazardous';
+  const hazard = material.handling?.hazard?.toLowerCase();
+  if (!hazard || BENIGN.some((start) => hazard.startsWith(start))) return 'none-on-file';
+  return TOXIC.some((word) => hazard.includes(word)) ? 'toxic' : 'hazardous';
 }

@@ -40,9 +40,17 @@ function powerAt(text: string, at: number): number | undefined {
 
 /** The decimal of a finite double; throws RangeError for NaN and infinities, which no caller may pass. */
 export function decimalOf(x: number): Decimal {
-  const decimal = Number.isFinite(x) ? decimalOfText(String(x)) : undefined;
-  if (!decimal) throw new RangeError('only a finite number has a decimal');
-  return decimal;
+  if (!Number.isFinite(x)) throw new RangeError('only a finite number has a decimal');
+  const text = x.toExponential();
+  const start = x < 0 ? 1 : 0;
+  const power = text.indexOf('e');
+  const digits = text[start] + text.slice(start + 2, power);
+  const exponent = Number(text.slice(power + 1)) - (digits.length - 1);
+  const negative = x < 0;
+  // Integers are written out as far as `String` does: their zeros are digits.
+  return exponent > 0 && Math.abs(x) < 1e21
+    ? { negative, digits: digits + '0'.repeat(exponent), exponent: 0 }
+    : { negative, digits, exponent };
 }
 
 /** The double nearest to the decimal times 10^shift. May be infinite, or zero where it is too small. */

@@ -4,7 +4,7 @@
  */
 import { canonicalUnit } from './canonical-unit.ts';
 import type { Unit, UnitKind, UnitOf } from './unit.ts';
-import { UNITS } from './unit-table.ts';
+import { allUnits, unitsOf } from './unit-table.ts';
 
 export type UnitLookup<Kind extends UnitKind> =
   | { readonly found: 'one'; readonly unit: UnitOf<Kind> }
@@ -12,31 +12,18 @@ export type UnitLookup<Kind extends UnitKind> =
   | { readonly found: 'other-kind'; readonly unit: Unit }
   | { readonly found: 'none' };
 
-let bySpelling: Map<string, Unit[]> | undefined;
-
-/** Units by lower-case spelling, made at first use. */
-function spellings(lower: string): readonly Unit[] {
-  if (!bySpelling) {
-    bySpelling = new Map();
-    for (const unit of UNITS) {
-      const key = unit.symbol.toLowerCase();
-      const same = bySpelling.get(key);
-      if (same) same.push(unit);
-      else bySpelling.set(key, [unit]);
-    }
-  }
-  return bySpelling.get(lower) ?? [];
-}
-
 export function findUnit<Kind extends UnitKind>(text: string, kinds: readonly Kind[]): UnitLookup<Kind> {
   const symbol = canonicalUnit(text);
-  const all = spellings(symbol.toLowerCase());
-  const own = all.filter((unit): unit is UnitOf<Kind> => kinds.some((kind) => kind === unit.kind));
+  const own = kinds.flatMap((kind) => unitsOf(kind) as readonly UnitOf<Kind>[]);
   const exact = own.find((unit) => unit.symbol === symbol);
-  const twin = exact && own.find((unit) => unit.symbol === exact.mistakenFor);
+  const twin = exact?.mistakenFor && own.find((unit) => unit.symbol === exact.mistakenFor);
   if (exact) return twin ? { found: 'several', readings: [twin, exact] } : { found: 'one', unit: exact };
-  const [first, second] = own;
-  if (first) return second ? { found: 'several', readings: own } : { found: 'one', unit: first };
-  const foreign = all.find((unit) => unit.symbol === symbol) ?? all[0];
+  const lower = symbol.toLowerCase();
+  const inAnyCase = (unit: Unit): boolean => unit.symbol.toLowerCase() === lower;
+  const near = own.filter(inAnyCase);
+  const [first, second] = near;
+  if (first) return second ? { found: 'several', readings: near } : { found: 'one', unit: first };
+  const others = allUnits().filter(inAnyCase);
+  const foreign = others.find((unit) => unit.symbol === symbol) ?? others[0];
   return foreign ? { found: 'other-kind', unit: foreign } : { found: 'none' };
 }

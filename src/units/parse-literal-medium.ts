@@ -31,11 +31,6 @@ const EXAMPLES =
 const SIGN =
   'absorption has the plus sign here (fields exp(i(k r - w t)), n + ik with k >= 0); gain is not covered';
 
-/** Catalogue names hold no `=`, so one is enough to tell. */
-export function isLiteralMedium(text: string): boolean {
-  return text.includes('=');
-}
-
 export function parseLiteralMedium(text: string): TypedMedium | Problem {
   const values: Partial<Record<Key, string>> = {};
   for (const part of text.split(',')) {

@@ -1,5 +1,8 @@
-/** Every unit that is understood. Families are expanded from a base unit and the prefixes in use with it. */
-import { addDecimals, decimalOf, decimalToNumber } from './decimal.ts';
+/**
+ * Every unit that is understood, by kind. Families are expanded from a base unit and the prefixes in use with it, those of a
+ * kind when it is first asked for: there are some three hundred, and a question names two or three.
+ */
+import { addDecimals, type Decimal, decimalOf, decimalToNumber } from './decimal.ts';
 import { SI_PREFIXES } from './si-prefix.ts';
 import { byFactor, byPower, type Unit, type UnitKind } from './unit.ts';
 
@@ -49,41 +52,42 @@ const one = (symbol: string, name: string, kind: UnitKind, toSI: Unit['toSI']): 
 });
 
 /** Reciprocal lengths, each in the three ways it is written. */
-const WAVENUMBERS: readonly Unit[] = LENGTHS.flatMap(([symbol, name, power]) =>
-  [`${symbol}-1`, `1/${symbol}`, `/${symbol}`].map((s) =>
-    one(s, `reciprocal ${name}`, 'wavenumber', byPower(-power)),
-  ),
-);
+const wavenumbers = (): Unit[] =>
+  LENGTHS.flatMap(([symbol, name, power]) =>
+    [`${symbol}-1`, `1/${symbol}`, `/${symbol}`].map((s) =>
+      one(s, `reciprocal ${name}`, 'wavenumber', byPower(-power)),
+    ),
+  );
 
 const DEGREE = Math.PI / 180;
 const degrees: Unit['toSI'] = (number) => (decimalToNumber(number) * Math.PI) / 180;
-const ANGLES: readonly Unit[] = [
+const angles = (): Unit[] => [
   ...['deg', 'degree', 'degrees', '°'].map((s) => one(s, 'degree', 'angle', degrees)),
   ...family('angle', 'rad', 'radian', ' mu'),
   ...['arcmin', "'"].map((s) => one(s, 'minute of arc', 'angle', byFactor(DEGREE / 60))),
   ...['arcsec', '"', "''"].map((s) => one(s, 'second of arc', 'angle', byFactor(DEGREE / 3600))),
 ];
 
-/** Where the scales lie above absolute zero. Added in decimal, so that -40C is 233.15 K and not a neighbouring double. */
-const ICE_POINT_K = decimalOf(273.15);
-const ZERO_F_ABOVE_ABSOLUTE_ZERO = decimalOf(459.67);
-const TEMPERATURES: readonly Unit[] = [
-  ...['C', '°C', 'degC'].map((s) =>
-    one(s, 'degree Celsius', 'temperature', (number) => decimalToNumber(addDecimals(number, ICE_POINT_K))),
-  ),
-  one('K', 'kelvin', 'temperature', byPower(0)),
-  ...['F', '°F', 'degF'].map((s) =>
-    one(
-      s,
-      'degree Fahrenheit',
-      'temperature',
-      (number) => decimalToNumber(addDecimals(number, ZERO_F_ABOVE_ABSOLUTE_ZERO)) / 1.8,
+/** Added in decimal, so that -40C is 233.15 K and not a neighbouring double. */
+const above = (zero: Decimal, number: Decimal): number => decimalToNumber(addDecimals(number, zero));
+
+/** Where the scales lie above absolute zero: 273.15 K and 459.67 degrees Fahrenheit. */
+function temperatures(): Unit[] {
+  const ice_K = decimalOf(273.15);
+  const zero_F = decimalOf(459.67);
+  return [
+    ...['C', '°C', 'degC'].map((s) =>
+      one(s, 'degree Celsius', 'temperature', (number) => above(ice_K, number)),
     ),
-  ),
-];
+    one('K', 'kelvin', 'temperature', byPower(0)),
+    ...['F', '°F', 'degF'].map((s) =>
+      one(s, 'degree Fahrenheit', 'temperature', (number) => above(zero_F, number) / 1.8),
+    ),
+  ];
+}
 
 /** Conventional millimetre of mercury, torr = 1/760 atm and pound-force per square inch: NIST SP 811 (2008), appendix B. */
-const PRESSURES: readonly Unit[] = [
+const pressures = (): Unit[] => [
   ...family('pressure', 'Pa', 'pascal', 'm kM'),
   one('hPa', 'hectopascal', 'pressure', byPower(2)),
   ...family('pressure', 'bar', 'bar', 'um k', 5),
@@ -94,31 +98,56 @@ const PRESSURES: readonly Unit[] = [
   one('psi', 'pound-force per square inch', 'pressure', byFactor(6_894.757_293_168)),
 ];
 
-export const UNITS: readonly Unit[] = [
-  ...family('length', 'm', 'metre', 'fpnum k'),
-  one('cm', 'centimetre', 'length', byPower(-2)),
-  { ...one('Mm', 'megametre', 'length', byPower(6)), mistakenFor: 'mm' },
-  ...['Å', 'angstrom'].map((s) => one(s, 'angstrom', 'length', byPower(-10))),
-  ...['micron', 'microns'].map((s) => one(s, 'micrometre', 'length', byPower(-6))),
-  ...family('frequency', 'Hz', 'hertz', ' kMGTP'),
-  { ...one('mHz', 'millihertz', 'frequency', byPower(-3)), mistakenFor: 'MHz' },
-  ...family('photon-energy', 'eV', 'electronvolt', 'um k'),
-  { ...one('MeV', 'megaelectronvolt', 'photon-energy', byPower(6)), mistakenFor: 'meV' },
-  ...WAVENUMBERS,
-  ...ANGLES,
-  ...TEMPERATURES,
-  ...family('power', 'W', 'watt', 'fpnum kMGTP'),
-  one('dBm', 'decibel over one milliwatt', 'power', (number) => 10 ** (decimalToNumber(number) / 10 - 3)),
-  ...family('energy', 'J', 'joule', 'afpnum kM'),
-  ...family('time', 's', 'second', 'afpnum '),
-  ...over('irradiance', 'W', 'watt', 'pnum kMGTP', AREAS),
-  ...over('field', 'V', 'volt', 'num kMG', LENGTHS),
-  ...PRESSURES,
-  ...over('conductivity', 'S', 'siemens', 'num kM', LENGTHS.slice(0, 2)),
-  one('m2/W', 'square metre per watt', 'nonlinear-index', byPower(0)),
-  one('cm2/W', 'square centimetre per watt', 'nonlinear-index', byPower(-4)),
-  one('', 'one', 'fraction', byPower(0)),
-  one('%', 'per cent', 'fraction', byPower(-2)),
-  ...['ppm', 'umol/mol'].map((s) => one(s, 'micromole per mole', 'mole-fraction', byPower(0))),
-  ...['g/kg', '‰'].map((s) => one(s, 'gram per kilogram', 'salinity', byPower(0))),
-];
+const FAMILIES: Readonly<Record<UnitKind, () => Unit[]>> = {
+  length: () => [
+    ...family('length', 'm', 'metre', 'fpnum k'),
+    one('cm', 'centimetre', 'length', byPower(-2)),
+    { ...one('Mm', 'megametre', 'length', byPower(6)), mistakenFor: 'mm' },
+    ...['Å', 'angstrom'].map((s) => one(s, 'angstrom', 'length', byPower(-10))),
+    ...['micron', 'microns'].map((s) => one(s, 'micrometre', 'length', byPower(-6))),
+  ],
+  frequency: () => [
+    ...family('frequency', 'Hz', 'hertz', ' kMGTP'),
+    { ...one('mHz', 'millihertz', 'frequency', byPower(-3)), mistakenFor: 'MHz' },
+  ],
+  'photon-energy': () => [
+    ...family('photon-energy', 'eV', 'electronvolt', 'um k'),
+    { ...one('MeV', 'megaelectronvolt', 'photon-energy', byPower(6)), mistakenFor: 'meV' },
+  ],
+  wavenumber: wavenumbers,
+  angle: angles,
+  temperature: temperatures,
+  power: () => [
+    ...family('power', 'W', 'watt', 'fpnum kMGTP'),
+    one('dBm', 'decibel over one milliwatt', 'power', (number) => 10 ** (decimalToNumber(number) / 10 - 3)),
+  ],
+  energy: () => family('energy', 'J', 'joule', 'afpnum kM'),
+  time: () => family('time', 's', 'second', 'afpnum '),
+  irradiance: () => over('irradiance', 'W', 'watt', 'pnum kMGTP', AREAS),
+  field: () => over('field', 'V', 'volt', 'num kMG', LENGTHS),
+  pressure: pressures,
+  conductivity: () => over('conductivity', 'S', 'siemens', 'num kM', LENGTHS.slice(0, 2)),
+  'nonlinear-index': () => [
+    one('m2/W', 'square metre per watt', 'nonlinear-index', byPower(0)),
+    one('cm2/W', 'square centimetre per watt', 'nonlinear-index', byPower(-4)),
+  ],
+  fraction: () => [one('', 'one', 'fraction', byPower(0)), one('%', 'per cent', 'fraction', byPower(-2))],
+  'mole-fraction': () =>
+    ['ppm', 'umol/mol'].map((s) => one(s, 'micromole per mole', 'mole-fraction', byPower(0))),
+  salinity: () => ['g/kg', '‰'].map((s) => one(s, 'gram per kilogram', 'salinity', byPower(0))),
+};
+
+const made = new Map<UnitKind, readonly Unit[]>();
+
+/** The units of one kind. */
+export function unitsOf(kind: UnitKind): readonly Unit[] {
+  let units = made.get(kind);
+  if (!units) {
+    units = FAMILIES[kind]();
+    made.set(kind, units);
+  }
+  return units;
+}
+
+/** Every unit. */
+export const allUnits = (): readonly Unit[] => (Object.keys(FAMILIES) as UnitKind[]).flatMap(unitsOf);

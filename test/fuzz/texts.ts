@@ -3,13 +3,13 @@ import { catalogueFromSources } from '../../src/catalog/from-sources.ts';
 import { COMMANDS, optionsOf } from '../../src/cli/command-table.ts';
 import { type OptionKey, optionSpec } from '../../src/cli/options.ts';
 import { isProblem } from '../../src/units/problem.ts';
-import { UNITS } from '../../src/units/unit-table.ts';
+import { allUnits } from '../../src/units/unit-table.ts';
 import type { Random } from './random.ts';
 
 const catalogue = catalogueFromSources();
 export const KEYS: readonly string[] = catalogue.keys();
 const NAMES = catalogue.entries().flatMap((e) => [e.name, e.formula ?? e.key, ...e.aliases]);
-const SYMBOLS = UNITS.map((u) => u.symbol);
+const SYMBOLS = allUnits().map((u) => u.symbol);
 
 const sometimesDamaged = (r: Random, text: string): string => (r.chance(0.15) ? r.damaged(text) : text);
 

@@ -22,7 +22,9 @@ import { parseTime } from '../../src/units/parse-time.ts';
 import { parseTolerances } from '../../src/units/parse-tolerance.ts';
 import { parseWave } from '../../src/units/parse-wave.ts';
 import { isProblem, problemText } from '../../src/units/problem.ts';
-import { UNITS } from '../../src/units/unit-table.ts';
+import { allUnits } from '../../src/units/unit-table.ts';
+
+const UNITS = allUnits();
 
 const PARSERS: readonly ((text: string) => unknown)[] = [
   parseAngle,

@@ -1,11 +1,8 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
+import { isLiteralMedium } from '../../src/units/is-literal-medium.ts';
 import { parseComplex } from '../../src/units/parse-complex.ts';
-import {
-  isLiteralMedium,
-  parseLiteralMedium,
-  type TypedMedium,
-} from '../../src/units/parse-literal-medium.ts';
+import { parseLiteralMedium, type TypedMedium } from '../../src/units/parse-literal-medium.ts';
 import { outcome } from './outcome.ts';
 
 const z = (re: number, im = 0) => ({ re, im });

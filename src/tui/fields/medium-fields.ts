@@ -2,7 +2,8 @@
 import type { MediumSpec, Question } from '../../answer/question.ts';
 import { axesOf } from '../../catalog/choose-fit.ts';
 import type { Axis } from '../../catalog/types.ts';
-import { isLiteralMedium, parseLiteralMedium } from '../../units/parse-literal-medium.ts';
+import { isLiteralMedium } from '../../units/is-literal-medium.ts';
+import { parseLiteralMedium } from '../../units/parse-literal-medium.ts';
 import { isProblem, type Problem, problem } from '../../units/problem.ts';
 import { quoteInput } from '../../units/quote-input.ts';
 import { toAscii } from '../../units/to-ascii.ts';
