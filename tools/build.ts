@@ -12,7 +12,8 @@ import { chmodSync, copyFileSync, mkdirSync, readFileSync, rmSync, writeFileSync
 import path from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { type BuildOptions, build, type Metafile, type Plugin } from 'esbuild';
-import { makeCache } from './code-cache.ts';
+import { asyncScript, closeAsyncScript } from './async-script.ts';
+import { makeCache, makeScreenCaches } from './code-cache.ts';
 import { buildLateParts, callLate, type LateModules } from './late-parts.ts';
 import { writeNotices } from './licences.ts';
 import { writePackedCatalogue } from './pack-catalog.ts';
@@ -45,16 +46,18 @@ const partName = (file: string): string =>
     .replace(/\.tsx?$/, '')
     .replaceAll(path.sep, '-');
 
-/** Turns `import('./x.ts')` of the entry bundle into a load of the built part and remembers the part. */
+/** Turns `import('./x.ts')` of a script into a load of the built part and remembers the part. */
 function lazyParts(parts: Map<string, string>): Plugin {
   return {
     name: 'lazy-parts',
     setup(b) {
-      b.onResolve({ filter: /^\./ }, (args) => {
-        if (args.kind !== 'dynamic-import') return undefined;
-        const file = path.resolve(args.resolveDir, args.path);
-        parts.set(partName(file), file);
-        return { path: `./${partName(file)}.mjs`, external: true };
+      b.onResolve({ filter: /^[.a-z]/ }, (args) => {
+        if (args.kind !== 'dynamic-import' || args.path.startsWith('node:')) return undefined;
+        const isPackage = !args.path.startsWith('.');
+        const file = isPackage ? args.path : path.resolve(args.resolveDir, args.path);
+        const name = isPackage ? args.path : partName(file);
+        parts.set(name, file);
+        return { path: `./${name}.mjs`, external: true };
       });
     },
   };
@@ -68,6 +71,11 @@ const ALONE: ReadonlyMap<string, readonly string[]> = new Map([
   ['cli-commands-sweep', ['air', 'n-bk7', '--sweep', 'wave=400nm..700nm:1nm', '-o', '/dev/null']],
   ['cli-commands-stream', ['stream', '--from', 'air', '--into', 'n-bk7', '-o', '/dev/null', '{rows}']],
 ]);
+
+/** The full-screen program: what takes the terminal over, and, behind it, what draws the picture. */
+const SCREEN: readonly string[] = ['tui-main', 'tui-show-picture'];
+/** A step of the angle either way, then out. */
+const SCREEN_KEYS: readonly string[] = ['\x1b[A', '\x1b[B', 'q'];
 
 /** What most starts are: a few questions about one surface. */
 const PLAIN_QUESTIONS = [
@@ -130,6 +138,10 @@ function importThroughEntry(script: string): void {
   writeFileSync(script, ascii.replace(/\bimport\("\.\//g, 'importPart("./'));
 }
 
+/** Those of the parts that are named, for the bundler. */
+const named = (parts: ReadonlyMap<string, string>, names: readonly string[]): Record<string, string> =>
+  Object.fromEntries(names.map((name) => [name, parts.get(name) ?? '']));
+
 export async function buildAll(): Promise<void> {
   rmSync(dist, { recursive: true, force: true });
   mkdirSync(dist, { recursive: true });
@@ -140,6 +152,15 @@ export async function buildAll(): Promise<void> {
   const parts = new Map<string, string>();
   const met: LateModules = new Map();
   const src = path.join(root, 'src');
+  const drawing: BuildOptions = {
+    // Reading `fetch` loads the whole HTTP client of Node (50 ms); the layout engine asks for it without needing it.
+    define: { ...define, fetch: 'undefined', 'import.meta.dirname': '__dirname' },
+    alias: {
+      'string-width': path.join(root, 'src/term/string-width-alias.ts'),
+      '@alcalzone/ansi-tokenize': path.join(root, 'src/term/styled-chars-alias.ts'),
+    },
+    plugins: [withoutDevtools],
+  };
   const script: BuildOptions = {
     ...common,
     outdir: dist,
@@ -160,41 +181,51 @@ export async function buildAll(): Promise<void> {
   copyFileSync(path.join(root, 'tools/entry.cjs'), path.join(dist, 'halfspace.js'));
   chmodSync(path.join(dist, 'halfspace.js'), 0o755);
 
-  const chosen = (alone: boolean): Record<string, string> =>
-    Object.fromEntries([...parts].filter(([name]) => ALONE.has(name) === alone));
-  const alone = await build({ ...script, entryPoints: chosen(true) });
+  const alone = await build({ ...script, entryPoints: named(parts, [...ALONE.keys()]) });
+  const screen: Metafile[] = [];
+  // One after the other: the second is met in the first.
+  for (const name of SCREEN) {
+    const { metafile } = await build(
+      asyncScript({
+        ...script,
+        ...drawing,
+        entryPoints: named(parts, [name]),
+        plugins: [lazyParts(parts), withoutDevtools],
+      }),
+    );
+    if (metafile) screen.push(metafile);
+  }
+  const scripts = [...ALONE.keys(), ...SCREEN];
   const rest = await build({
     ...common,
-    entryPoints: chosen(false),
+    ...drawing,
+    entryPoints: named(
+      parts,
+      [...parts.keys()].filter((name) => !scripts.includes(name)),
+    ),
     outdir: dist,
     outExtension: { '.js': '.mjs' },
     chunkNames: 'part-[hash]',
     format: 'esm',
     splitting: true,
-    // Reading `fetch` loads the whole HTTP client of Node (50 ms); the layout engine asks for it without needing it.
-    define: { ...define, fetch: 'undefined', 'import.meta.dirname': '__dirname' },
     banner: {
       js: 'import{createRequire}from"node:module";const require=createRequire(import.meta.url),__dirname=require("node:path").dirname(require("node:url").fileURLToPath(import.meta.url));',
     },
-    alias: {
-      'string-width': path.join(root, 'src/term/string-width-alias.ts'),
-      '@alcalzone/ansi-tokenize': path.join(root, 'src/term/styled-chars-alias.ts'),
-    },
-    plugins: [withoutDevtools],
   });
-  for (const name of ALONE.keys()) {
+  for (const name of SCREEN) closeAsyncScript(path.join(dist, `${name}.js`));
+  for (const name of [...scripts, ...[...met.keys()].map((part) => part.name)]) {
     importThroughEntry(path.join(dist, `${name}.js`));
   }
-  for (const { name } of met.keys()) importThroughEntry(path.join(dist, `${name}.js`));
   makeCache(dist, 'core', PLAIN_QUESTIONS);
   for (const [name, line] of ALONE) makeCache(dist, name, [line]);
   for (const { name, lines } of met.keys()) makeCache(dist, name, lines);
+  await makeScreenCaches(dist, SCREEN, SCREEN_KEYS);
   const inputsOf = (...metas: (Metafile | undefined)[]): string[] => [
     ...new Set(metas.flatMap((meta) => Object.keys(meta?.inputs ?? {}))),
   ];
   const inputs = {
     entry: inputsOf(entry.metafile),
-    parts: inputsOf(...late, alone.metafile, rest.metafile),
+    parts: inputsOf(...late, alone.metafile, ...screen, rest.metafile),
   };
   writeNotices(root, dist, [...inputs.entry, ...inputs.parts]);
   writeFileSync(path.join(dist, 'inputs.json'), JSON.stringify(inputs));

@@ -7,48 +7,63 @@ import { spawnSync } from 'node:child_process';
 import { mkdirSync, mkdtempSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import path from 'node:path';
+import { spawn } from '@lydell/node-pty';
 
-/** Runs the command lines, the texts they print thrown away, then keeps the cache of the one script. */
+/** Starts the program as its entry does (entry.cjs), command line after command line, then keeps the caches asked for. */
 const MAKER = `
 const fs = require('node:fs'), vm = require('node:vm'), path = require('node:path');
-const [, dist, wanted, lines] = process.argv;
-let kept;
-const start = (name, module) => {
-  const file = path.join(dist, name + '.js');
-  const script = new vm.Script(fs.readFileSync(file, 'latin1'), { filename: file });
-  if (name === wanted) kept = script;
-  script.runInThisContext()(require, dist, importPart, loadNow, module);
+const [, dist, wanted, lines, isScreen] = process.argv;
+const scripts = new Map();
+const scriptOf = (name) => {
+  const filename = path.join(dist, name + '.js');
+  if (!scripts.has(name)) scripts.set(name, new vm.Script(fs.readFileSync(filename, 'latin1'), { filename }));
+  return scripts.get(name);
 };
+const run = (name, module) => scriptOf(name).runInThisContext()(require, dist, importPart, loadNow, module);
 const loaded = new Map();
-const loadNow = (name) => {
+const load = (name) => {
   if (!loaded.has(name)) {
-    const module = { exports: {} };
-    loaded.set(name, module);
-    start(name, module);
+    const part = { module: { exports: {} } };
+    loaded.set(name, part);
+    part.done = run(name, part.module);
   }
-  return loaded.get(name).exports;
+  return loaded.get(name);
 };
-const importPart = (part) => {
-  const name = path.basename(part, '.mjs');
-  return fs.existsSync(path.join(dist, name + '.js')) ? Promise.resolve(loadNow(name)) : import(path.join(dist, part));
+const loadNow = (name) => load(name).module.exports;
+const importPart = async (file) => {
+  const name = path.basename(file, '.mjs');
+  if (!fs.existsSync(path.join(dist, name + '.js'))) return import(path.join(dist, file));
+  const part = load(name);
+  await part.done;
+  return part.module.exports;
 };
-const core = path.join(dist, 'core.js');
-const script = new vm.Script(fs.readFileSync(core, 'latin1'), { filename: core });
-if (wanted === 'core') kept = script;
+const keep = (status) => {
+  for (const name of JSON.parse(wanted)) {
+    if (status || !scripts.has(name)) throw new Error(name + ' did not run');
+    fs.writeFileSync(path.join(dist, name + '.cache'), scripts.get(name).createCachedData());
+  }
+};
+const exit = process.exit;
 process.exit = (status) => {
   process.exitCode = status;
+  if (!isScreen) return;
+  keep(status);
+  exit(status);
 };
+process.once('beforeExit', () => keep(process.exitCode));
 const write = fs.writeSync;
-fs.writeSync = (to, bytes, ...more) => (to === 1 ? bytes.length : write(to, bytes, ...more));
+if (!isScreen) fs.writeSync = (to, bytes, ...more) => (to === 1 ? bytes.length : write(to, bytes, ...more));
 for (const line of JSON.parse(lines)) {
   process.argv = [process.execPath, 'halfspace', ...line];
-  script.runInThisContext()(require, dist, importPart, loadNow);
+  run('core');
 }
-process.once('beforeExit', () => {
-  if (process.exitCode || !kept) throw new Error(wanted + ' did not run');
-  fs.writeFileSync(path.join(dist, wanted + '.cache'), kept.createCachedData());
-});
 `;
+
+/** Only what a plain start sets counts: other flags of this process would make a cache that plain starts reject. */
+const plainEnvironment = (folder: string): Record<string, string> => {
+  const { CI, NODE_OPTIONS, ...others } = process.env as Record<string, string>;
+  return { ...others, XDG_DATA_HOME: folder, XDG_CONFIG_HOME: folder, XDG_STATE_HOME: folder };
+};
 
 /**
  * @param name the script, without its ending
@@ -56,8 +71,7 @@ process.once('beforeExit', () => {
  *   `{own}` a folder with an entry of a user's own
  */
 export function makeCache(dist: string, name: string, lines: readonly (readonly string[])[]): void {
-  const folder = mkdtempSync(path.join(tmpdir(), 'rows-'));
-  try {
+  withFolder((folder) => {
     const rows = path.join(folder, 'rows.csv');
     const waves = Array.from({ length: 200 }, (_, i) => `${(0.4 + i / 200).toFixed(4)},${i % 80}`);
     writeFileSync(rows, `wave_um,angle\n${waves.join('\n')}\n`);
@@ -66,14 +80,60 @@ export function makeCache(dist: string, name: string, lines: readonly (readonly 
     writeFileSync(path.join(own, 'an-oil.csv'), 'wavelength_nm,n,k\n400,1.53,0\n700,1.51,1e-6\n');
     const named: Readonly<Record<string, string>> = { '{rows}': rows, '{own}': own };
     const given = lines.map((line) => line.map((word) => named[word] ?? word));
-    // Only what a plain start sets counts: other flags of this process would make a cache that plain starts reject.
-    const env = { ...process.env, NODE_OPTIONS: '', XDG_DATA_HOME: path.join(dist, 'no-such-folder') };
-    const made = spawnSync(process.execPath, ['-e', MAKER, dist, name, JSON.stringify(given)], {
-      env,
-      encoding: 'utf8',
-    });
+    const made = spawnSync(
+      process.execPath,
+      ['-e', MAKER, dist, JSON.stringify([name]), JSON.stringify(given)],
+      { env: plainEnvironment(path.join(folder, 'none')), encoding: 'utf8' },
+    );
     if (made.status !== 0) throw new Error(`the code cache of ${name} could not be made: ${made.stderr}`);
-  } finally {
-    rmSync(folder, { recursive: true, force: true });
-  }
+  });
+}
+
+/** The scripts of the full-screen program, after its first frame and the keys given one by one. The last key leaves it. */
+export async function makeScreenCaches(
+  dist: string,
+  names: readonly string[],
+  keys: readonly string[],
+): Promise<void> {
+  await withFolder(async (folder) => {
+    const args = ['-e', MAKER, dist, JSON.stringify(names), '[[]]', 'screen'];
+    const env = { ...plainEnvironment(folder), LANG: 'C.UTF-8', TERM: 'xterm-256color' };
+    const screen = spawn(process.execPath, args, { cols: 80, rows: 24, env });
+    let text = '';
+    const left = [...keys];
+    let timer: NodeJS.Timeout | undefined;
+    const pressWhenQuiet = (): void => {
+      clearTimeout(timer);
+      timer = setTimeout(() => {
+        const key = left.shift();
+        if (key === undefined) return;
+        screen.write(key);
+        pressWhenQuiet();
+      }, QUIET_ms);
+    };
+    screen.onData((data) => {
+      text += data;
+      pressWhenQuiet();
+    });
+    const giveUp = setTimeout(() => screen.kill('SIGKILL'), LONGEST_ms);
+    const status = await new Promise<number>((resolve) =>
+      screen.onExit(({ exitCode, signal }) => resolve(signal || exitCode)),
+    );
+    clearTimeout(timer);
+    clearTimeout(giveUp);
+    if (status !== 0) throw new Error(`the code cache of the screen could not be made: ${text}`);
+  });
+}
+
+/** After so long without output a frame is complete. */
+const QUIET_ms = 250;
+const LONGEST_ms = 20_000;
+
+function withFolder<Result>(use: (folder: string) => Result): Result {
+  const folder = mkdtempSync(path.join(tmpdir(), 'cache-'));
+  const remove = (): void => rmSync(folder, { recursive: true, force: true });
+  const result = use(folder);
+  if (result instanceof Promise) return result.finally(remove) as Result;
+  remove();
+  return result;
 }

@@ -11,21 +11,25 @@ const start = (name, module) => {
     cachedData = fs.readFileSync(`${__dirname}/${name}.cache`);
   } catch {}
   const script = new vm.Script(source, { filename, cachedData });
-  script.runInThisContext()(require, __dirname, importPart, loadNow, module);
+  return script.runInThisContext()(require, __dirname, importPart, loadNow, module);
 };
 const loaded = new Map();
-const loadNow = (name) => {
-  let module = loaded.get(name);
-  if (!module) {
-    module = { exports: {} };
-    loaded.set(name, module);
-    start(name, module);
+const load = (name) => {
+  let part = loaded.get(name);
+  if (!part) {
+    part = { module: { exports: {} }, done: undefined };
+    loaded.set(name, part);
+    part.done = start(name, part.module);
   }
-  return module.exports;
+  return part;
 };
-// A part is either a script with a code cache of its own, or a module.
-const importPart = (part) => {
-  const name = part.slice(2, -4);
-  return fs.existsSync(`${__dirname}/${name}.js`) ? Promise.resolve(loadNow(name)) : import(part);
+const loadNow = (name) => load(name).module.exports;
+// A part is either a script with a code cache of its own, which may have something to wait for, or a module.
+const importPart = async (path) => {
+  const name = path.slice(2, -4);
+  if (!fs.existsSync(`${__dirname}/${name}.js`)) return import(path);
+  const part = load(name);
+  await part.done;
+  return part.module.exports;
 };
 start('core');

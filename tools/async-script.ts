@@ -1,0 +1,45 @@
+/**
+ * Turns a bundle of modules into a script with a code cache: an asynchronous function of what the starter gives, since some
+ * packages wait at the top of a module, which no other script format allows. The bundler leaves one list of exports at the
+ * end, which becomes what the function gives back; Node's own modules come from the starter's `require`.
+ */
+import { readFileSync, writeFileSync } from 'node:fs';
+import { builtinModules } from 'node:module';
+import type { BuildOptions, Plugin } from 'esbuild';
+
+const builtins: Plugin = {
+  name: 'builtins',
+  setup(b) {
+    const known = new Set([...builtinModules, ...builtinModules.map((name) => `node:${name}`)]);
+    b.onResolve({ filter: /^[\w:/]+$/ }, ({ path: name, namespace }) =>
+      known.has(name) && namespace !== 'builtin' ? { path: name, namespace: 'builtin' } : undefined,
+    );
+    b.onLoad({ filter: /.*/, namespace: 'builtin' }, ({ path: name }) => ({
+      contents: `module.exports = givenRequire(${JSON.stringify(name)});`,
+    }));
+  },
+};
+
+/** To be added to the options of the build; its plugins come before those given. */
+export const asyncScript = (given: BuildOptions): BuildOptions => ({
+  ...given,
+  define: { ...given.define, 'import.meta.url': 'scriptUrl' },
+  format: 'esm',
+  splitting: false,
+  outExtension: { '.js': '.js' },
+  banner: {
+    js: '(async function(require,__dirname,importPart,loadNow,module){const givenRequire=require,scriptUrl="file://"+__dirname+"/";',
+  },
+  footer: {},
+  plugins: [builtins, ...(given.plugins ?? [])],
+});
+
+/** Makes the built module a function; throws where it is not of the shape stated above. */
+export function closeAsyncScript(file: string): void {
+  const text = readFileSync(file, 'utf8');
+  const list = /export\s*\{([^{}]*)\};?\s*$/.exec(text);
+  if (!list) throw new Error(`${file} does not end in its exports`);
+  const names = (list[1] ?? '').split(',').map((item) => item.trim().split(/\s+as\s+/));
+  const object = names.map(([inside, outside = inside]) => `${outside}:${inside}`).join(',');
+  writeFileSync(file, `${text.slice(0, list.index)}module.exports={${object}}})`);
+}
