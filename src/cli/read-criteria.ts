@@ -77,6 +77,7 @@ export function readOptions(options: OptionValues, classes: readonly string[]): 
     ...(options.clear_m && { clear_m: options.clear_m }),
     ...(options.maxLoss !== undefined && { maxLoss: options.maxLoss }),
     ...(options.thickness_m !== undefined && { thickness_m: options.thickness_m }),
+    ...(options.temperature_K !== undefined && { temperature_K: options.temperature_K }),
     ranges: {
       ...(indexRange && { n: indexRange }),
       ...(groupIndexRange && { groupIndex: groupIndexRange }),

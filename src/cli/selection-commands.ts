@@ -30,7 +30,7 @@ export const SELECTION_COMMANDS = [
         many: true,
       },
     ],
-    options: [...CRITERIA_OPTIONS, 'sort', 'airWavelength', 'catalog', 'json', 'csv'],
+    options: [...CRITERIA_OPTIONS, 'sort', 'airWavelength', 'temperature_K', 'catalog', 'json', 'csv'],
     examples: [
       { line: 'find --at 10.6um --clear 10.6um --not hygroscopic', meaning: 'windows for a CO2 laser' },
       {
@@ -65,6 +65,7 @@ export const SELECTION_COMMANDS = [
       'not',
       'clear_m',
       'airWavelength',
+      'temperature_K',
       'catalog',
       'json',
       'csv',

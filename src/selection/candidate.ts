@@ -29,25 +29,38 @@ export class Candidate {
   readonly material: Material;
   readonly axis: Axis;
   readonly wave: FitWave | undefined;
+  /** Undefined: each fit at the temperature it holds for. */
+  readonly temperature_K: number | undefined;
   private readonly survey: Survey;
   private quick: QuickMedium | undefined | null = null;
   private matter: QuickOptics | undefined;
   private spread: number | Undecided | undefined;
   private dispersion: number | Undecided | undefined;
 
-  constructor(survey: Survey, material: Material, axis: Axis, wave: FitWave | undefined) {
+  constructor(
+    survey: Survey,
+    material: Material,
+    axis: Axis,
+    wave: FitWave | undefined,
+    temperature_K?: number,
+  ) {
     this.survey = survey;
     this.material = material;
     this.axis = axis;
     this.wave = wave;
+    this.temperature_K = temperature_K;
   }
 
   /** Undefined where no data reach the wave, or no wave is given. */
   get medium(): QuickMedium | undefined {
     if (this.quick === null) {
-      this.quick = this.wave && quickMedium(this.survey, this.material, this.axis, this.wave);
+      this.quick = this.wave && this.measure(this.axis, this.wave);
     }
     return this.quick;
+  }
+
+  private measure(axis: Axis, wave: FitWave): QuickMedium | undefined {
+    return quickMedium(this.survey, this.material, axis, wave, this.temperature_K);
   }
 
   private get known(): QuickOptics | undefined {
@@ -63,7 +76,7 @@ export class Candidate {
 
   /** The same material and wave on another axis. */
   onAxis(axis: Axis): Candidate {
-    return new Candidate(this.survey, this.material, axis, this.wave);
+    return new Candidate(this.survey, this.material, axis, this.wave, this.temperature_K);
   }
 
   get n(): number | Undecided {
@@ -94,7 +107,7 @@ export class Candidate {
   private measureBirefringence(): number | Undecided {
     const { wave, material } = this;
     if (!wave) return undecided('no-data-at-wave');
-    const at = (axis: Axis): number | undefined => quickMedium(this.survey, material, axis, wave)?.n;
+    const at = (axis: Axis): number | undefined => this.measure(axis, wave)?.n;
     const reached = new Set(material.fits.filter((fit) => inRange(fit, wave)).map((fit) => fit.axis));
     if (reached.size === 0) return undecided('no-data-at-wave');
     if (reached.has('isotropic')) return 0;

@@ -1,6 +1,6 @@
 /** Criteria in words, one phrase a condition: "n 1.37 to 1.39", "clear 3 um to 5 um", "not toxic". */
 import type { WaveSpec } from '../answer/question.ts';
-import { METRE } from '../units/display-unit.ts';
+import { CELSIUS, METRE } from '../units/display-unit.ts';
 import { formatNumber } from '../units/format-number.ts';
 import { formatQuantity, formatRange } from '../units/format-quantity.ts';
 import { ASCII, type NumberStyle } from '../units/number-style.ts';
@@ -45,9 +45,14 @@ export function lossWords(
     : `loss up to ${limit} through ${formatQuantity(thickness_m, METRE, 'shortest', { style })}`;
 }
 
+function temperatureWords(temperature_K: number, style: NumberStyle): string {
+  const celsius = Number((temperature_K - 273.15).toPrecision(9));
+  return `all at ${formatQuantity(celsius, CELSIUS, 'shortest', { style })}`;
+}
+
 /** All but the wave, which faces name in a place of its own. */
 export function conditionWords(criteria: Criteria, style: NumberStyle = ASCII): readonly string[] {
-  const { words, ranges, clear_m, classes, not, maxLoss, thickness_m } = criteria;
+  const { words, ranges, clear_m, classes, not, maxLoss, thickness_m, temperature_K } = criteria;
   return [
     ...(words.length > 0 ? [words.map((word) => `"${word}"`).join(' ')] : []),
     ...(Object.entries(ranges) as [RangeMeasure, ValueRange][]).map(([m, range]) =>
@@ -57,5 +62,6 @@ export function conditionWords(criteria: Criteria, style: NumberStyle = ASCII): 
     ...(maxLoss === undefined ? [] : [lossWords(maxLoss, thickness_m, style)]),
     ...(classes.length > 0 ? [`class ${classes.join(' or ')}`] : []),
     ...not.map((x) => `not ${x.kind === 'class' ? x.text : x.property}`),
+    ...(temperature_K === undefined || !criteria.wave ? [] : [temperatureWords(temperature_K, style)]),
   ];
 }

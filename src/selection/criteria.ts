@@ -25,6 +25,8 @@ export type Exclusion =
 
 export interface Criteria {
   readonly wave?: WaveSpec;
+  /** That of every medium; where absent each fit answers at the one it holds for. Abbe numbers stay those of the fits. */
+  readonly temperature_K?: number | undefined;
   /** Each must begin a word of the material's names, formula or class, or stand inside one. */
   readonly words: readonly string[];
   readonly ranges: Readonly<Partial<Record<RangeMeasure, ValueRange>>>;

@@ -32,16 +32,20 @@ export interface FindResult {
   readonly undecided: ReadonlyMap<UndecidedReason, number>;
 }
 
-/** A material on each of its axes, at the wave of the criteria. */
-export type CandidatesOf = (material: Material, wave: FitWave | undefined) => readonly Candidate[];
+/** A material on each of its axes, at the wave and the temperature of the criteria. */
+export type CandidatesOf = (
+  material: Material,
+  wave: FitWave | undefined,
+  temperature_K: number | undefined,
+) => readonly Candidate[];
 
 /** Nothing measured before. */
 export function freshCandidates(survey: Survey): CandidatesOf {
-  return (material, wave) => {
+  return (material, wave, temperature_K) => {
     const described = axesOf(material);
     // An entry of measured reflectances alone has no axis, and no data at any wave.
     const axes: readonly Axis[] = described.length > 0 ? described : ['isotropic'];
-    return axes.map((axis) => new Candidate(survey, material, axis, wave));
+    return axes.map((axis) => new Candidate(survey, material, axis, wave, temperature_K));
   };
 }
 
@@ -63,7 +67,7 @@ export function findMaterials(
   const asksHygroscopic = excludesHygroscopic(criteria);
   for (const material of survey.materials) {
     if (!isAmong(material.class) || !hasWords(material) || hasExcluded(material, criteria)) continue;
-    const verdict = judge(candidatesOf(material, wave), criteria);
+    const verdict = judge(candidatesOf(material, wave, criteria.temperature_K), criteria);
     if (verdict === false) continue;
     const open = isUndecided(verdict) ? verdict.undecided : undefined;
     const reason = open ?? (asksHygroscopic && !hygroscopicOnFile(material) ? 'not-on-file' : undefined);

@@ -13,6 +13,7 @@ import { sortFound } from './sort-found.ts';
 import type { SortOrder } from './sort-order.ts';
 import type { Survey } from './survey.ts';
 import { isUndecided, UNDECIDED_WORDS, type Undecided, type UndecidedReason } from './undecided.ts';
+import { type Warming, warmingOf } from './warming.ts';
 
 export interface Hit {
   readonly facts: MaterialFacts;
@@ -20,6 +21,7 @@ export interface Hit {
   readonly alsoAxes: readonly Axis[];
   /** At the wave; null where none is given. */
   readonly medium: MediumAnswer | null;
+  readonly warming: Warming;
   readonly birefringence: number | null;
   /** At the d and e lines, relative to air. */
   readonly n_d: number | null;
@@ -80,14 +82,16 @@ const counts = ({ undecided }: FindResult): FindReport['undecided'] =>
   [...undecided].map(([reason, count]) => ({ reason, count })).sort((a, b) => b.count - a.count);
 
 function describe(survey: Survey, { candidate, alsoAxes }: Found, criteria: Criteria): Hit {
-  const { material, axis, wave } = candidate;
+  const { material, axis, wave, temperature_K } = candidate;
   const reasons: Record<string, string> = {};
   const given = <Value>(name: string, value: Value | Undecided): Value | null => {
     if (!isUndecided(value)) return value;
     reasons[name] = wave ? UNDECIDED_WORDS[value.undecided] : NO_WAVE;
     return null;
   };
-  const side = wave && mediumSide({ kind: 'catalogue', material, axis }, wave, {}, false, survey.sourceOf);
+  const side =
+    wave &&
+    mediumSide({ kind: 'catalogue', material, axis }, wave, { temperature_K }, false, survey.sourceOf);
   const medium = side && !isRefusal(side) ? side.answer : null;
   if (!medium) reasons['n'] = NO_WAVE;
   for (const name of ['groupIndex', 'gvd_s2_per_m'] as const) {
@@ -105,6 +109,7 @@ function describe(survey: Survey, { candidate, alsoAxes }: Found, criteria: Crit
     axis,
     alsoAxes,
     medium,
+    warming: side && !isRefusal(side) ? warmingOf(side.notes) : 'none',
     birefringence: given('birefringence', candidate.birefringence),
     n_d,
     n_e,

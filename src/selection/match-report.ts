@@ -22,10 +22,12 @@ import type { Survey } from './survey.ts';
 import { standsTemperature, type ThermalMatch, thermalMatch } from './thermal-match.ts';
 import { type ThermalSlope, thermalSlope } from './thermal-slope.ts';
 import type { UndecidedReason } from './undecided.ts';
+import { type Warming, warmingOf } from './warming.ts';
 
 export interface Match {
   readonly facts: MaterialFacts;
   readonly medium: MediumAnswer;
+  readonly warming: Warming;
   /** n of this medium minus n of the target. */
   readonly difference: number;
   readonly difference_uncertainty: number;
@@ -41,7 +43,11 @@ export interface Match {
 }
 
 export interface MatchReport {
-  readonly target: { readonly medium: MediumAnswer; readonly slope: ThermalSlope | null };
+  readonly target: {
+    readonly medium: MediumAnswer;
+    readonly slope: ThermalSlope | null;
+    readonly warming: Warming;
+  };
   readonly wave: { readonly spec: WaveSpec; readonly at: FitWave };
   readonly within: number | null;
   /** Least reflecting first. */
@@ -69,7 +75,8 @@ export function matchReport(survey: Survey, question: MatchQuestion): MatchRepor
   const { target, wave: spec, within } = question;
   const at = bothReferences(spec);
   if (isRefusal(at)) return at;
-  const side = mediumSide(target, at, {}, false, survey.sourceOf);
+  const { temperature_K } = question.criteria;
+  const side = mediumSide(target, at, { temperature_K }, false, survey.sourceOf);
   if (isRefusal(side)) return refuse(side.code, side.exit, side.message, 'choose a wave inside');
   const result = findMaterials(survey, { ...question.criteria, wave: spec });
   if (isRefusal(result)) return result;
@@ -81,16 +88,18 @@ export function matchReport(survey: Survey, question: MatchQuestion): MatchRepor
     within === undefined ? ranked : ranked.filter(({ candidate }) => isWithin(candidate, side, within));
   const listed = within === undefined ? near.slice(0, NEAREST) : near;
   const slope =
-    target.kind === 'catalogue' ? thermalSlope(target.material, side.answer.axis as Axis, at) : null;
+    target.kind === 'catalogue'
+      ? thermalSlope(target.material, side.answer.axis as Axis, at, temperature_K)
+      : null;
   return {
-    target: { medium: side.answer, slope },
+    target: { medium: side.answer, slope, warming: warmingOf(side.notes) },
     wave: { spec, at },
     within: within ?? null,
     matches: listed.flatMap(({ candidate }) => describe(survey, side, slope, candidate, at) ?? []),
     ranked: ranked.length,
     examined: result.examined,
     undecided: [...result.undecided].map(([reason, count]) => ({ reason, count })),
-    mixtures: question.mix ? mixtureReport(survey, side, candidates, at) : null,
+    mixtures: question.mix ? mixtureReport(survey, side, candidates, at, temperature_K) : null,
   };
 }
 
@@ -120,20 +129,27 @@ function describe(
   survey: Survey,
   side: MediumSide,
   slope: ThermalSlope | null,
-  { material, axis }: Candidate,
+  { material, axis, temperature_K }: Candidate,
   at: FitWave,
 ): Match | undefined {
-  const other = mediumSide({ kind: 'catalogue', material, axis }, at, {}, false, survey.sourceOf);
+  const other = mediumSide(
+    { kind: 'catalogue', material, axis },
+    at,
+    { temperature_K },
+    false,
+    survey.sourceOf,
+  );
   if (isRefusal(other)) return undefined;
   const difference = other.optics.n.re - side.optics.n.re;
   const u = Math.hypot(indexSpread(side.answer), indexSpread(other.answer));
   const further = { re: other.optics.n.re + (difference < 0 ? -u : u), im: other.optics.n.im };
   const R = fresnel(side.optics, other.optics, 0).Rs;
-  const ownSlope = thermalSlope(material, axis, at);
+  const ownSlope = thermalSlope(material, axis, at, temperature_K);
   const thermal = thermalMatch({ n: side.optics.n.re, slope }, { n: other.optics.n.re, slope: ownSlope }, u);
   return {
     facts: materialFacts(material),
     medium: other.answer,
+    warming: warmingOf(other.notes),
     difference,
     difference_uncertainty: u,
     R,

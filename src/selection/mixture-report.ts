@@ -45,6 +45,7 @@ export function mixtureReport(
   target: MediumSide,
   candidates: readonly Candidate[],
   at: FitWave,
+  temperature_K: number | undefined,
 ): MixtureReport {
   const { n } = target.optics;
   if (n.im > ABSORBING * n.re) return { mixtures: [], possible: 0, notKnownToMix: 0, outOfReach: true };
@@ -52,7 +53,13 @@ export function mixtureReport(
     .filter(({ material }) => material.class === 'liquid')
     .flatMap((candidate) => {
       const { material, axis } = candidate;
-      const side = mediumSide({ kind: 'catalogue', material, axis }, at, {}, false, survey.sourceOf);
+      const side = mediumSide(
+        { kind: 'catalogue', material, axis },
+        at,
+        { temperature_K },
+        false,
+        survey.sourceOf,
+      );
       return isRefusal(side) || side.optics.n.im > ABSORBING * side.optics.n.re ? [] : [{ material, side }];
     })
     .sort((a, b) => a.side.optics.n.re - b.side.optics.n.re);

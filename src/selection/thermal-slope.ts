@@ -1,5 +1,5 @@
 /**
- * dn/dT of a medium at a wave around the temperature its index is given for, taken off the index itself at that temperature
+ * dn/dT of a medium at a wave around the temperature asked for or its index is given for, taken off the index itself at that temperature
  * plus and minus one kelvin: the model's own temperature, the fit's thermal form, or the single value among the handling facts.
  */
 import type { FitWave } from '../catalog/choose-fit.ts';
@@ -19,8 +19,13 @@ export interface ThermalSlope {
 }
 
 /** Null where nothing on file says how the index changes, or the temperature of the index is not known. */
-export function thermalSlope(material: Material, axis: Axis, wave: FitWave): ThermalSlope | null {
-  const base = mediumAtWave(material, axis, wave, {}, false);
+export function thermalSlope(
+  material: Material,
+  axis: Axis,
+  wave: FitWave,
+  around_K?: number,
+): ThermalSlope | null {
+  const base = mediumAtWave(material, axis, wave, { temperature_K: around_K }, false);
   if (isRefusal(base)) return null;
   const at_K = base.used.temperature_K ?? temperatureOf(base);
   if (at_K === undefined) return null;

@@ -1,9 +1,9 @@
 /**
  * Conditions typed beside the name of a medium, in the language of `halfspace find`: `glass n 1.5..1.53 not toxic`. What a
- * condition lacks is said while the others hold. The wave is that of the question where none is typed. Words that match nothing
+ * condition lacks is said while the others hold. The wave is that of the question where none is typed, the temperature always. Words that match nothing
  * as they stand are taken with slips.
  */
-import type { WaveSpec } from '../answer/question.ts';
+import type { Question, WaveSpec } from '../answer/question.ts';
 import type { Material } from '../catalog/types.ts';
 import { isRefusal } from '../medium/refusal.ts';
 import type { FindResult, Found } from '../selection/find-materials.ts';
@@ -23,29 +23,30 @@ export interface ConditionedHits {
   readonly count: string;
 }
 
-const made = new WeakMap<World, WeakMap<WaveSpec, Map<string, ConditionedHits | undefined>>>();
+const made = new WeakMap<World, WeakMap<Question, Map<string, ConditionedHits | undefined>>>();
 /** Texts kept, for the views of one frame and a letter taken back; lists of thousands are heavy to keep. */
 const MOST_TEXTS = 4;
 
 /** Undefined where the text holds nothing but words: then it is a name. */
-export function conditionedHits(text: string, wave: WaveSpec, world: World): ConditionedHits | undefined {
-  const waves = made.get(world) ?? new WeakMap<WaveSpec, Map<string, ConditionedHits | undefined>>();
-  made.set(world, waves);
-  const known = waves.get(wave) ?? new Map<string, ConditionedHits | undefined>();
-  waves.set(wave, known);
+export function conditionedHits(text: string, question: Question, world: World): ConditionedHits | undefined {
+  const questions = made.get(world) ?? new WeakMap<Question, Map<string, ConditionedHits | undefined>>();
+  made.set(world, questions);
+  const known = questions.get(question) ?? new Map<string, ConditionedHits | undefined>();
+  questions.set(question, known);
   if (known.has(text)) return known.get(text);
-  const hits = findConditioned(text, wave, world);
+  const hits = findConditioned(text, question, world);
   if (known.size >= MOST_TEXTS) known.clear();
   known.set(text, hits);
   return hits;
 }
 
-function findConditioned(text: string, wave: WaveSpec, world: World): ConditionedHits | undefined {
+function findConditioned(text: string, question: Question, world: World): ConditionedHits | undefined {
+  const { wave, conditions } = question;
   const { materials, classes } = world.survey();
   const reading = parseConditions(text, { classes, wave });
   if (reading.parts.every((part) => part.kind === 'word')) return undefined;
   const { words } = reading.criteria;
-  const criteria = { ...reading.criteria, words: [] };
+  const criteria = { ...reading.criteria, temperature_K: conditions.temperature_K, words: [] };
   const result = world.find(criteria, words.length === 0 ? undefined : meant(words, world));
   if (isRefusal(result)) return { reading, found: [], count: result.message };
   const found = sortFound(result.found, defaultOrder(criteria), criteria);

@@ -85,7 +85,7 @@ export function conditionsIn(text: string, question: Question, world: World): Co
   const literal = readLiteral(text.trim());
   // "n=1.4..1.5" is a condition, "n=1.4+" an unfinished medium.
   if (literal !== undefined && !(isProblem(literal) && text.includes('..'))) return undefined;
-  return conditionedHits(text, question.wave, world);
+  return conditionedHits(text, question, world);
 }
 
 function recentFirst(

@@ -26,8 +26,9 @@ export class MediumFinder {
   readonly #catalogue: IndexedCatalogue;
   #survey: Survey | undefined;
   #candidatesOf: CandidatesOf | undefined;
-  /** Vacuum wavelength in um that the candidates are measured at. */
+  /** Vacuum wavelength and temperature that the candidates are measured at. */
   #at_um: number | undefined;
+  #temperature_K: number | undefined;
   #candidates = new Map<Material, readonly Candidate[]>();
   #waiting: string[] = [];
   #timer: NodeJS.Timeout | undefined;
@@ -44,15 +45,17 @@ export class MediumFinder {
   /** `among`: media to look at, in the order wanted; all in the order of the catalogue where absent. */
   find(criteria: Criteria, among: readonly Material[] | undefined): FindResult | Refusal {
     const survey = this.survey();
-    return findMaterials({ ...survey, materials: among ?? survey.materials }, criteria, (material, wave) =>
-      wave ? this.#measured(material, wave) : this.#fresh()(material, wave),
+    return findMaterials(
+      { ...survey, materials: among ?? survey.materials },
+      criteria,
+      (material, wave, T) => (wave ? this.#measured(material, wave, T) : this.#fresh()(material, wave, T)),
     );
   }
 
-  prepare(wave: WaveSpec): void {
+  prepare(wave: WaveSpec, temperature_K: number | undefined): void {
     const at = bothReferences(wave);
-    if (isRefusal(at) || at.vacuum_um === this.#at_um) return;
-    this.#moveTo(at);
+    if (isRefusal(at) || this.#isAt(at, temperature_K)) return;
+    this.#moveTo(at, temperature_K);
     this.#waiting = [...this.#catalogue.keys()];
     this.#schedule(at);
   }
@@ -77,12 +80,17 @@ export class MediumFinder {
     if (!material) return;
     namesOf(material);
     // Asking for the medium is what measures it.
-    for (const candidate of this.#measured(material, at)) void candidate.medium;
+    for (const candidate of this.#measured(material, at, this.#temperature_K)) void candidate.medium;
   }
 
-  #moveTo(at: FitWave): void {
+  #isAt(at: FitWave, temperature_K: number | undefined): boolean {
+    return at.vacuum_um === this.#at_um && temperature_K === this.#temperature_K;
+  }
+
+  #moveTo(at: FitWave, temperature_K: number | undefined): void {
     this.stop();
     this.#at_um = at.vacuum_um;
+    this.#temperature_K = temperature_K;
     this.#candidates = new Map();
   }
 
@@ -91,11 +99,11 @@ export class MediumFinder {
     return this.#candidatesOf;
   }
 
-  #measured(material: Material, wave: FitWave): readonly Candidate[] {
-    if (wave.vacuum_um !== this.#at_um) this.#moveTo(wave);
+  #measured(material: Material, wave: FitWave, temperature_K: number | undefined): readonly Candidate[] {
+    if (!this.#isAt(wave, temperature_K)) this.#moveTo(wave, temperature_K);
     let candidates = this.#candidates.get(material);
     if (!candidates) {
-      candidates = this.#fresh()(material, wave);
+      candidates = this.#fresh()(material, wave, temperature_K);
       this.#candidates.set(material, candidates);
     }
     return candidates;

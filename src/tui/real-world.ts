@@ -2,7 +2,7 @@
 import type { Answer } from '../answer/answer.ts';
 import { answerQuestion } from '../answer/answer-question.ts';
 import type { SourceOf } from '../answer/medium-side.ts';
-import type { Layer, Question, WaveSpec } from '../answer/question.ts';
+import type { Layer, Question } from '../answer/question.ts';
 import type { CatalogueEntry, IndexedCatalogue } from '../catalog/entries.ts';
 import { foldTight } from '../catalog/fold.ts';
 import { type Refusal, refuse } from '../medium/refusal.ts';
@@ -26,7 +26,7 @@ export interface RealWorld extends World {
   /** Loads the forgiving search; until then names are found by their letters alone. */
   loadSearch(): Promise<void>;
   /** Gets ready, a little at a time, for conditions at a wave: the list of media has been opened. */
-  prepareFind(wave: WaveSpec): void;
+  prepareFind(question: Question): void;
   stop(): void;
 }
 
@@ -62,7 +62,7 @@ export function realWorld(
     find: (criteria, among) => finder.find(criteria, among),
     coatings: (question) => designs.get(question),
     survey: () => finder.survey(),
-    prepareFind: (wave) => finder.prepare(wave),
+    prepareFind: ({ wave, conditions }) => finder.prepare(wave, conditions.temperature_K),
     lookup: (name) => catalogue.lookup(name),
     material: (key) => catalogue.material(key),
     source: sourceOf,

@@ -107,7 +107,7 @@ export async function showPicture(start: Start, terminal: Terminal): Promise<num
   store.subscribe(() => kept.follow(store.state()));
   store.subscribe(() => {
     const { search, question } = store.state();
-    if (search) world.prepareFind(question.wave);
+    if (search) world.prepareFind(question);
   });
   setTimeout(
     () => void world.loadSearch().then(() => store.dispatch({ kind: 'ready' })),

@@ -21,10 +21,12 @@ const keys = (criteria: Partial<Criteria>): readonly string[] =>
   find(criteria).found.map((f) => f.candidate.material.key);
 
 /** The program's own answer, one medium at a time, with nothing of the search in it. */
-function askMedium(m: Material, axis: Axis, wavelength_m: number) {
+function askMedium(m: Material, axis: Axis, wavelength_m: number, temperature_K?: number) {
   const vacuumSpec = { kind: 'catalogue' as const, material: material('vacuum') };
   const answer = answerQuestion(
-    makeQuestion(vacuumSpec, { kind: 'catalogue', material: m, axis }, vacuum(wavelength_m)),
+    makeQuestion(vacuumSpec, { kind: 'catalogue', material: m, axis }, vacuum(wavelength_m), {
+      conditions: { temperature_K },
+    }),
     survey.sourceOf,
   );
   return isRefusal(answer) ? undefined : answer.into;
@@ -47,19 +49,22 @@ function askPlate(m: Material, axis: Axis, wavelength_m: number, thickness_m: nu
 
 describe('find, against one question a medium', () => {
   it.each([
-    [633e-9, 1.37, 1.39],
-    [10.6e-6, 2.3, 2.5],
-    [1.55e-6, 1.44, 1.45],
-    [193e-9, 1.4, 1.6],
-  ])('by index at %d m', (wavelength_m, from, to) => {
+    [633e-9, 1.37, 1.39, undefined],
+    [10.6e-6, 2.3, 2.5, undefined],
+    [1.55e-6, 1.44, 1.45, undefined],
+    [193e-9, 1.4, 1.6, undefined],
+    [633e-9, 1.32, 1.36, 313.15],
+    [10.6e-6, 3.9, 4.1, 353.15],
+    [1.55e-6, 1.44, 1.52, 80],
+  ])('by index at %d m, from %d to %d, at %s K', (wavelength_m, from, to, temperature_K) => {
     const found: string[] = [];
     let blank = 0;
     for (const m of survey.materials) {
-      const media = axesOf(m).map((axis) => askMedium(m, axis, wavelength_m));
+      const media = axesOf(m).map((axis) => askMedium(m, axis, wavelength_m, temperature_K));
       if (media.some((x) => x && x.n >= from && x.n <= to)) found.push(m.key);
       else if (media.length === 0 || media.some((x) => !x)) blank++;
     }
-    const result = find({ wave: vacuum(wavelength_m), ranges: { n: { from, to } } });
+    const result = find({ wave: vacuum(wavelength_m), temperature_K, ranges: { n: { from, to } } });
     expect(result.found.map((f) => f.candidate.material.key)).toEqual(found);
     expect(result.undecided.get('no-data-at-wave') ?? 0).toBe(blank);
     expect(result.examined).toBe(survey.materials.length);
@@ -84,6 +89,36 @@ describe('find, against one question a medium', () => {
     expect(keys({ wave, ranges: { gvd_s2_per_m: { from: -30e-27, to: 30e-27 } } })).toEqual(slow);
     expect(keys({ wave, ranges: { birefringence: { from: 0.05 } } })).toEqual(double);
     expect(double.length).toBeGreaterThan(5);
+  });
+
+  it('by group index, dispersion and birefringence at a temperature', () => {
+    const [wavelength_m, temperature_K] = [800e-9, 373.15];
+    const wave = vacuum(wavelength_m);
+    for (const { candidate } of find({ wave, temperature_K }).found) {
+      const { material: m, axis } = candidate;
+      const answer = askMedium(m, axis, wavelength_m, temperature_K);
+      const name = `${m.key}:${axis}`;
+      const same = (value: unknown, wanted: number | null | undefined): void => {
+        if (typeof value === 'number')
+          expect(Math.abs(value - (wanted ?? Number.NaN)), name).toBeLessThan(1e-12);
+        else expect(wanted, name).toBeNull();
+      };
+      same(candidate.groupIndex, answer?.groupIndex);
+      same(candidate.gvd_s2_per_m, answer?.gvd_s2_per_m);
+    }
+    const doubles = find({ wave, temperature_K, ranges: { birefringence: { from: 1e-3 } } }).found;
+    const changed = doubles.filter(({ candidate: { material: m, birefringence } }) => {
+      const at = (axis: Axis, T?: number): number =>
+        axesOf(m).includes(axis) ? (askMedium(m, axis, wavelength_m, T)?.n ?? Number.NaN) : Number.NaN;
+      const [low, high]: readonly [Axis, Axis] = axesOf(m).includes('z')
+        ? ['x', 'z']
+        : ['ordinary', 'extraordinary'];
+      const warm = at(high, temperature_K) - at(low, temperature_K);
+      expect(birefringence, m.key).toBeCloseTo(warm, 12);
+      return Math.abs(warm - (at(high) - at(low))) > 1e-4;
+    });
+    // Else the temperature would not have been looked at.
+    expect(changed.length).toBeGreaterThan(2);
   });
 
   it('by the loss of a plate, as the path of two surfaces gives it', () => {

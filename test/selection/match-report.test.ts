@@ -20,19 +20,26 @@ function match(target: MediumSpec, wavelength_m: number, more: Partial<MatchQues
 }
 
 describe('match', () => {
-  it.each(['fused-silica', 'n-bk7', 'sapphire'])('ranks as one question a medium does: %s', (key) => {
+  it.each([
+    ['fused-silica', undefined],
+    ['n-bk7', undefined],
+    ['sapphire', undefined],
+    ['n-bk7', 313.15],
+  ])('ranks as one question a medium does: %s at %s K', (key, temperature_K) => {
     const wavelength_m = 589e-9;
     const reflectances = survey.materials.flatMap((m) =>
       axesOf(m).flatMap((axis) => {
         const answer = answerQuestion(
-          makeQuestion(named(key), { kind: 'catalogue', material: m, axis }, vacuum(wavelength_m)),
+          makeQuestion(named(key), { kind: 'catalogue', material: m, axis }, vacuum(wavelength_m), {
+            conditions: { temperature_K },
+          }),
           survey.sourceOf,
         );
         if (isRefusal(answer) || (m.key === key && axis === answer.from.axis)) return [];
         return [{ name: `${m.key}:${axis}`, R: answer.interface.R }];
       }),
     );
-    const report = match(named(key), wavelength_m);
+    const report = match(named(key), wavelength_m, { criteria: { ...NO_CRITERIA, temperature_K } });
     expect(report.ranked).toBe(reflectances.length);
     const sorted = [...reflectances].sort((a, b) => a.R - b.R);
     for (const [i, found] of report.matches.entries()) {

@@ -10,7 +10,7 @@ import { type DocumentHead, jsonDocument } from './json-document.ts';
 
 export function findJson(report: FindReport, order: SortOrder, head: DocumentHead, ascii: boolean): string {
   const { criteria, wave, examined, hits, undecided } = report;
-  const { ranges, clear_m, classes, not, words, maxLoss, thickness_m } = criteria;
+  const { ranges, clear_m, classes, not, words, maxLoss, thickness_m, temperature_K } = criteria;
   return jsonDocument(
     head,
     {
@@ -22,6 +22,7 @@ export function findJson(report: FindReport, order: SortOrder, head: DocumentHea
         not: not.map((x) => (x.kind === 'class' ? x.text : x.property)),
         maxLoss: maxLoss ?? null,
         thickness_m: thickness_m ?? null,
+        temperature_K: temperature_K ?? null,
         sort: `${order.descending ? '-' : ''}${order.key}`,
       },
       wave: wave && waveData(wave.spec, wave.at),
@@ -50,6 +51,8 @@ function hitData(hit: Hit) {
     n: medium?.n ?? null,
     k: medium?.k ?? null,
     n_uncertainty: medium?.n_uncertainty ?? null,
+    temperature_K: medium?.temperature_K ?? null,
+    warming: hit.warming,
     groupIndex: medium?.groupIndex ?? null,
     gvd_s2_per_m: medium?.gvd_s2_per_m ?? null,
     birefringence: hit.birefringence,
@@ -118,4 +121,6 @@ const NAMES = [
   'density_kg_per_m3',
   'grade',
   'source',
+  'temperature_K',
+  'warming',
 ] as const;

@@ -32,7 +32,7 @@ export function findText(report: FindReport, order: SortOrder, style: NumberStyl
   const asked = conditionWords(criteria, style);
   const heading = [...asked, ...(wave ? [`at ${waveWords(wave.spec, style)}`] : [])].join(', ');
   const shown = fitting(columnsFor(criteria, order, hits), hits, style);
-  const marks = hits.flatMap((hit) => marksOf(hit.facts, hit.medium));
+  const marks = hits.flatMap((hit) => marksOf(hit.facts, hit.medium, hit.warming));
   const notes = shown.flatMap(({ note }) => (note === undefined ? [] : [note]));
   const table = columns(
     shown,
@@ -86,7 +86,7 @@ const GVD: HitColumn = {
   title: 'GVD',
   right: true,
   cell: ({ medium }, style) =>
-    text(medium?.gvd_s2_per_m == null ? null : medium.gvd_s2_per_m * 1e27, { decimals: 2 }, style),
+    text(medium?.gvd_s2_per_m == null ? null : medium.gvd_s2_per_m * 1e27, { significant: 3 }, style),
   note: 'GVD in fs²/mm',
 };
 const BIREFRINGENCE: HitColumn = {
@@ -143,8 +143,8 @@ const CLEAR: HitColumn = {
 };
 const MARKS: HitColumn = {
   title: '',
-  cell: ({ facts, medium }) =>
-    marksOf(facts, medium)
+  cell: ({ facts, medium, warming }) =>
+    marksOf(facts, medium, warming)
       .map((mark) => mark.letter)
       .join(''),
 };

@@ -8,7 +8,7 @@ import { type DocumentHead, jsonDocument } from './json-document.ts';
 
 export function matchJson(report: MatchReport, head: DocumentHead, ascii: boolean): string {
   const { target, wave, within, matches, ranked, examined, undecided, mixtures } = report;
-  const { medium, slope } = target;
+  const { medium, slope, warming } = target;
   return jsonDocument(
     head,
     {
@@ -20,6 +20,7 @@ export function matchJson(report: MatchReport, head: DocumentHead, ascii: boolea
         k: medium.k,
         n_uncertainty: medium.n_uncertainty,
         temperature_K: medium.temperature_K,
+        warming,
         dn_dT_per_K: slope?.dn_dT_per_K ?? null,
         source: medium.fit?.source ?? null,
       },
@@ -69,6 +70,7 @@ function matchData(match: Match) {
     matchTemperature_uncertainty_K: thermal?.uncertainty_K ?? null,
     matchTemperatureBothSlopesKnown: thermal?.bothSlopesKnown ?? null,
     temperature_K: medium.temperature_K,
+    warming: match.warming,
     hygroscopic: facts.hygroscopic,
     hazardLevel: facts.hazardLevel,
     hazard: facts.hazard,
@@ -110,6 +112,7 @@ const NAMES = [
   'hazardLevel',
   'hazard',
   'grade',
+  'warming',
 ] as const;
 
 export function matchCsv({ matches }: MatchReport, ascii: boolean): string {

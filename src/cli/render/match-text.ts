@@ -70,7 +70,7 @@ function table(matches: readonly Match[], style: NumberStyle): readonly string[]
     differenceText(match),
     ...reflectanceTexts(match),
     temperatureText(match, style),
-    marksOf(match.facts, match.medium)
+    marksOf(match.facts, match.medium, match.warming)
       .map((mark) => mark.letter)
       .join(''),
   ]);
@@ -115,7 +115,7 @@ function counted(report: MatchReport): string {
 
 function notes(report: MatchReport): readonly string[] {
   const { matches } = report;
-  const marks = matches.flatMap((match) => marksOf(match.facts, match.medium));
+  const marks = matches.flatMap((match) => marksOf(match.facts, match.medium, match.warming));
   const thermal = matches.some((m) => m.thermal);
   const assumed = matches.some((m) => m.thermal && !m.thermal.bothSlopesKnown);
   return [
