@@ -4,6 +4,7 @@
  */
 
 import type { FitWave } from '../catalog/choose-fit.ts';
+import { LOSSY_INCIDENCE } from '../interface/special-angles.ts';
 import type { CautionNote } from '../medium/caution.ts';
 import { isRefusal, type Refusal, refuse } from '../medium/refusal.ts';
 import type { Answer } from './answer.ts';
@@ -12,7 +13,7 @@ import { crystalNotes } from './crystal-answer.ts';
 import { crystalPart } from './crystal-part.ts';
 import { type EnergyParts, energyParts } from './energy-answer.ts';
 import { indexUncertainty, type ThermalSide } from './input-uncertainty.ts';
-import { interfaceParts, LOSSY_INCIDENCE } from './interface-answer.ts';
+import { interfaceParts } from './interface-answer.ts';
 import type { MediumSide, SourceOf } from './medium-side.ts';
 import { type Path, readEnds, readPath } from './path.ts';
 import { type PathFields, pathFields, surfaceFields } from './path-fields.ts';
@@ -141,6 +142,7 @@ function surfaceNotes(
   if (from.optics.n.im > LOSSY_INCIDENCE * Math.abs(from.optics.n.re))
     notes.push({ code: 'lossy-incidence', details: {} });
   if (surface.R === 0) notes.push({ code: 'infinite-value', details: { quantity: 'the return loss' } });
-  if (surface.R >= 1) notes.push({ code: 'infinite-value', details: { quantity: 'the reflection loss' } });
+  if (surface.R >= 1 && surface.T !== null)
+    notes.push({ code: 'infinite-value', details: { quantity: 'the reflection loss' } });
   return notes;
 }

@@ -1,5 +1,6 @@
 /** Coatings for one pair of media: the question of `coat`, answered. Pure; the films at hand come with the question. */
-import { fresnel } from '../interface/fresnel.ts';
+import { LOSSY_INCIDENCE } from '../interface/special-angles.ts';
+import { surfaceWave } from '../interface/surface-wave.ts';
 import type { CautionNote } from '../medium/caution.ts';
 import { isRefusal, type Refusal, refuse } from '../medium/refusal.ts';
 import { orderCautions, wordCaution } from './caution-text.ts';
@@ -9,7 +10,7 @@ import { type CoatScene, type Film, filmKey, filmsAt, substanceAt } from './coat
 import type { CoatingReport, MirrorDesign, SkippedFilm } from './coating-shape.ts';
 import { idealFilm, singleFilmCoatings } from './coating-single.ts';
 import { type InSteps, runToEnd } from './in-steps.ts';
-import { LOSSY_INCIDENCE, powerOf } from './interface-answer.ts';
+import { powerOf } from './interface-answer.ts';
 import type { MediumSide, SourceOf } from './medium-side.ts';
 import { readEnds } from './path.ts';
 import type { MediumSpec, Question } from './question.ts';
@@ -75,7 +76,7 @@ export function* coatingReportInSteps(
   const designed = films.filter((f) => asked.films.some((spec) => filmKey(spec) === f.key));
   const mirror = yield* mirrorPart(scene, films, designed, skipped, asked);
   if (isRefusal(mirror)) return mirror;
-  const bare = fresnel(from.optics, into.optics, incidenceAngle_rad);
+  const bare = surfaceWave(from.optics, into.optics, incidenceAngle_rad).wave;
   return {
     wave: waveAnswer(wave, question.wave),
     geometry: { incidenceAngle_rad, polarization },

@@ -5,6 +5,7 @@
  */
 import { axesOf, type FitWave } from '../catalog/choose-fit.ts';
 import type { Axis } from '../catalog/types.ts';
+import { LOSSY_INCIDENCE } from '../interface/special-angles.ts';
 import { isRefusal, type Refusal, refuse } from '../medium/refusal.ts';
 import { StackRefusal } from '../stack/stack-refusal.ts';
 import { extraordinaryIndex, walkOffAngle_rad } from '../stack/uniaxial.ts';
@@ -26,7 +27,6 @@ import {
   whyNotUniaxial,
 } from './crystal-media.ts';
 import type { CrystalAnswer, WaveplateAnswer } from './crystal-shape.ts';
-import { LOSSY_INCIDENCE } from './interface-answer.ts';
 import { type MediumSide, mediumSide, type SourceOf } from './medium-side.ts';
 import { opticAxisAngle_rad } from './optic-axis.ts';
 import type { Question } from './question.ts';

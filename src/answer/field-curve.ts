@@ -2,12 +2,13 @@
  * |E|^2 along the normal, over that of the incident wave: in front of the path, through its layers, behind it. Only where
  * everything is summed as amplitudes is there one such curve; else the refusal says what to change.
  */
+
+import { LOSSY_INCIDENCE } from '../interface/special-angles.ts';
 import { lengthText } from '../medium/range-text.ts';
 import { isRefusal, type Refusal, refuse } from '../medium/refusal.ts';
 import { fieldAt, frontField, type StackField, solveField } from '../stack/field-profile.ts';
 import { StackRefusal } from '../stack/stack-refusal.ts';
 import type { Answer } from './answer.ts';
-import { LOSSY_INCIDENCE } from './interface-answer.ts';
 import type { SourceOf } from './medium-side.ts';
 import { layeredPath, type Path, readEnds, readPath } from './path.ts';
 import type { Question } from './question.ts';

@@ -1,17 +1,15 @@
 /** The interface part of the answer: Fresnel, special angles, total reflection, losses; null wherever a value does not exist. */
-import { type FresnelResult, fresnel } from '../interface/fresnel.ts';
+import type { FresnelResult } from '../interface/fresnel.ts';
 import { reflectionLoss_dB, returnLoss_dB } from '../interface/losses.ts';
 import { pseudoBrewsterAngle } from '../interface/pseudo-brewster.ts';
-import { brewsterAngles, criticalAngle, WEAK_ABSORPTION } from '../interface/special-angles.ts';
+import { brewsterAngles } from '../interface/special-angles.ts';
+import { surfaceWave } from '../interface/surface-wave.ts';
 import { totalReflection } from '../interface/total-reflection.ts';
 import { abs2, arg, type Complex } from '../num/complex.ts';
 import type { InterfaceAnswer } from './answer.ts';
 import type { MediumSide } from './medium-side.ts';
 import type { Polarization } from './question.ts';
 import type { UncertaintyPart } from './spread-answer.ts';
-
-/** From this ratio k/n of the medium of incidence on, T as a fraction of the incident power has no meaning. */
-export const LOSSY_INCIDENCE = 1e-3;
 
 /** Below this R counts as none for phases: its amplitude is rounding noise. */
 const NO_REFLECTION = 1e-31;
@@ -34,13 +32,11 @@ export function interfaceParts(
 ): InterfaceParts {
   const a = from.optics;
   const b = into.optics;
-  const wave = fresnel(a, b, angle_rad);
-  const critical = criticalAngle(a, b);
-  const total =
-    critical !== null && angle_rad > critical && b.n.im <= WEAK_ABSORPTION * b.n.re && wave.kappa2.im > 0;
-  const tunnelling = total ? totalReflection(a, b, angle_rad, vacuumWavelength_m) : null;
+  const met = surfaceWave(a, b, angle_rad);
+  const { wave, powersKnown } = met;
+  const total = met.totalReflection;
+  const tunnelling = total ? totalReflection(met.from, b, angle_rad, vacuumWavelength_m) : null;
   const brewster = brewsterAngles(a, b);
-  const powersKnown = a.n.im <= LOSSY_INCIDENCE * Math.abs(a.n.re);
   const R = powerOf(polarization, wave.Rs, wave.Rp);
   return {
     wave,
@@ -61,7 +57,7 @@ export function interfaceParts(
       brewsterAngle_rad: brewster.p,
       brewsterAngleS_rad: brewster.s,
       pseudoBrewsterAngle_rad: b.n.im > 0 ? pseudoBrewsterAngle(a, b) : null,
-      criticalAngle_rad: critical,
+      criticalAngle_rad: met.criticalAngle_rad,
       totalReflection: total,
       evanescentDepth_m: tunnelling?.evanescentDepth_m ?? null,
       goosHanchenS_m: tunnelling?.goosHanchenS_m ?? null,

@@ -6,6 +6,8 @@
  * path up to there, closed by the layer's own medium), spread over the refracted beam: I_j/I = T_j cos/cos_j.
  * Unpolarized light: powers are means; the standing wave is that of s.
  */
+
+import { LOSSY_INCIDENCE } from '../interface/special-angles.ts';
 import {
   type FrontField,
   frontField,
@@ -15,7 +17,7 @@ import {
 } from '../stack/field-profile.ts';
 import { mixedStack } from '../stack/mixed-stack.ts';
 import { StackRefusal } from '../stack/stack-refusal.ts';
-import { LOSSY_INCIDENCE, powerOf } from './interface-answer.ts';
+import { powerOf } from './interface-answer.ts';
 import type { MediumSide } from './medium-side.ts';
 import { layeredPath, type Path } from './path.ts';
 import type { Question } from './question.ts';

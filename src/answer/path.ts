@@ -5,6 +5,7 @@
  */
 import type { FitWave } from '../catalog/choose-fit.ts';
 import { K, N } from '../dispersion/evaluator.ts';
+import { LOSSY_INCIDENCE } from '../interface/special-angles.ts';
 import { isRefusal, type Refusal, refuse } from '../medium/refusal.ts';
 import { complex } from '../num/complex.ts';
 import {
@@ -14,7 +15,6 @@ import {
   dispersiveFromWavelength,
 } from '../stack/group-delay.ts';
 import type { LayeredPath, Substance } from '../stack/layered-path.ts';
-import { LOSSY_INCIDENCE } from './interface-answer.ts';
 import { type MediumSide, mediumSide, type SourceOf } from './medium-side.ts';
 import type { Layer, Question } from './question.ts';
 import { bothReferences } from './wave.ts';

@@ -4,12 +4,11 @@
  * bit; cautions, sources, uncertainties, phases and special angles are left to `answerQuestion`.
  */
 import type { Conditions } from '../dispersion/evaluator.ts';
-import { fresnel } from '../interface/fresnel.ts';
 import type { Optics } from '../interface/optics.ts';
-import { criticalAngle, WEAK_ABSORPTION } from '../interface/special-angles.ts';
+import { surfaceWave } from '../interface/surface-wave.ts';
 import { type BoundMedium, bindLiteral, bindMaterial } from '../medium/bound-medium.ts';
 import type { InterfaceAnswer } from './answer.ts';
-import { LOSSY_INCIDENCE, powerOf } from './interface-answer.ts';
+import { powerOf } from './interface-answer.ts';
 import type { MediumSpec, Polarization } from './question.ts';
 
 /** T is null where the medium of incidence absorbs too much for a fraction of its power to mean anything. */
@@ -31,21 +30,14 @@ export function surfacePowers(
   angle_rad: number,
   polarization: Polarization,
 ): SurfacePowers {
-  const wave = fresnel(from, into, angle_rad);
-  const critical = criticalAngle(from, into);
-  const totalReflection =
-    critical !== null &&
-    angle_rad > critical &&
-    into.n.im <= WEAK_ABSORPTION * into.n.re &&
-    wave.kappa2.im > 0;
-  const known = from.n.im <= LOSSY_INCIDENCE * Math.abs(from.n.re);
+  const { wave, totalReflection, powersKnown } = surfaceWave(from, into, angle_rad);
   return {
     Rs: wave.Rs,
     Rp: wave.Rp,
     R: powerOf(polarization, wave.Rs, wave.Rp),
-    Ts: known ? wave.Ts : null,
-    Tp: known ? wave.Tp : null,
-    T: known ? powerOf(polarization, wave.Ts, wave.Tp) : null,
+    Ts: powersKnown ? wave.Ts : null,
+    Tp: powersKnown ? wave.Tp : null,
+    T: powersKnown ? powerOf(polarization, wave.Ts, wave.Tp) : null,
     refractionAngle_rad: totalReflection ? null : Math.atan2(wave.q.re, wave.kappa2.re),
     totalReflection,
   };

@@ -1,5 +1,5 @@
 /** The powers of one bare surface at inputs that may be moved, for the uncertainty. */
-import { fresnel } from '../interface/fresnel.ts';
+import { surfaceWave } from '../interface/surface-wave.ts';
 import type { Moved } from './moved.ts';
 
 /** [s, p] of reflectance and transmittance. */
@@ -9,6 +9,6 @@ export interface BothPolarizations {
 }
 
 export function surfacePower({ from, into, angle_rad }: Moved): BothPolarizations {
-  const w = fresnel(from, into, angle_rad);
-  return { R: [w.Rs, w.Rp], T: [w.Ts, w.Tp] };
+  const { wave } = surfaceWave(from, into, angle_rad);
+  return { R: [wave.Rs, wave.Rp], T: [wave.Ts, wave.Tp] };
 }

@@ -32,13 +32,16 @@ function angleFromSquaredSine(sin2: number): number | null {
   return Math.atan2(Math.sqrt(sin2), Math.sqrt(1 - sin2));
 }
 
-/** Absorption up to this ratio k/n leaves the critical angle and total reflection meaningful (1 - R stays below about 1e-3). */
+/** From this ratio k/n of the medium of incidence on, T as a fraction of the incident power has no meaning. */
+export const LOSSY_INCIDENCE = 1e-3;
+
+/** Absorption beyond up to this ratio k/n leaves the critical angle and total reflection meaningful (1 - R stays below about 1e-3). */
 export const WEAK_ABSORPTION = 1e-4;
 
-/** sin(theta_c) = n2/n1 for n2 < n1; null otherwise and where either side absorbs more than weakly. */
+/** sin(theta_c) = n2/n1 for n2 < n1; null otherwise and where either side absorbs more than that. */
 export function criticalAngle(from: Optics, into: Optics): number | null {
   if (from.n.re <= 0 || into.n.re < 0) return null;
-  if (from.n.im > WEAK_ABSORPTION * from.n.re || into.n.im > WEAK_ABSORPTION * into.n.re) return null;
+  if (from.n.im > LOSSY_INCIDENCE * from.n.re || into.n.im > WEAK_ABSORPTION * into.n.re) return null;
   const ratio = into.n.re / from.n.re;
   return ratio < 1 ? Math.asin(ratio) : null;
 }

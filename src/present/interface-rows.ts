@@ -70,7 +70,7 @@ function lossRows(rows: RowList, surface: InterfaceAnswer, style: PresentStyle):
     'reflectionLoss_dB',
     'loss',
     'reflection loss',
-    surface.reflectionLoss_dB === null && surface.R >= 1
+    surface.reflectionLoss_dB === null && surface.R >= 1 && surface.T !== null
       ? 'all reflected'
       : formatQuantity(surface.reflectionLoss_dB, DECIBEL, { decimals: 3 }, { style }),
   );
