@@ -84,14 +84,13 @@ const PLAIN_QUESTIONS = [
   ['--json', 'vacuum', 'gold', '633nm'],
 ];
 
-/** Ink asks for the developer tools only in development; the package is not installed. */
+/** Ink asks for the developer tools only in development; they, and the network connection they open, stay out. */
 const withoutDevtools: Plugin = {
   name: 'without-devtools',
   setup(b) {
-    b.onResolve({ filter: /^react-devtools-core$/ }, () => ({
-      path: 'react-devtools-core',
-      namespace: 'empty',
-    }));
+    b.onResolve({ filter: /^\.\/devtools\.js$/ }, ({ importer }) =>
+      /node_modules\/ink\//.test(importer) ? { path: 'devtools', namespace: 'empty' } : undefined,
+    );
     b.onLoad({ filter: /.*/, namespace: 'empty' }, () => ({ contents: 'export default {};' }));
   },
 };
@@ -190,7 +189,7 @@ export async function buildAll(): Promise<void> {
         ...script,
         ...drawing,
         entryPoints: named(parts, [name]),
-        plugins: [lazyParts(parts), withoutDevtools],
+        plugins: [withoutDevtools, lazyParts(parts)],
       }),
     );
     if (metafile) screen.push(metafile);
