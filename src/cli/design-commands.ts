@@ -66,6 +66,8 @@ export const DESIGN_COMMANDS = [
       'thickness_m',
       'tolerances',
       'json',
+      'csv',
+      'markdown',
     ],
     examples: [
       { line: 'crystal calcite 633nm', meaning: 'principal axes, directions, faces, waveplates' },

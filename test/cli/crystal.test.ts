@@ -73,6 +73,42 @@ describe('halfspace crystal', () => {
     expect(err.split('\n').length).toBeLessThanOrEqual(3);
   });
 
+  it('is a row a fact as CSV, with the numbers of the JSON', async () => {
+    const line = 'calcite 633nm --cut-angle 45 --thickness 1mm --retardance quarter';
+    const document = await report(line);
+    const { status, out } = await run(['crystal', ...words(line), '--csv']);
+    expect(status).toBe(0);
+    const [head = [], ...rows] = out
+      .trimEnd()
+      .split('\n')
+      .map((l) => l.split(','));
+    const all = rows.map((row) => Object.fromEntries(head.map((name, i) => [name, row[i] ?? ''])));
+    const of = (part: string) => all.filter((row) => row['part'] === part);
+    expect(rows.every((row) => row.length === head.length)).toBe(true);
+    expect(of('axis').map((row) => Number(row['n']))).toEqual(document.axes.map((a) => a.n));
+    expect(of('direction').map((row) => Number(row['walkOff_rad']))).toEqual(
+      document.directions.map((d) => d.walkOff_rad),
+    );
+    expect(of('face').map((row) => Number(row['Rp']))).toEqual(document.faces.map((f) => f.Rp));
+    expect(of('cut').map((row) => row['about'])).toEqual(['ordinary', 'extraordinary', 'plate']);
+    expect(Number(of('cut')[2]?.['retardance_waves'])).toBe(document.cut?.plate?.retardance_waves);
+    const thinnest = document.plates[0]?.waveplates[0]?.zeroOrderThickness_m;
+    expect(of('waveplate').map((row) => Number(row['thickness_m']))).toContain(thinnest);
+  });
+
+  it('is a heading, tables and lists as Markdown, with the cells of the text', async () => {
+    for (const line of ['calcite 633nm --cut-angle 45 --thickness 1mm', 'ktp 1064nm']) {
+      const { out } = await run(['crystal', ...words(line), '--markdown']);
+      expect(out).toMatch(/^### \S/);
+      const widths = (block: string): readonly number[] =>
+        block.split('\n').map((l) => l.split(' | ').length);
+      const tables = out.split('\n\n').filter((block) => block.startsWith('|'));
+      expect(tables.length).toBeGreaterThan(4);
+      for (const table of tables) expect(new Set(widths(table)).size).toBe(1);
+      expectAscii((await run(['crystal', ...words(line), '--markdown', '--ascii'])).out);
+    }
+  });
+
   it('fits 72 columns, in ASCII too', async () => {
     for (const line of [
       'calcite 633nm --cut-angle 45 --thickness 1mm --retardance quarter',

@@ -1,20 +1,19 @@
 /** `halfspace crystal [FROM] CRYSTAL WAVE`: a birefringent crystal at one wave, at a cut where one is stated. */
-import { type CrystalReport, crystalReport } from '../../answer/crystal-report.ts';
+import { crystalReport } from '../../answer/crystal-report.ts';
 import { makeQuestion } from '../../answer/question.ts';
 import { isRefusal } from '../../medium/refusal.ts';
 import type { Command } from '../context.ts';
-import { CONVENTION_NOTES } from '../convention-notes.ts';
 import { findMedium, suggestMedia } from '../find-medium.ts';
 import { questionOptions, readWave } from '../read-question.ts';
+import { crystalCsv, crystalJson } from '../render/crystal-data.ts';
+import { crystalMarkdown } from '../render/crystal-markdown.ts';
 import { crystalText } from '../render/crystal-text.ts';
-import { jsonDocument } from '../render/json-document.ts';
 import { reportRefusal } from '../report-refusal.ts';
 
 const OUTSIDE = 'air';
 
 export const run: Command = async ({ operands, options }, context) => {
   const catalogue = context.catalogue();
-  const json = options.json === true;
   const [waveText = '', crystalName = '', outsideName = OUTSIDE] = operands.toReversed();
   const wave = readWave(waveText, options);
   if (isRefusal(wave)) return reportRefusal(wave, context);
@@ -36,12 +35,10 @@ export const run: Command = async ({ operands, options }, context) => {
   const report = crystalReport(asked, (id) => catalogue.source(id));
   if (isRefusal(report)) return reportRefusal(report, context);
   const head = { version: context.version, catalogue: catalogue.hash };
-  context.write(
-    json
-      ? jsonDocument(head, withConventions(report), options.ascii === true)
-      : crystalText(report, { ascii: context.ascii }),
-  );
+  const style = { ascii: context.ascii };
+  if (options.json) context.write(crystalJson(report, head, options.ascii === true));
+  else if (options.csv) context.write(crystalCsv(report, options.ascii === true));
+  else if (options.markdown) context.write(crystalMarkdown(report, style));
+  else context.write(crystalText(report, style));
   return options.strict && report.cautions.some((c) => c.level !== 'note') ? 1 : 0;
 };
-
-const withConventions = (report: CrystalReport): object => ({ convention: CONVENTION_NOTES, ...report });

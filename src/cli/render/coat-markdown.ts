@@ -14,6 +14,7 @@ import {
 import type { PresentStyle } from '../../present/shown.ts';
 import { formatNumber } from '../../units/format-number.ts';
 import { toAscii } from '../../units/to-ascii.ts';
+import { markdownCell, markdownTable } from './markdown-table.ts';
 
 export function coatMarkdown(report: CoatingReport, style: PresentStyle): string {
   const prefix = lengthPrefix(report);
@@ -28,16 +29,16 @@ export function coatMarkdown(report: CoatingReport, style: PresentStyle): string
         ]
       : [];
   const lines = [
-    `### ${cell(coatHeadline(report, style))}`,
+    `### ${markdownCell(coatHeadline(report, style))}`,
     '',
     bareText(report, style),
     '',
     ...idealText,
-    ...table(
+    ...markdownTable(
       ['film', 'n', `quarter wave (${unit})`, 'R (%)', 'R over the spread (%)', below],
       cellsOf(singleFilmTable(report, style)),
     ),
-    ...table(
+    ...markdownTable(
       ['outer', 'inner', `outer (${unit})`, `inner (${unit})`, 'R (%)', 'R over the spread (%)', below],
       twoLayers.flatMap((d) =>
         d.solutions.map((s) => [
@@ -55,7 +56,7 @@ export function coatMarkdown(report: CoatingReport, style: PresentStyle): string
       ? [
           `High reflector: H ${mirror.high.key} ${lengthCell(mirror.highThickness_m, prefix, style)} ${unit}, L ${mirror.low.key} ${lengthCell(mirror.lowThickness_m, prefix, style)} ${unit}`,
           '',
-          ...table(
+          ...markdownTable(
             ['pairs', 'layers', 'R (%)', 'R over the spread (%)'],
             cellsOf(mirrorTable(mirror, style)),
           ),
@@ -67,13 +68,5 @@ export function coatMarkdown(report: CoatingReport, style: PresentStyle): string
   return `${(style.ascii ? lines.map(toAscii) : lines).join('\n').trimEnd()}\n`;
 }
 
-function table(heads: readonly string[], rows: readonly (readonly string[])[]): readonly string[] {
-  if (rows.length === 0) return [];
-  return [line(heads), line(heads.map(() => '---')), ...rows.map((r) => line(r.map(cell))), ''];
-}
-
 const cellsOf = (designs: DesignTable<unknown> | null): readonly (readonly string[])[] =>
   designs?.rows.map((row) => row.cells) ?? [];
-
-const line = (cells: readonly string[]): string => `| ${cells.join(' | ')} |`;
-const cell = (text: string): string => text.replaceAll('|', '\\|').replaceAll('*', '\\*');
