@@ -4,23 +4,10 @@
  * end, which becomes what the function gives back; Node's own modules come from the starter's `require`.
  */
 import { readFileSync, writeFileSync } from 'node:fs';
-import { builtinModules } from 'node:module';
-import type { BuildOptions, Plugin } from 'esbuild';
+import type { BuildOptions } from 'esbuild';
+import { givenNodeModules } from './node-modules.ts';
 
-const builtins: Plugin = {
-  name: 'builtins',
-  setup(b) {
-    const known = new Set([...builtinModules, ...builtinModules.map((name) => `node:${name}`)]);
-    b.onResolve({ filter: /^[\w:/]+$/ }, ({ path: name, namespace }) =>
-      known.has(name) && namespace !== 'builtin' ? { path: name, namespace: 'builtin' } : undefined,
-    );
-    b.onLoad({ filter: /.*/, namespace: 'builtin' }, ({ path: name }) => ({
-      contents: `module.exports = givenRequire(${JSON.stringify(name)});`,
-    }));
-  },
-};
-
-/** To be added to the options of the build; its plugins come before those given. */
+/** The options of the build, changed so that `closeAsyncScript` can finish what it makes. */
 export const asyncScript = (given: BuildOptions): BuildOptions => ({
   ...given,
   define: { ...given.define, 'import.meta.url': 'scriptUrl' },
@@ -31,7 +18,7 @@ export const asyncScript = (given: BuildOptions): BuildOptions => ({
     js: '(async function(require,__dirname,importPart,loadNow,module){const givenRequire=require,scriptUrl="file://"+__dirname+"/";',
   },
   footer: {},
-  plugins: [builtins, ...(given.plugins ?? [])],
+  plugins: [givenNodeModules, ...(given.plugins ?? [])],
 });
 
 /** Makes the built module a function; throws where it is not of the shape stated above. */

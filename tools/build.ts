@@ -16,6 +16,7 @@ import { asyncScript, closeAsyncScript } from './async-script.ts';
 import { makeCache, makeScreenCaches } from './code-cache.ts';
 import { buildLateParts, callLate, type LateModules } from './late-parts.ts';
 import { writeNotices } from './licences.ts';
+import { lateNodeModules } from './node-modules.ts';
 import { writePackedCatalogue } from './pack-catalog.ts';
 
 const root = path.dirname(path.dirname(fileURLToPath(import.meta.url)));
@@ -95,29 +96,6 @@ const withoutDevtools: Plugin = {
   },
 };
 
-/**
- * Modules of Node that take long to load and that most runs never use: their functions load them when they are called.
- * `node:tty` brings streams and sockets along, a tenth of a start.
- */
-const LATE_MODULES = /^node:(os|tty|crypto|child_process)$/;
-const lateModules: Plugin = {
-  name: 'late-modules',
-  setup(b) {
-    b.onResolve({ filter: LATE_MODULES }, ({ path: name, namespace }) =>
-      namespace === 'late' ? { path: name, external: true } : { path: name, namespace: 'late' },
-    );
-    b.onLoad({ filter: /.*/, namespace: 'late' }, async ({ path: name }) => {
-      const functions = Object.entries((await import(name)) as Record<string, unknown>).filter(
-        ([key, value]) => key !== 'default' && typeof value === 'function',
-      );
-      const late = functions.map(
-        ([key]) => `export const ${key} = (...given) => require('${name}').${key}(...given);`,
-      );
-      return { contents: late.join('\n') };
-    });
-  },
-};
-
 const KEPT_OUT = /node_modules\/(ink|react|fuse\.js|conf|yoga-layout|d3-scale|ml-levenberg-marquardt)\//;
 
 function refuseHeavyEntry(meta: Metafile): void {
@@ -141,10 +119,21 @@ function importThroughEntry(script: string): void {
 const named = (parts: ReadonlyMap<string, string>, names: readonly string[]): Record<string, string> =>
   Object.fromEntries(names.map((name) => [name, parts.get(name) ?? '']));
 
+/** The code of the layout engine, which its package holds as text. */
+function writeLayoutEngine(): void {
+  const holder = path.join(root, 'node_modules/yoga-layout/dist/binaries/yoga-wasm-base64-esm.js');
+  const text = /"data:application\/octet-stream;base64,([A-Za-z0-9+/=]+)"/.exec(
+    readFileSync(holder, 'utf8'),
+  )?.[1];
+  if (text === undefined) throw new Error(`${holder} holds no WebAssembly where it used to`);
+  writeFileSync(path.join(dist, 'layout-engine.wasm'), Buffer.from(text, 'base64'));
+}
+
 export async function buildAll(): Promise<void> {
   rmSync(dist, { recursive: true, force: true });
   mkdirSync(dist, { recursive: true });
   writePackedCatalogue(root, dist);
+  writeLayoutEngine();
   // The root package is an ES module package; the entry is CommonJS.
   writeFileSync(path.join(dist, 'package.json'), '{"type":"commonjs"}\n');
 
@@ -153,9 +142,16 @@ export async function buildAll(): Promise<void> {
   const src = path.join(root, 'src');
   const drawing: BuildOptions = {
     // Reading `fetch` loads the whole HTTP client of Node (50 ms); the layout engine asks for it without needing it.
-    define: { ...define, fetch: 'undefined', 'import.meta.dirname': '__dirname' },
+    define: {
+      ...define,
+      fetch: 'undefined',
+      'import.meta.dirname': '__dirname',
+      'Intl.Segmenter': 'LateSegmenter',
+    },
+    inject: [path.join(root, 'src/term/late-segmenter.ts')],
     alias: {
       'string-width': path.join(root, 'src/term/string-width-alias.ts'),
+      'yoga-layout': path.join(root, 'tools/layout-engine.mjs'),
       '@alcalzone/ansi-tokenize': path.join(root, 'src/term/styled-chars-alias.ts'),
     },
     plugins: [withoutDevtools],
@@ -172,7 +168,7 @@ export async function buildAll(): Promise<void> {
   const entry = await build({
     ...script,
     entryPoints: { core: path.join(root, 'src/main.ts') },
-    plugins: [lazyParts(parts), callLate(src, met), lateModules],
+    plugins: [lazyParts(parts), callLate(src, met), lateNodeModules],
   });
   const late = await buildLateParts(script, src, met);
   refuseHeavyEntry(entry.metafile!);
