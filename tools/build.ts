@@ -20,6 +20,7 @@ import { lateNodeModules } from './node-modules.ts';
 import { writePackedCatalogue } from './pack-catalog.ts';
 
 const root = path.dirname(path.dirname(fileURLToPath(import.meta.url)));
+const src = path.join(root, 'src');
 const dist = path.join(root, 'dist');
 const { version } = JSON.parse(readFileSync(path.join(root, 'package.json'), 'utf8')) as { version: string };
 
@@ -53,7 +54,7 @@ function lazyParts(parts: Map<string, string>): Plugin {
     name: 'lazy-parts',
     setup(b) {
       b.onResolve({ filter: /^[.a-z]/ }, (args) => {
-        if (args.kind !== 'dynamic-import' || args.path.startsWith('node:')) return undefined;
+        if (args.kind !== 'dynamic-import' || !args.importer.startsWith(src)) return undefined;
         const isPackage = !args.path.startsWith('.');
         const file = isPackage ? args.path : path.resolve(args.resolveDir, args.path);
         const name = isPackage ? args.path : partName(file);
@@ -139,7 +140,6 @@ export async function buildAll(): Promise<void> {
 
   const parts = new Map<string, string>();
   const met: LateModules = new Map();
-  const src = path.join(root, 'src');
   const drawing: BuildOptions = {
     // Reading `fetch` loads the whole HTTP client of Node (50 ms); the layout engine asks for it without needing it.
     define: {

@@ -18,4 +18,5 @@ const engine = {
 };
 loadEngine(engine);
 
+// biome-ignore lint/style/noDefaultExport: the module it stands in for has one
 export default wrapAssembly(engine);

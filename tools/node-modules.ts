@@ -26,7 +26,8 @@ export const givenNodeModules: Plugin = {
   setup(b) {
     b.onResolve({ filter: /^[\w:/]+$/ }, ({ path: name, kind }) => {
       if (!KNOWN.has(bare(name))) return undefined;
-      return { path: name, namespace: kind === 'require-call' ? 'given-whole' : 'given' };
+      // Asked for as a whole, every export would be made at the start.
+      return { path: name, namespace: kind === 'import-statement' ? 'given' : 'given-whole' };
     });
     b.onLoad({ filter: /.*/, namespace: 'given' }, ({ path: name }) => exportsOf(name, 'givenRequire'));
     b.onLoad({ filter: /.*/, namespace: 'given-whole' }, ({ path: name }) => ({

@@ -55,6 +55,7 @@ export function stripEscapes(text: string): string {
 export function displayWidth(text: string): number {
   if (isAllPlainNarrow(text)) return text.length;
   const bare = stripEscapes(text);
+  if (bare !== text && isAllPlainNarrow(bare)) return bare.length;
   let width = 0;
   for (const { segment } of segments(bare)) width += clusterWidth(segment);
   return width;
