@@ -4,6 +4,7 @@
  * the build makes of that text, and is ready at once.
  */
 import { readFileSync } from 'node:fs';
+import { join } from 'node:path';
 import loadEngine from '../node_modules/yoga-layout/dist/binaries/yoga-wasm-base64-esm.js';
 import wrapAssembly from '../node_modules/yoga-layout/dist/src/wrapAssembly.js';
 
@@ -11,7 +12,7 @@ export * from '../node_modules/yoga-layout/dist/src/generated/YGEnums.js';
 
 const engine = {
   instantiateWasm(imports, done) {
-    const code = new WebAssembly.Module(readFileSync(`${import.meta.dirname}/layout-engine.wasm`));
+    const code = new WebAssembly.Module(readFileSync(join(import.meta.dirname, 'layout-engine.wasm')));
     done(new WebAssembly.Instance(code, imports));
     return {};
   },

@@ -33,7 +33,7 @@ function loadedFrom(name: string, found = new Set<string>()): Set<string> {
     loadedFrom(existsSync(path.join(dist, part)) ? part : script, found);
   }
   for (const [, script = ''] of text.matchAll(/\bloadNow\("([\w-]+)"\)/g)) loadedFrom(`${script}.js`, found);
-  for (const [, data = ''] of text.matchAll(/["'`]([\w-]+\.dat)["'`]/g)) found.add(data);
+  for (const [, data = ''] of text.matchAll(/["'`]([\w-]+\.(?:dat|wasm))["'`]/g)) found.add(data);
   return found;
 }
 
