@@ -12,7 +12,7 @@ const { values } = parseArgs({
   options: {
     inputs: { type: 'string', default: '100000' },
     seed: { type: 'string', default: String(Date.now() % 1_000_000) },
-    sessions: { type: 'string', default: '5' },
+    sessions: { type: 'string', default: '10' },
   },
 });
 const seed = Number(values.seed);

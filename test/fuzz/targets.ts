@@ -2,6 +2,9 @@
  * What is fed with random inputs. Each target takes one input and throws where the program would have broken a promise: no
  * exception, no stack trace, no NaN or Infinity in JSON, an exit status that is documented, words with every failure.
  */
+import { existsSync, mkdtempSync, readFileSync, rmSync } from 'node:fs';
+import os from 'node:os';
+import path from 'node:path';
 import { answerColumns, DEFAULT_COLUMNS, keysOf } from '../../src/batch/answer-columns.ts';
 import { ByteWriter } from '../../src/batch/byte-writer.ts';
 import { CsvBatch } from '../../src/batch/csv-batch.ts';
@@ -10,14 +13,21 @@ import type { FixedParts } from '../../src/batch/row-layout.ts';
 import { catalogueFromSources } from '../../src/catalog/from-sources.ts';
 import { readOwnFiles, withOwn } from '../../src/catalog/own.ts';
 import { makeAsking, sampleAnswers } from '../../src/cli/asking.ts';
+import { COMMANDS, optionsOf } from '../../src/cli/command-table.ts';
+import { optionSpec } from '../../src/cli/options.ts';
 import { explainReading, parseConditions } from '../../src/selection/parse-conditions.ts';
 import { KeyParser } from '../../src/term/key-parser.ts';
 import { initialState, type State } from '../../src/tui/state.ts';
 import { type Event, update } from '../../src/tui/update/update.ts';
+import { parseLiteralMedium } from '../../src/units/parse-literal-medium.ts';
+import { parseWave } from '../../src/units/parse-wave.ts';
+import { isProblem } from '../../src/units/problem.ts';
 import { run } from '../cli/in-process.ts';
 import { airToSilica, testWorld } from '../tui/helpers/stage.tsx';
+import { keyPieces } from './key-pieces.ts';
 import type { Random } from './random.ts';
-import { batchTable, commandLine, conditions, KEYS, medium, wave } from './texts.ts';
+import { screen } from './screen-target.ts';
+import { batchTable, commandLine, conditions, KEYS, medium, valueText, wave } from './texts.ts';
 
 export interface Target {
   readonly name: string;
@@ -50,6 +60,17 @@ function checkJson(text: string): void {
   check(JSON.parse(text));
 }
 
+/** Rows go to a descriptor, past the streams that are caught. */
+const ROWS_FILE = path.join(mkdtempSync(path.join(os.tmpdir(), 'halfspace-fuzz-')), 'rows');
+const isTable = (args: readonly string[]): boolean =>
+  args.some((a) => /^--(?:sweep|columns|digits)(?:=|$)/.test(a));
+function takeRows(): string {
+  if (!existsSync(ROWS_FILE)) return '';
+  const rows = readFileSync(ROWS_FILE, 'utf8');
+  rmSync(ROWS_FILE);
+  return rows;
+}
+
 const commands: Target = {
   name: 'command lines',
   weight: 0.06,
@@ -58,12 +79,16 @@ const commands: Target = {
     return {
       input: JSON.stringify(args),
       feed: async () => {
-        const { status, out, err } = await run(args);
+        const { status, out: told, err } = await run([...args, ...(isTable(args) ? ['-o', ROWS_FILE] : [])]);
+        const out = told + takeRows();
         if (!STATUSES.has(status)) fail(`status ${status}`);
         checkText(out);
         checkText(err);
         if (status >= 2 && err.trim() === '' && out.trim() === '') fail(`status ${status} without a word`);
-        if (args.includes('--json') && out.startsWith('{')) checkJson(out);
+        if (args.includes('--json')) {
+          for (const text of isTable(args) ? out.split('\n') : [out])
+            if (text.startsWith('{')) checkJson(text);
+        }
         if (
           !args.includes('--json') &&
           /\b(?:NaN|undefined|\[object)/.test(out.replaceAll(args.join('|'), ''))
@@ -77,7 +102,7 @@ const commands: Target = {
 
 const own: Target = {
   name: "entries of one's own",
-  weight: 0.14,
+  weight: 0.1,
   make(r) {
     const key = r.pick(KEYS);
     const material = catalogue.material(key);
@@ -158,7 +183,7 @@ const batches: Target = {
 const classes = [...new Set(catalogue.entries().map((e) => e.class))];
 const search: Target = {
   name: 'conditions of a search',
-  weight: 0.25,
+  weight: 0.12,
   make(r) {
     const text = conditions(r);
     return {
@@ -175,41 +200,56 @@ const search: Target = {
   },
 };
 
-const world = testWorld();
-const SPECIAL = [
-  '\r',
-  '\x1b',
-  '\t',
-  '\x1b[Z',
-  '\x7f',
-  '\x15',
-  '\x01',
-  '\x05',
-  '\x0b',
-  '\x17',
-  '\x1b[A',
-  '\x1b[B',
-  '\x1b[C',
-  '\x1b[D',
-  '\x1b[5~',
-  '\x1b[6~',
-  '\x1b[H',
-  '\x1b[F',
-  '\x1b[',
-  '\x1bO',
-  '\x1b[200~',
-  '\x1b[201~',
-  '\x1b]11;rgb:0/0/0\x07',
-  '\x1b[<0;3;3M',
-  '\x1b[I',
-  ' ',
-  '?',
-  'q',
-  'u',
-  'y',
-  '/',
+/** Every reader of a value of the command line, waves and media among them. */
+const READERS: readonly (readonly [string, (text: string) => unknown])[] = [
+  ['wave', parseWave],
+  ['medium', parseLiteralMedium],
+  ['layers', (text) => world.readLayers(text)],
+  ...[...new Set(COMMANDS.flatMap(({ name }) => optionsOf(name)))].flatMap((key) => {
+    const { name, ...spec } = optionSpec(key);
+    return 'parse' in spec ? [[`--${name}`, spec.parse as (text: string) => unknown] as const] : [];
+  }),
 ];
 
+function checkNumbers(value: unknown, depth = 0): void {
+  if (Number.isNaN(value)) fail('a NaN');
+  if (typeof value === 'object' && value !== null && depth < 4)
+    for (const part of Object.values(value)) checkNumbers(part, depth + 1);
+}
+
+const values: Target = {
+  name: 'values',
+  weight: 0.15,
+  make(r) {
+    const [reader, read] = r.pick(READERS);
+    const text = valueText(r, reader);
+    return {
+      input: `${reader}: ${text}`,
+      feed: () => {
+        const value = read(text);
+        if (!isProblem(value)) return checkNumbers(value);
+        checkText(`${value.message} ${value.remedy}`);
+        if (value.message.trim() === '' || value.remedy.trim() === '') fail('a problem without words');
+        if (
+          /[\n\r]|\bNaN\b|\bundefined\b/.test(`${value.message} ${value.remedy}`) &&
+          !/NaN|undefined/.test(text)
+        )
+          fail(`not one line for people: ${value.message}; ${value.remedy}`);
+      },
+    };
+  },
+};
+
+const names: Target = {
+  name: 'names of media',
+  weight: 0.05,
+  make(r) {
+    const text = r.chance(0.3) ? r.damaged(medium(r)) : medium(r);
+    return { input: text, feed: () => void [catalogue.lookup(text), world.search(text)] };
+  },
+};
+
+const world = testWorld();
 /** One state goes on from input to input, as in a long session; each input is some keys, glued or torn. */
 let session: State = freshSession();
 let steps = 0;
@@ -219,19 +259,9 @@ function freshSession(): State {
 
 const keys: Target = {
   name: 'keys',
-  weight: 0.5,
+  weight: 0.42,
   make(r) {
-    const pieces = r.many(1, 4, () =>
-      r.pick([
-        () => String.fromCharCode(97 + r.below(26)),
-        () => String.fromCharCode(32 + r.below(95)),
-        () => r.pick(SPECIAL),
-        () => r.pick(SPECIAL),
-        () => r.number(),
-        () => (r.chance(0.2) ? medium(r) : '4'),
-        () => (r.chance(0.1) ? r.bytes(1 + r.below(6)).toString('latin1') : 'a'),
-      ])(),
-    );
+    const pieces = keyPieces(r);
     const size = { columns: 1 + r.below(200), rows: 1 + r.below(60) };
     const resizes = r.chance(0.02);
     return {
@@ -254,4 +284,4 @@ const keys: Target = {
   },
 };
 
-export const TARGETS: readonly Target[] = [keys, search, own, commands, batches];
+export const TARGETS: readonly Target[] = [keys, screen, values, names, search, own, commands, batches];

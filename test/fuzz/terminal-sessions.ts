@@ -3,10 +3,14 @@ import { mkdtempSync } from 'node:fs';
 import os from 'node:os';
 import path from 'node:path';
 import { setTimeout as sleep } from 'node:timers/promises';
-import { PtySession } from '../helpers/pty.ts';
+import { lineSettingsOf, PtySession } from '../helpers/pty.ts';
 import { Random } from './random.ts';
 
 const BYTES = 1500;
+/** On a busy machine the keys before it may take their time; hangs of single keys are found without a terminal. */
+const LONGEST_END_ms = 60_000;
+/** Says the settings of the line once the program has ended. */
+const LINE = '"$0" "$1"; status=$?; stty -a; exit $status';
 /** Ctrl-C ends and Ctrl-Z suspends: both would end the session early. */
 const harmless = (bytes: Buffer): Buffer => Buffer.from(bytes.filter((b) => b !== 3 && b !== 26));
 
@@ -20,7 +24,7 @@ export async function terminalSessions(
   for (let i = 0; i < count; i++) {
     const r = new Random(seed + i);
     const home = mkdtempSync(path.join(os.tmpdir(), 'halfspace-fuzz-'));
-    const session = new PtySession(process.execPath, [program], {
+    const session = new PtySession('sh', ['-c', LINE, process.execPath, program], {
       columns: 30 + r.below(100),
       rows: 10 + r.below(40),
       env: { HOME: home },
@@ -40,7 +44,7 @@ export async function terminalSessions(
     session.send('\x1b');
     await sleep(120);
     session.send('\x03');
-    const status = await Promise.race([session.exited, sleep(8000, -1)]);
+    const status = await Promise.race([session.exited, sleep(LONGEST_END_ms, -1)]);
     await session.quiet(50);
     const modes = session.model.modes();
     const output = session.output();
@@ -54,6 +58,8 @@ export async function terminalSessions(
     ) {
       broken.push(`${where}: left ${JSON.stringify(modes)}`);
     }
+    const line = lineSettingsOf(output.slice(output.lastIndexOf('speed ')));
+    if (status >= 0 && !(line.echo && line.canonical)) broken.push(`${where}: left ${JSON.stringify(line)}`);
     if (/^\s+at .+:\d+:\d+\)?$/m.test(output)) broken.push(`${where}: a stack trace\n${session.screen()}`);
     await session.dispose();
   }

@@ -146,6 +146,20 @@ function rightValue(r: Random, key: OptionKey): string | undefined {
   return Array.from({ length: 60 }, () => r.pick(VALUES)).find((text) => !isProblem(parse(text)));
 }
 
+/** A text for one reader: what it takes, what another one takes, or what none does. */
+export function valueText(r: Random, reader: string): string {
+  const text = r.pick([
+    () => (reader === 'medium' || reader === 'layers' ? medium(r) : wave(r)),
+    () => r.pick(VALUES),
+    () => layer(r),
+    () => `${r.number()}${r.pick(['', ' '])}${r.pick(SYMBOLS)}`,
+    () =>
+      `${r.pick(['wave', 'angle', 'n', 'n1', 'thickness', 'temperature'])}=${r.number()}..${r.number()}:${r.number()}`,
+    () => r.number(),
+  ])();
+  return r.chance(0.4) ? r.damaged(text) : text;
+}
+
 function optionText(r: Random, key: OptionKey): readonly string[] {
   const { name, ...spec } = optionSpec(key);
   if (!('parse' in spec)) return [`--${name}`];
@@ -184,7 +198,7 @@ const COMMANDS_INSIDE = COMMANDS.filter(({ name }) =>
     'crystal',
     'equivalent',
     'coat',
-    'order',
+    'order-check',
   ].includes(name),
 );
 
