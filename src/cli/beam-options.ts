@@ -19,7 +19,7 @@ export const PATH_OPTION_ROWS = {
     name: 'design-wave',
     placeholder: 'WAVE',
     meaning: 'the wave for which qw and hw are meant',
-    fallback: 'the WAVE given',
+    fallback: 'the WAVE given, the first of several',
     group: 'path',
     parse: (text: string) => parseWave(text),
   }),

@@ -1,5 +1,5 @@
-/** `MEDIUM`, `MEDIUM@THICKNESS` and the waves behind them, for commands that compare. */
-import type { WaveSpec } from '../answer/question.ts';
+/** Media, plates, coated parts and the waves behind them, for commands that compare. */
+import type { Layer, LayerThickness, MediumSpec, WaveSpec } from '../answer/question.ts';
 import type { IndexedCatalogue } from '../catalog/entries.ts';
 import { isRefusal, type Refusal, refuse } from '../medium/refusal.ts';
 import type { Part } from '../selection/compare-report.ts';
@@ -40,28 +40,85 @@ export function splitWaves(
   return { media: operands.slice(0, first), waves };
 }
 
+/**
+ * `MEDIUM`, `MEDIUM@THICKNESS`, or a part with films, in the order the wave meets them: `FILM@qw/MEDIUM@3mm/FILM@100nm`. The
+ * part is the piece without a thickness, else the thickest; the others are its films.
+ */
 export async function readPart(text: string, catalogue: IndexedCatalogue): Promise<Part | Refusal> {
+  const texts = text.split('/');
+  const pieces: Piece[] = [];
+  for (const piece of texts) {
+    const read = readPiece(piece, catalogue);
+    if (isRefusal(read)) return suggestMedia(read, piece.split('@')[0] ?? '', catalogue);
+    pieces.push(read);
+  }
+  const [only] = pieces;
+  if (only && pieces.length === 1) {
+    if (only.thickness?.kind === 'waves') return filmAlone(text, texts[0]?.split('@')[0] ?? '');
+    return { medium: only.medium, text, thickness_m: only.thickness?.thickness_m ?? null };
+  }
+  const place = placeOfPlate(pieces);
+  const plate = pieces[place];
+  if (!plate) {
+    const remedy = 'write FILM@qw/MEDIUM@3mm/FILM@qw, films and part in the order the wave meets them';
+    return refuse('bad-part', 2, `${quoteInput(text)} is films alone`, `${remedy}; the part in a length`);
+  }
+  const layersOf = (list: readonly Piece[]): readonly Layer[] | undefined => {
+    const layers = list.flatMap(({ medium, thickness }) => (thickness ? [{ medium, thickness }] : []));
+    return layers.length === list.length ? layers : undefined;
+  };
+  const front = layersOf(pieces.slice(0, place));
+  const back = layersOf(pieces.slice(place + 1));
+  if (!front || !back) {
+    return refuse(
+      'bad-part',
+      2,
+      `${quoteInput(text)} names more than one medium without a thickness`,
+      'give every film a thickness, such as FILM@qw or FILM@100nm',
+    );
+  }
+  return {
+    medium: plate.medium,
+    text,
+    thickness_m: plate.thickness?.kind === 'length' ? plate.thickness.thickness_m : null,
+    coating: { front, back },
+  };
+}
+
+interface Piece {
+  readonly medium: MediumSpec;
+  readonly thickness: LayerThickness | undefined;
+}
+
+function readPiece(text: string, catalogue: IndexedCatalogue): Piece | Refusal {
   const [name = '', size, ...more] = text.split('@');
   if (more.length > 0) {
     return refuse(
       'bad-thickness',
       2,
       `${quoteInput(text)} has two thicknesses`,
-      `write ${name}@THICKNESS, such as ${name}@3mm`,
+      `write ${name}@THICKNESS, such as ${name}@3mm; films stand apart: FILM@qw/${name}@3mm`,
     );
   }
-  const medium = findMedium(name, catalogue);
-  if (isRefusal(medium)) return suggestMedia(medium, name, catalogue);
-  if (size === undefined) return { medium, text: name, thickness_m: null };
-  const thickness = parseThickness(size);
+  const thickness = size === undefined ? undefined : parseThickness(size);
   if (isProblem(thickness)) return refuse('bad-thickness', 2, thickness.message, thickness.remedy);
-  if (thickness.kind === 'waves') {
-    return refuse(
-      'bad-thickness',
-      2,
-      `${quoteInput(text)} is a film, and parts are compared as plates`,
-      `give a length: ${name}@3mm`,
-    );
-  }
-  return { medium, text, thickness_m: thickness.thickness_m };
+  const medium = findMedium(name, catalogue);
+  return isRefusal(medium) ? medium : { medium, thickness };
+}
+
+const filmAlone = (text: string, name: string): Refusal =>
+  refuse(
+    'bad-thickness',
+    2,
+    `${quoteInput(text)} is a film, and parts are compared as plates`,
+    `give a length: ${name}@3mm; or the part under it: ${text}/MEDIUM@3mm`,
+  );
+
+/** The piece without a thickness, else the one of the greatest length; -1 where every piece is a part of a wave. */
+function placeOfPlate(pieces: readonly Piece[]): number {
+  const open = pieces.findIndex(({ thickness }) => thickness === undefined);
+  if (open >= 0) return open;
+  const lengths = pieces.map(({ thickness }) => (thickness?.kind === 'length' ? thickness.thickness_m : -1));
+  const greatest = Math.max(...lengths);
+  return greatest < 0 ? -1 : lengths.indexOf(greatest);
 }

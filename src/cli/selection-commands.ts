@@ -85,17 +85,33 @@ export const SELECTION_COMMANDS = [
     operands: [
       {
         name: 'PART',
-        meaning: 'a medium, or a plate of it: MEDIUM@THICKNESS, such as germanium@3mm; two to six',
+        meaning:
+          'a medium, a plate of it (germanium@3mm), or a coated plate, films and plate in the order the wave meets them (FILM@qw/germanium@3mm/FILM@qw); two to six',
         many: true,
         completes: 'medium',
       },
       { name: 'WAVE', meaning: 'one or more, behind the parts', many: true },
     ],
-    options: ['airWavelength', 'temperature_K', 'catalog', 'json', 'csv', 'markdown', 'plot', 'span', 'svg'],
+    options: [
+      'airWavelength',
+      'temperature_K',
+      'designWave',
+      'catalog',
+      'json',
+      'csv',
+      'markdown',
+      'plot',
+      'span',
+      'svg',
+    ],
     examples: [
       {
         line: 'compare zinc-selenide@3mm germanium@3mm kcl@3mm 10.6um',
         meaning: 'windows: loss, hardness, hazards',
+      },
+      {
+        line: 'compare zinc-sulfide@qw/ge@3mm/zinc-sulfide@qw ge@3mm 10um',
+        meaning: 'what a coating saves',
       },
       { line: 'compare n-bk7 fused-silica calcium-fluoride 400nm 1064nm', meaning: 'media at two waves' },
       {
@@ -124,6 +140,7 @@ export const SELECTION_COMMANDS = [
       'polarization',
       'airWavelength',
       'temperature_K',
+      'designWave',
       'power_W',
       'beamDiameter_m',
       'profile',

@@ -30,18 +30,21 @@ const starred = (text: string, best: boolean): string => (best ? `${text} *` : t
 
 /** Of one wave; a part without data has a dash everywhere. */
 export function waveRows({ columns }: ComparedWave, style: NumberStyle): readonly CompareRow[] {
-  return WAVE_QUANTITIES.map(({ symbol, label, text, rank }) => {
-    const best = rank
-      ? bestOf(
-          columns.map((c) => (isRefusal(c) ? null : rank[0](c))),
-          rank[1],
-        )
-      : [];
-    const cells = columns.map((c, i) =>
-      isRefusal(c) ? NO_VALUE : starred(text(c, style), best[i] === true),
-    );
-    return { symbol, label, cells };
-  }).filter(({ cells }) => cells.some((cell) => cell !== NO_VALUE));
+  const facesDiffer = columns.some((c) => !isRefusal(c) && c.backReflectance !== c.surfaceReflectance);
+  return WAVE_QUANTITIES.filter((quantity) => facesDiffer || quantity !== BACK_SURFACE)
+    .map(({ symbol, label, text, rank }) => {
+      const best = rank
+        ? bestOf(
+            columns.map((c) => (isRefusal(c) ? null : rank[0](c))),
+            rank[1],
+          )
+        : [];
+      const cells = columns.map((c, i) =>
+        isRefusal(c) ? NO_VALUE : starred(text(c, style), best[i] === true),
+      );
+      return { symbol, label, cells };
+    })
+    .filter(({ cells }) => cells.some((cell) => cell !== NO_VALUE));
 }
 
 /** What does not depend on the wave. */
@@ -54,10 +57,10 @@ export function factRows({ parts }: CompareReport, style: NumberStyle): readonly
 
 const share = (medium: MediumAnswer): number => howKnown(medium).uncertainty / Math.abs(medium.n || 1);
 
-/** R moves with n: dR = 4 (n - 1)/(n + 1)^3 dn. */
-const surfaceDigits = ({ surfaceReflectance, medium }: PartAtWave) => {
+/** R of a bare surface moves with n: dR = 4 (n - 1)/(n + 1)^3 dn; that of a coated one with its films. */
+const surfaceDigits = (R: number, { medium }: PartAtWave, ofFilms: number | null) => {
   const spread = (4 * Math.abs(medium.n - 1) * howKnown(medium).uncertainty) / (medium.n + 1) ** 3;
-  return precisionFor(surfaceReflectance, spread, 4);
+  return precisionFor(R, ofFilms ?? spread, 4);
 };
 
 const percent = (
@@ -68,6 +71,16 @@ const percent = (
 
 /** 1 - T of a plate to the place where its surfaces are known, at most four digits. */
 const LOSS_DIGITS = { significant: 4 } as const;
+
+/** Shown where it differs from the front. */
+const BACK_SURFACE: Quantity<PartAtWave> = {
+  symbol: 'R',
+  label: 'back surface',
+  text: (column, style) => {
+    const { backReflectance: R, backR_uncertainty: u } = column;
+    return percent(R, surfaceDigits(R, column, u), style);
+  },
+};
 
 const WAVE_QUANTITIES: readonly Quantity<PartAtWave>[] = [
   { symbol: 'n', label: 'index', text: ({ medium }, style) => indexText(medium, howKnown(medium), style) },
@@ -103,9 +116,15 @@ const WAVE_QUANTITIES: readonly Quantity<PartAtWave>[] = [
   {
     symbol: 'R',
     label: 'one surface',
-    text: (column, style) => percent(column.surfaceReflectance, surfaceDigits(column), style),
+    text: (column, style) =>
+      percent(
+        column.surfaceReflectance,
+        surfaceDigits(column.surfaceReflectance, column, column.R_uncertainty),
+        style,
+      ),
     rank: [({ surfaceReflectance }) => surfaceReflectance, 'least'],
   },
+  BACK_SURFACE,
   {
     symbol: 'τ',
     label: 'internal',
@@ -115,7 +134,11 @@ const WAVE_QUANTITIES: readonly Quantity<PartAtWave>[] = [
   {
     symbol: 'loss',
     label: 'of the part',
-    text: ({ loss, surfacesOnly }, style) => percent(loss, LOSS_DIGITS, style) + (surfacesOnly ? ' +' : ''),
+    text: ({ loss, surfacesOnly, R_uncertainty, backR_uncertainty }, style) => {
+      const spread = Math.hypot(R_uncertainty ?? 0, backR_uncertainty ?? 0);
+      const digits = spread === 0 ? LOSS_DIGITS : precisionFor(loss, spread, 4);
+      return percent(loss, digits, style) + (surfacesOnly ? ' +' : '');
+    },
     rank: [({ loss }) => loss, 'least'],
   },
   {

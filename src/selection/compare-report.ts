@@ -13,6 +13,7 @@ import type { Conditions } from '../dispersion/evaluator.ts';
 import { brewsterAngles } from '../interface/special-angles.ts';
 import { isRefusal, type Refusal, refuse } from '../medium/refusal.ts';
 import { type AbbeNumbers, abbeNumbers } from './abbe-numbers.ts';
+import { type Coating, coatedPart } from './coated-part.ts';
 import { type MaterialFacts, materialFacts } from './material-facts.ts';
 import { airAround, plateFractions, surfaceReflectance } from './plate-loss.ts';
 import type { Survey } from './survey.ts';
@@ -24,6 +25,8 @@ export interface Part {
   readonly text: string;
   /** Null for a bare medium. */
   readonly thickness_m: number | null;
+  /** Undefined where both faces are bare. */
+  readonly coating?: Coating;
 }
 
 export interface ComparedPart {
@@ -36,8 +39,13 @@ export interface ComparedPart {
 
 export interface PartAtWave {
   readonly medium: MediumAnswer;
-  /** One surface, in air. */
+  /** One surface, in air; the front one, with its films, of a coated part. */
   readonly surfaceReflectance: number;
+  /** From the air behind; that of the front where both are bare. */
+  readonly backReflectance: number;
+  /** By the indices of the films; null for a bare part, where the digits follow its index. */
+  readonly R_uncertainty: number | null;
+  readonly backR_uncertainty: number | null;
   /** Of one pass; null for a bare medium and where absorption is not known. */
   readonly internalTransmittance: number | null;
   /** 1 - T of the plate; null for a bare medium and where nothing can be said. */
@@ -47,6 +55,7 @@ export interface PartAtWave {
   readonly brewsterAngle_rad: number | null;
   readonly dn_dT_per_K: number | null;
   readonly cautions: readonly Caution[];
+  readonly films: readonly MediumAnswer[];
 }
 
 export interface ComparedWave {
@@ -59,6 +68,8 @@ export interface ComparedWave {
 export interface CompareReport {
   readonly parts: readonly ComparedPart[];
   readonly waves: readonly ComparedWave[];
+  /** The wave that quarter waves of coatings are meant for. */
+  readonly design: { readonly spec: WaveSpec; readonly at: FitWave };
 }
 
 export const FEWEST_PARTS = 2;
@@ -70,16 +81,24 @@ export function compareReport(
   parts: readonly Part[],
   waves: readonly WaveSpec[],
   conditions: Conditions,
+  designWave: WaveSpec | undefined = waves[0],
 ): CompareReport | Refusal {
   if (parts.length < FEWEST_PARTS || parts.length > MOST_PARTS) {
     const message = `${parts.length} media or parts cannot be compared`;
     return refuse('part-count', 2, message, `name ${FEWEST_PARTS} to ${MOST_PARTS} of them`);
   }
+  if (!designWave) return refuse('wave-missing', 2, 'no wave is given to compare at', 'give one or more');
+  const design = bothReferences(designWave);
+  if (isRefusal(design)) return design;
   const compared: ComparedWave[] = [];
   for (const spec of waves) {
     const at = bothReferences(spec);
     if (isRefusal(at)) return at;
-    compared.push({ spec, at, columns: parts.map((part) => columnOf(survey, part, at, conditions)) });
+    compared.push({
+      spec,
+      at,
+      columns: parts.map((part) => columnOf(survey, part, { spec, at, designWave }, conditions)),
+    });
   }
   const refusals = compared.flatMap(({ columns }) => columns).filter(isRefusal);
   const [first] = refusals;
@@ -90,6 +109,7 @@ export function compareReport(
   return {
     parts: parts.map((part) => describe(survey, part, wave?.at)),
     waves: compared,
+    design: { spec: designWave, at: design },
   };
 }
 
@@ -105,21 +125,91 @@ function describe(survey: Survey, part: Part, at: FitWave | undefined): Compared
   };
 }
 
-function columnOf(survey: Survey, part: Part, at: FitWave, conditions: Conditions): PartAtWave | Refusal {
+interface AtWave {
+  readonly spec: WaveSpec;
+  readonly at: FitWave;
+  readonly designWave: WaveSpec;
+}
+
+function columnOf(survey: Survey, part: Part, wave: AtWave, conditions: Conditions): PartAtWave | Refusal {
+  const { at } = wave;
   const side = mediumSide(part.medium, at, conditions, false, survey.sourceOf);
   if (isRefusal(side)) return side;
   const air = airAround(survey, at);
   const { medium } = part;
   const slope =
     medium.kind === 'catalogue' ? thermalSlope(medium.material, side.answer.axis as Axis, at) : null;
+  const R = surfaceReflectance(air, side.optics);
+  const bare: Faces = {
+    ...plate(survey, part, side, at),
+    surfaceReflectance: R,
+    backReflectance: R,
+    R_uncertainty: null,
+    backR_uncertainty: null,
+  };
+  const films = filmsOf(survey, part, at, conditions);
+  if (isRefusal(films)) return films;
+  const faces = part.coating ? coated(survey, part, part.coating, wave, conditions, bare) : bare;
+  if (isRefusal(faces)) return faces;
   return {
     medium: side.answer,
-    surfaceReflectance: surfaceReflectance(air, side.optics),
-    ...plate(survey, part, side, at),
-    brewsterAngle_rad: brewsterAngles(air, side.optics).p,
+    ...faces,
+    // Films move the angle of least reflection.
+    brewsterAngle_rad: part.coating ? null : brewsterAngles(air, side.optics).p,
     dn_dT_per_K: slope?.dn_dT_per_K ?? null,
-    cautions: orderCautions(side.notes.map((note) => wordCaution(note, part.text, side.name))),
+    cautions: orderCautions(
+      [side, ...films].flatMap(({ notes, name }) => notes.map((note) => wordCaution(note, part.text, name))),
+    ),
+    films: films.map((film) => film.answer),
   };
+}
+
+type Faces = PlateOfPart &
+  Pick<PartAtWave, 'surfaceReflectance' | 'backReflectance' | 'R_uncertainty' | 'backR_uncertainty'>;
+
+function coated(
+  survey: Survey,
+  { medium, thickness_m }: Part,
+  coating: Coating,
+  { spec, at, designWave }: AtWave,
+  conditions: Conditions,
+  bare: Faces,
+): Faces | Refusal {
+  const part = coatedPart(survey, {
+    medium,
+    thickness_m: bare.loss === null ? null : thickness_m,
+    coating,
+    wave: spec,
+    at,
+    designWave,
+    conditions,
+  });
+  if (isRefusal(part)) return part;
+  const { front, back, loss } = part;
+  return {
+    ...bare,
+    surfaceReflectance: front.R,
+    backReflectance: back.R,
+    R_uncertainty: front.R_uncertainty,
+    backR_uncertainty: back.R_uncertainty,
+    loss,
+  };
+}
+
+/** A refusal where the data of one end. */
+function filmsOf(
+  survey: Survey,
+  { coating }: Part,
+  at: FitWave,
+  conditions: Conditions,
+): readonly MediumSide[] | Refusal {
+  const films: MediumSide[] = [];
+  for (const { medium } of [...(coating?.front ?? []), ...(coating?.back ?? [])]) {
+    const film = mediumSide(medium, at, conditions, false, survey.sourceOf);
+    if (isRefusal(film)) return film;
+    films.push(film);
+  }
+  return films;
 }
 
 type PlateOfPart = Pick<PartAtWave, 'internalTransmittance' | 'loss' | 'surfacesOnly'>;

@@ -10,6 +10,8 @@ const COMMANDS = [
   'compare n-bk7 fused-silica calcium-fluoride 400nm 1064nm d-line',
   'compare air water 10GHz',
   'compare n=1.5@2mm n=1.5+0.001i@2mm 633nm',
+  'compare zinc-sulfide@qw/germanium@3mm/zinc-sulfide@qw germanium@3mm zinc-sulfide@qw/germanium 10um 9um',
+  'compare magnesium-fluoride-film@100nm/n-bk7@5mm n=1.38@qw/n=1.5@2mm 550nm --design-wave 600nm',
   'compare lithium-tantalate-stoichiometric potassium-titanyl-phosphate:z 1064nm --temperature 40C',
 ];
 
@@ -40,6 +42,18 @@ describe('halfspace compare', () => {
     expect(out).not.toContain('\u001b');
   });
 
+  it('sets a coated part beside the bare one, and says what is on it', async () => {
+    // Single quarter-wave film of MgF2 on crown glass, 1.3 % in place of 4.2 % (Hecht, Optics, 9.7.2).
+    const { out } = await run(line('compare magnesium-fluoride-film@qw/n-bk7@5mm n-bk7@5mm 550nm'));
+    expect(out).toMatch(/^ +n-bk7@5mm \(a\) +n-bk7@5mm$/m);
+    expect(out).toMatch(/^R +one surface +1\.27 % \* +4\.239 %$/m);
+    expect(out).toMatch(/^R +back surface +4\.239 % +4\.239 %$/m);
+    expect(out.replace(/\s+/g, ' ')).toContain(
+      '(a) magnesium-fluoride-film@qw/n-bk7@5mm; quarter and half waves at 550 nm in vacuum.',
+    );
+    expect(out).toContain('Magnesium fluoride film: H. A. Macleod');
+  });
+
   it('shows 64.17 and 63.96 for N-BK7 (Schott data sheet)', async () => {
     const { out } = await run(line('compare n-bk7 n-sf11 d-line'));
     expect(out).toMatch(/^V_d +Abbe number +64\.17 +25\.68$/m);
@@ -53,6 +67,10 @@ describe('halfspace compare', () => {
     ['compare n-bk7@qw znse 1um', 'n-bk7@3mm'],
     ['compare n-bk7@1mm@2mm znse 1um', 'two thicknesses'],
     ['compare bk77 znse 1um', 'did you mean'],
+    ['compare n=1.38@qw/n=1.5@qw znse 1um', 'films alone'],
+    ['compare n=1.38/n=1.5 znse 1um', 'more than one medium without a thickness'],
+    ['compare n=1.38@qw/n-bk77@3mm znse 1um', 'did you mean n-bk7'],
+    ['compare n=1.38@qw znse 1um', 'n=1.38@qw/MEDIUM@3mm'],
   ])('refuses %s', async (command, hint) => {
     const { status, out, err } = await run(line(command));
     expect([status, out]).toEqual([2, '']);

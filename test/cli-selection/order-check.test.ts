@@ -51,6 +51,20 @@ describe('halfspace order-check', () => {
     }
   });
 
+  it('makes a film once: a quarter wave at the first wave, or at the design wave', async () => {
+    const at800 = async (command: string): Promise<string> => {
+      const { out } = await run(line(command));
+      return /At 800 nm in vacuum\n[\s\S]*?front face, coated, ([\d.]+) %/.exec(out)?.[1] ?? out;
+    };
+    const path = 'order-check air magnesium-fluoride-film@qw n-bk7@3mm air';
+    const [first, named] = [
+      await at800(`${path} 550nm 800nm`),
+      await at800(`${path} 800nm --design-wave 550nm`),
+    ];
+    expect(first).toBe(named);
+    expect(Number(await at800(`${path} 800nm`))).toBeLessThan(Number(first));
+  });
+
   it('puts the graver remarks first', async () => {
     const { out } = await run(line('order-check air gold@1mm air 633nm'));
     const levels = [...out.matchAll(/^(stop|look|fine) +/gm)].map((m) => m[1]);

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { answerQuestion } from '../../src/answer/answer-question.ts';
-import { type MediumSpec, makeQuestion } from '../../src/answer/question.ts';
+import { type Layer, type MediumSpec, makeQuestion } from '../../src/answer/question.ts';
 import { isRefusal } from '../../src/medium/refusal.ts';
 import { bestOf } from '../../src/selection/best-values.ts';
 import { compareReport, type Part } from '../../src/selection/compare-report.ts';
@@ -57,6 +57,65 @@ describe('compare', () => {
         expect(column.surfacesOnly).toBe(surface.into.absorptionCoefficient_per_m === null);
       }
     }
+  });
+
+  it('takes films by the formulas of one quarter-wave layer and of a plate (Born & Wolf 1.6.4, 7.6)', () => {
+    const clear: MediumSpec = { kind: 'literal', literal: { n: { re: 2.2, im: 0 } }, text: 'n=2.2' };
+    const quarter = (n: number, ns: number, n0: number): number =>
+      ((n0 * ns - n * n) / (n0 * ns + n * n)) ** 2;
+    const coatings = [
+      [named('magnesium-fluoride-film'), 'n-bk7', 550e-9, 5e-3],
+      [clear, 'germanium', 10.6e-6, 3e-3],
+      [named('silicon-dioxide-film'), 'sapphire', 633e-9, 10e-3],
+    ] as const;
+    for (const [medium, key, wavelength_m, thickness_m] of coatings) {
+      const film: Layer = { medium, thickness: { kind: 'waves', waves: 0.25 } };
+      const bare = part(key, thickness_m);
+      const both = { ...bare, coating: { front: [film], back: [film] } };
+      const front = { ...bare, coating: { front: [film], back: [] } };
+      const columns = compare([bare, both, front], [wavelength_m]).waves[0]?.columns ?? [];
+      const [plain, twice, once] = columns.flatMap((c) => (isRefusal(c) ? [] : [c]));
+      const index = (of: MediumSpec): number => {
+        const answer = answerQuestion(makeQuestion(named('air'), of, vacuum(wavelength_m)), survey.sourceOf);
+        return isRefusal(answer) ? Number.NaN : answer.into.n;
+      };
+      const R = quarter(index(medium), index(named(key)), index(named('air')));
+      const R0 = plain?.surfaceReflectance ?? Number.NaN;
+      const tau = plain?.internalTransmittance ?? 1;
+      const loss = (R1: number, R2: number): number =>
+        1 - ((1 - R1) * (1 - R2) * tau) / (1 - R1 * R2 * tau * tau);
+      expect(plain?.loss, key).toBeCloseTo(loss(R0, R0), 6);
+      expect(twice?.surfaceReflectance, key).toBeCloseTo(R, 7);
+      expect(twice?.backReflectance, key).toBeCloseTo(R, 7);
+      expect(twice?.loss, key).toBeCloseTo(loss(R, R), 7);
+      expect(once?.backReflectance, key).toBeCloseTo(R0, 6);
+      expect(once?.loss, key).toBeCloseTo(loss(R, R0), 7);
+    }
+  });
+
+  it('makes films once, for the first wave unless another is named', () => {
+    const ar = {
+      ...part('n-bk7', 5e-3),
+      coating: {
+        front: [{ medium: named('magnesium-fluoride-film'), thickness: { kind: 'waves', waves: 0.25 } }],
+        back: [],
+      },
+    } satisfies Part;
+    const R = (waves: readonly number[], design?: number): readonly number[] => {
+      const report = compareReport(
+        survey,
+        [ar, part('n-bk7')],
+        waves.map((w) => vacuum(w)),
+        {},
+        design === undefined ? undefined : vacuum(design),
+      );
+      if (isRefusal(report)) throw new Error(report.message);
+      return report.waves.flatMap(({ columns: [c] }) => (c && !isRefusal(c) ? [c.surfaceReflectance] : []));
+    };
+    const [atDesign = 0, beside = 0] = R([550e-9, 900e-9]);
+    expect(beside).toBeGreaterThan(atDesign);
+    expect(R([900e-9], 550e-9)[0]).toBe(beside);
+    expect(R([900e-9])[0]).toBeLessThan(beside);
   });
 
   it('leaves a gap with its reason where the data end, and refuses only where all do', () => {

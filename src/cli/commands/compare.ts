@@ -4,6 +4,7 @@ import { compareReport, type Part } from '../../selection/compare-report.ts';
 import { makeSurvey } from '../../selection/survey.ts';
 import type { Command } from '../context.ts';
 import { readPart, splitWaves } from '../read-parts.ts';
+import { readWave } from '../read-question.ts';
 import { compareCsv, compareJson } from '../render/compare-data.ts';
 import { compareMarkdown, compareText } from '../render/compare-text.ts';
 import { reportRefusal } from '../report-refusal.ts';
@@ -21,7 +22,9 @@ export const run: Command = async ({ operands, options }, context) => {
   }
   const { temperature_K } = options;
   const survey = makeSurvey(catalogue);
-  const report = compareReport(survey, parts, split.waves, { temperature_K });
+  const designWave = options.designWave && readWave(options.designWave.text, options);
+  if (isRefusal(designWave)) return reportRefusal(designWave, context);
+  const report = compareReport(survey, parts, split.waves, { temperature_K }, designWave);
   if (isRefusal(report)) return reportRefusal(report, context);
   const ascii = options.ascii === true;
   const style = { ascii: context.ascii };

@@ -19,7 +19,9 @@ export const run: Command = async ({ operands, options }, context) => {
   for (const wave of operands.slice(split.media.length)) {
     const question = await readQuestion([...split.media, wave], options, catalogue);
     if (isRefusal(question)) return reportRefusal(question, context);
-    questions.push(question);
+    // The films of a part are made once, for the first wave if for no other.
+    const designWave = question.designWave ?? split.waves[0];
+    questions.push({ ...question, designWave });
   }
   const report = orderReport(makeSurvey(catalogue), questions);
   if (isRefusal(report)) return reportRefusal(report, context);

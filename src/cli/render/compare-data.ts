@@ -1,4 +1,5 @@
 /** The comparison for programs: JSON, one object a part with one entry a wave; CSV, one record for each part at each wave. */
+import type { Layer } from '../../answer/question.ts';
 import { isRefusal, type Refusal } from '../../medium/refusal.ts';
 import type { ComparedPart, CompareReport, PartAtWave } from '../../selection/compare-report.ts';
 import { csvTable } from './csv-table.ts';
@@ -6,11 +7,12 @@ import { waveData } from './find-data.ts';
 import { type DocumentHead, jsonDocument } from './json-document.ts';
 
 export function compareJson(report: CompareReport, head: DocumentHead, ascii: boolean): string {
-  const { parts, waves } = report;
+  const { parts, waves, design } = report;
   return jsonDocument(
     head,
     {
       waves: waves.map(({ spec, at }) => waveData(spec, at)),
+      designWave: parts.some(({ part }) => part.coating) ? waveData(design.spec, design.at) : null,
       parts: parts.map((part, i) => ({
         ...partData(part),
         atWave: waves.map(({ columns }) => columnData(columns[i] as PartAtWave | Refusal)),
@@ -28,6 +30,9 @@ function partData({ part, axis, facts, abbe }: ComparedPart) {
     class: facts?.class ?? null,
     axis,
     thickness_m: part.thickness_m,
+    coating: part.coating
+      ? { front: part.coating.front.map(filmData), back: part.coating.back.map(filmData) }
+      : null,
     transparency_m: facts?.transparency_m ?? null,
     Vd: abbe?.Vd ?? null,
     Ve: abbe?.Ve ?? null,
@@ -38,6 +43,13 @@ function partData({ part, axis, facts, abbe }: ComparedPart) {
     care: facts?.care ?? null,
   };
 }
+
+const filmData = ({ medium, thickness }: Layer) => ({
+  key: medium.kind === 'literal' ? null : medium.material.key,
+  text: medium.kind === 'literal' ? medium.text : medium.material.name,
+  thickness_m: thickness.kind === 'length' ? thickness.thickness_m : null,
+  thickness_waves: thickness.kind === 'waves' ? thickness.waves : null,
+});
 
 /** `reason` says why every number is null, or why a loss holds no absorption. */
 function columnData(column: PartAtWave | Refusal) {
@@ -51,6 +63,9 @@ function columnData(column: PartAtWave | Refusal) {
     gvd_s2_per_m: medium.gvd_s2_per_m,
     wavelength_m: medium.wavelength_m,
     surfaceReflectance: column.surfaceReflectance,
+    backReflectance: column.backReflectance,
+    surfaceReflectance_uncertainty: column.R_uncertainty,
+    backReflectance_uncertainty: column.backR_uncertainty,
     internalTransmittance: column.internalTransmittance,
     loss: column.loss,
     lossIncludesAbsorption: column.loss === null ? null : !column.surfacesOnly,
@@ -73,6 +88,9 @@ const NOTHING = {
   gvd_s2_per_m: null,
   wavelength_m: null,
   surfaceReflectance: null,
+  backReflectance: null,
+  surfaceReflectance_uncertainty: null,
+  backReflectance_uncertainty: null,
   internalTransmittance: null,
   loss: null,
   lossIncludesAbsorption: null,
@@ -126,6 +144,7 @@ export function compareCsv({ parts, waves }: CompareReport, ascii: boolean): str
         data.transparency_m?.[1],
         ...WAVE_NAMES.map((name) => column[name]),
         column.source?.id,
+        column.backReflectance,
       ];
     }),
   );
@@ -136,6 +155,7 @@ export function compareCsv({ parts, waves }: CompareReport, ascii: boolean): str
     'transparencyTo_m',
     ...WAVE_NAMES.map((name) => (name === 'wavelength_m' ? 'wavelengthInside_m' : name)),
     'source',
+    'backReflectance',
   ];
   return csvTable(names, records, ascii);
 }

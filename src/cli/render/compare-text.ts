@@ -1,10 +1,10 @@
 /** Media and parts side by side for people, as text or as Markdown; the best value of a row has a star. */
 import {
-  COMPARE_LEGEND,
   compareCautions,
   compareGaps,
+  compareLegend,
   compareSources,
-  partTitle,
+  partTitles,
 } from '../../present/compare-page.ts';
 import { type CompareRow, factRows, waveRows } from '../../present/compare-rows.ts';
 import type { CompareReport } from '../../selection/compare-report.ts';
@@ -19,8 +19,8 @@ import { cautionSection } from './text.ts';
 const WIDEST = 80;
 
 export function compareText(report: CompareReport, style: NumberStyle): string {
-  const { parts, waves } = report;
-  const titles = parts.map(partTitle);
+  const { waves } = report;
+  const titles = partTitles(report);
   return page(
     [
       ...waves.flatMap((wave) => [
@@ -32,7 +32,7 @@ export function compareText(report: CompareReport, style: NumberStyle): string {
       ]),
       ...blocks(titles, factRows(report, style), style),
       '',
-      ...COMPARE_LEGEND.flatMap((line) => paragraph(line)),
+      ...compareLegend(report, style).flatMap((line) => paragraph(line)),
       ...cautionSection(compareCautions(report)),
       ...sources(report, style),
     ],
@@ -61,8 +61,8 @@ function sources(report: CompareReport, style: NumberStyle): readonly string[] {
 }
 
 export function compareMarkdown(report: CompareReport, style: NumberStyle): string {
-  const { parts, waves } = report;
-  const titles = parts.map(partTitle);
+  const { waves } = report;
+  const titles = partTitles(report);
   const cautions = compareCautions(report);
   const lines = [
     ...waves.flatMap((wave) => [
@@ -78,7 +78,7 @@ export function compareMarkdown(report: CompareReport, style: NumberStyle): stri
     ...markdownTable(titles, factRows(report, style)),
     '',
     // A star of its own in a table, not the mark of a list.
-    ...COMPARE_LEGEND.map((line) => line.replace(/^\*/, '\\*')),
+    ...compareLegend(report, style).map((line) => line.replace(/^\*/, '\\*')),
     ...(cautions.length > 0 ? ['', ...cautions.map((c) => `- **${c.level}** ${c.text}`)] : []),
     '',
     ...compareSources(report, style).map((line) => `- ${line}`),

@@ -2,11 +2,11 @@
 import type { MediumSpec, Question } from '../../answer/question.ts';
 import { isRefusal, type Refusal } from '../../medium/refusal.ts';
 import {
-  COMPARE_LEGEND,
   compareCautions,
   compareGaps,
+  compareLegend,
   compareSources,
-  partTitle,
+  partTitles,
 } from '../../present/compare-page.ts';
 import { type CompareRow, factRows, waveRows } from '../../present/compare-rows.ts';
 import {
@@ -39,7 +39,7 @@ export function compareLines(
   }
   const report = reportOn(question, parts, world);
   if (isRefusal(report)) return [pageLine(`${report.message}; ${report.remedy}`, 'caution', 'x')];
-  const titles = report.parts.map(partTitle);
+  const titles = partTitles(report);
   const table = (rows: readonly CompareRow[]): readonly PageLine[] =>
     columnBlocks(
       [{ title: '' }, { title: '' }, ...titles.map((title) => ({ title }))],
@@ -59,7 +59,7 @@ export function compareLines(
     pageLine('At any wave', 'heading'),
     ...table(factRows(report, style)),
     pageLine(''),
-    ...COMPARE_LEGEND.map((text) => pageLine(text, 'aside')),
+    ...compareLegend(report, style).map((text) => pageLine(text, 'aside')),
     ...(cautions.length > 0 ? [pageLine(''), pageLine('Cautions', 'heading')] : []),
     ...cautionLines(cautions),
     pageLine(''),
