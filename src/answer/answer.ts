@@ -90,6 +90,8 @@ export interface MediumAnswer {
   readonly humidity: number | null;
   readonly co2_ppm: number | null;
   readonly salinity_g_per_kg: number | null;
+  /** Share of the second constituent of a mixture. */
+  readonly composition: number | null;
   readonly transparency_m: readonly [number, number] | null;
   readonly own: boolean;
   readonly fit: FitAnswer | null;

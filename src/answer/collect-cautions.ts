@@ -23,9 +23,20 @@ export function collectCautions(sources: CautionSources): readonly Caution[] {
     ...media.flatMap((medium, i) =>
       mediumNotes(medium, sources).map((n) => wordCaution(n, placeName(i, media.length), medium.side.name)),
     ),
+    ...unusedComposition(sources),
     ...interfaceNotes.map((n) => wordCaution(n, 'interface', 'interface')),
     ...beamNotes.map((n) => wordCaution(n, 'beam', 'beam')),
   ]);
+}
+
+/** A composition belongs to one medium of a path; it is said where none takes it. */
+function unusedComposition({ question, media }: CautionSources): readonly Caution[] {
+  const last = media.at(-1);
+  const { composition } = question.conditions;
+  if (!last || composition === undefined) return [];
+  if (media.some(({ side }) => side.answer.composition !== null)) return [];
+  const note: CautionNote = { code: 'condition-not-used', details: { condition: 'composition' } };
+  return [wordCaution(note, 'into', last.side.name)];
 }
 
 /** "from", "layer 1" and so on, "into". */

@@ -50,6 +50,7 @@ export const QUESTION_OPTIONS = [
   'humidity',
   'co2_ppm',
   'salinity_g_per_kg',
+  'composition',
   'tolerances',
   'extrapolate',
   'catalog',

@@ -88,6 +88,14 @@ export const OPTIONS = {
     group: 'question',
     parse: parseSalinity,
   }),
+  composition: value({
+    name: 'composition',
+    placeholder: 'FRACTION',
+    meaning: 'share of the second constituent of a mixture, as its fit says, such as 30% or 0.3',
+    fallback: 'that of the recommended fit',
+    group: 'question',
+    parse: parseFraction,
+  }),
   tolerances: value({
     name: 'tolerance',
     placeholder: 'NAME=VALUE,...',

@@ -59,7 +59,8 @@ export function questionOptions(
   options: OptionValues,
   wave: WaveSpec,
 ): Partial<Omit<Question, 'from' | 'into' | 'wave'>> | Refusal {
-  const { temperature_K, pressure_Pa, humidity, co2_ppm, salinity_g_per_kg, linewidth } = options;
+  const { temperature_K, pressure_Pa, humidity, co2_ppm, salinity_g_per_kg, composition, linewidth } =
+    options;
   const beam = readBeam(options);
   if (isRefusal(beam)) return beam;
   const designWave = options.designWave && readWave(options.designWave.text, options);
@@ -67,7 +68,14 @@ export function questionOptions(
   return {
     incidenceAngle_rad: options.angle_rad ?? 0,
     polarization: options.polarization ?? 'unpolarized',
-    conditions: dropUndefined({ temperature_K, pressure_Pa, humidity, co2_ppm, salinity_g_per_kg }),
+    conditions: dropUndefined({
+      temperature_K,
+      pressure_Pa,
+      humidity,
+      co2_ppm,
+      salinity_g_per_kg,
+      composition,
+    }),
     beam,
     tolerances: options.tolerances ? readTolerances(options.tolerances, wave) : {},
     extrapolate: options.extrapolate === true,

@@ -14,6 +14,7 @@ import { type BoundFit, bestFit, bindFit, reaches, type Waves } from './bound-fi
 import { fitPreference } from './fit-preference.ts';
 import { type LiteralMedium, literalOptics } from './literal.ts';
 import { mediumAtWave } from './optics-at.ts';
+import { outsideTable } from './outside-table.ts';
 import { isPassiveIndex } from './passive-index.ts';
 import { isRefusal, type Refusal } from './refusal.ts';
 
@@ -64,7 +65,7 @@ export function bindMaterial(
   extrapolate: boolean,
 ): BoundMedium {
   const axes = (axis ? [axis] : AXIS_ORDER)
-    .map((a) => material.fits.filter((fit) => fit.axis === a))
+    .map((a) => material.fits.filter((fit) => fit.axis === a && !outsideTable(fit, material, conditions)))
     .filter((fits) => fits.length > 0)
     .map((fits) => fits.map((fit) => bindFit(fit, material, conditions)));
   const all = axes.flat();

@@ -25,6 +25,7 @@ import { toAbsolute } from './air-reference.ts';
 import type { CautionNote } from './caution.ts';
 import { fitPreference } from './fit-preference.ts';
 import { hazardLevel } from './hazard-level.ts';
+import { outsideTable } from './outside-table.ts';
 import { isPassiveIndex } from './passive-index.ts';
 import { lengthText, rangeText } from './range-text.ts';
 import { type Refusal, refuse } from './refusal.ts';
@@ -82,6 +83,8 @@ export function mediumAtWave(
   if (!choice.inRange && !extrapolate) return outsideRange(material, theAxis, wave);
 
   const { fit } = choice;
+  const outside = outsideTable(fit, material, conditions);
+  if (outside) return outside;
   const notes: CautionNote[] = [];
   const state = evaluateFit(fit, material, wave, conditions, notes);
   const jet = state.jet;

@@ -32,6 +32,8 @@ export function conditionsText(medium: MediumAnswer, style: PresentStyle): strin
     parts.push(`CO2 ${formatNumber(medium.co2_ppm, 'shortest', style)}e-6`);
   if (medium.salinity_g_per_kg !== null)
     parts.push(`${formatNumber(medium.salinity_g_per_kg, 'shortest', style)} g/kg salt`);
+  if (medium.composition !== null)
+    parts.push(`composition ${formatNumber(medium.composition, 'shortest', style)}`);
   return parts.join(', ');
 }
 

@@ -3,8 +3,7 @@
  * keys, every number so written that it reads back as the same double. `catalog` and the like, which no question holds, are
  * the caller's to add.
  *
- * Limits: a composition (which no option states) is left out; a design wave in air beside a wave in vacuum, or the other way round,
- * is written as if both were the same.
+ * Limit: a design wave in air beside a wave in vacuum, or the other way round, is written as if both were the same.
  */
 import type { Beam, CrystalCut, Layer, MediumSpec, Question, WaveSpec } from '../answer/question.ts';
 import { repeatedRuns } from '../present/layer-runs.ts';
@@ -102,7 +101,7 @@ function waveWord({ wavelength_m, inAir, text }: WaveSpec, airWavelength: boolea
 }
 
 function conditionWords({ conditions }: Question): readonly string[] {
-  const { temperature_K, pressure_Pa, humidity, co2_ppm, salinity_g_per_kg } = conditions;
+  const { temperature_K, pressure_Pa, humidity, co2_ppm, salinity_g_per_kg, composition } = conditions;
   const words: string[] = [];
   if (temperature_K !== undefined) {
     const celsius = Number((temperature_K - ZERO_CELSIUS_K).toFixed(9));
@@ -113,6 +112,7 @@ function conditionWords({ conditions }: Question): readonly string[] {
   if (humidity !== undefined) words.push('--humidity', String(humidity));
   if (co2_ppm !== undefined) words.push('--co2', String(co2_ppm));
   if (salinity_g_per_kg !== undefined) words.push('--salinity', String(salinity_g_per_kg));
+  if (composition !== undefined) words.push('--composition', String(composition));
   return words;
 }
 

@@ -31,6 +31,7 @@ const COMMANDS: readonly string[] = [
   'air sapphire:O 1064nm',
   'air n-bk7 632.8nm --air-wavelength --angle 0.3rad --tolerance wave=1nm,angle=0.5deg,n=1e-4',
   'air water 589.3nm --temperature 25C --pressure 98kPa --humidity 50% --co2 420 --json',
+  'air glucose-syrup-solution 589.3nm --composition 30%',
   'air seawater 589.3nm --salinity 35 --temperature=-1C --extrapolate --plain',
   'air fused-silica 633nm --power 5mW --beam 1mm --profile flat --csv',
   'air fused-silica 633nm --irradiance 1kW/m2 --markdown',

@@ -17,7 +17,7 @@ describe('the table of options', () => {
 
   it('holds every option of the published command line', () => {
     const published =
-      'angle pol air-wavelength temperature pressure humidity co2 salinity power beam profile irradiance field tolerance extrapolate json csv markdown plain color no-color ascii quiet output linear catalog strict no-input log help version';
+      'angle pol air-wavelength temperature pressure humidity co2 salinity composition power beam profile irradiance field tolerance extrapolate json csv markdown plain color no-color ascii quiet output linear catalog strict no-input log help version';
     for (const name of published.split(' ')) expect(optionKeyByName(name), name).toBeDefined();
   });
 

@@ -16,7 +16,7 @@ describe('conditions', () => {
     ...ABSORBING_FITS,
   ].map((f) => f.parameters);
   const stated = {
-    temperature_K: 283.15,
+    temperature_K: 303.15,
     pressure_Pa: 90000,
     humidity: 0.3,
     co2_ppm: 700,

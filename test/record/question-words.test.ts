@@ -99,6 +99,7 @@ const question: fc.Arbitrary<Question> = fc
       humidity: maybe(fc.double({ min: 0, max: 1, noNaN: true })),
       co2_ppm: maybe(fc.double({ min: 0, max: 1e6, noNaN: true })),
       salinity_g_per_kg: maybe(fc.double({ min: 0, max: 300, noNaN: true })),
+      composition: maybe(fc.double({ min: 0, max: 1, noNaN: true })),
     }),
     tolerances: fc.record({
       wavelength_m: maybe(log(1e-15, 1e-3)),

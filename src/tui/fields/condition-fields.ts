@@ -171,8 +171,7 @@ function conditionField(kind: ConditionKind): Field {
 
 /** What the models used, while nothing is set. */
 function usedValue({ answer }: FieldContext, name: ConditionName): number | undefined {
-  if (!answer || name === 'composition') return undefined;
-  return answer.into[name] ?? answer.from[name] ?? undefined;
+  return answer?.into[name] ?? answer?.from[name] ?? undefined;
 }
 
 export const CONDITION_FIELDS: readonly Field[] = KINDS.map(conditionField);

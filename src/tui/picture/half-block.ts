@@ -67,6 +67,7 @@ function stateItems(medium: MediumAnswer | null, style: NumberStyle): readonly I
       : `${formatQuantity(Number(medium.humidity.toPrecision(4)), PER_CENT, 'shortest', { style })} RH`,
     medium.humidity === 0 ? 'dry' : undefined,
     medium.salinity_g_per_kg === null ? undefined : `${medium.salinity_g_per_kg} g/kg`,
+    medium.composition === null ? undefined : `composition ${medium.composition}`,
   ].filter((part) => part !== undefined);
   return parts.length === 0 ? [] : [textItem(parts.join(', '))];
 }
