@@ -1,12 +1,22 @@
 /**
- * The laws of `fresnel.ts` on bare numbers, for curves, sweeps and scans: nothing is allocated, the powers and the reflected
- * amplitudes go into an array of the caller's. Equal to `fresnel` to rounding (held by a property test), exactly so where total
- * reflection makes R = 1 and T = 0.
+ * Reflection and transmission of a plane wave at a plane interface between two homogeneous media, on bare numbers: nothing is
+ * allocated, the results go into an array of the caller's. Everything that asks for one surface asks here, as a rule through
+ * `fresnel.ts`.
  *
- * Both polarizations have one form. With z = mu for s and z = eps for p, and the normal wave vectors kappa,
- *   r = (kappa1 z2 - kappa2 z1)/D,  D = kappa1 z2 + kappa2 z1
+ *   kappa_j = sqrt(eps_j mu_j - q^2), Im >= 0, then Re >= 0;   q = n1 sin(theta) is the same on both sides (Snell)
+ * Both polarizations have one form. With z = mu for s and z = eps for p,
+ *   r = (kappa1 z2 - kappa2 z1)/D,  D = kappa1 z2 + kappa2 z1   (r_p in the sign of Born & Wolf)
  *   T = 4 |kappa1 z1|^2 Re(kappa2 z2*) / (Re(kappa1 z1*) |D|^2)
  * which needs no division by kappa2: nothing is lost at the critical angle.
+ *
+ * kappa2^2 = n2^2 - n1^2 + kappa1^2 rather than n2^2 - q^2: exact for like media, no cancellation at grazing incidence. The root
+ * decays, with one exception: a wave that comes out of an absorbing medium at an angle fades along the surface, and the wave
+ * beyond fades with it. In a clear medium its planes of constant amplitude are tilted so that Im kappa2 is a little negative; it
+ * still goes forward, and the decaying root would be the wave that comes back.
+ *
+ * Source: Born & Wolf, Principles of Optics, 7th ed., 1.5 and 1.6; Jackson, Classical Electrodynamics, 7.3.
+ * Special cases: total reflection between lossless media gives R = 1 and T = 0 exactly. The media without magnetism have forms
+ * of their own, two to three times as fast as the general one.
  */
 import { isLossless, type Optics } from './optics.ts';
 
