@@ -41,7 +41,7 @@ async function exportsOf(name: string, require: string): Promise<{ contents: str
   const load = `${require}(${JSON.stringify(name)})`;
   const late = LATE.has(bare(name));
   const lines = Object.entries((await import(name)) as Record<string, unknown>).map(([key, value]) => {
-    if (key === 'default') return `export default /* @__PURE__ */ ${load};`;
+    if (key === 'default') return `export default /* @__PURE__ */ (() => ${load})();`;
     const isLate = late && typeof value === 'function' && !/^class\b|^[A-Z]/.test(key);
     return isLate
       ? `export const ${key} = (...given) => ${load}.${key}(...given);`

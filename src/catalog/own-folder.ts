@@ -18,7 +18,8 @@ const MAX_BYTES = 8_000_000;
 /** The default folder. Relative values of XDG_DATA_HOME are ignored, as the XDG base directory specification asks. */
 export function ownFolderPath(env: Readonly<Record<string, string | undefined>>): string {
   const data = env['XDG_DATA_HOME'];
-  const base = data !== undefined && isAbsolute(data) ? data : join(homedir(), '.local', 'share');
+  const base =
+    data !== undefined && isAbsolute(data) ? data : join(env['HOME'] || homedir(), '.local', 'share');
   return join(base, 'halfspace', 'materials');
 }
 

@@ -14,24 +14,39 @@ const fs = require('node:fs');
 for (const name of ['readFileSync', 'openSync']) {
   const plain = fs[name];
   fs[name] = (file, ...more) => {
-    if (String(file).startsWith(process.env.WATCHED)) console.error('read ' + String(file).slice(process.env.WATCHED.length + 1));
+    if (String(file).startsWith(process.env.WATCHED)) fs.writeSync(2, 'read ' + String(file).slice(process.env.WATCHED.length + 1) + '\\n');
     return plain(file, ...more);
   };
 }
+process.on('exit', () => {
+  for (const name of process.moduleLoadList) fs.writeSync(2, 'loaded ' + name.replace('NativeModule ', '') + '\\n');
+});
 process.argv.splice(1, 1);
 require(process.argv[1]);
 `;
 
-function filesRead(...args: readonly string[]): readonly string[] {
-  const { stderr, status } = spawnSync(process.execPath, ['-e', WATCH, '--', entry, entry, ...args], {
-    encoding: 'utf8',
-    env: { ...process.env, WATCHED: dist, XDG_DATA_HOME: join(dist, 'none') },
-  });
-  expect(status, stderr).toBe(0);
-  const read = stderr.split('\n').flatMap((line) => (line.startsWith('read ') ? [line.slice(5)] : []));
-  return [...new Set(read)];
+interface Started {
+  readonly files: readonly string[];
+  /** Modules of Node. */
+  readonly modules: readonly string[];
 }
 
+function start(...args: readonly string[]): Started {
+  const { stderr, status } = spawnSync(process.execPath, ['-e', WATCH, '--', entry, entry, ...args], {
+    encoding: 'utf8',
+    env: { ...process.env, WATCHED: dist, HOME: join(dist, 'none'), XDG_DATA_HOME: '' },
+  });
+  expect(status, stderr).toBe(0);
+  const after = (word: string): readonly string[] => [
+    ...new Set(
+      stderr.split('\n').flatMap((line) => (line.startsWith(word) ? [line.slice(word.length)] : [])),
+    ),
+  ];
+  return { files: after('read '), modules: after('loaded ') };
+}
+
+/** Modules of Node that take long to load. */
+const LATE = ['tty', 'net', 'stream', 'os', 'crypto', 'child_process'];
 const FIRST = ['halfspace.js', 'core.js', 'core.cache', 'catalog.dat'];
 
 describe.skipIf(!existsSync(entry))('a start of the program', () => {
@@ -42,16 +57,19 @@ describe.skipIf(!existsSync(entry))('a start of the program', () => {
     ['n-bk7', 'air', '550nm', '--angle', '60', '--pol', 's', '--ascii'],
     ['air', 'zinc-selenide', '10.6um', '--quiet'],
   ])('reads the first script and the catalogue only for one surface: %s', (...args) => {
-    expect([...filesRead(...args)].sort()).toEqual([...FIRST].sort());
+    const { files, modules } = start(...args);
+    expect([...files].sort()).toEqual([...FIRST].sort());
+    expect(modules).toContain('fs');
+    expect(modules.filter((name) => LATE.includes(name))).toEqual([]);
   });
 
   it('reads the part for paths where there is a layer', () => {
-    const files = filesRead('air', 'magnesium-fluoride-film@qw', 'n-bk7', '550nm');
+    const { files } = start('air', 'magnesium-fluoride-film@qw', 'n-bk7', '550nm');
     expect(files).toContain('late-path.js');
     expect(files).not.toContain('late-own.js');
   });
 
   it('reads the part for typed media where one is typed in numbers', () => {
-    expect(filesRead('air', 'n=1.5', '550nm')).toContain('late-words.js');
+    expect(start('air', 'n=1.5', '550nm').files).toContain('late-words.js');
   });
 });
