@@ -12,7 +12,7 @@ const MAY_IMPORT: Readonly<Record<string, readonly string[]>> = {
   dispersion: ['units', 'num'],
   interface: ['units', 'num'],
   catalog: ['dispersion', 'units', 'num', 'interface'],
-  cite: ['catalog'],
+  cite: ['catalog', 'num'],
   medium: ['interface', 'catalog', 'dispersion', 'units', 'num'],
   stack: ['interface', 'units', 'num'],
   answer: ['cite', 'medium', 'stack', 'interface', 'catalog', 'dispersion', 'units', 'num'],

@@ -97,15 +97,24 @@ export function chooseFit(
     -(f.accuracy_n ?? Number.POSITIVE_INFINITY),
     f.grade === 'A' ? 2 : f.grade === 'B' ? 1 : 0,
   ];
-  const sorted = [...reaching].sort((a, b) => compareRanks(rank(b), rank(a)));
-  const best = sorted[0];
-  if (best) return { fit: best, inRange: true, others: sorted.slice(1) };
+  const [best, ...others] = bestFirst(reaching, rank);
+  if (best) return { fit: best, inRange: true, others };
   const distance = (f: Fit): number => {
     const l = fitWavelength_um(f, wave);
     return l < f.range_um[0] ? Math.log(f.range_um[0] / l) : Math.log(l / f.range_um[1]);
   };
-  const nearest = [...fits].sort((a, b) => distance(a) - distance(b) || compareRanks(rank(b), rank(a)))[0];
+  // Sorting keeps the order of equals.
+  const nearest = [...bestFirst(fits, rank)].sort((a, b) => distance(a) - distance(b))[0];
   return nearest ? { fit: nearest, inRange: false, others: [] } : undefined;
+}
+
+/** A rank may take a while to find: each is found once, and none where there is nothing to choose. */
+function bestFirst(fits: readonly Fit[], rank: (fit: Fit) => readonly number[]): readonly Fit[] {
+  if (fits.length < 2) return fits;
+  return fits
+    .map((fit) => ({ fit, rank: rank(fit) }))
+    .sort((a, b) => compareRanks(b.rank, a.rank))
+    .map(({ fit }) => fit);
 }
 
 function compareRanks(a: readonly number[], b: readonly number[]): number {

@@ -81,9 +81,8 @@ export function readCheckValues(folder?: string): string {
 function pathOf(name: string, folder: string | undefined): string {
   if (folder !== undefined) return join(folder, name);
   const here = import.meta.dirname;
-  const beside = join(here, name);
   const built = join(here, '..', '..', 'dist', name);
-  return !existsSync(beside) && existsSync(built) ? built : beside;
+  return here.endsWith('catalog') && existsSync(built) ? built : join(here, name);
 }
 
 const noFolder = (path: string): OwnProblem => ({

@@ -3,6 +3,7 @@
  * `I. H. Malitson, "Interspecimen comparison ...", J. Opt. Soc. Am. 55, 1205-1209 (1965), https://doi.org/10.1364/...`
  */
 import type { Source } from '../catalog/types.ts';
+import { isAscii } from '../num/ascii.ts';
 
 /** More authors than this become "et al.". */
 const MAX_AUTHORS = 4;
@@ -19,7 +20,12 @@ export function sourceText(source: Source): string {
   ];
   const line = parts.filter((s) => s !== undefined && s !== '').join(', ');
   // Whatever the record holds, a citation is one line.
-  return (line === '' ? source.id : line).replace(/\s+/g, ' ').trim();
+  return inOneLine(line === '' ? source.id : line);
+}
+
+function inOneLine(text: string): string {
+  const isPlain = isAscii(text) && !text.includes('  ');
+  return (isPlain ? text : text.replace(/\s+/g, ' ')).trim();
 }
 
 /** Year of issue, if the record has one. */

@@ -88,11 +88,15 @@ export function roundDecimal(d: Decimal, place: number): Decimal {
   }
   const drop = place - d.exponent;
   if (drop > d.digits.length) return { negative: false, digits: '0', exponent: place };
-  const kept = BigInt(d.digits.slice(0, d.digits.length - drop) || '0');
+  const kept = d.digits.slice(0, d.digits.length - drop) || '0';
   const up = (d.digits[d.digits.length - drop] ?? '0') >= '5';
-  const digits = String(up ? kept + 1n : kept);
+  const digits = up ? nextInteger(kept) : kept;
   return { negative: d.negative && digits !== '0', digits, exponent: place };
 }
+
+/** The integer above; exact in doubles up to fifteen digits. */
+const nextInteger = (digits: string): string =>
+  digits.length <= 15 ? String(Number(digits) + 1) : String(BigInt(digits) + 1n);
 
 /** Rounded to so many significant digits, also where rounding adds a digit (9.996 to three is 10.0). */
 export function roundToDigits(d: Decimal, significantDigits: number): Decimal {

@@ -124,9 +124,10 @@ function choosePrefix(d: Decimal, unit: DisplayUnit): SiPrefix {
  * a power of ten beside the prefix.
  */
 function largestPrefix(d: Decimal, unit: DisplayUnit): SiPrefix {
+  if (isZero(d) || unit.prefixes === undefined) return NO_PREFIX;
+  const place = leadingPlace(d);
   const allowed = prefixesOf(unit);
-  if (isZero(d)) return NO_PREFIX;
-  const fitting = allowed.filter((p) => p.power <= leadingPlace(d)).at(-1) ?? allowed[0] ?? NO_PREFIX;
-  const leading = leadingPlace(d) - fitting.power;
+  const fitting = allowed.findLast((p) => p.power <= place) ?? allowed[0] ?? NO_PREFIX;
+  const leading = place - fitting.power;
   return notationPower(leading, 0) === undefined ? fitting : NO_PREFIX;
 }
