@@ -21,6 +21,11 @@ export const LOG_OPTION_ROWS = {
     completes: 'file',
     excludes: TABLES,
     parse(text: string): string | Problem {
+      if (text === '-') {
+        const remedy =
+          'name a file; halfspace log last prints what is kept, write ./- for a file of that name';
+        return problem('not-a-choice', 'a logbook is a file, and - is standard output', remedy);
+      }
       return text === '' || text.includes('\0')
         ? problem('empty', 'the name is empty or holds a null character', 'write a path such as bench.jsonl')
         : text;

@@ -16,7 +16,10 @@ const DESCRIPTION = [
 
 const FILES: readonly (readonly [string, string])[] = [
   ['$XDG_CONFIG_HOME/halfspace/', 'settings'],
-  ['$XDG_STATE_HOME/halfspace/', 'the logbook'],
+  [
+    '$XDG_STATE_HOME/halfspace/',
+    'the logbook: a file of JSON lines that only grows. On a network file system let the programs of one machine write one logbook: from several machines at once, records can overwrite each other',
+  ],
 ];
 
 const STANDARDS =

@@ -174,6 +174,13 @@ describe('log export', () => {
   });
 });
 
+describe('--log-file', () => {
+  it('is a file: - is refused, and no file of that name is made', async () => {
+    const { status, err } = await run(['air', 'n=1.5', '633nm', '--log-file', '-']);
+    expect([status, err]).toEqual([2, expect.stringContaining('- is standard output')]);
+  });
+});
+
 describe('log rerun', () => {
   it('finds the same answer to the last bit, with the status 0', async () => {
     await keepAll();

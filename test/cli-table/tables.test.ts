@@ -66,5 +66,5 @@ describe('the table of commands', () => {
     for (const { name } of COMMANDS) {
       if (name !== 'help') expect((await loadCommand(name)).run, name).toBeTypeOf('function');
     }
-  });
+  }, 120_000);
 });
