@@ -55,7 +55,12 @@ export function answerQuestion(question: Question, sourceOf: SourceOf): Answer |
   const media = thermalSides(path, question, wave, sourceOf);
   const power = parts ? pathPower(parts, vacuumWavelength_m) : surfacePower;
   const spread = powerSpread(question, wave, path, media, surface, power);
-  const powers = { R: surface.R, T: surface.T, surface: parts ? null : first.wave };
+  const powers = {
+    R: surface.R,
+    T: surface.T,
+    surface: parts ? null : first.wave,
+    kappa2: first.wave.kappa2,
+  };
   const pulsed = question.pulseDuration_s !== undefined || question.beam !== undefined;
   const pulse = pulsed ? pulseAnswer(question, parts) : null;
   const fields = (): PathFields =>

@@ -47,11 +47,11 @@ export function energyParts(
   const I = meanIrradiance_W_per_m2(beam, from);
   const power_W = beam.kind === 'power' ? beam.power_W : null;
   const fields = I === null ? null : fieldsFor(I, scene);
-  const { R, T, surface } = powers;
+  const { R, T, kappa2 } = powers;
   const pressure =
-    I === null || T === null || !surface
+    I === null || T === null
       ? null
-      : radiationPressure_Pa(from.optics, into.optics, surface, R, T, angle_rad, I);
+      : radiationPressure_Pa(from.optics, into.optics, kappa2, R, T, angle_rad, I);
   const train = isWide(beam) ? beam.pulse : undefined;
   const pulse =
     train && isWide(beam) ? pulsedBeam(train, beam, power_W, scene, vacuumWavelength_m, stretched) : null;

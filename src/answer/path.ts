@@ -57,6 +57,9 @@ export function readPath(
       'start the path in a transparent medium',
     );
   }
+  const design = designOf(question, sourceOf);
+  if (isRefusal(design)) return design;
+  const now: Design = { wave, n0: from.optics.n.re };
   const layers: PathLayer[] = [];
   // Groups that repeat share their layers: each is worked out once.
   const known = new Map<Layer, PathLayer>();
@@ -68,7 +71,7 @@ export function readPath(
     }
     const side = mediumSide(layer.medium, wave, question.conditions, question.extrapolate, sourceOf);
     if (isRefusal(side)) return side;
-    const thickness_m = thicknessOf(layer, side, question, from, wave, sourceOf);
+    const thickness_m = thicknessOf(layer, side, question, design, now, sourceOf);
     if (typeof thickness_m !== 'number') return thickness_m;
     const read = { side, thickness_m };
     known.set(layer, read);
@@ -77,32 +80,37 @@ export function readPath(
   return { from, layers, into };
 }
 
+/** The wave for which parts of a wave are meant, and the index of the first medium there. */
+interface Design {
+  readonly wave: FitWave;
+  readonly n0: number;
+}
+
+function designOf(question: Question, sourceOf: SourceOf): Design | Refusal | undefined {
+  const { designWave, conditions, extrapolate, layers } = question;
+  if (!designWave || layers.every((layer) => layer.thickness.kind === 'length')) return undefined;
+  const wave = bothReferences(designWave);
+  if (isRefusal(wave)) return wave;
+  const before = mediumSide(question.from, wave, conditions, extrapolate, sourceOf);
+  return isRefusal(before) ? before : { wave, n0: before.optics.n.re };
+}
+
 /** A part of a wave is meant in the layer, along its normal component, at the design wave: waves lambda/(n cos inside). */
 function thicknessOf(
   layer: Layer,
   side: MediumSide,
   question: Question,
-  from: MediumSide,
-  wave: FitWave,
+  design: Design | undefined,
+  now: Design,
   sourceOf: SourceOf,
 ): number | Refusal {
   const { thickness } = layer;
   if (thickness.kind === 'length') return thickness.thickness_m;
-  let n = side.optics.n.re;
-  let n0 = from.optics.n.re;
-  let lambda_um = wave.vacuum_um;
-  if (question.designWave) {
-    const design = bothReferences(question.designWave);
-    if (isRefusal(design)) return design;
-    const { conditions, extrapolate } = question;
-    const there = mediumSide(layer.medium, design, conditions, extrapolate, sourceOf);
-    if (isRefusal(there)) return there;
-    const before = mediumSide(question.from, design, conditions, extrapolate, sourceOf);
-    if (isRefusal(before)) return before;
-    n = there.optics.n.re;
-    n0 = before.optics.n.re;
-    lambda_um = design.vacuum_um;
-  }
+  const { wave, n0 } = design ?? now;
+  const { conditions, extrapolate } = question;
+  const there = design ? mediumSide(layer.medium, wave, conditions, extrapolate, sourceOf) : side;
+  if (isRefusal(there)) return there;
+  const n = there.optics.n.re;
   const normal2 = n * n - (n0 * Math.sin(question.incidenceAngle_rad)) ** 2;
   if (!(normal2 > 0)) {
     return refuse(
@@ -112,7 +120,7 @@ function thicknessOf(
       'give its thickness as a length',
     );
   }
-  return (thickness.waves * lambda_um * 1e-6) / Math.sqrt(normal2);
+  return (thickness.waves * wave.vacuum_um * 1e-6) / Math.sqrt(normal2);
 }
 
 const substance = (side: MediumSide): Substance => ({ eps: side.optics.eps, mu: side.optics.mu });

@@ -7,6 +7,7 @@ import {
   type WaveEnergy,
 } from '../interface/energy.ts';
 import type { FresnelResult } from '../interface/fresnel.ts';
+import type { Complex } from '../num/complex.ts';
 import type { EnergyAnswer, FieldsAnswer } from './beam-answer.ts';
 import type { MediumSide } from './medium-side.ts';
 import type { PathFields } from './path-fields.ts';
@@ -18,6 +19,8 @@ export interface PowerFractions {
   readonly T: number | null;
   /** Fields just beyond the surface follow from its amplitudes; behind a path of layers only powers are given. */
   readonly surface: FresnelResult | null;
+  /** Normal component of the wave vector beyond, over k0. */
+  readonly kappa2: Complex;
 }
 
 /** What a beam meets: the media, what they do with its power, the fields relative to the incident one. */

@@ -95,14 +95,15 @@ export function meanEnergy(a: WaveEnergy, b: WaveEnergy): WaveEnergy {
 }
 
 /**
- * Normal component of the radiation pressure on the interface, Minkowski bookkeeping (momentum n h nu/c per photon):
- * p = (I/c) cos1 [n1 cos1 (1 + R) - n2 cos2 T]; negative pulls outward. Null into an absorbing medium at oblique incidence.
+ * Normal component of the radiation pressure on the interface, or on all that stands between the two media, Minkowski bookkeeping
+ * (momentum n h nu/c per photon): p = (I/c) cos1 [n1 cos1 (1 + R) - n2 cos2 T], n2 cos2 = Re kappa2; negative pulls outward. Null
+ * into an absorbing medium at oblique incidence. Of a body in vacuum: (I/c) cos^2 (1 + R - T), no matter what convention.
  * The split of momentum between field and matter is a convention (Pfeifer et al., Rev. Mod. Phys. 79, 1197 (2007)).
  */
 export function radiationPressure_Pa(
   from: Optics,
   into: Optics,
-  wave: FresnelResult,
+  kappa2: Complex,
   R: number,
   T: number,
   incidenceAngle_rad: number,
@@ -110,7 +111,7 @@ export function radiationPressure_Pa(
 ): number | null {
   if (into.n.im > ABSORBING * Math.abs(into.n.re) && incidenceAngle_rad > 0) return null;
   const cos1 = Math.cos(incidenceAngle_rad);
-  const carried = T === 0 ? 0 : wave.kappa2.re * T;
+  const carried = T === 0 ? 0 : kappa2.re * T;
   return (irradiance_W_per_m2 / c) * cos1 * (from.n.re * cos1 * (1 + R) - carried);
 }
 

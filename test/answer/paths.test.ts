@@ -242,3 +242,32 @@ describe('many layers', () => {
     expect(Math.log(sets.R_uncertainty! / single.R_uncertainty!)).toBeLessThan(1.5);
   });
 });
+
+describe('radiation pressure on a path', () => {
+  const c = 299_792_458;
+  const pressure = (layers: readonly Layer[], deg: number, into = index(1)) => {
+    const a = ask(index(1), into, vacuumWave(1e-6), {
+      layers,
+      incidenceAngle_rad: deg * DEGREE,
+      beam: { kind: 'irradiance', irradiance_W_per_m2: c },
+    });
+    return { ...a.interface, pressure_Pa: a.energy?.radiationPressure_Pa };
+  };
+
+  it('of a body in vacuum is (I/c) cos^2 (1 + R - T), coherent or not', () => {
+    for (const layers of [
+      [film(1.5, 0, 1e-7)],
+      [film(1.5, 1e-4, 5e-3)],
+      [quarter(2.1), film(0.2, 3, 2e-8)],
+    ]) {
+      for (const deg of [0, 40]) {
+        const { R, T, pressure_Pa } = pressure(layers, deg);
+        expect(pressure_Pa).toBeCloseTo(Math.cos(deg * DEGREE) ** 2 * (1 + R - T!), 13);
+      }
+    }
+  });
+
+  it('of an ideal quarter wave pulls by the whole step of momentum: 1 - n', () => {
+    expect(pressure([quarter(Math.sqrt(1.5))], 0, index(1.5)).pressure_Pa).toBeCloseTo(1 - 1.5, 12);
+  });
+});

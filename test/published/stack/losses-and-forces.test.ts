@@ -1,13 +1,20 @@
 /** Losses, forces, polarisation, uncertainty: published values. Each row carries its source; see `check-rows.ts`. */
-import { arg, div } from '../../../src/num/complex.ts';
+
+import { radiationPressure_Pa } from '../../../src/interface/energy.ts';
+import { opticsFromIndex } from '../../../src/interface/optics.ts';
+import { arg, div, ONE } from '../../../src/num/complex.ts';
 import { quarterWaveFilmReflectance } from '../../../src/stack/coating.ts';
 import { coherentStack } from '../../../src/stack/coherent-stack.ts';
 import { ghostRipple } from '../../../src/stack/etalon.ts';
 import { layerFromIndex, substanceFromIndex } from '../../../src/stack/layered-path.ts';
 import { mixedStack } from '../../../src/stack/mixed-stack.ts';
-import { bodyForce_N, bodyPressure } from '../../../src/stack/radiation-pressure.ts';
 import { insertionLoss_dB } from '../../../src/stack/window.ts';
 import { checkRows, row } from './check-rows.ts';
+
+const VACUUM = opticsFromIndex(ONE, ONE);
+/** On a body in vacuum that lets nothing through; of a beam of one square metre it is the force in newton. */
+const pressureOnBlack_Pa = (irradiance_W_per_m2: number, R: number): number =>
+  radiationPressure_Pa(VACUUM, VACUUM, ONE, R, 0, 0, irradiance_W_per_m2) ?? Number.NaN;
 
 const deg = Math.PI / 180;
 const air = substanceFromIndex(1);
@@ -97,7 +104,7 @@ checkRows('Losses, forces, polarisation, uncertainty', [
     source: 'solar constant 1361 W/m^2 (4.54 uPa)',
     kind: 'published',
     fromMemory: true,
-    got: ({ I_W_m2, R }) => bodyPressure(I_W_m2, 0, R, 0).normal_Pa * 1e6,
+    got: ({ I_W_m2, R }) => pressureOnBlack_Pa(I_W_m2, R) * 1e6,
   }),
   row({
     id: 'rp-1370',
@@ -110,7 +117,7 @@ checkRows('Losses, forces, polarisation, uncertainty', [
     source: 'encyclopaedia article',
     kind: 'published',
     fromMemory: false,
-    got: ({ I_W_m2, R }) => bodyPressure(I_W_m2, 0, R, 0).normal_Pa * 1e6,
+    got: ({ I_W_m2, R }) => pressureOnBlack_Pa(I_W_m2, R) * 1e6,
   }),
   row({
     id: 'rp-1400',
@@ -123,7 +130,7 @@ checkRows('Losses, forces, polarisation, uncertainty', [
     source: 'Halliday & Resnick problem, 1.4 kW/m^2',
     kind: 'published',
     fromMemory: false,
-    got: ({ I_W_m2, R }) => bodyPressure(I_W_m2, 0, R, 0).normal_Pa * 1e6,
+    got: ({ I_W_m2, R }) => pressureOnBlack_Pa(I_W_m2, R) * 1e6,
   }),
   row({
     id: 'rp-1W',
@@ -136,7 +143,7 @@ checkRows('Losses, forces, polarisation, uncertainty', [
     source: 'common practice (3.3 nN/W)',
     kind: 'exact',
     fromMemory: true,
-    got: ({ P_W, R }) => bodyForce_N(P_W, 0, R, 0) * 1e9,
+    got: ({ P_W, R }) => pressureOnBlack_Pa(P_W, R) * 1e9,
   }),
   row({
     id: 'pol-45',
