@@ -17,6 +17,14 @@ const WORDING: Readonly<Record<CautionCode, Wording>> = {
     (d, s) =>
       `${s}: outside the fit's range (${d['range']}): extrapolated at your request, no digit is vouched for`,
   ],
+  'source-erratum': [
+    'caution',
+    (d, s) => `${s}: its source has an erratum (${d['notice']}); see whether it concerns this number`,
+  ],
+  'source-retracted': [
+    'caution',
+    (d, s) => `${s}: its source was retracted (${d['notice']}); do not rely on this number`,
+  ],
   'range-edge': ['note', (d, s) => `${s}: at the very edge of the fit's range (${d['range']})`],
   'outside-confirmed-range': [
     'note',

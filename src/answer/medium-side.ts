@@ -117,8 +117,18 @@ function catalogueSide(medium: MediumAtWave, wave: FitWave, sourceOf: SourceOf):
       own: material.own === true,
       fit: fitAnswer(medium, sourceOf),
     },
-    notes: medium.notes,
+    notes: [...medium.notes, ...noticesOf(sourceOf(fit.source))],
   };
+}
+
+/** What became of the work behind a fit after it was published. */
+function noticesOf(source: Source | undefined): readonly CautionNote[] {
+  return [
+    ...(source?.erratum ? [{ code: 'source-erratum' as const, details: { notice: source.erratum } }] : []),
+    ...(source?.retraction
+      ? [{ code: 'source-retracted' as const, details: { notice: source.retraction } }]
+      : []),
+  ];
 }
 
 function fitAnswer({ fit, inRange, secondOpinion }: MediumAtWave, sourceOf: SourceOf): FitAnswer {

@@ -222,6 +222,8 @@ const shapes = once(() => {
       URL: text('^https?://\\S+$', 'an http or https address'),
       accessed: date,
       note: text(),
+      erratum: text(),
+      retraction: text(),
     },
   );
 

@@ -167,4 +167,8 @@ export interface Source {
   readonly URL?: string;
   readonly accessed?: { readonly 'date-parts': readonly (readonly number[])[] };
   readonly note?: string;
+  /** Where the correction of the work was published, and what it changes. */
+  readonly erratum?: string;
+  /** Where and why the work was withdrawn. */
+  readonly retraction?: string;
 }

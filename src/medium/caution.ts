@@ -15,6 +15,8 @@ export type CautionCode =
   | 'hazardous-material'
   | 'recalled-data'
   | 'accuracy-not-stated'
+  | 'source-erratum'
+  | 'source-retracted'
   | 'sources-disagree'
   | 'contradicted'
   | 'own-entry'

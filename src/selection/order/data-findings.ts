@@ -12,6 +12,8 @@ const ABOUT_DATA: ReadonlySet<string> = new Set([
   'film-process',
   'recalled-data',
   'accuracy-not-stated',
+  'source-erratum',
+  'source-retracted',
   'sources-disagree',
   'contradicted',
   'own-entry',
