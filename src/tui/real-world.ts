@@ -47,11 +47,15 @@ export function realWorld(
   const charts = new Charts(sourceOf);
   let find: SearchEntries = (text) => plainSearch(catalogue.entries(), text);
   let found = new Map<string, readonly CatalogueEntry[]>();
-  let all = catalogue.entries();
+  // Read when first asked for: the first frame shows none.
+  let all: readonly CatalogueEntry[] | undefined;
   return {
     answer: (question) => answerOrReport(question, sourceOf),
     search: (text) => {
-      if (text === '') return all;
+      if (text === '') {
+        all ??= catalogue.entries();
+        return all;
+      }
       const known = found.get(text);
       if (known) return known;
       const entries = find(text);
@@ -84,7 +88,7 @@ export function realWorld(
       find = (text) => search(text).map((hit) => hit.entry);
       found = new Map();
       // Another list, so that whoever keeps hits sees that they are to be made anew.
-      all = [...all];
+      all = [...catalogue.entries()];
     },
     stop: () => {
       tables.stop();

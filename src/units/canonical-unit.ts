@@ -5,7 +5,8 @@
 import { isLetter } from '../num/ascii.ts';
 
 export function canonicalUnit(text: string): string {
-  return isWord(text) ? text : inOneSpelling(text);
+  const trimmed = text.trim();
+  return isWord(trimmed) ? trimmed : inOneSpelling(trimmed);
 }
 
 /** Letters from a to z alone are as they should be; most units are. */
@@ -16,7 +17,6 @@ function isWord(text: string): boolean {
 
 function inOneSpelling(text: string): string {
   return text
-    .trim()
     .replaceAll('º', '°')
     .normalize('NFKC')
     .replaceAll('μ', 'u')
