@@ -6,7 +6,7 @@
 import { type Decimal, isZero, plainDecimal } from '../units/decimal.ts';
 import { scanNumber } from '../units/parse-number.ts';
 import { isProblem, type Problem, problem } from '../units/problem.ts';
-import { quoteInput } from '../units/quote-input.ts';
+import { printedInput, quoteInput } from '../units/quote-input.ts';
 
 export interface SweepRange {
   /** What is swept, as typed. */
@@ -40,16 +40,17 @@ export function parseSweep(text: string): SweepRange | Problem {
     return problem(
       'empty',
       message,
-      `write it behind a colon: ${name}=${quoteInput(range).slice(1, -1)}:STEP`,
+      `write it behind a colon: ${printedInput(name)}=${printedInput(range)}:STEP`,
     );
   }
-  const numbers = [low, rest.slice(0, colon), rest.slice(colon + 1)].map((part) => scanNumber(part));
+  const parts = [low, rest.slice(0, colon), rest.slice(colon + 1)];
+  const numbers = parts.map((part) => scanNumber(part));
   const bad = numbers.find(isProblem);
   if (bad) return { ...bad, message: `${quoteInput(text)}: ${bad.message}` };
   const [from, to, step] = numbers as { readonly decimal: Decimal; readonly rest: string }[];
-  return from && to && step
-    ? countPoints(name, text, from, to, step)
-    : problem('empty', 'no range', EXAMPLES);
+  if (!from || !to || !step) return problem('empty', 'no range', EXAMPLES);
+  const [lower, upper, by] = parts.map((part) => part.trim());
+  return countPoints(name, text, from, to, step, `${name}=${upper}..${lower}:${by}`);
 }
 
 interface Typed {
@@ -58,13 +59,20 @@ interface Typed {
   readonly rest: string;
 }
 
-function countPoints(name: string, text: string, from: Typed, to: Typed, step: Typed): SweepRange | Problem {
+function countPoints(
+  name: string,
+  text: string,
+  from: Typed,
+  to: Typed,
+  step: Typed,
+  turned: string,
+): SweepRange | Problem {
   const units = [...new Set([from, to, step].map(({ rest }) => rest.trim()).filter((unit) => unit !== ''))];
   // A step of temperature may be in kelvin.
   const unit =
     units.length === 2 && units.includes('K') && units.some(isCelsius) ? units.find(isCelsius) : units[0];
   if (units.length > 1 && !(isCelsius(unit ?? '') && step.rest.trim() === 'K')) {
-    const message = `${quoteInput(text)} has the units ${units.join(' and ')}`;
+    const message = `${quoteInput(text)} has the units ${units.map(printedInput).join(' and ')}`;
     return problem('unit-ambiguous', message, 'give both ends and the step in one unit');
   }
   const exponent = Math.min(from.decimal.exponent, to.decimal.exponent, step.decimal.exponent);
@@ -75,17 +83,13 @@ function countPoints(name: string, text: string, from: Typed, to: Typed, step: T
   const width = scaled(step.decimal, exponent);
   if (width <= 0n) {
     const zero = isZero(step.decimal) ? 'is 0' : 'is below 0';
-    const turned = zero === 'is 0' ? '' : ', the lower end first';
-    return problem('out-of-range', `the step of ${quoteInput(text)} ${zero}`, `give a step above 0${turned}`);
+    const order = zero === 'is 0' ? '' : ', the lower end first';
+    return problem('out-of-range', `the step of ${quoteInput(text)} ${zero}`, `give a step above 0${order}`);
   }
   if (first > last) {
     const message = `${quoteInput(text)} runs backwards`;
-    const right = `${plainDecimal(to.decimal)}..${plainDecimal(from.decimal)}${unit ?? ''}`;
-    return problem(
-      'out-of-range',
-      message,
-      `write the lower end first: ${name}=${right}:${plainDecimal(step.decimal)}${unit ?? ''}`,
-    );
+    const example = printedInput(turned) === turned ? `: ${turned}` : '';
+    return problem('out-of-range', message, `write the lower end first${example}`);
   }
   const points = Number((last - first) / width) + 1;
   if (points > MOST_POINTS) return tooMany(text, points, name);
@@ -98,7 +102,7 @@ export function tooMany(text: string, points: number, name: string): Problem {
   return problem(
     'out-of-range',
     message,
-    `take a larger step of the ${name}, or put the rows into halfspace stream`,
+    `take a larger step of the ${printedInput(name)}, or put the rows into halfspace stream`,
   );
 }
 

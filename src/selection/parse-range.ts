@@ -6,7 +6,7 @@ import { airToVacuum_um } from '../dispersion/air-index.ts';
 import { parseNumber } from '../units/parse-number.ts';
 import { parseWave } from '../units/parse-wave.ts';
 import { isProblem, type Problem, problem } from '../units/problem.ts';
-import { quoteInput } from '../units/quote-input.ts';
+import { printedInput, quoteInput } from '../units/quote-input.ts';
 import type { ValueRange } from './value-range.ts';
 
 export interface RangeSpec {
@@ -37,7 +37,7 @@ export function parseRange(text: string, spec: RangeSpec): ValueRange | Problem 
     return problem(
       'out-of-range',
       `${quoteInput(trimmed)} runs backwards`,
-      `write the lower end first: ${high}..${low}`,
+      `write the lower end first: ${printedInput(high)}..${printedInput(low)}`,
     );
   }
   return { ...(from !== undefined && { from }), ...(to !== undefined && { to }) };

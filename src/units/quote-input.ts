@@ -3,8 +3,11 @@
  * overrides and unpaired surrogates become `?`, long text is cut.
  */
 const LONGEST = 40;
-export function quoteInput(text: string): string {
+export function printedInput(text: string): string {
   const clean = text.slice(0, 4 * LONGEST).replace(/[\p{Cc}\p{Cf}\p{Cs}\p{Co}\p{Zl}\p{Zp}]/gu, '?');
   const characters = [...clean];
-  return characters.length > LONGEST ? `"${characters.slice(0, LONGEST - 3).join('')}..."` : `"${clean}"`;
+  return characters.length > LONGEST ? `${characters.slice(0, LONGEST - 3).join('')}...` : clean;
 }
+
+/** The same in quotes. */
+export const quoteInput = (text: string): string => `"${printedInput(text)}"`;

@@ -54,6 +54,15 @@ describe('numbers as bytes', () => {
 });
 
 describe('a sweep', () => {
+  it.each([
+    ['wave=700nm..400nm:5nm', 'write the lower end first: wave=400nm..700nm:5nm'],
+    ['temperature=5.000000000000000000e-324..-1:1.000000', 'write the lower end first'],
+    ['wa\nve=2..1:1', 'write the lower end first'],
+    ['wa\x1b[2Jve=1..2', 'write it behind a colon: wa?[2Jve=1..2:STEP'],
+  ])('says of %j in one line what would be right', (text, remedy) => {
+    expect(parseSweep(text)).toMatchObject({ remedy });
+  });
+
   it('counts and writes its points in decimal', () => {
     const sweep = parseSweep('wave=0.4um..0.7um:0.1um');
     if (isProblem(sweep)) throw new Error(sweep.message);
