@@ -5,7 +5,8 @@
  * Promises: one event per key, however keys are glued together or sequences torn apart; a bracketed paste is one event
  * and never a key; replies and reports of the terminal (colours, attributes, focus, mouse, positions) give no event,
  * and no part of a sequence is ever taken for text.
- * Special cases: ESC and a key in one piece are Alt and that key, as terminals send it; ESC at the end of one piece and
+ * Special cases: ESC and a key in one piece are Alt and that key, as terminals send it, but Ctrl-C and Ctrl-Z act whatever a
+ * slow link or a busy program has glued to them: they are Escape and that key; ESC at the end of one piece and
  * ESC at the start of the next are two key presses; a sequence that never ends is dropped, a paste that never ends is
  * handed over as far as it came; CR LF is one Enter.
  */
@@ -28,6 +29,8 @@ const MAX_SEQUENCE_LENGTH = 64;
 const MAX_REPLY_LENGTH = 4096;
 
 const ESC = '\x1b';
+const CTRL_C = '\x03';
+const CTRL_Z = '\x1a';
 const PASTE_START = '\x1b[200~';
 const PASTE_END = '\x1b[201~';
 const CONTROL_SEQUENCE = /^\x1b\[([0-?]*)([ -/]*)([@-~])/;
@@ -126,6 +129,9 @@ function scan(text: string): Scan {
     case 'P':
     case '_':
       return scanReply(text);
+    case CTRL_C:
+    case CTRL_Z:
+      return { length: 1, key: namedKey('escape') };
     default:
       return withAlt(scanCharacter(text.slice(1)));
   }

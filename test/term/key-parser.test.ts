@@ -174,6 +174,12 @@ describe('glued keys', () => {
     expect(events(bytes)).toEqual(chords);
   });
 
+  it('let Ctrl-C and Ctrl-Z act behind an Escape, which nobody means as one key', () => {
+    expect(events('\x1b\x03')).toEqual(['escape', 'ctrl+c']);
+    expect(events('ab\x1b\x1b[A\x1b\x03')).toEqual(['a', 'b', 'alt+up', 'escape', 'ctrl+c']);
+    expect(events('\x1b', '\x1a')).toEqual(['escape', 'ctrl+z']);
+  });
+
   it('are one event each, also two hundred of them', () => {
     const text = 'the quick brown fox '.repeat(10);
     expect(events(text).join('')).toBe(text.replaceAll(' ', 'space'));
