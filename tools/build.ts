@@ -8,6 +8,7 @@
  *
  * The build fails if the one-shot bundle contains a package that must stay out of it.
  */
+import { execFileSync } from 'node:child_process';
 import { chmodSync, copyFileSync, mkdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
 import { fileURLToPath } from 'node:url';
@@ -215,6 +216,11 @@ export async function buildAll(): Promise<void> {
   for (const [name, line] of ALONE) makeCache(dist, name, [line]);
   for (const { name, lines } of met.keys()) makeCache(dist, name, lines);
   await makeScreenCaches(dist, SCREEN, SCREEN_KEYS);
+  // Made by the program from its own table of options, and installed with it.
+  writeFileSync(
+    path.join(dist, 'halfspace.1'),
+    execFileSync(process.execPath, [path.join(dist, 'halfspace.js'), 'man']),
+  );
   const inputsOf = (...metas: (Metafile | undefined)[]): string[] => [
     ...new Set(metas.flatMap((meta) => Object.keys(meta?.inputs ?? {}))),
   ];

@@ -15,6 +15,7 @@ const DOCUMENTS = [
   'README.md',
   'package.json',
   'dist/THIRD-PARTY.txt', // licences of what is bundled
+  'dist/halfspace.1', // the manual page
   'dist/package.json', // makes the folder CommonJS
   'catalog/README.md', // how to write an entry of one's own, which README.md refers to
   'catalog/schema/own-material.schema.json',
