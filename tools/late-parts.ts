@@ -48,6 +48,7 @@ export const LATE_PARTS: readonly LatePart[] = [
     name: 'late-words',
     modules: [
       'batch/sweep-range.ts',
+      'cli/misplaced-operand.ts',
       'cli/render/csv.ts',
       'cli/render/markdown.ts',
       'cli/render/plain.ts',

@@ -11,12 +11,23 @@ import { parseWave } from '../units/parse-wave.ts';
 import { isProblem } from '../units/problem.ts';
 import { quoteInput } from '../units/quote-input.ts';
 import { findMedium, suggestMedia } from './find-medium.ts';
+import { nameOptions } from './misplaced-operand.ts';
 import type { OptionValues } from './options.ts';
 import { readBeam } from './read-beam.ts';
 import { isGroupMark, isUnread, readLayers } from './read-path.ts';
 
 /** `operands`: FROM [LAYER@THICKNESS ...] INTO WAVE. */
 export function readQuestion(
+  operands: readonly string[],
+  options: OptionValues,
+  catalogue: IndexedCatalogue,
+): Question | Refusal | Promise<Refusal> {
+  const question = readOperands(operands, options, catalogue);
+  if (question instanceof Promise) return question.then((refusal) => nameOptions(refusal, operands));
+  return isRefusal(question) ? nameOptions(question, operands) : question;
+}
+
+function readOperands(
   operands: readonly string[],
   options: OptionValues,
   catalogue: IndexedCatalogue,
