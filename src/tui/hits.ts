@@ -88,6 +88,12 @@ export function conditionsIn(text: string, question: Question, world: World): Co
   return conditionedHits(text, question, world);
 }
 
+const MOST_RECENT = 12;
+
+/** The keys of media used, with one used now. */
+export const latestFirst = (recent: readonly string[], key: string): readonly string[] =>
+  [key, ...recent.filter((other) => other !== key)].slice(0, MOST_RECENT);
+
 function recentFirst(
   entries: readonly CatalogueEntry[],
   recent: readonly string[],

@@ -33,7 +33,7 @@ describe('halfspace match', () => {
     const { out } = await run(line('match fused-silica --at 633nm --mix --class liquid'));
     const flat = out.replace(/\s+/g, ' ');
     expect(flat).toContain('Estimate: shares by volume before mixing');
-    expect(flat).toContain('try a little first');
+    expect(flat).toContain('recalled from memory and not read in a source: try a little first');
   });
 
   it.each([

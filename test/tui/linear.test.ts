@@ -69,6 +69,27 @@ it('knows its words, and says so of others', () => {
   expect(talk('quit').isOver).toBe(true);
 });
 
+describe('the pages in words', () => {
+  it('coat: bare surface, films with names before their numbers', () => {
+    const { said } = talk('coat');
+    expect(said).toMatch(/\nBare surface: R 3\.46 %\n/);
+    expect(said).toMatch(/\nfilm magnesium-fluoride-film, n 1\.379\(10\), nm 114\.7, R % 1\.74, /);
+  });
+
+  it('order: every remark one sentence with its level', () => {
+    const { lines } = talk('order');
+    expect(lines[0]).toMatch(/^Order check: Air to Fused silica/);
+    expect(lines.filter((l) => /^(look|fine|stop), [a-z ]+: /.test(l)).length).toBeGreaterThan(6);
+  });
+
+  it('compare: each value beside the name of its medium, the best named', () => {
+    expect(talk('compare').said).toContain('nothing to compare yet');
+    const { said } = talk('into sapphire', 'into n-bk7', 'compare');
+    expect(said).toMatch(/\nR, one surface: n-bk7 4\.19\d* %, the best; sapphire:o 7\.6\d* %\n/);
+    expect(said).toMatch(/\nKnoop, hardness: n-bk7 610; sapphire:o 1370, the best\n/);
+  });
+});
+
 describe('what is said', () => {
   it('holds no box, braille or block character and no escape sequence', () => {
     const { said } = talk(
@@ -77,6 +98,8 @@ describe('what is said', () => {
       'second',
       'sources',
       'cautions',
+      'coat',
+      'order',
       'help',
       'list',
       'into si',

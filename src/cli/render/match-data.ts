@@ -1,5 +1,6 @@
 /** Matches and mixtures for programs: JSON and CSV, SI units, full precision. */
 import type { Match, MatchReport } from '../../selection/match-report.ts';
+import { MISCIBILITY_BASIS } from '../../selection/miscibility.ts';
 import type { Constituent } from '../../selection/mixture-report.ts';
 import { UNDECIDED_WORDS } from '../../selection/undecided.ts';
 import { csvTable } from './csv-table.ts';
@@ -33,8 +34,8 @@ export function matchJson(report: MatchReport, head: DocumentHead, ascii: boolea
       mixtures: mixtures && {
         rule: 'Lorentz-Lorenz, volume fractions before mixing',
         estimate: true,
-        caution:
-          'the rule may miss n by several 1e-3; miscibility is from charts of common solvents and must be tried',
+        miscibilityBasis: MISCIBILITY_BASIS,
+        caution: 'the rule may miss n by several 1e-3; whether the two mix must be tried',
         possible: mixtures.possible,
         notKnownToMix: mixtures.notKnownToMix,
         targetOutOfReach: mixtures.outOfReach,

@@ -8,6 +8,7 @@ import { conditionsText } from '../../present/source-lines.ts';
 import { conditionWords, waveWords } from '../../selection/condition-words.ts';
 import type { Criteria } from '../../selection/criteria.ts';
 import type { Match, MatchReport } from '../../selection/match-report.ts';
+import { MISCIBILITY_BASIS } from '../../selection/miscibility.ts';
 import type { MixtureReport } from '../../selection/mixture-report.ts';
 import { UNDECIDED_WORDS } from '../../selection/undecided.ts';
 import { type Column, columns } from '../../term/columns.ts';
@@ -162,7 +163,7 @@ function mixtureLines(report: MixtureReport, style: NumberStyle): readonly strin
     ...columns(heads, rows, { ascii: style.ascii, indent: 0 }),
     '',
     ...paragraph(
-      `Estimate: shares by volume before mixing, rule of Lorentz and Lorenz; it may miss n by several 1e-3, so adjust while measuring. Whether the two mix is from charts of common solvents: try a little first, mind heat and vapour. ${mixtures.length} of ${possible} mixtures, the least touchy first.${left}`,
+      `Estimate: shares by volume before mixing, rule of Lorentz and Lorenz; it may miss n by several 1e-3, so adjust while measuring. Whether the two mix is ${MISCIBILITY_BASIS}: try a little first, mind heat and vapour. ${mixtures.length} of ${possible} mixtures, the least touchy first.${left}`,
     ),
     ...paragraph(`Marks: ${legendOf(marks)}.`),
   ];

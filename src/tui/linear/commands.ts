@@ -8,10 +8,12 @@ import {
   curvesSpoken,
   fieldLines,
   mediumLines,
+  pageWords,
   sourcesSpoken,
   summaryLines,
   surfaceLines,
 } from './linear-lines.ts';
+import { coatWords, compareWords, orderWords } from './page-words.ts';
 
 export interface Command {
   readonly words: readonly string[];
@@ -70,6 +72,21 @@ export const COMMANDS: readonly Command[] = [
     words: ['curves'],
     help: 'reflectance over the angle and over the wave, as sentences and tables',
     run: (state, world) => ({ state, lines: curvesSpoken(state, world) }),
+  },
+  {
+    words: ['coat', 'F'],
+    help: 'films and mirrors for these two media',
+    run: (state, world) => ({ state, lines: pageWords(coatWords, state, world) }),
+  },
+  {
+    words: ['order', 'O'],
+    help: 'what to settle before this part is ordered',
+    run: (state, world) => ({ state, lines: pageWords(orderWords, state, world) }),
+  },
+  {
+    words: ['compare', 'V'],
+    help: 'the second medium versus the media chosen last',
+    run: (state, world) => ({ state, lines: pageWords(compareWords, state, world) }),
   },
   {
     words: ['log'],

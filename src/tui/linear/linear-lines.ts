@@ -115,6 +115,20 @@ export function curvesSpoken(state: State, world: World): readonly string[] {
   );
 }
 
+/** A page of the picture in words. */
+export function pageWords(
+  words: (state: State, style: NumberStyle, world: World) => readonly string[],
+  state: State,
+  world: World,
+): readonly string[] {
+  const lines = words(state, styleOf(state), world).filter((text) => text.trim() !== '');
+  // An arrow is a sign to the eye alone.
+  return spoken(
+    state,
+    lines.map((text) => text.trim().replaceAll(' → ', ' to ')),
+  );
+}
+
 function withAnswer(
   state: State,
   make: (answer: Answer, style: NumberStyle) => readonly string[],

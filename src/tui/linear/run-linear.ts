@@ -3,10 +3,12 @@
  * placed and no mode is switched, so a screen reader reads everything once and in order.
  */
 import { createInterface } from 'node:readline';
+import type { Question } from '../../answer/question.ts';
 import { isRefusal, type Refusal } from '../../medium/refusal.ts';
 import type { Confirmed } from '../../record/logbook-file.ts';
 import type { LogRecord } from '../../record/record.ts';
 import { recordText } from '../../record/record-text.ts';
+import { designCoatings } from '../coating-designs.ts';
 import { firstState } from '../first-state.ts';
 import { bindKeys } from '../keys/bindings.ts';
 import { keptText, Logbook } from '../logbook.ts';
@@ -22,14 +24,17 @@ const SIZE = { columns: 80, rows: 24 } as const;
 
 export async function runLinear(start: Start): Promise<number> {
   const logbook = new Logbook(start);
-  const world = realWorld(
-    start.host.catalogue(),
+  const catalogue = start.host.catalogue();
+  const real = realWorld(
+    catalogue,
     bindKeys(start.settings.keys).bindings,
     start.host.readLayers,
     (question, answer) => logbook.record(question, answer),
     () => {},
   );
-  await world.loadSearch();
+  // Nothing is drawn meanwhile: a word waits for its coatings.
+  const world = { ...real, coatings: (question: Question) => designCoatings(question, catalogue) };
+  await real.loadSearch();
   const first = firstState(start, SIZE, world, []);
   const write = (text: string): void => void process.stdout.write(text);
   const kept = new KeptSettings(

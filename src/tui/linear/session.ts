@@ -7,7 +7,7 @@ import type { LogRecord } from '../../record/record.ts';
 import { isProblem, problemText } from '../../units/problem.ts';
 import type { Field } from '../fields/field.ts';
 import { type Side, setMedium } from '../fields/medium-fields.ts';
-import { type Hit, hitsFor, mediumOfHit, whyNoHit } from '../hits.ts';
+import { type Hit, hitsFor, latestFirst, mediumOfHit, whyNoHit } from '../hits.ts';
 import { askAnew, type State } from '../state.ts';
 import type { World } from '../world.ts';
 import { COMMANDS } from './commands.ts';
@@ -156,5 +156,7 @@ function lookForMedium(state: State, side: Side, text: string, world: World): Re
 function choose(state: State, side: Side, medium: MediumSpec | undefined, world: World): Reply {
   const field = fieldsOf(state).find((f) => f.id === side);
   if (!medium || !field) return say(state, ['this medium cannot be read']);
-  return changed(state, field, askAnew(state, setMedium(state.question, side, medium), world));
+  const recent = medium.kind === 'catalogue' ? latestFirst(state.recent, medium.material.key) : state.recent;
+  const asked = askAnew(state, setMedium(state.question, side, medium), world);
+  return changed(state, field, asked === state ? state : { ...asked, recent });
 }

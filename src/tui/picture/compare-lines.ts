@@ -33,11 +33,8 @@ export function compareLines(
   world: World,
   width: number,
 ): readonly PageLine[] {
-  const parts = partsOf(question, recent, world);
-  if (parts.length < FEWEST_PARTS) {
-    return [pageLine('nothing to compare yet: media that were chosen stand here beside the second one')];
-  }
-  const report = reportOn(question, parts, world);
+  const report = comparison(question, recent, world);
+  if (!report) return [pageLine(NOTHING_TO_COMPARE)];
   if (isRefusal(report)) return [pageLine(`${report.message}; ${report.remedy}`, 'caution', 'x')];
   const titles = partTitles(report);
   const table = (rows: readonly CompareRow[]): readonly PageLine[] =>
@@ -66,6 +63,19 @@ export function compareLines(
     pageLine('Sources', 'heading'),
     ...compareSources(report, style).map((text) => pageLine(text)),
   ];
+}
+
+export const NOTHING_TO_COMPARE =
+  'nothing to compare yet: choose media in either half, and they stand here beside the second one';
+
+/** Undefined while no other medium has been chosen. */
+export function comparison(
+  question: Question,
+  recent: readonly string[],
+  world: World,
+): CompareReport | Refusal | undefined {
+  const parts = partsOf(question, recent, world);
+  return parts.length < FEWEST_PARTS ? undefined : reportOn(question, parts, world);
 }
 
 function partsOf({ into }: Question, recent: readonly string[], world: World): readonly Part[] {

@@ -23,7 +23,7 @@ export interface HitFacts {
   readonly index: string;
   /** "clear", "1/e 13 nm", "absorbs", "no data". */
   readonly transparency: string;
-  /** More about the marked one, as sentences. */
+  /** More about the marked one, the numbers first: there is room for a few lines. */
   readonly details: readonly string[];
 }
 
@@ -52,19 +52,19 @@ function makeFacts(hit: Hit, question: Question, world: World, style: NumberStyl
   const about = hit.kind === 'entry' ? [aboutEntry(hit)] : [];
   if (!medium || isRefusal(wave)) return { name, index: '', transparency: 'no data', details: about };
   const side = mediumSide(medium, wave, question.conditions, false, (id) => world.source(id));
-  if (isRefusal(side)) return { name, index: '', transparency: 'no data', details: [...about, side.message] };
+  if (isRefusal(side)) return { name, index: '', transparency: 'no data', details: [side.message, ...about] };
   const { answer } = side;
   return {
     name,
     index: shortIndex(answer, style),
     transparency: transparencyText(answer, wave.vacuum_um * 1e-6, style),
-    details: [...about, detailText(answer, style)],
+    details: [detailText(answer, style), ...about],
   };
 }
 
 function aboutEntry(hit: Hit & { readonly kind: 'entry' }): string {
   const { name, formula, class: kind, axes } = hit.entry;
-  const crystal = axes.length > 1 ? `axes ${axes.join(', ')}` : undefined;
+  const crystal = axes.length > 1 ? `axes ${axes.map((axis) => axis[0]).join(', ')}` : undefined;
   return [name, formula, kind, crystal].filter((part) => part !== undefined).join(', ');
 }
 
@@ -88,7 +88,7 @@ function detailText(medium: MediumAnswer, style: NumberStyle): string {
   const n = `n = ${indexText(medium, howKnown(medium), style)}`;
   const k = medium.k > 0 ? `k = ${formatNumber(medium.k, { significant: 3 }, style)}` : undefined;
   const range = medium.transparency_m
-    ? `transparent from ${formatRange(medium.transparency_m, METRE, 'shortest', { style })}`
+    ? `clear ${formatRange(medium.transparency_m, METRE, 'shortest', { style })}`
     : undefined;
   return [n, k, range].filter((part) => part !== undefined).join(', ');
 }

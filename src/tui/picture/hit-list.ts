@@ -47,8 +47,12 @@ export function listLines(state: State, search: Search, world: World, columns: n
   const marked = facts[search.selected - search.top];
   const count = hits.length > rows ? `${search.selected + 1} of ${hits.length}. ` : '';
   const details = marked ? wrapText(`${count}${marked.details.join('; ')}`, width - 2) : [];
-  for (let i = 0; i < detailLines(body); i++) {
-    const text = details[i];
+  const room = detailLines(body);
+  for (let i = 0; i < room; i++) {
+    const isCut = i === room - 1 && details.length > room;
+    const text = isCut
+      ? fitToWidth(`${details[i]} ${details[i + 1]}`, width - 2, style.ascii ? '.' : '…')
+      : details[i];
     const shown = text !== undefined && style.ascii ? toAscii(text) : text;
     lines.push(shown === undefined ? BLANK : { kind: 'detail', text: shown, isSelected: false });
   }

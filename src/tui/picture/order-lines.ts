@@ -64,7 +64,7 @@ function rowLines({ level, topic, text, source }: OrderRow, width: number): read
   const [mark, role] = MARKS[level];
   const body = `${text} [${source}]`;
   if (width < WIDE_FROM) return [pageLine(`${level}, ${topic}: ${body}`, role, mark)];
-  const [first = '', ...rest] = wrap(body, width - TEXT_COLUMN);
+  const [first = '', ...rest] = wrap(body, width - TEXT_COLUMN - MARK_WIDTH);
   const head = (level.padEnd(LEVEL_COLUMN) + topic).padEnd(TEXT_COLUMN);
   return [
     laidOut(head + first, role, mark),

@@ -1,7 +1,7 @@
 /** Choosing a medium from the list that is open in a half. */
 import { problemText } from '../../units/problem.ts';
 import { type Side, setMedium } from '../fields/medium-fields.ts';
-import { hitsFor, mediumOfHit, whyNoHit } from '../hits.ts';
+import { hitsFor, latestFirst, mediumOfHit, whyNoHit } from '../hits.ts';
 import type { ActionId } from '../keys/actions.ts';
 import { EMPTY_LINE, insertText, type Line, pasteText } from '../line-edit.ts';
 import { focusOn, leaveWords, moveToField } from '../moves.ts';
@@ -9,8 +9,6 @@ import { listRows } from '../picture/hit-list.ts';
 import { askAnew, fieldStop, type Search, type State } from '../state.ts';
 import type { World } from '../world.ts';
 import { applyLineAction } from './line-actions.ts';
-
-const MOST_RECENT = 12;
 
 export function openSearch(state: State, side: Side, world: World): State {
   const search: Search = { side, line: EMPTY_LINE, selected: 0, top: 0 };
@@ -82,10 +80,7 @@ function choose(state: State, search: Search, world: World): State {
       message: { tone: 'refused', text: problemText(whyNoHit(search.line.text, state.question, world)) },
     };
   }
-  const recent =
-    hit.kind === 'entry'
-      ? [hit.entry.key, ...state.recent.filter((key) => key !== hit.entry.key)].slice(0, MOST_RECENT)
-      : state.recent;
+  const recent = hit.kind === 'entry' ? latestFirst(state.recent, hit.entry.key) : state.recent;
   const closed: State = { ...state, search: null, recent, message: null };
   return askAnew(closed, setMedium(state.question, search.side, medium), world);
 }
