@@ -64,6 +64,29 @@ export const LATE_PARTS: readonly LatePart[] = [
       ['--plain', 'air', 'n=1.5', '633nm'],
     ],
   },
+  {
+    name: 'late-models',
+    modules: [
+      'dispersion/aluminium-gallium-arsenide.ts',
+      'dispersion/brendel-bormann.ts',
+      'dispersion/composition-table.ts',
+      'dispersion/exponential-thermal.ts',
+      'dispersion/herzberger.ts',
+      'dispersion/ice-radio.ts',
+      'dispersion/magnetic-table.ts',
+      'dispersion/radio-air.ts',
+      'dispersion/sea-water-optical.ts',
+      'dispersion/thermal.ts',
+      'dispersion/water-optical.ts',
+      'dispersion/water-relaxation.ts',
+      'dispersion/wideband-debye.ts',
+    ],
+    lines: [
+      ['air', 'water', '589nm'],
+      ['air', 'water', '10GHz'],
+      ['air', 'fused-silica', '633nm', '--temperature', '30C'],
+    ],
+  },
 ];
 
 const isWithin = (file: string, modules: readonly string[]): boolean =>

@@ -9,7 +9,7 @@ import { fileURLToPath } from 'node:url';
 import { parseArgs } from 'node:util';
 import { foldTight } from '../src/catalog/fold.ts';
 import { CATALOG_FOLDER, catalogueFromSources } from '../src/catalog/from-sources.ts';
-import { KEY_PATTERN } from '../src/catalog/material-shape.ts';
+import { KEY_PATTERN } from '../src/catalog/key-pattern.ts';
 import { parameterShapes } from '../src/catalog/parameter-shapes.ts';
 import type { Shape } from '../src/catalog/shape.ts';
 import type { ModelName } from '../src/dispersion/parameters.ts';

@@ -2,6 +2,8 @@
  * The shape of a catalogue entry and of a bibliography item. `materialShape` is strict, for the catalogue itself;
  * `ownMaterialShape` asks less of a user's own file: what it may leave out is filled in by own.ts.
  */
+
+import { KEY_PATTERN } from './key-pattern.ts';
 import { once } from './once.ts';
 import { parameterShapes } from './parameter-shapes.ts';
 import {
@@ -20,7 +22,6 @@ import {
   yesNo,
 } from './shape.ts';
 
-export const KEY_PATTERN = '^[a-z0-9]+(-[a-z0-9]+)*$';
 /** Types of the CSL data schema 1.0 that a bibliography here may need. */
 export const SOURCE_TYPES = [
   'article',

@@ -10,7 +10,7 @@ import type { TableColumn, TableParameters } from '../dispersion/parameters.ts';
 import type { Fault } from './check-shape.ts';
 import { fault, numbersOf, readFacts, shorten, splitCsv } from './csv-text.ts';
 import { foldLoose } from './fold.ts';
-import { KEY_PATTERN } from './material-shape.ts';
+import { KEY_PATTERN } from './key-pattern.ts';
 import type { Material, Source } from './types.ts';
 
 export interface OwnTable {

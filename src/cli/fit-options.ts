@@ -1,5 +1,5 @@
 /** Options of the fit to measured points, for the table of options. */
-import { KEY_PATTERN } from '../catalog/material-shape.ts';
+import { KEY_PATTERN } from '../catalog/key-pattern.ts';
 import { choiceParser } from '../units/parse-choice.ts';
 import { type Problem, problem } from '../units/problem.ts';
 import { quoteInput } from '../units/quote-input.ts';
