@@ -134,6 +134,12 @@ function reportCrash(error: unknown): number {
     writeOut(2, `halfspace: ${error.message}\n`);
     return FILE_TROUBLE;
   }
+  const { code, syscall } = error as NodeJS.ErrnoException;
+  if (syscall === 'write') {
+    const why = code === 'ENOSPC' ? 'the disk is full' : String(code);
+    writeOut(2, `halfspace: the answer cannot be written (${why}); make room, or write it elsewhere\n`);
+    return FILE_TROUBLE;
+  }
   const message = error instanceof Error ? error.message : String(error);
   const detail = process.env['HALFSPACE_DEBUG'] && error instanceof Error ? `${error.stack}\n` : '';
   writeOut(2, `halfspace: internal error: ${message}; please report it with the command you gave\n${detail}`);

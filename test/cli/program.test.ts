@@ -140,6 +140,19 @@ describe('statuses', PATIENT, () => {
   });
 });
 
+describe('a full disk behind standard output', PATIENT, () => {
+  it
+    .runIf(existsSync('/dev/full'))
+    .each(['air fused-silica 633nm', '--json air gold 633nm', 'find --at 633nm'])(
+    'is said in one line, and ends %s with 4',
+    (line) => {
+      const { status, err } = inShell(`"$@" ${line} > /dev/full`);
+      expect(status).toBe(4);
+      expect(err).toMatch(/^halfspace: the answer cannot be written \(the disk is full\); .*\n$/);
+    },
+  );
+});
+
 describe('what is not understood', PATIENT, () => {
   it.each([
     ['an unknown medium', ['air', 'quarts', '633nm'], 'did you mean crystal-quartz?'],
