@@ -16,26 +16,37 @@
  * Limit: on a network file system that does not append as one piece, programs on different machines can overwrite each
  * other after the reading back; one machine is safe there too.
  */
-import * as fs from 'node:fs';
+import {
+  closeSync,
+  fstatSync,
+  fsyncSync,
+  mkdirSync,
+  openSync,
+  readSync,
+  realpathSync,
+  type Stats,
+  statSync,
+  writeSync,
+} from 'node:fs';
 import path from 'node:path';
 import { type Refusal, refuse } from '../medium/refusal.ts';
 import { diskTrouble, errorCode, shortWrite } from './disk-trouble.ts';
 import { LONGEST_LINE_BYTES, linesBackward, linesForward, type RawLine, type ReadAt } from './line-reader.ts';
 import type { LogbookPlace } from './logbook-path.ts';
 
-/** The file calls used, so that a test can stand in a disk that fails. */
-export type Files = Pick<
-  typeof fs,
-  | 'openSync'
-  | 'closeSync'
-  | 'fstatSync'
-  | 'statSync'
-  | 'writeSync'
-  | 'readSync'
-  | 'fsyncSync'
-  | 'mkdirSync'
-  | 'realpathSync'
->;
+/** The file calls used, and no others: the bundle would carry the rest along, and a test can stand in a disk that fails. */
+const DISK = {
+  closeSync,
+  fstatSync,
+  fsyncSync,
+  mkdirSync,
+  openSync,
+  readSync,
+  realpathSync,
+  statSync,
+  writeSync,
+};
+export type Files = typeof DISK;
 
 export interface Confirmed {
   readonly confirmed: true;
@@ -55,7 +66,7 @@ const ATTEMPTS = 8;
  * Appends one line and returns when it is confirmed.
  * @param line JSON text without a newline; throws RangeError for anything with one
  */
-export function appendToLogbook(place: LogbookPlace, line: string, files: Files = fs): Confirmed | Refusal {
+export function appendToLogbook(place: LogbookPlace, line: string, files: Files = DISK): Confirmed | Refusal {
   const { file } = place;
   if (line === '' || line.includes('\n')) throw new RangeError('a logbook line is one line of text');
   const bytes = Buffer.from(line, 'utf8');
@@ -87,7 +98,7 @@ export function appendToLogbook(place: LogbookPlace, line: string, files: Files 
 export function* logbookLines(
   file: string,
   order: 'oldest-first' | 'newest-first',
-  files: Files = fs,
+  files: Files = DISK,
 ): Generator<RawLine | Refusal, void> {
   let handle: number | undefined;
   try {
@@ -141,7 +152,7 @@ function tryToAppend(
 /** Looks for the line in the file that the path names now, which may have been put in the place of the one written to. */
 function readBack(
   file: string,
-  before: fs.Stats,
+  before: Stats,
   line: Buffer,
   files: Files,
 ): { readonly offset: number; readonly behindWhole: boolean } | undefined {
@@ -193,7 +204,7 @@ function byteAt(read: ReadAt, position: number): number | undefined {
   return read(byte, position) === 1 ? byte[0] : undefined;
 }
 
-function notAFile(file: string, stat: fs.Stats): Refusal {
+function notAFile(file: string, stat: Stats): Refusal {
   if (stat.isDirectory()) return diskTrouble(Object.assign(new Error(), { code: 'EISDIR' }), file, 'write');
   return refuse(
     'logbook-path',
