@@ -32,31 +32,31 @@ export interface FindResult {
   readonly undecided: ReadonlyMap<UndecidedReason, number>;
 }
 
-/** A material on each of its axes, at the wave and the temperature of the criteria. */
-export type CandidatesOf = (
-  material: Material,
+/** Media at a wave and a temperature, each on each of its axes; `place` is that among the materials of the survey. */
+export type CandidatesAt = (
   wave: FitWave | undefined,
   temperature_K: number | undefined,
-) => readonly Candidate[];
+) => (material: Material, place: number) => readonly Candidate[];
 
 /** Nothing measured before. */
-export function freshCandidates(survey: Survey): CandidatesOf {
-  return (material, wave, temperature_K) => {
+export const freshCandidates =
+  (survey: Survey): CandidatesAt =>
+  (wave, temperature_K) =>
+  (material) => {
     const described = axesOf(material);
     // An entry of measured reflectances alone has no axis, and no data at any wave.
     const axes: readonly Axis[] = described.length > 0 ? described : ['isotropic'];
     return axes.map((axis) => new Candidate(survey, material, axis, wave, temperature_K));
   };
-}
 
 /**
  * Refuses only a wave outside what the program covers.
- * @param candidatesOf hands out candidates measured before, where the same wave is searched again and again.
+ * @param candidatesAt hands out candidates measured before, where the same wave is searched again and again.
  */
 export function findMaterials(
   survey: Survey,
   criteria: Criteria,
-  candidatesOf: CandidatesOf = freshCandidates(survey),
+  candidatesAt: CandidatesAt = freshCandidates(survey),
 ): FindResult | Refusal {
   const wave = criteria.wave && bothReferences(criteria.wave);
   if (isRefusal(wave)) return wave;
@@ -65,16 +65,20 @@ export function findMaterials(
   const isAmong = classTest(survey.classes, criteria);
   const hasWords = wordTest(criteria.words);
   const asksHygroscopic = excludesHygroscopic(criteria);
-  for (const material of survey.materials) {
+  const candidatesOf = candidatesAt(wave, criteria.temperature_K);
+  const { materials } = survey;
+  // Thousands at a time, for a list that follows every key: no iterator, no list of its own for each.
+  for (let place = 0; place < materials.length; place++) {
+    const material = materials[place]!;
     if (!isAmong(material.class) || !hasWords(material) || hasExcluded(material, criteria)) continue;
-    const verdict = judge(candidatesOf(material, wave, criteria.temperature_K), criteria);
+    const verdict = judge(candidatesOf(material, place), criteria);
     if (verdict === false) continue;
     const open = isUndecided(verdict) ? verdict.undecided : undefined;
     const reason = open ?? (asksHygroscopic && !hygroscopicOnFile(material) ? 'not-on-file' : undefined);
     if (reason) reasons.set(reason, (reasons.get(reason) ?? 0) + 1);
     else if (!isUndecided(verdict)) found.push(verdict);
   }
-  return { wave: wave ?? null, found, examined: survey.materials.length, undecided: reasons };
+  return { wave: wave ?? null, found, examined: materials.length, undecided: reasons };
 }
 
 type Verdict = boolean | Undecided;
@@ -92,8 +96,12 @@ function classTest(all: readonly string[], { classes, not }: Criteria): (materia
   return (materialClass) => looked.has(materialClass);
 }
 
-const hasExcluded = (material: Material, { not }: Criteria): boolean =>
-  not.some((exclusion) => exclusion.kind === 'property' && hasProperty(material, exclusion.property));
+function hasExcluded(material: Material, { not }: Criteria): boolean {
+  for (const exclusion of not) {
+    if (exclusion.kind === 'property' && hasProperty(material, exclusion.property)) return true;
+  }
+  return false;
+}
 
 /** False too where the fact is not on file. */
 function hasProperty(material: Material, property: Excludable): boolean {

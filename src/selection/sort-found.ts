@@ -38,9 +38,9 @@ export function sortFound(
       : sign * compare(a, b);
   // Found in the order of the keys, thousands at a time, by a list that follows every key press.
   if (values.every((value, i) => i === 0 || order(values[i - 1], value) <= 0)) return found;
-  const places = Uint32Array.from(values, (_, i) => i);
-  places.sort((a, b) => order(values[a], values[b]) || a - b);
-  return Array.from(places, (i) => found[i]).filter((f) => f !== undefined);
+  // An array's own sort finds the runs that are in order already: bundled entries, then those of the user.
+  const places = values.map((_, i) => i).sort((a, b) => order(values[a], values[b]));
+  return places.flatMap((i) => found[i] ?? []);
 }
 
 type SortValue = number | string | undefined;

@@ -49,15 +49,30 @@ function findConditioned(text: string, question: Question, world: World): Condit
   const criteria = { ...reading.criteria, temperature_K: conditions.temperature_K, words: [] };
   const result = world.find(criteria, words.length === 0 ? undefined : meant(words, world));
   if (isRefusal(result)) return { reading, found: [], count: result.message };
-  const found = sortFound(result.found, defaultOrder(criteria), criteria);
+  const order = defaultOrder(criteria);
+  // By key is the order found in, but for the entries of one's own, which stand last.
+  const found = order.key === 'key' ? result.found : sortFound(result.found, order, criteria);
   return { reading, found, count: countText(result, materials.length, criteria.wave) };
 }
 
+interface Meant {
+  readonly text: string;
+  readonly materials: readonly Material[];
+}
+
+/** The last words of a world: they stay while a condition behind them is typed. */
+const lastMeant = new WeakMap<World, Meant>();
+
 /** Those that hold the words; where none does, those that come close. */
 function meant(words: readonly string[], world: World): readonly Material[] {
+  const text = words.join(' ');
+  const last = lastMeant.get(world);
+  if (last?.text === text) return last.materials;
   const { materials, material } = world.survey();
   const strict = materials.filter(wordTest(words));
-  return strict.length > 0 ? strict : world.search(words.join(' ')).flatMap(({ key }) => material(key) ?? []);
+  const close = strict.length > 0 ? strict : world.search(text).flatMap(({ key }) => material(key) ?? []);
+  lastMeant.set(world, { text, materials: close });
+  return close;
 }
 
 function countText({ found, undecided }: FindResult, total: number, wave: WaveSpec | undefined): string {

@@ -11,7 +11,7 @@ import { isRefusal, type Refusal } from '../medium/refusal.ts';
 import type { Candidate } from '../selection/candidate.ts';
 import type { Criteria } from '../selection/criteria.ts';
 import {
-  type CandidatesOf,
+  type CandidatesAt,
   type FindResult,
   findMaterials,
   freshCandidates,
@@ -21,16 +21,42 @@ import { makeSurvey, type Survey } from '../selection/survey.ts';
 
 /** Work at most this long before looking after keys again. */
 const PIECE_ms = 4;
+/** Waves kept measured: that of the question and the one being typed. */
+const MOST_WAVES = 2;
+
+/** The media of a survey at one wave and temperature, each measured when it is first asked about. */
+class MeasuredMedia {
+  readonly vacuum_um: number;
+  readonly temperature_K: number | undefined;
+  readonly #measure: (material: Material, place: number) => readonly Candidate[];
+  readonly #materials: readonly Material[];
+  readonly #lists: (readonly Candidate[] | undefined)[];
+
+  constructor(survey: Survey, wave: FitWave, temperature_K: number | undefined) {
+    this.vacuum_um = wave.vacuum_um;
+    this.temperature_K = temperature_K;
+    this.#materials = survey.materials;
+    // Filled from its end: an array that grows so would become a slow one.
+    this.#lists = survey.materials.map(() => undefined);
+    this.#measure = freshCandidates(survey)(wave, temperature_K);
+  }
+
+  at(place: number): readonly Candidate[] {
+    const known = this.#lists[place];
+    if (known) return known;
+    const material = this.#materials[place];
+    const list = material ? this.#measure(material, place) : [];
+    this.#lists[place] = list;
+    return list;
+  }
+}
 
 export class MediumFinder {
   readonly #catalogue: IndexedCatalogue;
   #survey: Survey | undefined;
-  #candidatesOf: CandidatesOf | undefined;
-  /** Vacuum wavelength and temperature that the candidates are measured at. */
-  #at_um: number | undefined;
-  #temperature_K: number | undefined;
-  #candidates = new Map<Material, readonly Candidate[]>();
-  #waiting: string[] = [];
+  #places: ReadonlyMap<Material, number> | undefined;
+  /** The one asked about last first. */
+  #measured: readonly MeasuredMedia[] = [];
   #timer: NodeJS.Timeout | undefined;
 
   constructor(catalogue: IndexedCatalogue) {
@@ -45,67 +71,59 @@ export class MediumFinder {
   /** `among`: media to look at, in the order wanted; all in the order of the catalogue where absent. */
   find(criteria: Criteria, among: readonly Material[] | undefined): FindResult | Refusal {
     const survey = this.survey();
-    return findMaterials(
-      { ...survey, materials: among ?? survey.materials },
-      criteria,
-      (material, wave, T) => (wave ? this.#measured(material, wave, T) : this.#fresh()(material, wave, T)),
-    );
+    const candidatesAt: CandidatesAt = (wave, temperature_K) => {
+      if (!wave) return freshCandidates(survey)(wave, temperature_K);
+      const measured = this.#measuredAt(wave, temperature_K);
+      if (!among) return (_, place) => measured.at(place);
+      const places = this.#placesIn(survey);
+      return (material) => measured.at(places.get(material) ?? -1);
+    };
+    return findMaterials({ ...survey, materials: among ?? survey.materials }, criteria, candidatesAt);
   }
 
   prepare(wave: WaveSpec, temperature_K: number | undefined): void {
     const at = bothReferences(wave);
-    if (isRefusal(at) || this.#isAt(at, temperature_K)) return;
-    this.#moveTo(at, temperature_K);
-    this.#waiting = [...this.#catalogue.keys()];
-    this.#schedule(at);
+    if (isRefusal(at) || this.#known(at, temperature_K)) return;
+    this.stop();
+    const survey = this.survey();
+    this.#schedule(survey, this.#measuredAt(at, temperature_K), survey.materials.length);
   }
 
   stop(): void {
     clearTimeout(this.#timer);
     this.#timer = undefined;
-    this.#waiting = [];
   }
 
-  #schedule(at: FitWave): void {
-    this.#timer ??= setTimeout(() => {
+  /** Measures the media before the place `end`, the last ones first. */
+  #schedule(survey: Survey, measured: MeasuredMedia, end: number): void {
+    this.#timer = setTimeout(() => {
       this.#timer = undefined;
-      const end = performance.now() + PIECE_ms;
-      while (this.#waiting.length > 0 && performance.now() < end) this.#measure(this.#waiting.pop(), at);
-      if (this.#waiting.length > 0) this.#schedule(at);
+      const until = performance.now() + PIECE_ms;
+      let place = end;
+      while (place > 0 && performance.now() < until) {
+        place--;
+        const material = survey.materials[place];
+        if (material) namesOf(material);
+        // Asking for the medium is what measures it.
+        for (const candidate of measured.at(place)) void candidate.medium;
+      }
+      if (place > 0) this.#schedule(survey, measured, place);
     }, 1);
   }
 
-  #measure(key: string | undefined, at: FitWave): void {
-    const material = key === undefined ? undefined : this.#catalogue.material(key);
-    if (!material) return;
-    namesOf(material);
-    // Asking for the medium is what measures it.
-    for (const candidate of this.#measured(material, at, this.#temperature_K)) void candidate.medium;
+  #known(wave: FitWave, temperature_K: number | undefined): MeasuredMedia | undefined {
+    return this.#measured.find((m) => m.vacuum_um === wave.vacuum_um && m.temperature_K === temperature_K);
   }
 
-  #isAt(at: FitWave, temperature_K: number | undefined): boolean {
-    return at.vacuum_um === this.#at_um && temperature_K === this.#temperature_K;
+  #measuredAt(wave: FitWave, temperature_K: number | undefined): MeasuredMedia {
+    const measured =
+      this.#known(wave, temperature_K) ?? new MeasuredMedia(this.survey(), wave, temperature_K);
+    this.#measured = [measured, ...this.#measured.filter((m) => m !== measured)].slice(0, MOST_WAVES);
+    return measured;
   }
 
-  #moveTo(at: FitWave, temperature_K: number | undefined): void {
-    this.stop();
-    this.#at_um = at.vacuum_um;
-    this.#temperature_K = temperature_K;
-    this.#candidates = new Map();
-  }
-
-  #fresh(): CandidatesOf {
-    this.#candidatesOf ??= freshCandidates(this.survey());
-    return this.#candidatesOf;
-  }
-
-  #measured(material: Material, wave: FitWave, temperature_K: number | undefined): readonly Candidate[] {
-    if (!this.#isAt(wave, temperature_K)) this.#moveTo(wave, temperature_K);
-    let candidates = this.#candidates.get(material);
-    if (!candidates) {
-      candidates = this.#fresh()(material, wave, temperature_K);
-      this.#candidates.set(material, candidates);
-    }
-    return candidates;
+  #placesIn({ materials }: Survey): ReadonlyMap<Material, number> {
+    this.#places ??= new Map(materials.map((material, place) => [material, place]));
+    return this.#places;
   }
 }
