@@ -1,4 +1,4 @@
-import { describe, expect, it } from 'vitest';
+import { describe, expect, it, vi } from 'vitest';
 import { checkMaterial } from '../../src/catalog/check-material.ts';
 import { passes } from '../../src/catalog/check-values.ts';
 import { catalogueFromSources, readCatalogueSources } from '../../src/catalog/from-sources.ts';
@@ -106,11 +106,9 @@ describe('every published value', () => {
     expect(toleranceUsed(value)).toBe(Number.POSITIVE_INFINITY);
   });
 
-  it('is recomputed from the packed files to the same result, in under a second', () => {
+  it('is recomputed from the packed files to the same result', () => {
     const packed = packCatalogue(sources);
-    const start = performance.now();
     const again = verifyMaterials(withCheckValues(openPacked(packed.catalogue), packed.checks.toString()));
-    expect(performance.now() - start).toBeLessThan(1000);
     expect(again.values.map((v) => v.computed)).toEqual(
       verifyMaterials([...sources.materials].sort((a, b) => (a.key < b.key ? -1 : 1))).values.map(
         (v) => v.computed,
@@ -132,17 +130,19 @@ describe('what answers need and no more', () => {
     expect(guided.filter((f) => f.digitsGuide_n !== undefined).length).toBeGreaterThan(50);
   });
 
-  it('looks a name up and parses its material within a few milliseconds', () => {
-    const packed = packCatalogue(sources).catalogue;
-    const time = (name: string): number => {
-      const start = performance.now();
-      openPacked(packed).lookup(name);
-      return performance.now() - start;
-    };
-    // The quickest of a few: what the work takes, not what else the machine is doing.
-    for (const name of ['fused silica', 'n-bk7', 'silicon', 'gold', 'water', 'KTP:z', 'SiO2'])
-      expect(Math.min(time(name), time(name), time(name))).toBeLessThan(5);
-  });
+  it.each(['fused silica', 'n-bk7', 'silicon', 'gold', 'water', 'KTP:z', 'SiO2', 'nosuch'])(
+    'looks up %s without parsing anything but the header and the materials it gives',
+    (name) => {
+      const packed = packCatalogue(sources).catalogue;
+      const parsed = vi.spyOn(JSON, 'parse');
+      const found = openPacked(packed).lookup(name);
+      const keys = parsed.mock.results.slice(1).map(({ value }) => (value as { key?: string }).key);
+      parsed.mockRestore();
+      const given =
+        found.kind === 'one' ? [found.found.material] : found.kind === 'several' ? found.candidates : [];
+      expect(keys).toEqual(given.map(({ key }) => key));
+    },
+  );
 });
 
 describe('the bibliography', () => {
