@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { ACTION_IDS, ACTIONS, CONTEXTS, type Context } from '../../src/tui/keys/actions.ts';
+import type { CommandName } from '../../src/cli/command-table.ts';
+import { ACTION_IDS, ACTIONS, type ActionId, CONTEXTS, type Context } from '../../src/tui/keys/actions.ts';
 import { bindKeys, clashesOf, isPrintable } from '../../src/tui/keys/bindings.ts';
 import { keyText } from '../../src/tui/keys/key-names.ts';
 
@@ -35,14 +36,31 @@ describe('the table of keys', () => {
     }
   });
 
-  it('leaves Ctrl-B to terminal multiplexers', () => {
+  it('leaves Ctrl-B to terminal multiplexers, and Ctrl-A but where text is typed', () => {
     expect(ACTIONS.flatMap((a) => a.keys)).not.toContain('ctrl+b');
+    const beside = ACTIONS.filter((a) => a.contexts.every((c) => c !== 'entry' && c !== 'search'));
+    expect(beside.flatMap((a) => a.keys)).not.toContain('ctrl+a');
+  });
+
+  it.each<[ActionId, CommandName]>([
+    ['search', 'find'],
+    ['sources', 'cite'],
+    ['coatings', 'coat'],
+    ['order-check', 'order-check'],
+    ['compare', 'compare'],
+    ['log', 'log'],
+    ['copy-record', 'log'],
+  ])('names the command that does the same as %s: %s', (id, command) => {
+    const { help = '' } = ACTIONS.find((a) => a.id === id && a.contexts.includes('picture')) ?? {};
+    expect(help).toContain(`halfspace ${command}`);
   });
 
   it.each<[Context, string, string]>([
     ['picture', 'k', 'up'],
     ['picture', 'ctrl+n', 'down'],
     ['page', 'G', 'last'],
+    ['page', 'n', 'down'],
+    ['page', 'N', 'up'],
     ['page', 'ctrl+u', 'page-up'],
     ['page', 'alt+v', 'page-up'],
     ['search', 'ctrl+v', 'page-down'],

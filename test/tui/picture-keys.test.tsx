@@ -380,6 +380,13 @@ describe('pages', () => {
     open();
   });
 
+  it('goes to the next and the previous line found by n and N', () => {
+    open({ rows: 12 }).type('?/the<enter>');
+    const tops = ['n', 'n', 'N', 'N', 'N'].map((key) => stage.type(key).state.page?.top);
+    expect(tops).toEqual([1, 2, 1, 0, 0]);
+    expect(stage.state.page?.filter?.text).toBe('the');
+  });
+
   it('scrolls to its end and no further', async () => {
     open().type('?G');
     const end = stage.state.page?.top ?? 0;
