@@ -90,7 +90,6 @@ export const SCREEN_OPTIONS = [
   'linear',
   'catalog',
   'logFile',
-  'noInput',
 ] as const satisfies readonly OptionKey[];
 
 const MEDIUM =

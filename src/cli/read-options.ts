@@ -7,7 +7,8 @@
 import { isDigit } from '../num/ascii.ts';
 import { orList } from '../units/parse-choice.ts';
 import { quoteInput } from '../units/quote-input.ts';
-import { nearest } from './nearest.ts';
+import { MOST_CANDIDATES, nearest } from './nearest.ts';
+import type { OptionSpec } from './option-spec.ts';
 import { OPTION_KEYS, type OptionKey, optionKeyByLetter, optionKeyByName, optionSpec } from './options.ts';
 import type { UsageError } from './usage-error.ts';
 
@@ -106,16 +107,27 @@ function isKnownOption(argument: string): boolean {
 }
 
 function unknownOption(typed: string): UsageError {
-  const names = OPTION_KEYS.map(optionSpec).filter((spec) => !spec.hidden);
-  const candidates = nearest(
-    typed,
-    names.map((spec) => `--${spec.name}`),
-  );
+  const specs = OPTION_KEYS.map(optionSpec).filter((spec) => !spec.hidden);
+  const candidates =
+    typed.length === 2
+      ? meantByLetter(typed.slice(1).toLowerCase(), specs)
+      : nearest(
+          typed,
+          specs.map((spec) => `--${spec.name}`),
+        );
   const remedy =
     candidates.length > 0
       ? `did you mean ${orList(candidates)}?`
       : 'an operand that begins with - goes after --';
   return { code: 'unknown-option', message: `there is no option ${plain(typed)}`, remedy, candidates };
+}
+
+/** Of a letter that is none: the same one in the other case, else the options whose names begin with it. */
+function meantByLetter(letter: string, specs: readonly OptionSpec[]): readonly string[] {
+  const other = specs.find(({ short }) => short?.toLowerCase() === letter);
+  if (other) return [`-${other.short}`];
+  const begin = specs.filter(({ name }) => name.startsWith(letter));
+  return begin.slice(0, MOST_CANDIDATES).map(({ name }) => `--${name}`);
 }
 
 function missingValue(key: OptionKey): UsageError {

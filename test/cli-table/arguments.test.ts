@@ -125,10 +125,8 @@ describe('no operands', () => {
     });
   });
 
-  it('is a mistake where an option asks for an answer', () => {
-    expect(failure('--json')).toBe(
-      'missing-operand: FROM, INTO, WAVE missing; write halfspace FROM INTO WAVE',
-    );
+  it.each(['--json', '--no-input'])('is a mistake where an option asks for an answer: %s', (option) => {
+    expect(failure(option)).toBe('missing-operand: FROM, INTO, WAVE missing; write halfspace FROM INTO WAVE');
   });
 });
 
@@ -136,6 +134,15 @@ describe('what is not understood is refused with what would be right', () => {
   it.each<[string, string]>([
     ['air bk7 633nm --angel 45', 'unknown-option: there is no option --angel; did you mean --angle?'],
     ['air bk7 633nm --temp 25C', 'unknown-option: there is no option --temp; did you mean --temperature?'],
+    ['air bk7 633nm -v', 'unknown-option: there is no option -v; did you mean -V?'],
+    [
+      'air bk7 633nm -p s',
+      'unknown-option: there is no option -p; did you mean --pol, --pressure, --pairs, --power or --profile?',
+    ],
+    [
+      'air bk7 633nm -Z',
+      'unknown-option: there is no option -Z; an operand that begins with - goes after --',
+    ],
     ['air bk7 633nm --ang=45', 'unknown-option: there is no option --ang; did you mean --angle?'],
     ['air bk7 633nm -angle 45', 'unknown-option: there is no option -angle; did you mean --angle?'],
     [
