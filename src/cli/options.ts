@@ -193,7 +193,7 @@ export const OPTIONS = {
   color: choice({
     name: 'color',
     choices: COLOURS,
-    meaning: 'when to use colour',
+    meaning: 'when the full-screen program uses colour; all else has none',
     fallback: 'auto',
     group: 'output',
     everywhere: true,

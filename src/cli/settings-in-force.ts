@@ -46,7 +46,7 @@ function colour({ options, env, file, stdoutIsTTY }: SettingFacts): SettingInFor
     name: 'color',
     value: isOn,
     ...decided,
-    meaning: 'colour on this output',
+    meaning: 'colour on the screen',
   };
 }
 

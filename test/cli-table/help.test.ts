@@ -1,3 +1,6 @@
+import { readdirSync, readFileSync } from 'node:fs';
+import { join } from 'node:path';
+import { fileURLToPath } from 'node:url';
 import { describe, expect, it } from 'vitest';
 import { parseArguments } from '../../src/cli/arguments.ts';
 import { COMMAND_NAMES, COMMANDS, namedCommands, optionsOf } from '../../src/cli/command-table.ts';
@@ -45,6 +48,22 @@ describe('help', () => {
     for (const [names] of ENVIRONMENT) expect(text).toContain(`\n  ${names}`);
     expect(text).toContain('exp(i(k r - w t))');
     expect(text).toContain('\nBugs\n');
+  });
+
+  it('names every environment variable that the sources read', () => {
+    const root = fileURLToPath(new URL('../../src', import.meta.url));
+    const sources = readdirSync(root, { recursive: true, encoding: 'utf8' }).filter((f) => /\.tsx?$/.test(f));
+    const read = sources.flatMap((file) =>
+      [
+        ...readFileSync(join(root, file), 'utf8').matchAll(
+          /(?<!delete )\benv(?:ironment)?(?:\.|\[')([A-Z][A-Z_]+)/g,
+        ),
+      ].map(([, name = '']) => name),
+    );
+    expect(read.length).toBeGreaterThan(15);
+    const listed = ENVIRONMENT.flatMap(([names]) => names.split(', '));
+    expect([...new Set(read)].filter((name) => !listed.includes(name))).toEqual([]);
+    for (const name of listed) expect(helpText()).toContain(name);
   });
 
   it('gives examples that the parser takes as the command they belong to', () => {
