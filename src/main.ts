@@ -11,6 +11,7 @@ import { run as runAnswer } from './cli/commands/answer.ts';
 import type { Context } from './cli/context.ts';
 import { loadCommand } from './cli/load-command.ts';
 import type { OptionValues } from './cli/options.ts';
+import { plainQuestion } from './cli/plain-question.ts';
 import { readLayers } from './cli/read-path.ts';
 import { saveFile } from './cli/save-file.ts';
 import { usageErrorText } from './cli/usage-error.ts';
@@ -110,7 +111,11 @@ function openScreen(options: OptionValues, context: Context): number | Promise<n
 }
 
 function dispatch(): number | Promise<number> {
-  const parsed = parseArguments(process.argv.slice(2));
+  const argv = process.argv.slice(2);
+  if (argv.length === 0) return openScreen({}, makeContext({}));
+  const plain = plainQuestion(argv);
+  if (plain) return runCommand(plain, makeContext({}));
+  const parsed = parseArguments(argv);
   switch (parsed.kind) {
     case 'error': {
       const ascii = decideGlyphs(process.env) === 'ascii';

@@ -40,6 +40,14 @@ export const LATE_PARTS: readonly LatePart[] = [
     ],
   },
   {
+    name: 'late-arguments',
+    modules: ['cli/arguments.ts', 'cli/usage-error.ts'],
+    lines: [
+      ['air', 'n-bk7', '633nm', '--angle', '45', '--pol', 'p'],
+      ['--json', 'vacuum', 'gold', '633nm'],
+    ],
+  },
+  {
     name: 'late-own',
     modules: ['catalog/own.ts'],
     lines: [['--catalog', '{own}', 'air', 'fused-silica', '633nm']],
@@ -65,18 +73,17 @@ export const LATE_PARTS: readonly LatePart[] = [
     ],
   },
   {
-    name: 'late-models',
+    // Laws of media that few questions name.
+    name: 'late-media',
     modules: [
       'dispersion/aluminium-gallium-arsenide.ts',
       'dispersion/brendel-bormann.ts',
       'dispersion/composition-table.ts',
       'dispersion/exponential-thermal.ts',
-      'dispersion/herzberger.ts',
       'dispersion/ice-radio.ts',
       'dispersion/magnetic-table.ts',
       'dispersion/radio-air.ts',
       'dispersion/sea-water-optical.ts',
-      'dispersion/thermal.ts',
       'dispersion/water-optical.ts',
       'dispersion/water-relaxation.ts',
       'dispersion/wideband-debye.ts',
@@ -84,7 +91,8 @@ export const LATE_PARTS: readonly LatePart[] = [
     lines: [
       ['air', 'water', '589nm'],
       ['air', 'water', '10GHz'],
-      ['air', 'fused-silica', '633nm', '--temperature', '30C'],
+      ['air', 'gold', '633nm'],
+      ['air', 'titanium', '633nm'],
     ],
   },
 ];

@@ -26,6 +26,9 @@ const LOADERS: Readonly<Record<Invocation['command'], () => Promise<CommandModul
   verify: () => import('./commands/verify.ts'),
 };
 
+/** Whether a first word is the name of a command: one that has code, or `help`. */
+export const isCommandWord = (word: string): boolean => word === 'help' || Object.hasOwn(LOADERS, word);
+
 export function loadCommand(name: Invocation['command']): Promise<CommandModule> {
   return LOADERS[name]();
 }

@@ -106,7 +106,7 @@ export function mediumAtWave(
   }
   let absorptionKnown = state.complexFit;
   if (!absorptionKnown && jet[N]! > 0) {
-    absorptionKnown = bindAbsorption(material.absorption)(wave.vacuum_um, jet);
+    absorptionKnown = material.absorption ? bindAbsorption(material.absorption)(wave.vacuum_um, jet) : false;
   }
   const second = secondOpinion(
     choice.others,

@@ -50,15 +50,16 @@ const LATE = ['tty', 'net', 'stream', 'os', 'crypto', 'child_process'];
 const FIRST = ['halfspace.js', 'core.js', 'core.cache', 'catalog.dat'];
 
 describe.skipIf(!existsSync(entry))('a start of the program', () => {
-  it.each([
-    ['air', 'fused-silica', '632.8nm'],
-    ['air', 'n-bk7', '633nm', '--angle', '45', '--pol', 'p'],
-    ['--json', 'vacuum', 'gold', '633nm'],
-    ['n-bk7', 'air', '550nm', '--angle', '60', '--pol', 's', '--ascii'],
-    ['air', 'zinc-selenide', '10.6um', '--quiet'],
-  ])('reads the first script and the catalogue only for one surface: %s', (...args) => {
-    const { files, modules } = start(...args);
-    expect([...files].sort()).toEqual([...FIRST].sort());
+  it.each<[string, readonly string[]]>([
+    ['air fused-silica 632.8nm', []],
+    ['air zinc-selenide 10.6um', []],
+    ['air n-bk7 633nm --angle 45 --pol p', ['arguments']],
+    ['n-bk7 air 550nm --angle 60 --pol s --ascii', ['arguments']],
+    ['--json vacuum gold 633nm', ['arguments']],
+  ])('reads for one surface only what it needs: %s', (line, parts) => {
+    const { files, modules } = start(...line.split(' '));
+    const needed = parts.flatMap((part) => [`late-${part}.js`, `late-${part}.cache`]);
+    expect([...files].sort()).toEqual([...FIRST, ...needed].sort());
     expect(modules).toContain('fs');
     expect(modules.filter((name) => LATE.includes(name))).toEqual([]);
   });
