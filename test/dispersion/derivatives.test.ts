@@ -3,6 +3,7 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { type BoundModel, JET_LENGTH } from '../../src/dispersion/evaluator.ts';
 import { bindModel } from '../../src/dispersion/registry.ts';
+import { evenly } from '../helpers/evenly.ts';
 import { ABSORBING_FITS } from './fits/absorbing.ts';
 import type { PublishedFit } from './fits/check.ts';
 import { LIQUIDS_AND_TABLES } from './fits/liquids-and-tables.ts';
@@ -122,22 +123,19 @@ describe('derivatives', () => {
 
   it('of a Sellmeier fit hold for any poles outside the band', () => {
     const pole = fc.record({
-      B: fc.double({ min: 0.1, max: 2, noNaN: true }),
-      C_um2: fc.oneof(
-        fc.double({ min: 0.001, max: 0.04, noNaN: true }),
-        fc.double({ min: 40, max: 400, noNaN: true }),
-      ),
+      B: evenly(0.1, 2),
+      C_um2: fc.oneof(evenly(0.001, 0.04), evenly(40, 400)),
       numeratorPower: fc.constantFrom<0 | 2>(0, 2),
     });
     const term = fc.record({
-      c: fc.double({ min: -1e-3, max: 1e-3, noNaN: true }),
+      c: evenly(-1e-3, 1e-3),
       power: fc.constantFrom(-8, -6, -4, -2, 2, 4, -1, 1.5),
     });
     fc.assert(
       fc.property(
         fc.array(pole, { minLength: 1, maxLength: 5 }),
         fc.array(term, { maxLength: 4 }),
-        fc.double({ min: 0.6, max: 3, noNaN: true }),
+        evenly(0.6, 3),
         (poles, terms, um) => {
           const model = bindModel({ model: 'sellmeier', offset: 2.5, poles, terms }, {});
           const written = jetAt(model, um);

@@ -2,8 +2,9 @@
 import fc from 'fast-check';
 import { type Optics, opticsFromIndex, opticsFromPermittivity } from '../../src/interface/optics.ts';
 import { ONE } from '../../src/num/complex.ts';
+import { evenly } from '../helpers/evenly.ts';
 
-const between = (min: number, max: number) => fc.double({ min, max, noNaN: true });
+const between = evenly;
 
 export const losslessDielectric: fc.Arbitrary<Optics> = between(1, 5).map((n) =>
   opticsFromIndex({ re: n, im: 0 }, ONE),

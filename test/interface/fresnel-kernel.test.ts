@@ -3,6 +3,7 @@ import { describe, expect, it } from 'vitest';
 import { SURFACE_LENGTH, writeSurface, writeSurfaceOf } from '../../src/interface/fresnel-kernel.ts';
 import { type Optics, opticsFromIndex, opticsFromPermittivity } from '../../src/interface/optics.ts';
 import { abs2, ONE } from '../../src/num/complex.ts';
+import { evenly } from '../helpers/evenly.ts';
 import {
   absorbing,
   incidence,
@@ -41,7 +42,7 @@ function expectEqual(from: Optics, into: Optics, angle_rad: number): void {
   }
 }
 
-const between = (min: number, max: number) => fc.double({ min, max, noNaN: true });
+const between = evenly;
 const magnetic = fc.oneof(losslessMagnetic, passiveMagnetic);
 const doublyNegative = fc
   .tuple(between(-6, -0.5), between(-6, -0.5))

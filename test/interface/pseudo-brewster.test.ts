@@ -4,6 +4,7 @@ import { fresnel, fresnelAngleDerivative } from '../../src/interface/fresnel.ts'
 import { type Optics, opticsFromIndex } from '../../src/interface/optics.ts';
 import { pseudoBrewsterAngle } from '../../src/interface/pseudo-brewster.ts';
 import { ONE } from '../../src/num/complex.ts';
+import { evenly } from '../helpers/evenly.ts';
 import { absorbing, losslessDielectric, losslessMagnetic, passiveMagnetic } from './arbitrary-media.ts';
 
 const RIGHT_ANGLE = Math.PI / 2;
@@ -26,8 +27,7 @@ function expectLeast(a: Optics, b: Optics): void {
 }
 
 const ofIndex = (re: number, im: number) => opticsFromIndex({ re, im }, ONE);
-const decades = (from: number, to: number) =>
-  fc.double({ min: from, max: to, noNaN: true }).map((x) => 10 ** x);
+const decades = (from: number, to: number) => evenly(from, to).map((x) => 10 ** x);
 
 describe('the angle of least R_p', () => {
   it('has no lower point anywhere, from a transparent medium without magnetism', () => {

@@ -3,6 +3,7 @@ import { describe, expect, it } from 'vitest';
 import * as C from '../../src/num/complex.ts';
 import { faddeeva, faddeevaJet } from '../../src/num/faddeeva.ts';
 import { variable } from '../../src/num/jet.ts';
+import { evenly } from '../helpers/evenly.ts';
 
 /** M. Abramowitz, I. A. Stegun, Handbook of Mathematical Functions (1964), table 7.9: x, y, Re w, Im w (six decimals; from memory). */
 const TABLE_7_9 = [
@@ -37,7 +38,7 @@ const SIXTY_DIGITS: readonly (readonly [number, number, number, number])[] = [
   [0.0, -1.25, 9.17364344748284, 0.0],
 ];
 
-const coordinate = (max: number): fc.Arbitrary<number> => fc.double({ min: -max, max, noNaN: true });
+const coordinate = (max: number): fc.Arbitrary<number> => evenly(-max, max);
 
 describe('Faddeeva function', () => {
   it.each(TABLE_7_9)('agrees with Abramowitz and Stegun at %d + %di', (x, y, re, im) => {
@@ -83,7 +84,7 @@ describe('Faddeeva function', () => {
 
   it('has jets that obey the differential equations w^(n+1) = -2 z w^(n) - 2 n w^(n-1)', () => {
     fc.assert(
-      fc.property(coordinate(20), fc.double({ min: 0.05, max: 12, noNaN: true }), (x, y) => {
+      fc.property(coordinate(20), evenly(0.05, 12), (x, y) => {
         const jet = faddeevaJet({ re: variable(x), im: [y, 0, 0, 0] });
         const z = { re: x, im: y };
         const d = ([0, 1, 2, 3] as const).map((n) =>
@@ -97,5 +98,69 @@ describe('Faddeeva function', () => {
         expect(C.abs(C.sub(d[3], third))).toBeLessThan(20 * room * (C.abs(d[1]) + C.abs(z) * C.abs(d[2])));
       }),
     );
+  });
+
+  // Abramowitz & Stegun 7.1.3, 7.1.20, 7.1.23: w(0) = 1, w' = -2 z w + 2 i/sqrt(pi), w(iy) = exp(y^2) erfc(y).
+  it('has jets that begin with the function and its first derivative, in every quadrant, near and far', () => {
+    for (const z of [
+      { re: 0, im: 0 },
+      { re: 1, im: 0.5 },
+      { re: -2, im: 1 },
+      { re: 0.3, im: -0.8 },
+      { re: 2, im: -6.6 },
+      { re: -8, im: 0.5 },
+      { re: 5, im: 6 },
+    ]) {
+      const jet = faddeevaJet({ re: variable(z.re), im: [z.im, 0, 0, 0] });
+      const w = faddeeva(z);
+      expect({ re: jet.re[0], im: jet.im[0] }).toEqual(w);
+      const first = C.add(C.scale(C.mul(z, w), -2), { re: 0, im: 2 / Math.sqrt(Math.PI) });
+      const size = 1 + C.abs(z) * C.abs(w);
+      expect(Math.abs(jet.re[1] - first.re)).toBeLessThan(1e-13 * size);
+      expect(Math.abs(jet.im[1] - first.im)).toBeLessThan(1e-13 * size);
+    }
+  });
+
+  it('keeps the real part exp(-x^2) on the real axis, however far, and is 1 at 0', () => {
+    for (const x of [0, 0.5, 3, 6.4, 6.5, 7, 12, -9])
+      expect(faddeeva({ re: x, im: 0 }).re / Math.exp(-x * x)).toBeCloseTo(1, x === 6.4 ? 2 : 9);
+    expect(faddeeva({ re: 0, im: 0 })).toEqual(C.ONE);
+  });
+
+  it('grows as 2 exp(-z^2) below the real axis, far out too', () => {
+    const z = { re: 1, im: -7 };
+    const gauss = C.scale(C.exp(C.neg(C.mul(z, z))), 2);
+    expect(C.abs(C.sub(faddeeva(z), gauss)) / C.abs(gauss)).toBeLessThan(1e-13);
+  });
+
+  it('does not overflow on the way where z^2 would', () => {
+    const w = faddeeva({ re: 3e160, im: 4e160 });
+    // i/(sqrt(pi) z)
+    expect(w.re * 5e160 * Math.sqrt(Math.PI)).toBeCloseTo(0.8, 12);
+    expect(w.im * 5e160 * Math.sqrt(Math.PI)).toBeCloseTo(0.6, 12);
+  });
+
+  it('keeps its digits beside the nodes of either sum: on the real axis Re w = exp(-x^2)', () => {
+    const step = Math.sqrt(Math.PI / 12);
+    for (let half = 1; half <= 12; half++) {
+      for (const away of [-0.1, -1e-3, -1e-9, -1e-12, 0, 1e-12, 1e-9, 1e-3, 0.1]) {
+        const x = (half / 2) * step + away;
+        for (const y of [0, 1e-13])
+          expect(Math.abs(faddeeva({ re: x, im: y }).re - Math.exp(-x * x))).toBeLessThan(2e-13);
+      }
+    }
+  });
+
+  // Abramowitz & Stegun 7.1.23, differentiated: w -> i/(sqrt(pi) z) (1 + 1/(2 z^2)).
+  it('has third derivatives without cancellation far out', () => {
+    for (const size of [1e2, 1e4, 1e8]) {
+      const jet = faddeevaJet({ re: variable(0.6 * size), im: [0.8 * size, 0, 0, 0] });
+      const z = { re: 0.6 * size, im: 0.8 * size };
+      const z2 = C.mul(z, z);
+      const leading = C.div({ re: 0, im: -1 / Math.sqrt(Math.PI) }, C.mul(z2, z2));
+      const wanted = C.mul(leading, C.add(C.ONE, C.div({ re: 5, im: 0 }, z2)));
+      const error = C.sub({ re: jet.re[3], im: jet.im[3] }, wanted);
+      expect(C.abs(error) / C.abs(wanted)).toBeLessThan(1e-6);
+    }
   });
 });

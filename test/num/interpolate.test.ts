@@ -1,15 +1,13 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { cubic, linear, quadratic, TableError, taylorAt } from '../../src/num/interpolate.ts';
+import { evenly } from '../helpers/evenly.ts';
 
 const rows = fc
-  .array(
-    fc.tuple(fc.double({ min: 0.05, max: 2, noNaN: true }), fc.double({ min: -5, max: 5, noNaN: true })),
-    {
-      minLength: 4,
-      maxLength: 20,
-    },
-  )
+  .array(fc.tuple(evenly(0.05, 2), evenly(-5, 5)), {
+    minLength: 4,
+    maxLength: 20,
+  })
   .map((steps) => {
     let x = 0;
     const places = steps.map(([step]) => {
@@ -75,6 +73,11 @@ describe('interpolants', () => {
   it('three rows make a parabola, two a line, one a constant', () => {
     const f = quadratic([1, 2, 4], [1, 4, 16]);
     expect(taylorAt(f, 3)[0]).toBeCloseTo(9, 12);
+    // t^2 - 3 t + 5
+    const [value, slope, half] = taylorAt(quadratic([1, 1.5, 3], [3, 2.75, 5]), 2);
+    expect(value).toBeCloseTo(3, 13);
+    expect(slope).toBeCloseTo(1, 13);
+    expect(half).toBeCloseTo(1, 13);
     expect(taylorAt(cubic([1, 2, 4], [1, 4, 16]), 3)[2]).toBeCloseTo(1, 12);
     expect(taylorAt(cubic([0, 1], [2, 3]), 0.5)).toEqual([2.5, 1, 0, 0]);
     expect(taylorAt(linear([0.5], [1.5]), 7)).toEqual([1.5, 0, 0, 0]);
@@ -90,6 +93,11 @@ describe('interpolants', () => {
 
   it('refuses tables that no interpolant exists for', () => {
     expect(() => linear([], [])).toThrow(TableError);
+    expect(() => linear([], [])).toThrow('a table needs at least 1 rows, not 0');
+    expect(() => quadratic([0, 1], [1, 2])).toThrow('at least 3 rows, not 2');
+    expect(() => linear([0, 1, 1], [1, 2, 3])).toThrow('row 3 does not');
+    expect(() => linear([0, 1], [1, Infinity])).toThrow('row 2 of the table');
+    expect(new TableError('').name).toBe('TableError');
     expect(() => linear([0, 1], [1])).toThrow(/one value per place/);
     expect(() => linear([0, 0], [1, 2])).toThrow(/rise strictly/);
     expect(() => cubic([0, 1, 2, Number.NaN], [1, 2, 3, 4])).toThrow(/not a finite number/);

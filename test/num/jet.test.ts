@@ -1,11 +1,12 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import * as J from '../../src/num/jet.ts';
+import { evenly } from '../helpers/evenly.ts';
 
-const part = fc.double({ min: -3, max: 3, noNaN: true });
+const part = evenly(-3, 3);
 const jet = fc.tuple(part, part, part, part);
 /** Value away from zero, so that quotients, roots and logarithms are well conditioned. */
-const positive = fc.tuple(fc.double({ min: 0.3, max: 4, noNaN: true }), part, part, part);
+const positive = fc.tuple(evenly(0.3, 4), part, part, part);
 
 function close(a: J.Jet, b: J.Jet, tolerance = 1e-9): void {
   for (const i of [0, 1, 2, 3] as const) {
@@ -41,7 +42,7 @@ describe('jet algebra', () => {
 
   it('agrees on powers whichever way they are formed', () => {
     fc.assert(
-      fc.property(positive, fc.double({ min: -3, max: 3, noNaN: true }), (a, p) => {
+      fc.property(positive, evenly(-3, 3), (a, p) => {
         close(J.pow(a, p), J.exp(J.scale(J.log(a), p)), 1e-7);
         close(J.pow(a, 3), J.mul(a, J.mul(a, a)));
         close(J.pow(a, -2), J.reciprocal(J.mul(a, a)), 1e-7);
@@ -80,5 +81,14 @@ describe('jet algebra', () => {
     expect(J.derivative(l, 3)).toBeCloseTo(2 / x ** 3, 13);
     const s = J.sqrt(J.variable(x));
     expect(J.derivative(s, 3)).toBeCloseTo((3 / 8) * x ** -2.5, 14);
+  });
+
+  it('adds numbers, subtracts, negates and forms any order of derivative', () => {
+    expect(J.shift([1, 2, 3, 4], 10)).toEqual([11, 2, 3, 4]);
+    expect(J.sub([9, 7, 5, 3], [1, 2, 3, 4])).toEqual([8, 5, 2, -1]);
+    expect(J.neg([1, -2, 3, -4])).toEqual([-1, 2, -3, 4]);
+    expect(([0, 1, 2, 3] as const).map((order) => J.derivative([7, 5, 3, 2], order))).toEqual([7, 5, 6, 12]);
+    expect(J.pow(J.variable(0), 1)).toEqual([0, 1, 0, 0]);
+    expect(J.pow(J.variable(2), 4)).toEqual([16, 32, 24, 8]);
   });
 });

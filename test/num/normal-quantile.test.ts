@@ -2,6 +2,7 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { normalQuantile } from '../../src/num/normal-quantile.ts';
 import { spreadSequence } from '../../src/num/spread-sequence.ts';
+import { evenly } from '../helpers/evenly.ts';
 
 /** Standard normal distribution function by Simpson's rule from 0. */
 function distribution(x: number): number {
@@ -16,7 +17,7 @@ function distribution(x: number): number {
 describe('normalQuantile', () => {
   it('inverts the distribution function', () => {
     fc.assert(
-      fc.property(fc.double({ min: -5, max: 5, noNaN: true }), (x) => {
+      fc.property(evenly(-5, 5), (x) => {
         expect(Math.abs(normalQuantile(distribution(x)) - x)).toBeLessThan(
           1e-6 * (1 + Math.exp(x * x * 0.3)),
         );
@@ -30,6 +31,27 @@ describe('normalQuantile', () => {
     expect(normalQuantile(0.995)).toBeCloseTo(2.575829, 6);
     expect(normalQuantile(1e-9)).toBeCloseTo(-5.997807, 5);
     expect(normalQuantile(1e-15)).toBeCloseTo(-7.941345, 5);
+  });
+
+  it('is odd about one half, infinite at the ends', () => {
+    for (const p of [0.03, 0.06, 0.08, 0.3, 0.45])
+      expect(normalQuantile(1 - p)).toBeCloseTo(-normalQuantile(p), 12);
+    expect(normalQuantile(0)).toBe(Number.NEGATIVE_INFINITY);
+    expect(normalQuantile(1)).toBe(Number.POSITIVE_INFINITY);
+  });
+
+  // Algorithm AS 241 itself: about 7 digits wherever the argument.
+  it('keeps seven digits far out: the tail is exp(-x^2/2)/(x sqrt(2 pi)) (1 - 1/x^2 + 3/x^4 - 15/x^6 + 105/x^8)', () => {
+    for (const x of [6, 7, 8, 12, 20, 30]) {
+      const series = 1 - 1 / x ** 2 + 3 / x ** 4 - 15 / x ** 6 + 105 / x ** 8 - 945 / x ** 10;
+      const tail = (Math.exp((-x * x) / 2) / (x * Math.sqrt(2 * Math.PI))) * series;
+      expect(Math.abs(normalQuantile(tail) + x) / x).toBeLessThan(x < 8 ? 1e-5 : 5e-7);
+    }
+  });
+
+  it('keeps seven digits within: the distribution function, summed by Simpson, returns', () => {
+    for (let x = -3; x <= 3; x += 0.125)
+      expect(Math.abs(normalQuantile(distribution(x)) - x)).toBeLessThan(5e-7 * Math.max(1, Math.abs(x)));
   });
 });
 
@@ -46,5 +68,14 @@ describe('spreadSequence', () => {
         }
       }
     }
+  });
+
+  it('steps by the golden ratio on a line and by powers of the plastic number, root of x^3 = x + 1, in a plane', () => {
+    expect(spreadSequence(1)(0)[0]).toBeCloseTo(0.6180339887 - 0.5, 9);
+    expect(spreadSequence(1)(1)[0]).toBeCloseTo((0.5 + 2 * 0.6180339887) % 1, 9);
+    const plastic = 1.324717957244746;
+    const [x, y] = spreadSequence(2)(0);
+    expect(x).toBeCloseTo((0.5 + 1 / plastic) % 1, 12);
+    expect(y).toBeCloseTo((0.5 + 1 / plastic ** 2) % 1, 12);
   });
 });

@@ -4,9 +4,10 @@ import { twoLayerCoating } from '../../src/stack/coating.ts';
 import { coherentStack } from '../../src/stack/coherent-stack.ts';
 import { layerFromIndex, substanceFromIndex } from '../../src/stack/layered-path.ts';
 import { idealFilmIndexAt, normalIndex, tiltedAdmittance } from '../../src/stack/oblique-film.ts';
+import { evenly } from '../helpers/evenly.ts';
 
-const index = fc.double({ min: 1, max: 4, noNaN: true });
-const angle = fc.double({ min: 0, max: 80, noNaN: true }).map((deg) => (deg * Math.PI) / 180);
+const index = evenly(1, 4);
+const angle = evenly(0, 80).map((deg) => (deg * Math.PI) / 180);
 const pol = fc.constantFrom('s' as const, 'p' as const);
 
 describe('films off the normal', () => {
