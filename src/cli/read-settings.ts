@@ -4,6 +4,7 @@
  */
 import { readFileSync } from 'node:fs';
 import { isAbsolute, join } from 'node:path';
+import { brokenJsonLine } from '../units/broken-json-line.ts';
 
 export interface SettingsContent {
   /** Undefined where there is no home to keep it in. */
@@ -54,8 +55,8 @@ function parseSettings(text: string): Omit<SettingsContent, 'path'> {
   let value: unknown;
   try {
     value = text.trim() === '' ? {} : JSON.parse(text);
-  } catch (error) {
-    return { state: 'broken', value: {}, problems: [`line ${lineOf(text, error)}: no valid JSON`] };
+  } catch {
+    return { state: 'broken', value: {}, problems: [`line ${brokenJsonLine(text)}: no valid JSON`] };
   }
   if (typeof value !== 'object' || value === null || Array.isArray(value))
     return { state: 'broken', value: {}, problems: ['it holds no object; write { } for no settings'] };
@@ -74,12 +75,6 @@ function* faultsOf(record: Readonly<Record<string, unknown>>): Generator<string>
     if (found !== undefined && !words.some((word) => word === found))
       yield `${name} is ${printable(JSON.stringify(found))}; write ${words.map((w) => `"${w}"`).join(', ')}`;
   }
-}
-
-/** The line that the JSON parser stopped at; the last one where it does not say. */
-function lineOf(text: string, error: unknown): number {
-  const position = /position (\d+)/.exec(error instanceof Error ? error.message : '')?.[1];
-  return text.slice(0, position === undefined ? text.length : Number(position)).split('\n').length;
 }
 
 /** A settings file may hold anything; the terminal must not. */

@@ -5,6 +5,7 @@
 import { accessSync, constants, existsSync, mkdirSync, readFileSync } from 'node:fs';
 import { dirname, isAbsolute, join } from 'node:path';
 import type { Environment } from '../../term/ability.ts';
+import { brokenJsonLine } from '../../units/broken-json-line.ts';
 
 const FILE = 'config.json';
 
@@ -36,20 +37,12 @@ export function readSettingsFile(folder: string | undefined): FileContent {
   }
   try {
     return { value: text.trim() === '' ? {} : JSON.parse(text) };
-  } catch (error) {
+  } catch {
     return {
       value: {},
-      problem: `${path}${placeOf(text, error)}: no valid JSON; it is left as it is and not used`,
+      problem: `${path}, line ${brokenJsonLine(text)}: no valid JSON; it is left as it is and not used`,
     };
   }
-}
-
-/** ", line 3" from the message of the JSON parser. */
-function placeOf(text: string, error: unknown): string {
-  const message = error instanceof Error ? error.message : '';
-  const position = /position (\d+)/.exec(message)?.[1];
-  const at = position === undefined ? text.length : Number(position);
-  return `, line ${text.slice(0, at).split('\n').length}`;
 }
 
 /** Keeps values in the file; undefined, or why it could not. */
