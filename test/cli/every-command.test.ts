@@ -1,6 +1,6 @@
 /** End to end: what every command of the program keeps to, whatever it prints. */
-import { mkdtempSync, readdirSync, rmSync, writeFileSync } from 'node:fs';
-import { tmpdir } from 'node:os';
+import { mkdtempSync, readdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
+import { hostname, tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { COMMAND_NAMES, type CommandName } from '../../src/cli/command-table.ts';
@@ -13,7 +13,8 @@ beforeAll(() => {
   home = mkdtempSync(join(tmpdir(), 'halfspace-home-'));
   work = mkdtempSync(join(tmpdir(), 'halfspace-work-'));
   writeFileSync(join(work, 'oil.csv'), POINTS);
-  expect(run('answer', ['--log', '--quiet'])).toMatchObject({ status: 0, err: '' });
+  const someone = { USER: 'nobody-of-that-name', LOGNAME: 'nobody-of-that-name' };
+  expect(run('answer', ['--log', '--quiet'], someone)).toMatchObject({ status: 0, err: '' });
 });
 afterAll(() => {
   for (const folder of [home, work]) rmSync(folder, { recursive: true, force: true });
@@ -66,6 +67,21 @@ describe('every command', { timeout: 60_000 }, () => {
     expect(readdirSync(join(home, '.local', 'state'))).toEqual(['halfspace']);
     expect(readdirSync(work)).toEqual(['oil.csv']);
   });
+
+  it('logs who asked and where only if told to', () => {
+    const logged = readFileSync(join(home, '.local', 'state', 'halfspace', 'logbook.jsonl'), 'utf8');
+    expect(logged).toContain('"commandWords"');
+    for (const name of ['nobody-of-that-name', hostname(), home]) expect(logged).not.toContain(name);
+  });
+
+  it.each(['--json', '--csv', '--markdown', '--plain'])(
+    'answers by %s in any window and language alike',
+    (form) => {
+      const { status, out, err } = run('answer', [form], OTHERWISE);
+      expect([status, err]).toEqual([0, '']);
+      expect(out).toBe(run('answer', [form]).out);
+    },
+  );
 
   it.each(COMMAND_NAMES)('%s explains itself on standard output, whatever else is wrong', (name) => {
     const words = name === 'answer' ? [] : [name];

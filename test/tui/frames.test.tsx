@@ -19,6 +19,7 @@ function checkFrame(lines: readonly string[], columns: number, rows: number): vo
 }
 
 function checkText(lines: readonly string[]): void {
+  expect(lines.join('\n')).not.toMatch(/\p{Emoji_Presentation}|\ufe0f/u);
   expect(lines.join('\n')).not.toMatch(/NaN|undefined|Infinity|\[object|(?<!\d)-0(?![.\d])/);
 }
 

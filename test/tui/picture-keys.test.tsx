@@ -387,6 +387,16 @@ describe('pages', () => {
     expect(stage.state.page?.filter?.text).toBe('the');
   });
 
+  it('keeps its place over changes of size, and gives the picture back as it was', () => {
+    const atStart = open({ rows: 14 }).state.focus;
+    const { focus, place } = stage.type('<down><down><down>').state;
+    expect(focus).not.toBe(atStart);
+    stage.type('?<down><down><down>').resize(70, 16).resize(90, 14);
+    expect(stage.state.page?.top).toBe(3);
+    stage.type('<escape>');
+    expect([stage.state.focus, stage.state.place]).toEqual([focus, place]);
+  });
+
   it('scrolls to its end and no further', async () => {
     open().type('?G');
     const end = stage.state.page?.top ?? 0;
