@@ -1,6 +1,6 @@
 /** Rows per second of the stream command, against awk computing the same column and against `wc -l`, on the same file. */
 import { spawnSync } from 'node:child_process';
-import { openSync, readFileSync, writeFileSync } from 'node:fs';
+import { existsSync, openSync, readFileSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
 import type { Line } from './figure.ts';
 import { ENVIRONMENT, HOME, isInstalled, PROGRAM } from './program.ts';
@@ -14,12 +14,19 @@ const AWK = `BEGIN { FS = OFS = "," } NR == 1 { print $0, "n"; next } {
   print $0, sprintf("%.6f", sqrt(1 + 0.6961663 * x / (x - 0.0684043 ^ 2) + 0.4079426 * x / (x - 0.1162414 ^ 2) + 0.8974794 * x / (x - 9.896161 ^ 2)))
 }`;
 
-const STREAM = ['stream', '--from', 'vacuum', '--into', 'fused-silica', '--columns', 'n2'];
+export const STREAM = ['stream', '--from', 'vacuum', '--into', 'fused-silica', '--columns', 'n2'];
 
-export async function batch(rounds: number): Promise<readonly Line[]> {
+/** A file of as many waves, written where it is not there yet. */
+export function wavesFile(): string {
   const file = path.join(HOME, 'waves.csv');
+  if (existsSync(file)) return file;
   const rows = Array.from({ length: ROWS }, (_, i) => (400 + (i * 1200) / ROWS).toFixed(4));
   writeFileSync(file, `wave_nm\n${rows.join('\n')}\n`);
+  return file;
+}
+
+export async function batch(rounds: number): Promise<readonly Line[]> {
+  const file = wavesFile();
 
   const time = (command: string, args: readonly string[]): number => {
     const begin = process.hrtime.bigint();

@@ -2,6 +2,7 @@
 import { spawnSync } from 'node:child_process';
 import { openSync, readFileSync } from 'node:fs';
 import path from 'node:path';
+import { STREAM, wavesFile } from './batch.ts';
 import type { Line } from './figure.ts';
 import { median } from './figure.ts';
 import { ENVIRONMENT, HOME, PROGRAM, ROOT } from './program.ts';
@@ -26,13 +27,13 @@ export async function memory(): Promise<readonly Line[]> {
       ? { name: 'peak memory of the screen', missing: 'this system has no /proc' }
       : ratio('peak memory of the screen, 300 keys', screen),
   );
-  try {
-    const file = path.join(HOME, 'waves.csv');
-    const stream = ['stream', '--from', 'vacuum', '--into', 'fused-silica', '--columns', 'n2'];
-    lines.push(ratio('peak memory of a batch', peak([PROGRAM, ...stream], file)));
-  } catch {
-    lines.push({ name: 'peak memory of a batch', missing: 'the stream command is not there yet' });
-  }
+  const batch_kB = peak([PROGRAM, ...STREAM], wavesFile());
+  lines.push(ratio('peak memory of a batch', batch_kB), {
+    name: 'peak memory of a batch, a million rows',
+    value: batch_kB / 1000,
+    unit: 'MB',
+    target: { atMost: 80 },
+  });
   return lines;
 }
 
