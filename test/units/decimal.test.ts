@@ -10,6 +10,7 @@ import {
   plainDecimal,
   roundDecimal,
   roundToDigits,
+  trimZeros,
 } from '../../src/units/decimal.ts';
 
 const finite = fc.double({ noNaN: true, noDefaultInfinity: true });
@@ -96,5 +97,37 @@ describe('decimal', () => {
         expect(decimalToNumber(addDecimals(decimalOf(a), decimalOf(b)))).toBe(a + b);
       }),
     );
+  });
+
+  it('reads powers with either letter, and nothing that runs on', () => {
+    expect(decimalOfText('1.5e3')).toEqual({ negative: false, digits: '15', exponent: 2 });
+    expect(decimalOfText('1.5E-3')).toEqual({ negative: false, digits: '15', exponent: -4 });
+    expect(decimalOfText('-007.50')).toEqual({ negative: true, digits: '750', exponent: -2 });
+    for (const junk of ['1x3', '1e3x', '1e3 ', '1f3']) expect(decimalOfText(junk)).toBeUndefined();
+  });
+
+  it('writes the zeros of integers as digits, up to 1e21 as the language does', () => {
+    expect(decimalOf(6300)).toEqual({ negative: false, digits: '6300', exponent: 0 });
+    expect(decimalOf(-5)).toEqual({ negative: true, digits: '5', exponent: 0 });
+    expect(decimalOf(1e20)).toEqual({ negative: false, digits: `1${'0'.repeat(20)}`, exponent: 0 });
+    expect(decimalOf(1e21)).toEqual({ negative: false, digits: '1', exponent: 21 });
+    expect(decimalOf(-1e21)).toEqual({ negative: true, digits: '1', exponent: 21 });
+    expect(() => decimalOf(Number.NaN)).toThrow('only a finite number has a decimal');
+  });
+
+  it('gives zero no sign and one exponent', () => {
+    expect(roundDecimal(text('-0'), -2)).toEqual({ negative: false, digits: '0', exponent: -2 });
+    expect(roundDecimal(text('-0.4'), 0)).toEqual({ negative: false, digits: '0', exponent: 0 });
+    expect(roundDecimal(text('-0.04'), 1)).toEqual({ negative: false, digits: '0', exponent: 1 });
+    expect(trimZeros(text('0e7'))).toEqual({ negative: false, digits: '0', exponent: 0 });
+    expect(trimZeros(text('1200'))).toEqual({ negative: false, digits: '12', exponent: 2 });
+    expect(addDecimals(text('5'), text('-5'))).toEqual({ negative: false, digits: '0', exponent: 0 });
+    expect(plainDecimal(text('0e3'))).toBe('0');
+  });
+
+  it('carries through more digits than a double holds', () => {
+    expect(plainDecimal(roundDecimal(text('12345678901234567890.5'), 0))).toBe('12345678901234567891');
+    expect(plainDecimal(roundDecimal(text('99999999999999999999.5'), 0))).toBe('100000000000000000000');
+    expect(plainDecimal(roundDecimal(text('999999999999999.5'), 0))).toBe('1000000000000000');
   });
 });

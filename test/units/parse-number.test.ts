@@ -31,6 +31,8 @@ describe('numbers that are accepted', () => {
     ['1e308', 1e308],
     ['5e-324', 5e-324],
     ['0e999', 0],
+    ['2 × 10⁺³', 2000],
+    ['2 × 10^+3', 2000],
   ])('%j is %d', (text, value) => {
     expect(read(text)).toBe(value);
   });
@@ -56,6 +58,10 @@ describe('numbers that are refused, with what would be right', () => {
     ['0,500', 'not-a-number: "0,500" is not a number; did you mean 0.500?'],
     ['1,550', 'not-a-number: "1,550" is not a number; did you mean 1.550 or 1550?'],
     ['1,234.5', 'not-a-number: "1,234.5" is not a number; did you mean 1234.5?'],
+    [',5', `not-a-number: ",5" is not a number; ${decimal}`],
+    ['1,55 nm', 'not-a-number: "1,55 nm" is not a number; did you mean 1.55 nm?'],
+    ['-12,3450', 'not-a-number: "-12,3450" is not a number; did you mean -12.3450?'],
+    ['1,234.56', 'not-a-number: "1,234.56" is not a number; did you mean 1234.56?'],
     ['1,234,567', 'not-a-number: "1,234,567" is not a number; did you mean 1234567?'],
     ['NaN', `not-a-number: "NaN" is not a number; ${decimal}`],
     ['Infinity', `not-a-number: "Infinity" is not a number; ${decimal}`],
