@@ -151,3 +151,48 @@ describe('short form of moist air', () => {
     expect(honours({ model: 'constant', n: 1 })).toEqual([]);
   });
 });
+
+describe('what a table knows of itself (invented numbers)', () => {
+  const n = { kind: 'linear', along: 'L', values: [1.5, 1.4, 1.3] } as const;
+  const plain: ModelParameters = { model: 'table', abscissa: 'um', at: [1, 2, 3], n };
+
+  it('has derivatives as its pieces have, none from one row, and absorbs where it has a column for that', () => {
+    expect(bindModel(plain, {})).toMatchObject({
+      used: {},
+      hasDerivative: true,
+      derivativeOrder: 1,
+      complex: false,
+    });
+    const cubic: ModelParameters = { ...plain, n: { ...n, kind: 'cubic' } };
+    expect(bindModel(cubic, {}).derivativeOrder).toBe(2);
+    const single: ModelParameters = { model: 'table', abscissa: 'um', at: [1], n: { ...n, values: [1.5] } };
+    expect(bindModel(single, {})).toMatchObject({ hasDerivative: false, derivativeOrder: 0 });
+    expect(bindModel({ ...plain, k: { ...n, values: [0, 0, 0] } }, {}).complex).toBe(true);
+  });
+
+  it('takes an empty place of a warmer column from the nearest filled row, in either direction', () => {
+    const warm: ModelParameters = {
+      ...plain,
+      warmer: {
+        temperature_C: 20,
+        columns: [
+          { temperature_C: 40, n: [null, 1.38, null] },
+          { temperature_C: 0, n: [1.51, null, null] },
+        ],
+      },
+    };
+    const at = (um: number, t_C: number) => index(warm, um, { temperature_K: 273.15 + t_C }).re;
+    expect(at(1, 40)).toBeCloseTo(1.48, 12);
+    expect(at(3, 40)).toBeCloseTo(1.28, 12);
+    expect(at(3, 30)).toBeCloseTo(1.29, 12);
+    expect(at(3, 0)).toBeCloseTo(1.31, 12);
+    expect(at(2, 20)).toBeCloseTo(1.4, 12);
+    expect(honours(warm)).toEqual(['temperature_K']);
+    expect(honours(plain)).toEqual([]);
+    const empty: ModelParameters = {
+      ...plain,
+      warmer: { temperature_C: 20, columns: [{ temperature_C: 40, n: [null, null, null] }] },
+    };
+    expect(() => bindModel(empty, {})).toThrow('a column of a table holds no value');
+  });
+});

@@ -122,3 +122,22 @@ describe('media that are refused', () => {
     expect(outcome(parseLiteralMedium(text))).toBe(line);
   });
 });
+
+describe('numbers beyond any medium', () => {
+  it.each<[string, string]>([
+    ['n=1e21', 'greater than 1e20'],
+    ['eps=1e21', 'greater than 1e20'],
+    ['eps=4,sigma=1e21', 'greater than 1e20'],
+    ['n=1e-21', 'smaller than 1e-20'],
+    ['eps=1e-21', 'smaller than 1e-20'],
+  ])('%j', (text, words) => {
+    const line = outcome(parseLiteralMedium(text));
+    expect(line).toContain('out-of-range: ');
+    expect(line).toContain(`is ${words}; no medium is: check the exponent`);
+  });
+
+  it('are not those at the limits, nor a conductivity of zero', () => {
+    for (const text of ['n=1e20', 'n=1e-20', 'eps=4,sigma=0'])
+      expect(typeof outcome(parseLiteralMedium(text))).toBe('object');
+  });
+});
