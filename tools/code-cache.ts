@@ -9,38 +9,22 @@ import { tmpdir } from 'node:os';
 import path from 'node:path';
 import { spawn } from '@lydell/node-pty';
 
-/** Starts the program as its entry does (entry.cjs), command line after command line, then keeps the caches asked for. */
+/** Starts the program by its entry, command line after command line, then keeps the caches of the scripts asked for. */
 const MAKER = `
 const fs = require('node:fs'), vm = require('node:vm'), path = require('node:path');
 const [, dist, wanted, lines, isScreen] = process.argv;
+// Every start runs the same compiled scripts, so that what each of them used comes together.
 const scripts = new Map();
-const scriptOf = (name) => {
-  const filename = path.join(dist, name + '.js');
-  if (!scripts.has(name)) scripts.set(name, new vm.Script(fs.readFileSync(filename, 'latin1'), { filename }));
-  return scripts.get(name);
-};
-const run = (name, module) => scriptOf(name).runInThisContext()(require, dist, importPart, loadNow, module);
-const loaded = new Map();
-const load = (name) => {
-  if (!loaded.has(name)) {
-    const part = { module: { exports: {} } };
-    loaded.set(name, part);
-    part.done = run(name, part.module);
-  }
-  return loaded.get(name);
-};
-const loadNow = (name) => load(name).module.exports;
-const importPart = async (file) => {
-  const name = path.basename(file, '.mjs');
-  if (!fs.existsSync(path.join(dist, name + '.js'))) return import(path.join(dist, file));
-  const part = load(name);
-  await part.done;
-  return part.module.exports;
+const { Script } = vm;
+vm.Script = function (source, { filename }) {
+  if (!scripts.has(filename)) scripts.set(filename, new Script(source, { filename }));
+  return scripts.get(filename);
 };
 const keep = (status) => {
   for (const name of JSON.parse(wanted)) {
-    if (status || !scripts.has(name)) throw new Error(name + ' did not run');
-    fs.writeFileSync(path.join(dist, name + '.cache'), scripts.get(name).createCachedData());
+    const script = scripts.get(dist + '/' + name + '.js');
+    if (status || !script) throw new Error(name + ' did not run');
+    fs.writeFileSync(path.join(dist, name + '.cache'), script.createCachedData());
   }
 };
 const exit = process.exit;
@@ -53,9 +37,11 @@ process.exit = (status) => {
 process.once('beforeExit', () => keep(process.exitCode));
 const write = fs.writeSync;
 if (!isScreen) fs.writeSync = (to, bytes, ...more) => (to === 1 ? bytes.length : write(to, bytes, ...more));
+const entry = path.join(dist, 'halfspace.js');
 for (const line of JSON.parse(lines)) {
-  process.argv = [process.execPath, 'halfspace', ...line];
-  run('core');
+  process.argv = [process.execPath, entry, ...line];
+  delete require.cache[entry];
+  require(entry);
 }
 `;
 
