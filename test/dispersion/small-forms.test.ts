@@ -96,7 +96,7 @@ describe('contents against temperature (invented numbers)', () => {
 });
 
 describe('short form of moist air', () => {
-  /** G. Boensch, E. Potulski, Metrologia 35, 133 (1998), eqs. 6 to 9. */
+  /** The form of G. Boensch, E. Potulski, Metrologia 35, 133 (1998), eqs. 6 to 9; coefficients from memory. */
   const air: ModelParameters = {
     model: 'moist-air',
     form: 'edlen',

@@ -39,7 +39,7 @@ const near = (got: number, wanted: number, relative = 1e-9) =>
   expect(Math.abs(got - wanted)).toBeLessThanOrEqual(relative * Math.abs(wanted));
 
 describe('plane wave', () => {
-  it('of one kilowatt per square metre in vacuum: 868 V/m and 2.9 uT, as textbooks find for sunlight', () => {
+  it('of one kilowatt per square metre in vacuum: 868 V/m and 2.9 uT (sunlight in textbooks, from memory)', () => {
     const wave = planeWaveEnergy(VACUUM, 1, 1000);
     expect(wave.peakE_V_per_m).toBeCloseTo(868.0, 1);
     expect(wave.peakB_T * 1e6).toBeCloseTo(2.895, 3);
