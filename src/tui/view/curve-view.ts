@@ -120,17 +120,20 @@ function nameCurves(rows: string[][], plot: Plot, width: number, height: number)
 
 function axisLine(plot: Plot, width: number, columns: number, pen: Pen): string {
   const cells = new Array<string>(width).fill(pen.glyphs.axisAlong);
+  // Half a number reads as another one: what has no room beside what stands there is left out.
   const put = (text: string, at: number): void => {
     const start = Math.max(0, Math.min(width - displayWidth(text), at));
+    const end = start + displayWidth(text);
+    if (cells.slice(start, end).some((c) => c !== pen.glyphs.axisAlong)) return;
     [...text].forEach((c, i) => {
       cells[start + i] = c;
     });
   };
-  put(` ${plot.ends[0]} `, 0);
-  put(` ${plot.ends[1]}`, width);
   if (plot.present) {
     const { text, x } = plot.present;
     put(` ${text} `, Math.round(x * (width - 1)) - Math.floor(displayWidth(text) / 2) - 1);
   }
+  put(` ${plot.ends[0]} `, 0);
+  put(` ${plot.ends[1]}`, width);
   return lineOfSpans([span(blanks(SCALE_WIDTH)), span(pen.glyphs.axisCorner + cells.join(''))], columns, pen);
 }
